@@ -1,0 +1,33 @@
+/**
+ * Bounds of what is accepted, named once: they feed the schemas, the models and the `min`/`max` of inputs.
+ * Lengths mm, masses g. Wide enough for any light model, tight enough that a slip of units is caught.
+ */
+export const LIMITS = {
+  name: { max: 120 },
+  note: { max: 2_000 },
+  key: { max: 64 },
+  lengthMm: { max: 20_000 },
+  coordinateMm: { min: -20_000, max: 20_000 },
+  massG: { max: 100_000 },
+  share: { max: 0.9 },
+  chordShare: { min: -1, max: 2 },
+  density: { max: 25_000 },
+  areal: { max: 20_000 },
+  spread: { max: 5_000 },
+  cv: { max: 1 },
+  modulus: { max: 1_000 },
+  strength: { max: 10_000 },
+  surfaces: { max: 20 },
+  panels: { max: 40 },
+  parts: { max: 4_000 },
+  items: { max: 1_000 },
+  solids: { max: 1_000 },
+  materials: { max: 500 },
+  ribs: { max: 1_000 },
+  sectionPoints: { min: 5, max: 1_000 },
+  outlinePoints: { min: 3, max: 1_000 },
+  email: { max: 254 },
+  password: { min: 10, max: 128 },
+  /** bytes of a JSON body; a plan of 2,000 parts takes about half a megabyte */
+  bodyBytes: { max: 4_000_000 },
+} as const;

@@ -1,0 +1,56 @@
+import type { Vec3 } from './frame.ts';
+
+/**
+ * An amount of stuff (mm³, mm² or g) with its moments about the datum: what every part is summed into. First
+ * moments give the centroid; second moments (∫x² and so on) give inertia.
+ */
+export interface Lump {
+  amount: number;
+  first: Vec3;
+  second: Vec3;
+}
+
+export const emptyLump = (): Lump => ({ amount: 0, first: [0, 0, 0], second: [0, 0, 0] });
+
+/**
+ * Adds an amount at a point to a lump (the one given is changed: it is the caller's own sum). `spreadX` is the
+ * mean square of the amount's own extent along x about that point, mm², where the amount is wide.
+ */
+export function addAmount(lump: Lump, amount: number, at: Vec3, spreadX = 0): void {
+  lump.amount += amount;
+  for (const axis of [0, 1, 2] as const) {
+    lump.first[axis] += amount * at[axis];
+    lump.second[axis] += amount * at[axis] * at[axis];
+  }
+  lump.second[0] += amount * spreadX;
+}
+
+/** Sum of lumps. */
+export function sumLumps(lumps: readonly Lump[]): Lump {
+  const sum = emptyLump();
+  for (const { amount, first, second } of lumps) {
+    sum.amount += amount;
+    for (const axis of [0, 1, 2] as const) {
+      sum.first[axis] += first[axis];
+      sum.second[axis] += second[axis];
+    }
+  }
+  return sum;
+}
+
+/** The lump times a factor, as for a density or a share left standing. */
+export function scaleLump(lump: Lump, factor: number): Lump {
+  const times = (v: Vec3): Vec3 => [v[0] * factor, v[1] * factor, v[2] * factor];
+  return { amount: lump.amount * factor, first: times(lump.first), second: times(lump.second) };
+}
+
+/** The lump's other half, mirrored in the plane of symmetry. */
+export function mirrorLump(lump: Lump): Lump {
+  return { ...lump, first: [lump.first[0], -lump.first[1], lump.first[2]] };
+}
+
+/** Centroid, or null where there is nothing. @example centroid(emptyLump()) // → null */
+export function centroid(lump: Lump): Vec3 | null {
+  const { amount, first } = lump;
+  return amount === 0 ? null : [first[0] / amount, first[1] / amount, first[2] / amount];
+}

@@ -1,0 +1,150 @@
+import type { Section } from './section.ts';
+
+/**
+ * Areas and arcs of a section of unit chord between two x/c. Running integrals are made once per section by the
+ * trapezoid rule at two step widths and extrapolated (Richardson), so that 200 nodes give eight digits on a
+ * smooth section and exactness on a polygon.
+ */
+export interface Sums {
+  /** of the section's area, or of the arc's length */
+  amount: number;
+  /** first moments about nose and chord line */
+  x: number;
+  z: number;
+}
+
+export type FaceName = 'upper' | 'lower';
+
+interface Running {
+  amount: Float64Array;
+  x: Float64Array;
+  z: Float64Array;
+}
+
+/** Running integral of what one interval of nodes (i, j) contributes. */
+function runningOf(section: Section, piece: (i: number, j: number) => Sums): Running {
+  const n = section.x.length;
+  const run: Running = { amount: new Float64Array(n), x: new Float64Array(n), z: new Float64Array(n) };
+  for (let i = 2; i < n; i += 2) {
+    const first = piece(i - 2, i - 1);
+    const second = piece(i - 1, i);
+    const whole = piece(i - 2, i);
+    for (const key of ['amount', 'x', 'z'] as const) {
+      const correction = (first[key] + second[key] - whole[key]) / 3;
+      const before = run[key][i - 2] ?? 0;
+      run[key][i - 1] = before + first[key] + correction / 2;
+      run[key][i] = before + first[key] + second[key] + correction;
+    }
+  }
+  return run;
+}
+
+function areaPiece(s: Section, i: number, j: number): Sums {
+  const dx = (s.x[j] ?? 0) - (s.x[i] ?? 0);
+  const [x0, x1] = [s.x[i] ?? 0, s.x[j] ?? 0];
+  const [u0, u1, l0, l1] = [s.upper[i] ?? 0, s.upper[j] ?? 0, s.lower[i] ?? 0, s.lower[j] ?? 0];
+  const t0 = Math.max(0, u0 - l0);
+  const t1 = Math.max(0, u1 - l1);
+  return {
+    amount: (dx * (t0 + t1)) / 2,
+    x: (dx * (t0 * (2 * x0 + x1) + t1 * (x0 + 2 * x1))) / 6,
+    z: (dx * (u0 * u0 + u0 * u1 + u1 * u1 - l0 * l0 - l0 * l1 - l1 * l1)) / 6,
+  };
+}
+
+function arcPiece(s: Section, face: FaceName, i: number, j: number): Sums {
+  const z = s[face];
+  const [x0, x1, z0, z1] = [s.x[i] ?? 0, s.x[j] ?? 0, z[i] ?? 0, z[j] ?? 0];
+  const amount = Math.hypot(x1 - x0, z1 - z0);
+  return { amount, x: (amount * (x0 + x1)) / 2, z: (amount * (z0 + z1)) / 2 };
+}
+
+interface RunningSet {
+  area?: Running;
+  upper?: Running;
+  lower?: Running;
+}
+/** Running integrals belong to their section and go with it; a section never changes once read. */
+const running = new WeakMap<Section, RunningSet>();
+
+function setOf(section: Section): RunningSet {
+  let set = running.get(section);
+  if (!set) running.set(section, (set = {}));
+  return set;
+}
+
+/** Index of the interval that holds x. */
+function intervalOf(nodes: Float64Array, x: number): number {
+  let low = 0;
+  let high = nodes.length - 2;
+  while (low < high) {
+    const mid = (low + high + 1) >> 1;
+    if ((nodes[mid] ?? 0) <= x) low = mid;
+    else high = mid - 1;
+  }
+  return low;
+}
+
+const clamp01 = (x: number) => Math.min(1, Math.max(0, x));
+
+/** Value at x of a running integral; inside an interval `shape` says how its share of the interval grows. */
+function runTo(run: Running, nodes: Float64Array, x: number, shape: (i: number, f: number) => number): Sums {
+  const i = intervalOf(nodes, x);
+  const width = (nodes[i + 1] ?? 1) - (nodes[i] ?? 0);
+  const share = shape(i, width > 0 ? (x - (nodes[i] ?? 0)) / width : 0);
+  const at = (a: Float64Array) => (a[i] ?? 0) + share * ((a[i + 1] ?? 0) - (a[i] ?? 0));
+  return { amount: at(run.amount), x: at(run.x), z: at(run.z) };
+}
+
+const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x: a.x - b.x, z: a.z - b.z });
+
+/**
+ * Area between two x/c with its first moments, unit chord. Limits beyond nose or tail are taken there.
+ * @example areaBetween(readSection({ flat: 3 }, 100), 0.2, 0.7).amount.toFixed(6) // → '0.015000'
+ */
+export function areaBetween(section: Section, from: number, to: number): Sums {
+  const run = (setOf(section).area ??= runningOf(section, (i, j) => areaPiece(section, i, j)));
+  const thickness = (i: number) => Math.max(0, (section.upper[i] ?? 0) - (section.lower[i] ?? 0));
+  // Inside an interval the thickness is taken as linear, so the area grows as a parabola.
+  const grow = (i: number, f: number) => {
+    const [t0, t1] = [thickness(i), thickness(i + 1)];
+    return t0 + t1 > 0 ? (f * (2 * t0 + f * (t1 - t0))) / (t0 + t1) : f;
+  };
+  const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
+  return difference(runTo(run, section.x, b, grow), runTo(run, section.x, a, grow));
+}
+
+/** Developed length of one face between two x/c with its first moments, unit chord. */
+export function arcBetween(section: Section, face: FaceName, from: number, to: number): Sums {
+  const set = setOf(section);
+  const run = (set[face] ??= runningOf(section, (i, j) => arcPiece(section, face, i, j)));
+  const linear = (_: number, f: number) => f;
+  const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
+  return difference(runTo(run, section.x, b, linear), runTo(run, section.x, a, linear));
+}
+
+/** From x/c `start` on top, forward round the nose, to `end` on the bottom. */
+export function wrapArc(section: Section, start: number, end: number): Sums {
+  const top = arcBetween(section, 'upper', 0, start);
+  const bottom = arcBetween(section, 'lower', 0, end);
+  const middle = ((section.upper[0] ?? 0) + (section.lower[0] ?? 0)) / 2;
+  return {
+    amount: top.amount + bottom.amount + section.noseFace,
+    x: top.x + bottom.x,
+    z: top.z + bottom.z + section.noseFace * middle,
+  };
+}
+
+/** z/c of a face at x/c. */
+export function ordinateAt(section: Section, face: FaceName, x: number): number {
+  const i = intervalOf(section.x, clamp01(x));
+  const [x0, x1] = [section.x[i] ?? 0, section.x[i + 1] ?? 1];
+  const z = section[face];
+  const f = x1 > x0 ? (clamp01(x) - x0) / (x1 - x0) : 0;
+  return (z[i] ?? 0) + f * ((z[i + 1] ?? 0) - (z[i] ?? 0));
+}
+
+/** Thickness z/c of the section at x/c, never negative. */
+export function heightAt(section: Section, x: number): number {
+  return Math.max(0, ordinateAt(section, 'upper', x) - ordinateAt(section, 'lower', x));
+}

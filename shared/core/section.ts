@@ -1,0 +1,118 @@
+import { nacaNoseArc, nacaOrdinate } from './naca.ts';
+import type { PointsSpec, SectionSpec } from './plan.ts';
+
+/**
+ * A section as the core reads it: upper and lower z/c at equal x/c, so that any two can be blended ordinate by
+ * ordinate. Every second node is the middle of its neighbours' interval (in the angle that crowds nodes at nose
+ * and tail), which lets integrals be extrapolated from two step widths.
+ */
+export interface Section {
+  /** x/c from 0 at the nose to 1 at the tail; an odd number of nodes */
+  x: Float64Array;
+  upper: Float64Array;
+  lower: Float64Array;
+  /** developed length of nose at x = 0 that a wrapped skin covers, of the chord; 0 for a plate, whose edges carry no skin */
+  noseFace: number;
+}
+
+const BASE_INTERVALS = 96;
+
+/** x/c of an angle from the nose; equal steps of it crowd the nodes where a section turns. */
+const xOfAngle = (angle: number) => (1 - Math.cos(angle)) / 2;
+const angleOfX = (x: number) => Math.acos(1 - 2 * Math.min(1, Math.max(0, x)));
+
+/**
+ * Nodes for sections that must share them: the base grid, the given kinks (corners of a polygon section, places
+ * where a curve's formula changes), and the middles between.
+ */
+export function sectionGrid(kinks: readonly number[] = []): Float64Array {
+  const angles = Array.from({ length: BASE_INTERVALS + 1 }, (_, i) => (i * Math.PI) / BASE_INTERVALS);
+  for (const x of kinks) if (x > 0 && x < 1) angles.push(angleOfX(x));
+  angles.sort((a, b) => a - b);
+  const distinct = angles.filter((a, i) => i === 0 || a - (angles[i - 1] ?? 0) > 1e-9);
+  const x = new Float64Array(2 * distinct.length - 1);
+  distinct.forEach((angle, i) => {
+    x[2 * i] = xOfAngle(angle);
+    const next = distinct[i + 1];
+    if (next !== undefined) x[2 * i + 1] = xOfAngle((angle + next) / 2);
+  });
+  x[x.length - 1] = 1;
+  return x;
+}
+
+/** Upper and lower face of a coordinate section, each from nose to tail. */
+function facesOf(spec: PointsSpec): { upper: [number, number][]; lower: [number, number][] } {
+  let nose = 0;
+  spec.points.forEach((p, i) => {
+    if (p[0] < (spec.points[nose]?.[0] ?? Infinity)) nose = i;
+  });
+  const noseX = spec.points[nose]?.[0];
+  const second = spec.points[nose + 1]?.[0] === noseX ? nose + 1 : nose;
+  return { upper: spec.points.slice(0, nose + 1).reverse(), lower: spec.points.slice(second) };
+}
+
+/** Where a section's ordinates have corners, so that a shared grid has nodes there. */
+export function kinksOf(spec: SectionSpec): number[] {
+  if ('points' in spec) return spec.points.map((p) => p[0]);
+  if ('naca' in spec) return [Number(spec.naca[1]) / 10];
+  return [];
+}
+
+/** z on a face at x by straight lines between its points; ends hold beyond the first and last point. */
+function interpolate(face: readonly [number, number][], x: number): number {
+  let previous = face[0] ?? [0, 0];
+  for (const point of face) {
+    if (point[0] >= x) {
+      const run = point[0] - previous[0];
+      return run <= 0 ? point[1] : previous[1] + ((point[1] - previous[1]) * (x - previous[0])) / run;
+    }
+    if (point[0] >= previous[0]) previous = point;
+  }
+  return previous[1];
+}
+
+/**
+ * Reads a section on a grid. A plate of constant thickness depends on the chord (mm) that it is read at.
+ * @example readSection({ flat: 3 }, 100).upper[0] // → 0.015
+ * @example readSection({ naca: '0012' }, 100).noseFace // → 0
+ */
+export function readSection(
+  spec: SectionSpec,
+  chord: number,
+  x: Float64Array = sectionGrid(kinksOf(spec)),
+): Section {
+  if ('flat' in spec) {
+    const half = chord > 0 ? spec.flat / 2 / chord : 0;
+    return { x, upper: x.map(() => half), lower: x.map(() => -half), noseFace: 0 };
+  }
+  if ('naca' in spec) {
+    const upper = x.map((v) => nacaOrdinate(spec.naca, v, 1));
+    const lower = x.map((v) => nacaOrdinate(spec.naca, v, -1));
+    return { x, upper, lower, noseFace: nacaNoseArc(spec.naca) };
+  }
+  const faces = facesOf(spec);
+  const upper = x.map((v) => interpolate(faces.upper, v));
+  const lower = x.map((v) => interpolate(faces.lower, v));
+  return { x, upper, lower, noseFace: Math.abs((upper[0] ?? 0) - (lower[0] ?? 0)) };
+}
+
+/** Blend of two sections on one grid, ordinate by ordinate: `share` 0 gives the first, 1 the second. */
+export function blendSections(a: Section, b: Section, share: number): Section {
+  if (a === b || share === 0) return a;
+  if (share === 1) return b;
+  const mix = (p: Float64Array, q: Float64Array) => p.map((v, i) => v + share * ((q[i] ?? 0) - v));
+  return {
+    x: a.x,
+    upper: mix(a.upper, b.upper),
+    lower: mix(a.lower, b.lower),
+    noseFace: a.noseFace + share * (b.noseFace - a.noseFace),
+  };
+}
+
+/** x/c where the faces first cross inside the section, or null. Touching at the very ends is no crossing. */
+export function selfCrossingAt(section: Section): number | null {
+  const at = section.x.findIndex(
+    (x, i) => x > 0.001 && x < 0.999 && (section.upper[i] ?? 0) < (section.lower[i] ?? 0) - 1e-9,
+  );
+  return at < 0 ? null : (section.x[at] ?? null);
+}

@@ -1,0 +1,176 @@
+import { cosDegrees, radians, type Vec3 } from './frame.ts';
+import type { Panel, Pair, Surface } from './plan.ts';
+import { blendSections, kinksOf, readSection, sectionGrid, type Section } from './section.ts';
+
+/** One panel of a surface as its stations see it. Everything is linear in s inside a panel. */
+export interface PanelLine {
+  index: number;
+  start: number;
+  end: number;
+  chord: Pair;
+  leadingEdge: Pair;
+  y: number;
+  z: number;
+  cos: number;
+  sin: number;
+  root: (chord: number) => Section;
+  tip: (chord: number) => Section;
+}
+
+/** A surface laid out along its stations, starboard half, in body axes. */
+export interface SurfaceLine {
+  /** of all panels, mm; a tip block lies beyond */
+  length: number;
+  panels: PanelLine[];
+}
+
+/** Where a station lies and how big the surface is there. Changes along s are per mm of s. */
+export interface Station {
+  s: number;
+  panel: PanelLine;
+  chord: number;
+  chordSlope: number;
+  /** x of the leading edge */
+  leadingEdge: number;
+  leadingEdgeSlope: number;
+  section: Section;
+}
+
+/** Sections that do not depend on the chord are read once. */
+function reader(panel: Panel, end: 'rootSection' | 'tipSection', grid: Float64Array) {
+  const spec = panel[end];
+  if ('flat' in spec) return (chord: number) => readSection(spec, chord, grid);
+  const once = readSection(spec, 1, grid);
+  return () => once;
+}
+
+/** Lays a surface out along its stations. */
+export function surfaceLine(surface: Surface): SurfaceLine {
+  let [x, y, z] = surface.apex;
+  let start = 0;
+  const panels = surface.panels.map((panel, index): PanelLine => {
+    const cos = cosDegrees(panel.dihedral);
+    const sin = Math.sin(radians(panel.dihedral));
+    const grid = gridOf(panel);
+    const same = JSON.stringify(panel.rootSection) === JSON.stringify(panel.tipSection);
+    const root = reader(panel, 'rootSection', grid);
+    const line: PanelLine = {
+      index,
+      start,
+      end: start + panel.span,
+      chord: [panel.rootChord, panel.tipChord],
+      leadingEdge: [x, x + panel.sweep],
+      y,
+      z,
+      cos,
+      sin,
+      root,
+      tip: same ? root : reader(panel, 'tipSection', grid),
+    };
+    start += panel.span;
+    x += panel.sweep;
+    y += panel.span * cos;
+    z += panel.span * sin;
+    return line;
+  });
+  return { length: start, panels };
+}
+
+function gridOf(panel: Panel): Float64Array {
+  return sectionGrid([...kinksOf(panel.rootSection), ...kinksOf(panel.tipSection)]);
+}
+
+const EDGE = 1e-9;
+
+/** Panel that holds station s; a station on a break belongs to the panel inboard of it. */
+export function panelAt(line: SurfaceLine, s: number): PanelLine {
+  const found = line.panels.find((panel) => s <= panel.end + EDGE) ?? line.panels.at(-1);
+  if (!found) throw new RangeError('a surface has at least one panel');
+  return found;
+}
+
+/** The station at s, mm from the root along the panels; inside `panel` if that is given. */
+export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panelAt(line, s)): Station {
+  const span = panel.end - panel.start;
+  const share = Math.min(1, Math.max(0, (s - panel.start) / span));
+  const [c0, c1] = panel.chord;
+  const [x0, x1] = panel.leadingEdge;
+  const chord = c0 + share * (c1 - c0);
+  const root = panel.root(chord);
+  const tip = panel.tip(chord);
+  return {
+    s,
+    panel,
+    chord,
+    chordSlope: (c1 - c0) / span,
+    leadingEdge: x0 + share * (x1 - x0),
+    leadingEdgeSlope: (x1 - x0) / span,
+    section: root === tip ? root : blendSections(root, tip, share),
+  };
+}
+
+/**
+ * Body coordinates of a point of the station's section: `x` mm behind the leading edge and `z` mm above the chord
+ * line, square to the panel. A panel with dihedral leans its section inboard.
+ */
+export function pointOf(station: Station, x: number, z: number): Vec3 {
+  const { panel, s } = station;
+  const along = s - panel.start;
+  return [
+    station.leadingEdge + x,
+    panel.y + along * panel.cos - z * panel.sin,
+    panel.z + along * panel.sin + z * panel.cos,
+  ];
+}
+
+/** Value at s of a pair that holds at `from` and at `to`. @example pairAt([2, 4], 0, 100, 50) // → 3 */
+export function pairAt(pair: Pair, from: number, to: number, s: number): number {
+  return to > from ? pair[0] + ((pair[1] - pair[0]) * (s - from)) / (to - from) : pair[0];
+}
+
+/** Change per mm of such a pair. */
+export function pairSlope(pair: Pair, from: number, to: number): number {
+  return to > from ? (pair[1] - pair[0]) / (to - from) : 0;
+}
+
+/** Gauss–Legendre nodes and weights on (0, 1), five points: exact for polynomials up to the ninth degree. */
+const GAUSS: readonly [node: number, weight: number][] = [
+  [0.04691007703066802, 0.11846344252809454],
+  [0.23076534494715845, 0.23931433524968324],
+  [0.5, 0.28444444444444444],
+  [0.7692346550528415, 0.23931433524968324],
+  [0.9530899229693319, 0.11846344252809454],
+];
+
+export interface Sample {
+  station: Station;
+  /** mm of s that the sample stands for */
+  ds: number;
+}
+
+/**
+ * Samples for integrals over [from, to], split at panel breaks and at the further `breaks`, so that each piece is
+ * smooth. The range is clipped to the surface.
+ */
+export function samplesOver(
+  line: SurfaceLine,
+  from: number,
+  to: number,
+  breaks: readonly number[] = [],
+): Sample[] {
+  const samples: Sample[] = [];
+  for (const panel of line.panels) {
+    const a = Math.max(from, panel.start);
+    const b = Math.min(to, panel.end);
+    if (b <= a) continue;
+    const edges = [a, ...breaks.filter((s) => s > a + EDGE && s < b - EDGE).sort((p, q) => p - q), b];
+    for (let i = 1; i < edges.length; i++) {
+      const low = edges[i - 1] ?? a;
+      const width = (edges[i] ?? b) - low;
+      for (const [node, weight] of GAUSS) {
+        samples.push({ station: stationAt(line, low + node * width, panel), ds: weight * width });
+      }
+    }
+  }
+  return samples;
+}

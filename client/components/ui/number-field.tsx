@@ -1,0 +1,113 @@
+import { useState, type KeyboardEvent, type Ref } from 'react';
+import { cn } from '#client/lib/cn.ts';
+import { parseQuantity, type ParseProblem } from '#shared/units/parse.ts';
+import { QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
+import type { Unit } from '#shared/units/units.ts';
+import { Field, type FieldLook } from './field.tsx';
+import { besideOf, problemText, rangeText, stepped, textOf } from './number-text.ts';
+
+interface NumberFieldProps extends FieldLook {
+  quantity: Quantity;
+  /** In the quantity's base unit; null or undefined shows an empty field. */
+  value: number | null | undefined;
+  /** The number in the base unit, or null with what stands in the way (`missing` for an empty field). */
+  onChange: (value: number | null, problem: ParseProblem | null) => void;
+  /** Unit of a bare number; the quantity's own by default. */
+  unit?: Unit;
+  /** Bounds in the base unit; a value beyond them is still given on, and the field says what is wrong. */
+  min?: number;
+  max?: number;
+  /** Lower bound that is itself refused. */
+  above?: number;
+  /** One press of an arrow key, in the unit typed. */
+  step?: number;
+  /** May be left empty. */
+  optional?: boolean;
+  /** For a cell of a table: label in the heading, no room kept, no unit behind. */
+  compact?: boolean;
+  disabled?: boolean;
+  readOnly?: boolean;
+  className?: string;
+  placeholder?: string;
+  onFocus?: () => void;
+  inputRef?: Ref<HTMLInputElement>;
+}
+
+interface Typed {
+  text: string;
+  /** What the text was read as, to notice a value that came from elsewhere. */
+  value: number | null;
+}
+
+/** A number as builders write it. Keeps the text as typed; never re-formats under the cursor. */
+export function NumberField(props: NumberFieldProps) {
+  const { quantity, value, onChange, optional = false, compact = false, step } = props;
+  const { label, hint, suffix, inline, hideLabel, keepRoom } = props;
+  const unit = props.unit ?? QUANTITIES[quantity].shown;
+  const [typed, setTyped] = useState<Typed | null>(null);
+  const [left, setLeft] = useState(false);
+
+  // Typed text stands until the value is changed by something else: an undo, another part, a reload.
+  const own = typed !== null && (typed.value === null || typed.value === value);
+  const text = own ? typed.text : textOf(value, quantity, unit);
+
+  const read = parseQuantity(text, quantity, unit);
+  const problem = 'problem' in read && !(optional && read.problem === 'missing') ? read.problem : null;
+  const wrongSize = 'value' in read ? rangeText(read.value, { ...props, unit }) : undefined;
+  // An unfinished `1/` is no error while it is being typed.
+  const error = props.error ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
+
+  const take = (next: string) => {
+    const parsed = parseQuantity(next, quantity, unit);
+    const number = 'value' in parsed ? parsed.value : null;
+    setTyped({ text: next, value: number });
+    onChange(number, 'problem' in parsed ? parsed.problem : null);
+  };
+
+  const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
+    if ((event.key !== 'ArrowUp' && event.key !== 'ArrowDown') || event.altKey || props.readOnly) return;
+    event.preventDefault();
+    const direction = event.key === 'ArrowUp' ? 1 : -1;
+    const next = stepped(text, quantity, unit, direction * (event.shiftKey ? 10 : 1), step);
+    if (next !== text) take(next);
+  };
+
+  return (
+    <Field
+      {...{ label, hint, error, inline }}
+      suffix={suffix ?? (compact ? undefined : besideOf(text, quantity, unit))}
+      hideLabel={hideLabel ?? compact}
+      keepRoom={keepRoom ?? (!compact && !inline)}
+    >
+      {(control) => (
+        <input
+          {...control}
+          ref={props.inputRef}
+          type="text"
+          inputMode={
+            quantity === 'count' ? 'numeric' : quantity !== 'length' && props.min === 0 ? 'decimal' : 'text'
+          }
+          autoComplete="off"
+          spellCheck={false}
+          value={text}
+          disabled={props.disabled}
+          readOnly={props.readOnly}
+          placeholder={props.placeholder}
+          aria-required={optional ? undefined : true}
+          onFocus={props.onFocus}
+          onBlur={() => setLeft(true)}
+          onChange={(event) => {
+            setLeft(false);
+            take(event.target.value);
+          }}
+          onKeyDown={onKeyDown}
+          className={cn(
+            'inked min-h-row w-full text-right',
+            compact ? 'min-w-14 px-1.5' : 'px-2',
+            props.className,
+          )}
+        />
+      )}
+    </Field>
+  );
+}

@@ -1,0 +1,30 @@
+import type { Sequelize } from 'sequelize';
+import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
+import { GliderMember, initGliderMember } from './glider-member.ts';
+import { GliderSave, initGliderSave } from './glider-save.ts';
+import { Glider, initGlider } from './glider.ts';
+import { initIdempotencyKey } from './idempotency-key.ts';
+import { initMaterial } from './material.ts';
+import { Session, initSession } from './session.ts';
+import { initSheet } from './sheet.ts';
+import { User, initUser } from './user.ts';
+
+/** Binds every model to a database; all associations between them are here and nowhere else. */
+export function initModels(sequelize: Sequelize): void {
+  initUser(sequelize);
+  initSession(sequelize);
+  initIdempotencyKey(sequelize);
+  initMaterial(sequelize);
+  initGlider(sequelize);
+  initGliderMember(sequelize);
+  initGliderMaterial(sequelize);
+  initGliderSave(sequelize);
+  initSheet(sequelize);
+
+  Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
+  Glider.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
+  Glider.hasMany(GliderMember, { as: 'members', foreignKey: 'gliderId' });
+  GliderMaterial.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
+  GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
+}

@@ -6,7 +6,7 @@ export type Notice =
   | { code: 'no_wing'; path: 'plan' }
   | { code: 'no_mass'; path: 'plan' }
   | { code: 'no_tailplane'; path: 'plan' }
-  | { code: 'nothing_on_surface'; path: string }
+  | { code: 'part_measures_nothing'; path: string }
   | { code: 'station_past_tip'; path: string; station: number; tip: number }
   | { code: 'reversed_range'; path: string; from: number; to: number }
   | { code: 'strip_outside_section'; path: string; station: number; overBy: number }

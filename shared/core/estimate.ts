@@ -1,0 +1,163 @@
+import { liftsOf } from './flight-points.ts';
+import { itemLine, solidLine, surfaceLines, type LineWithLump } from './lines.ts';
+import { loadingOf, speedAt, squareDecimetres } from './loading.ts';
+import { centroid, sumLumps, type Lump } from './lump.ts';
+import type { Notice } from './notices.ts';
+import { balanceUncertainty, massUncertainty, percentOfMac } from './balance.ts';
+import { reynoldsNumber } from './atmosphere.ts';
+import { classAreaOf, planformOf } from './planform.ts';
+import type { Plan, Surface } from './plan.ts';
+import type { Balance, Estimate, Inertia, Line, Planform, Totals } from './result.ts';
+import { selfCrossingAt } from './section.ts';
+import { surfaceLine, type SurfaceLine } from './stations.ts';
+
+interface Laid {
+  surface: Surface;
+  line: SurfaceLine;
+  planform: Planform;
+}
+
+/** Lowest Reynolds number at which a light section still gives the lift that is usually asked of it. */
+const LOW_REYNOLDS = 20_000;
+
+/**
+ * The whole answer from one plan: planforms, a line for each part, item and solid, totals, balance, loading and
+ * speeds. Pure and synchronous: the same code answers in the browser while typing and on the server. The plan must
+ * satisfy `planSchema`; a material that is missing throws RangeError.
+ */
+export function estimate(plan: Plan): Estimate {
+  const notices: Notice[] = [];
+  const told = new Set<string>();
+  const tell = (notice: Notice) => {
+    const key = `${notice.code} ${notice.path}`;
+    if (told.has(key)) return;
+    told.add(key);
+    notices.push(notice);
+  };
+  const laid = plan.surfaces.map((surface): Laid => {
+    const line = surfaceLine(surface);
+    checkSurface(surface, line, tell);
+    return { surface, line, planform: planformOf(surface, line) };
+  });
+  const lines = [
+    ...laid.flatMap(({ surface, line }) => surfaceLines(plan, surface, line, tell)),
+    ...plan.solids.map((solid) => solidLine(plan, solid, tell)),
+    ...plan.items.map(itemLine),
+  ];
+  const totals = totalsOf(lines, laid);
+  const lifts = liftsOf(laid);
+  const balance = balanceOf(plan, lines, totals, lifts, tell);
+  const classArea = classAreaOfAll(laid);
+  const wingArea = lifts?.wingArea ?? 0;
+  const clMax = plan.flight?.clMax ?? 1;
+  const density = plan.flight?.airDensity ?? 1.225;
+  const stall = speedAt(totals.mass, wingArea, clMax, density);
+  const reynolds = stall === null || !lifts ? null : reynoldsNumber(stall, lifts.mac, density);
+  if (reynolds !== null && reynolds < LOW_REYNOLDS && clMax > 0.9) {
+    tell({ code: 'reynolds_low', path: 'plan', reynolds, clMax });
+  }
+  return {
+    planform: Object.fromEntries(laid.map(({ surface, planform }) => [surface.key, planform])),
+    lines: lines.map(({ line }) => line),
+    totals,
+    balance,
+    loading: {
+      wing: loadingOf(totals.mass, wingArea),
+      classArea: classArea > 0 ? squareDecimetres(classArea) : null,
+      classLoading: loadingOf(totals.mass, classArea),
+    },
+    speeds: { stall, reynolds },
+    spar: { stations: [], worst: null },
+    notices,
+  };
+}
+
+function checkSurface(surface: Surface, line: SurfaceLine, tell: (notice: Notice) => void): void {
+  line.panels.forEach((panel, i) => {
+    for (const end of ['root', 'tip'] as const) {
+      const at = selfCrossingAt(panel[end](panel.chord[end === 'root' ? 0 : 1]));
+      if (at !== null) tell({ code: 'section_self_crossing', path: surface.key, panel: i, end, at });
+    }
+    const inner = line.panels[i - 1];
+    const step = inner ? panel.chord[0] - inner.chord[1] : 0;
+    if (Math.abs(step) > 1e-6) tell({ code: 'chord_step', path: surface.key, panel: i, by: step });
+  });
+}
+
+function totalsOf(lines: readonly LineWithLump[], laid: readonly Laid[]): Totals {
+  const sum = sumLumps(lines.map(({ lump }) => lump));
+  const wings = new Set(
+    laid.filter(({ surface }) => surface.role === 'wing').map(({ surface }) => surface.key),
+  );
+  const byGroup: Record<string, number> = {};
+  let wingMass = 0;
+  for (const { line } of lines) {
+    byGroup[line.group] = (byGroup[line.group] ?? 0) + line.mass;
+    if (line.surface !== null && wings.has(line.surface)) wingMass += line.mass;
+  }
+  return {
+    mass: sum.amount,
+    u: massUncertainty(lines.map(({ line }) => line)),
+    at: centroid(sum),
+    wingMass,
+    byGroup,
+    inertia: inertiaOf(sum),
+  };
+}
+
+/** Moments of inertia about axes through the balance point, g·mm²: I_xx = Σm(y² + z²) − M(ȳ² + z̄²), and so on. */
+function inertiaOf(sum: Lump): Inertia | null {
+  const at = centroid(sum);
+  if (!at) return null;
+  const [x, y, z] = at.map((v, i) => Math.max(0, (sum.second[i] ?? 0) - sum.amount * v * v));
+  return { xx: (y ?? 0) + (z ?? 0), yy: (x ?? 0) + (z ?? 0), zz: (x ?? 0) + (y ?? 0) };
+}
+
+function classAreaOfAll(laid: readonly Laid[]): number {
+  return laid
+    .filter(({ surface }) => surface.role !== 'fin')
+    .reduce((sum, { surface, line }) => sum + classAreaOf(surface, line), 0);
+}
+
+function balanceOf(
+  plan: Plan,
+  lines: readonly LineWithLump[],
+  totals: Totals,
+  lifts: ReturnType<typeof liftsOf>,
+  tell: (notice: Notice) => void,
+): Balance {
+  if (!lifts) tell({ code: 'no_wing', path: 'plan' });
+  if (!totals.at) tell({ code: 'no_mass', path: 'plan' });
+  const neutralPoint = lifts?.neutralPoint ?? null;
+  if (lifts && neutralPoint === null) tell({ code: 'no_tailplane', path: 'plan' });
+  if (!totals.at) {
+    return { x: null, u: null, percentMac: null, uPercentMac: null, neutralPoint, staticMargin: null };
+  }
+  const x = totals.at[0];
+  const u = balanceUncertainty(
+    lines.map(({ line }: { line: Line }) => ({ mass: line.mass, x: line.at[0], u: line.u })),
+  );
+  if (!lifts) return { x, u, percentMac: null, uPercentMac: null, neutralPoint, staticMargin: null };
+  const percentMac = percentOfMac(x, lifts.xLeMac, lifts.mac);
+  const staticMargin = neutralPoint === null ? null : (neutralPoint - x) / lifts.mac;
+  if (staticMargin !== null && staticMargin < 0) {
+    tell({ code: 'balance_aft_of_neutral_point', path: 'plan', byMm: -staticMargin * lifts.mac });
+  }
+  const byPercentMac = plan.target ? percentMac - plan.target.percentMac : 0;
+  if (plan.target && Math.abs(byPercentMac) > plan.target.tolerance) {
+    tell({
+      code: 'balance_outside_target',
+      path: 'plan',
+      byMm: (byPercentMac / 100) * lifts.mac,
+      byPercentMac,
+    });
+  }
+  return {
+    x,
+    u,
+    percentMac,
+    uPercentMac: u === null ? null : (100 * u) / lifts.mac,
+    neutralPoint,
+    staticMargin,
+  };
+}

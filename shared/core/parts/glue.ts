@@ -1,0 +1,79 @@
+import { covers, developedAt, ribExtent, skinOver, stripAt, stripZ, type Half } from '../half.ts';
+import { addAmount, emptyLump } from '../lump.ts';
+import type { Strip } from '../plan.ts';
+import { areaBetween } from '../section-integrals.ts';
+import { pointOf, samplesOver, stationAt, type Station } from '../stations.ts';
+import { ribHeight } from './ribs.ts';
+import { stripSkew } from './strip.ts';
+import type { Measure } from './measure.ts';
+
+/**
+ * Area of all joints of one half, mm², each at its place: rib × strip, rib × skin, strip × skin over it, and the
+ * tip block on the last section.
+ */
+export function measureJoints(half: Half): Measure {
+  const lump = emptyLump();
+  for (const { part, stations } of half.ribs) {
+    for (const station of stations) {
+      for (const strip of half.strips) ribOnStrip(half, strip, station, part.thickness, lump);
+      ribOnSkins(half, station, part.thickness, lump);
+    }
+  }
+  for (const strip of half.strips) stripUnderSkins(half, strip, lump);
+  for (const tip of half.parts) {
+    if (tip.kind !== 'tipBlock') continue;
+    const last = stationAt(half.line, half.line.length);
+    const { amount, x, z } = areaBetween(last.section, 0, 1);
+    if (amount <= 0) continue;
+    addAmount(
+      lump,
+      amount * last.chord ** 2,
+      pointOf(last, (x / amount) * last.chord, (z / amount) * last.chord),
+    );
+  }
+  return { pieces: 1, length: null, area: lump.amount, volume: null, lump };
+}
+
+type Joints = Measure['lump'];
+
+function ribOnStrip(half: Half, strip: Strip, station: Station, thickness: number, joints: Joints): void {
+  if (!covers(strip, station.s)) return;
+  const place = stripAt(strip, station);
+  const z = stripZ(half, strip, station, place);
+  if (strip.seat === 'nose' || strip.seat === 'tail') {
+    // The rib butts on the strip over what both have in height there: a strip is sanded down to the section.
+    const face = strip.seat === 'nose' ? place.back : place.front;
+    const height = Math.min(place.height, ribHeight(half, station, face / station.chord));
+    addAmount(joints, height * thickness, pointOf(station, face, z));
+    return;
+  }
+  const contact = strip.letIn ? place.width + 2 * place.height : place.width;
+  addAmount(joints, contact * thickness, pointOf(station, place.centre, z));
+}
+
+function ribOnSkins(half: Half, station: Station, thickness: number, joints: Joints): void {
+  const extent = ribExtent(half, station);
+  for (const skin of half.skins) {
+    if (!covers(skin, station.s)) continue;
+    const arc = developedAt(skin, station, extent);
+    if (arc.amount <= 0) continue;
+    addAmount(joints, arc.amount * thickness, pointOf(station, arc.x / arc.amount, arc.z / arc.amount));
+  }
+}
+
+function stripUnderSkins(half: Half, strip: Strip, joints: Joints): void {
+  if (strip.seat !== 'top' && strip.seat !== 'bottom') return;
+  const face = strip.seat === 'top' ? 'upper' : 'lower';
+  const ends = half.skins.flatMap((skin) => [skin.from, skin.to]);
+  const [from, to] = [Math.min(strip.from, strip.to), Math.max(strip.from, strip.to)];
+  for (const { station, ds } of samplesOver(half.line, from, to, ends)) {
+    const place = stripAt(strip, station);
+    if (station.chord <= 0 || skinOver(half, station, face, place.centre / station.chord) <= 0) continue;
+    const along = Math.hypot(1, stripSkew(strip, station)) * ds;
+    addAmount(
+      joints,
+      place.width * along,
+      pointOf(station, place.centre, stripZ(half, strip, station, place)),
+    );
+  }
+}

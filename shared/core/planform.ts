@@ -1,0 +1,128 @@
+import type { Surface } from './plan.ts';
+import type { Planform } from './result.ts';
+import { areaBetween } from './section-integrals.ts';
+import { stationAt, surfaceLine, type SurfaceLine } from './stations.ts';
+
+/**
+ * Integrals of the chord over a planform, one half. `MAC = ∫c² ds / ∫c ds` (Houghton & Carpenter, Aerodynamics
+ * for Engineering Students); on a cranked wing xLE(MAC) is the chord-weighted mean, not the local leading edge.
+ */
+export interface ChordIntegrals {
+  /** ∫c ds, mm² */
+  area: number;
+  /** ∫c cos(dihedral) ds, mm² */
+  projected: number;
+  /** ∫c² ds */
+  square: number;
+  /** ∫ xLE c ds */
+  leadingEdge: number;
+  /** ∫ y c ds */
+  y: number;
+}
+
+const nothing = (): ChordIntegrals => ({ area: 0, projected: 0, square: 0, leadingEdge: 0, y: 0 });
+
+/** Sum of the chord integrals of several surfaces or panels. */
+export function addChords(parts: readonly ChordIntegrals[]): ChordIntegrals {
+  return parts.reduce(
+    (sum, p) => ({
+      area: sum.area + p.area,
+      projected: sum.projected + p.projected,
+      square: sum.square + p.square,
+      leadingEdge: sum.leadingEdge + p.leadingEdge,
+      y: sum.y + p.y,
+    }),
+    nothing(),
+  );
+}
+
+/**
+ * ∫f g over a run on which both are linear.
+ * @example linearProduct(6, 1, 1, 2, 2) // → 12
+ */
+export function linearProduct(run: number, f0: number, f1: number, g0: number, g1: number): number {
+  return (run * (f0 * (2 * g0 + g1) + f1 * (g0 + 2 * g1))) / 6;
+}
+
+/** Chord integrals of one half, exact for each panel and for tip blocks (half ellipses on the last chord). */
+export function chordIntegrals(surface: Surface, line: SurfaceLine = surfaceLine(surface)): ChordIntegrals {
+  const panels = line.panels.map((panel): ChordIntegrals => {
+    const span = panel.end - panel.start;
+    const [c0, c1] = panel.chord;
+    const area = (span * (c0 + c1)) / 2;
+    return {
+      area,
+      projected: area * Math.abs(panel.cos),
+      square: linearProduct(span, c0, c1, c0, c1),
+      leadingEdge: linearProduct(span, c0, c1, ...panel.leadingEdge),
+      y: linearProduct(span, c0, c1, panel.y, panel.y + span * panel.cos),
+    };
+  });
+  return addChords([...panels, ...tipChords(surface, line)]);
+}
+
+function tipChords(surface: Surface, line: SurfaceLine): ChordIntegrals[] {
+  const last = stationAt(line, line.length);
+  const section = areaBetween(last.section, 0, 1);
+  const middle = section.amount > 0 ? (section.x / section.amount) * last.chord : last.chord / 2;
+  const c = last.chord;
+  const { cos } = last.panel;
+  const y = last.panel.y + (last.panel.end - last.panel.start) * cos;
+  return surface.parts.flatMap((part) => {
+    if (part.kind !== 'tipBlock' || c <= 0) return [];
+    // c·√(1−(s/l)²) shrinks towards the section's centroid: ∫c = π/4·c·l, ∫c² = 2/3·c²·l, ∫c·s = c·l²/3.
+    const l = part.length;
+    const half = (part.side ?? 'both') === 'both' || !surface.mirrored ? 1 : 0.5;
+    const area = (half * Math.PI * c * l) / 4;
+    const square = (half * 2 * c * c * l) / 3;
+    return [
+      {
+        area,
+        projected: area * Math.abs(cos),
+        square,
+        leadingEdge: (last.leadingEdge + middle) * area - (middle / c) * square,
+        y: y * area + (half * cos * c * l * l) / 3,
+      },
+    ];
+  });
+}
+
+/** Span of one half from the plane of symmetry (or from the root, if not mirrored), projected, tip blocks in. */
+function reach(surface: Surface, line: SurfaceLine): number {
+  const last = line.panels.at(-1);
+  const tip = surface.parts.reduce((most, p) => (p.kind === 'tipBlock' ? Math.max(most, p.length) : most), 0);
+  const own = line.panels.reduce((sum, p) => sum + (p.end - p.start) * Math.abs(p.cos), 0);
+  return own + tip * Math.abs(last?.cos ?? 1) + (surface.mirrored ? Math.max(0, surface.apex[1]) : 0);
+}
+
+/** MAC and its place from chord integrals. The caller sees to it that there is an area. */
+export function meanChord(chords: ChordIntegrals): Pick<Planform, 'mac' | 'xLeMac' | 'yMac'> {
+  return {
+    mac: chords.square / chords.area,
+    xLeMac: chords.leadingEdge / chords.area,
+    yMac: chords.y / chords.area,
+  };
+}
+
+/** Planform figures of a surface, both halves of a mirrored one. A surface always has a chord, so an area. */
+export function planformOf(surface: Surface, line: SurfaceLine = surfaceLine(surface)): Planform {
+  const chords = chordIntegrals(surface, line);
+  const halves = surface.mirrored ? 2 : 1;
+  const areaProjected = halves * chords.projected;
+  const span = halves * reach(surface, line);
+  return {
+    areaDeveloped: halves * chords.area,
+    areaProjected,
+    span,
+    aspectRatio: areaProjected > 0 ? span ** 2 / areaProjected : null,
+    ...meanChord(chords),
+  };
+}
+
+/** Projected area, mm², that a class counts: carried through the fuselage to the plane of symmetry. */
+export function classAreaOf(surface: Surface, line: SurfaceLine = surfaceLine(surface)): number {
+  const { areaProjected } = planformOf(surface, line);
+  const root = surface.panels[0]?.rootChord ?? 0;
+  const carried = surface.mirrored ? 2 * Math.max(0, surface.apex[1]) * root : 0;
+  return areaProjected + carried;
+}

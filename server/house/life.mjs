@@ -1,0 +1,43 @@
+import { wording } from './messages.mjs';
+import { children } from './run.mjs';
+
+/** @type {Array<() => unknown>} */
+const endings = [];
+/** @type {Promise<never> | undefined} */
+let ending;
+
+/** Something to do before the house ends, whatever ends it; the last one given is done first. @param {() => unknown} step */
+export const atEnd = (step) => endings.push(step);
+
+export const isEnding = () => ending !== undefined;
+
+/** @param {number} code @returns {Promise<never>} */
+export function end(code) {
+  ending ??= (async () => {
+    for (const child of children) child.kill('SIGTERM');
+    for (const step of endings.toReversed()) {
+      try {
+        await step();
+      } catch (error) {
+        console.error(wording(error));
+        code ||= 1;
+      }
+    }
+    process.exit(code);
+  })();
+  return ending;
+}
+
+/**
+ * Runs a command of the house. One Ctrl-C reaches us twice, from the terminal and from npm, so every signal
+ * after the first is ignored: an ending that has begun is finished.
+ * @param {() => Promise<number>} command answers with the exit code
+ * @param {() => number} [interrupted] the exit code after a signal
+ */
+export function live(command, interrupted = () => 130) {
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(interrupted()));
+  command().then(end, (error) => {
+    if (!isEnding()) console.error(wording(error));
+    return end(1);
+  });
+}

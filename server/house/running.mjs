@@ -1,0 +1,62 @@
+import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { HouseError } from './messages.mjs';
+
+/** @typedef {{ pid: number, born: string, address: string, databasePort?: number }} Running */
+
+const note = (/** @type {string} */ home) => join(home, 'running.json');
+
+/** When a process began, so that a number used again is not taken for it. @param {number} pid */
+function bornOf(pid) {
+  try {
+    const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
+    return stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19] ?? '';
+  } catch {
+    return '';
+  }
+}
+
+/** The house that uses this home now, or null. @param {string} home @returns {Running | null} */
+export function runningIn(home) {
+  if (!existsSync(note(home))) return null;
+  try {
+    const running = /** @type {Running} */ (JSON.parse(readFileSync(note(home), 'utf8')));
+    return running.born !== '' && bornOf(running.pid) === running.born ? running : null;
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * Takes the home for this process; two houses on one cluster would stop it under each other.
+ * @param {string} home
+ * @param {string} address what the house will serve, for the sentence that the other one gets
+ */
+export function claim(home, address) {
+  const other = runningIn(home);
+  if (other) {
+    throw new HouseError(
+      `Featherbeam already runs from ${home} (${other.address}, process ${other.pid}): stop it first, ` +
+        'or give this one a folder of its own with FEATHERBEAM_HOME.',
+    );
+  }
+  mkdirSync(home, { recursive: true });
+  /** @type {Running} */
+  const own = { pid: process.pid, born: bornOf(process.pid), address };
+  rmSync(note(home), { force: true });
+  try {
+    write(home, own, 'wx');
+  } catch (error) {
+    if (/** @type {NodeJS.ErrnoException} */ (error).code !== 'EEXIST') throw error;
+    throw new HouseError(`Featherbeam is being started from ${home} by another command at this moment.`);
+  }
+  return {
+    /** Lets backups find the database. @param {number} databasePort */
+    tellPort: (databasePort) => write(home, { ...own, databasePort }, 'w'),
+    release: () => rmSync(note(home), { force: true }),
+  };
+}
+
+/** @param {string} home @param {Running} running @param {'w' | 'wx'} flag */
+const write = (home, running, flag) =>
+  writeFileSync(note(home), JSON.stringify(running), { flag, mode: 0o600 });

@@ -25,16 +25,19 @@ interface Running {
 function runningOf(section: Section, piece: (i: number, j: number) => Sums): Running {
   const n = section.x.length;
   const run: Running = { amount: new Float64Array(n), x: new Float64Array(n), z: new Float64Array(n) };
+  const keep = (into: Float64Array, i: number, first: number, second: number, whole: number) => {
+    const correction = (first + second - whole) / 3;
+    const before = into[i - 2] ?? 0;
+    into[i - 1] = before + first + correction / 2;
+    into[i] = before + first + second + correction;
+  };
   for (let i = 2; i < n; i += 2) {
     const first = piece(i - 2, i - 1);
     const second = piece(i - 1, i);
     const whole = piece(i - 2, i);
-    for (const key of ['amount', 'x', 'z'] as const) {
-      const correction = (first[key] + second[key] - whole[key]) / 3;
-      const before = run[key][i - 2] ?? 0;
-      run[key][i - 1] = before + first[key] + correction / 2;
-      run[key][i] = before + first[key] + second[key] + correction;
-    }
+    keep(run.amount, i, first.amount, second.amount, whole.amount);
+    keep(run.x, i, first.x, second.x, whole.x);
+    keep(run.z, i, first.z, second.z, whole.z);
   }
   return run;
 }
@@ -55,7 +58,7 @@ function areaPiece(s: Section, i: number, j: number): Sums {
 function arcPiece(s: Section, face: FaceName, i: number, j: number): Sums {
   const z = s[face];
   const [x0, x1, z0, z1] = [s.x[i] ?? 0, s.x[j] ?? 0, z[i] ?? 0, z[j] ?? 0];
-  const amount = Math.hypot(x1 - x0, z1 - z0);
+  const amount = Math.sqrt((x1 - x0) ** 2 + (z1 - z0) ** 2);
   return { amount, x: (amount * (x0 + x1)) / 2, z: (amount * (z0 + z1)) / 2 };
 }
 

@@ -96,6 +96,42 @@ export function readSection(
   return { x, upper, lower, noseFace: Math.abs((upper[0] ?? 0) - (lower[0] ?? 0)) };
 }
 
+/** A section and its partner at a panel's other end, on one grid. */
+export interface SectionPair {
+  root: (chord: number) => Section;
+  tip: (chord: number) => Section;
+}
+
+/**
+ * Formula sections already read, by their digits: reading one solves a root at each of 200 nodes, and the same few
+ * come back with every key stroke. A memory of pure answers only, kept small.
+ */
+const alreadyRead = new Map<string, SectionPair>();
+const REMEMBERED = 64;
+
+/** Both sections of a panel on the grid that they share. */
+export function readPair(rootSpec: SectionSpec, tipSpec: SectionSpec): SectionPair {
+  const key = 'points' in rootSpec || 'points' in tipSpec ? null : JSON.stringify([rootSpec, tipSpec]);
+  const known = key === null ? undefined : alreadyRead.get(key);
+  if (known) return known;
+  const grid = sectionGrid([...kinksOf(rootSpec), ...kinksOf(tipSpec)]);
+  const root = readerOf(rootSpec, grid);
+  const same = rootSpec === tipSpec || JSON.stringify(rootSpec) === JSON.stringify(tipSpec);
+  const pair = { root, tip: same ? root : readerOf(tipSpec, grid) };
+  if (key !== null) {
+    if (alreadyRead.size >= REMEMBERED) alreadyRead.clear();
+    alreadyRead.set(key, pair);
+  }
+  return pair;
+}
+
+/** A plate is read anew at each chord; any other section once. */
+function readerOf(spec: SectionSpec, grid: Float64Array): (chord: number) => Section {
+  if ('flat' in spec) return (chord) => readSection(spec, chord, grid);
+  const once = readSection(spec, 1, grid);
+  return () => once;
+}
+
 /** Blend of two sections on one grid, ordinate by ordinate: `share` 0 gives the first, 1 the second. */
 export function blendSections(a: Section, b: Section, share: number): Section {
   if (a === b || share === 0) return a;

@@ -1,6 +1,6 @@
 import { cosDegrees, radians, type Vec3 } from './frame.ts';
-import type { Panel, Pair, Surface } from './plan.ts';
-import { blendSections, kinksOf, readSection, sectionGrid, type Section } from './section.ts';
+import type { Pair, Panel, Surface } from './plan.ts';
+import { blendSections, readPair, type Section } from './section.ts';
 
 /** One panel of a surface as its stations see it. Everything is linear in s inside a panel. */
 export interface PanelLine {
@@ -15,6 +15,8 @@ export interface PanelLine {
   sin: number;
   root: (chord: number) => Section;
   tip: (chord: number) => Section;
+  /** the blended section at a share of the span; parts ask for the same stations, so each is made once */
+  sectionAt: (share: number) => Section;
 }
 
 /** A surface laid out along its stations, starboard half, in body axes. */
@@ -36,12 +38,18 @@ export interface Station {
   section: Section;
 }
 
-/** Sections that do not depend on the chord are read once. */
-function reader(panel: Panel, end: 'rootSection' | 'tipSection', grid: Float64Array) {
-  const spec = panel[end];
-  if ('flat' in spec) return (chord: number) => readSection(spec, chord, grid);
-  const once = readSection(spec, 1, grid);
-  return () => once;
+function blender(panel: Panel): Pick<PanelLine, 'root' | 'tip' | 'sectionAt'> {
+  const { root, tip } = readPair(panel.rootSection, panel.tipSection);
+  const made = new Map<number, Section>();
+  const sectionAt = (share: number) => {
+    const known = made.get(share);
+    if (known) return known;
+    const chord = panel.rootChord + share * (panel.tipChord - panel.rootChord);
+    const section = root === tip ? root(chord) : blendSections(root(chord), tip(chord), share);
+    made.set(share, section);
+    return section;
+  };
+  return { root, tip, sectionAt };
 }
 
 /** Lays a surface out along its stations. */
@@ -51,9 +59,6 @@ export function surfaceLine(surface: Surface): SurfaceLine {
   const panels = surface.panels.map((panel, index): PanelLine => {
     const cos = cosDegrees(panel.dihedral);
     const sin = Math.sin(radians(panel.dihedral));
-    const grid = gridOf(panel);
-    const same = JSON.stringify(panel.rootSection) === JSON.stringify(panel.tipSection);
-    const root = reader(panel, 'rootSection', grid);
     const line: PanelLine = {
       index,
       start,
@@ -64,8 +69,7 @@ export function surfaceLine(surface: Surface): SurfaceLine {
       z,
       cos,
       sin,
-      root,
-      tip: same ? root : reader(panel, 'tipSection', grid),
+      ...blender(panel),
     };
     start += panel.span;
     x += panel.sweep;
@@ -74,10 +78,6 @@ export function surfaceLine(surface: Surface): SurfaceLine {
     return line;
   });
   return { length: start, panels };
-}
-
-function gridOf(panel: Panel): Float64Array {
-  return sectionGrid([...kinksOf(panel.rootSection), ...kinksOf(panel.tipSection)]);
 }
 
 const EDGE = 1e-9;
@@ -96,8 +96,6 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
   const [c0, c1] = panel.chord;
   const [x0, x1] = panel.leadingEdge;
   const chord = c0 + share * (c1 - c0);
-  const root = panel.root(chord);
-  const tip = panel.tip(chord);
   return {
     s,
     panel,
@@ -105,7 +103,7 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
     chordSlope: (c1 - c0) / span,
     leadingEdge: x0 + share * (x1 - x0),
     leadingEdgeSlope: (x1 - x0) / span,
-    section: root === tip ? root : blendSections(root, tip, share),
+    section: panel.sectionAt(share),
   };
 }
 

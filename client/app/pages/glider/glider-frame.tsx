@@ -1,0 +1,66 @@
+import type { ReactNode } from 'react';
+import { NavLink, Outlet, useLocation } from 'react-router-dom';
+import type { Place } from '#client/app/paths.ts';
+import { SectionBoundary } from '#client/components/section-boundary.tsx';
+import { TitleBlock } from '#client/features/gliders/title-block.tsx';
+import { UndoButtons } from '#client/features/gliders/undo-buttons.tsx';
+import { useWorkspace } from '#client/features/gliders/workspace-context.ts';
+import { cn } from '#client/lib/cn.ts';
+
+const LABELS: Record<Place, string> = {
+  drawing: 'Drawing',
+  balance: 'Balance',
+  loading: 'Loading',
+  trial: 'Wood trial',
+  sheets: 'Sheets',
+};
+
+interface GliderFrameProps {
+  places: readonly Place[];
+  hrefOf: (place: Place) => string;
+  /** What stands over the sheet: conflicts, restored edits, that a sample is not stored. */
+  notices?: ReactNode;
+}
+
+/** The sheet of paper with its index tabs along the top edge and the title block at the lower right. */
+export function GliderFrame({ places, hrefOf, notices }: GliderFrameProps) {
+  const workspace = useWorkspace();
+  const { pathname } = useLocation();
+  return (
+    <div className="flex flex-1 flex-col print:block">
+      {notices}
+      <div className="no-print flex items-end justify-between gap-2">
+        <nav aria-label={`Places of ${workspace.plan.name}`} className="-mb-px min-w-0 overflow-x-auto">
+          <ul className="flex">
+            {places.map((place) => (
+              <li key={place}>
+                <NavLink to={hrefOf(place)} className={tabClass}>
+                  {LABELS[place]}
+                </NavLink>
+              </li>
+            ))}
+          </ul>
+        </nav>
+        <UndoButtons workspace={workspace} />
+      </div>
+      <div className="flex flex-1 flex-col border border-strong-rule bg-sheet print:block print:border-0">
+        <div className="flex min-h-0 flex-1 flex-col print:block">
+          <SectionBoundary resetKey={pathname}>
+            <Outlet />
+          </SectionBoundary>
+        </div>
+        <TitleBlock workspace={workspace} />
+      </div>
+    </div>
+  );
+}
+
+function tabClass({ isActive }: { isActive: boolean }): string {
+  return cn(
+    'flex min-h-9 items-center border border-b-0 px-4 whitespace-nowrap no-underline pointer-coarse:min-h-11',
+    'focus-visible:-outline-offset-2 max-sm:px-3',
+    isActive
+      ? 'rounded-t-md border-strong-rule bg-sheet font-semibold text-pencil'
+      : 'border-transparent text-graphite hover:text-ink',
+  );
+}

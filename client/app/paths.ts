@@ -1,0 +1,22 @@
+/** Places of a glider, in the order of their tabs. */
+export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'sheets'] as const;
+export type Place = (typeof PLACES)[number];
+/** The sample is not stored, so it has no sheets. */
+export const SAMPLE_PLACES = ['drawing', 'balance', 'loading', 'trial'] as const satisfies readonly Place[];
+
+/** Every address of the client, for links; the routes are in `router.tsx`. */
+export const paths = {
+  home: '/',
+  signIn: (next?: string) => (next === undefined ? '/sign-in' : `/sign-in?next=${encodeURIComponent(next)}`),
+  signUp: (next?: string) => (next === undefined ? '/sign-up' : `/sign-up?next=${encodeURIComponent(next)}`),
+  bench: '/bench',
+  materials: '/materials',
+  glider: (id: string, place: Place = 'drawing') => `/gliders/${id}/${place}`,
+  sample: (place: (typeof SAMPLE_PLACES)[number] = 'drawing') => `/sample/${place}`,
+  sheet: (id: string) => `/sheets/${id}`,
+} as const;
+
+/** Where to go after signing in: a path of our own, never another site. */
+export function safeNext(next: string | null): string {
+  return next !== null && /^\/(?![/\\])/.test(next) ? next : paths.bench;
+}

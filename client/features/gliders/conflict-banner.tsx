@@ -1,0 +1,56 @@
+import { useMemo } from 'react';
+import { Button } from '#client/components/ui/button.tsx';
+import { Notice } from '#client/components/ui/notice.tsx';
+import { formatMoment } from '#client/lib/moments.ts';
+import { estimate } from '#shared/core/estimate.ts';
+import type { Estimate } from '#shared/core/result.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Kept } from './autosave.ts';
+
+interface ConflictBannerProps {
+  theirs: Kept;
+  mine: Estimate;
+  onKeepMine: () => void;
+  onTakeTheirs: () => void;
+  onKeepAsNew: () => void;
+  pending: boolean;
+}
+
+/** Somebody saved in between: both states are at hand, and the reader chooses. */
+export function ConflictBanner({
+  theirs,
+  mine,
+  onKeepMine,
+  onTakeTheirs,
+  onKeepAsNew,
+  pending,
+}: ConflictBannerProps) {
+  const other = useMemo(() => estimate(theirs.plan), [theirs]);
+  return (
+    <Notice
+      tone="ochre"
+      live
+      word="Changed meanwhile."
+      className="mb-3"
+      actions={
+        <>
+          <Button onClick={onKeepMine}>Keep mine over theirs</Button>
+          <Button onClick={onTakeTheirs}>Take theirs</Button>
+          <Button onClick={onKeepAsNew} pending={pending}>
+            Keep mine as a new glider
+          </Button>
+        </>
+      }
+    >
+      {theirs.updatedBy} changed this glider at {formatMoment(theirs.updatedAt)}, while you had edits of your
+      own. Theirs: {figures(other)}. Yours: {figures(mine)}. Until you choose, nothing is overwritten; taking
+      theirs can be undone.
+    </Notice>
+  );
+}
+
+function figures(result: Estimate): string {
+  const mass = formatQuantity(result.totals.mass, 'mass');
+  const { percentMac } = result.balance;
+  return percentMac === null ? mass : `${mass}, ${formatQuantity(percentMac, 'percentMac')} MAC`;
+}

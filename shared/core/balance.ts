@@ -1,4 +1,5 @@
 import type { Vec3 } from './frame.ts';
+import { NOTHING } from './lump.ts';
 
 /** A mass at a place; `u` its standard uncertainty, g. */
 export interface PlacedMass {
@@ -37,7 +38,7 @@ export interface Weighed {
  */
 export function balanceUncertainty(masses: readonly Weighed[]): number | null {
   const total = masses.reduce((sum, m) => sum + m.mass, 0);
-  if (total === 0) return null;
+  if (total < NOTHING) return null;
   const x = masses.reduce((sum, m) => sum + m.mass * m.x, 0) / total;
   return rootOfSquares(
     masses.map((m) => ({ value: ((m.x - x) / total) * m.u, together: m.together })),

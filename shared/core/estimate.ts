@@ -1,7 +1,7 @@
 import { liftsOf } from './flight-points.ts';
 import { itemLine, solidLine, surfaceLines, type LineWithLump } from './lines.ts';
 import { loadingOf, speedAt, squareDecimetres } from './loading.ts';
-import { centroid, sumLumps, type Lump } from './lump.ts';
+import { centroid, NOTHING, sumLumps, type Lump } from './lump.ts';
 import type { Notice } from './notices.ts';
 import { balanceUncertainty, massUncertainty, percentOfMac } from './balance.ts';
 import { reynoldsNumber } from './atmosphere.ts';
@@ -63,7 +63,7 @@ export function estimate(plan: Plan): Estimate {
     balance,
     loading: {
       wing: loadingOf(totals.mass, wingArea),
-      classArea: classArea > 0 ? squareDecimetres(classArea) : null,
+      classArea: classArea > NOTHING ? squareDecimetres(classArea) : null,
       classLoading: loadingOf(totals.mass, classArea),
     },
     speeds: { stall, reynolds },

@@ -1,5 +1,6 @@
 import { neutralPoint } from './aero.ts';
 import { addChords, chordIntegrals, meanChord, type ChordIntegrals } from './planform.ts';
+import { NOTHING } from './lump.ts';
 import type { Surface, SurfaceRole } from './plan.ts';
 import type { Planform } from './result.ts';
 import type { SurfaceLine } from './stations.ts';
@@ -46,7 +47,7 @@ function together(laid: readonly Laid[], role: SurfaceRole) {
       return surface.mirrored ? [half, half] : [half];
     }),
   );
-  if (!(chords.projected > 0)) return null;
+  if (chords.projected < NOTHING) return null;
   const span = Math.max(...of.map(({ planform }) => planform.span));
   return { area: chords.projected, span, ...meanChord(chords) };
 }

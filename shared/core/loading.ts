@@ -1,11 +1,12 @@
 import { GRAVITY } from './frame.ts';
+import { NOTHING } from './lump.ts';
 
 /** Square millimetres in a square decimetre. */
 const MM2_PER_DM2 = 10_000;
 
 /** Wing loading in g/dm², or null without an area. @example loadingOf(250, 220_000).toFixed(4) // → '11.3636' */
 export function loadingOf(massG: number, areaMm2: number): number | null {
-  return areaMm2 > 0 ? massG / (areaMm2 / MM2_PER_DM2) : null;
+  return areaMm2 > NOTHING ? massG / (areaMm2 / MM2_PER_DM2) : null;
 }
 
 /** @example squareDecimetres(180_000) // → 18 */
@@ -24,6 +25,6 @@ export function speedAt(
   liftCoefficient: number,
   density: number,
 ): number | null {
-  if (!(areaMm2 > 0) || !(massG > 0)) return null;
+  if (areaMm2 < NOTHING || massG < NOTHING) return null;
   return Math.sqrt((2 * (massG / 1000) * GRAVITY) / (density * (areaMm2 / 1e6) * liftCoefficient));
 }

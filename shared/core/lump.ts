@@ -49,8 +49,11 @@ export function mirrorLump(lump: Lump): Lump {
   return { ...lump, first: [lump.first[0], -lump.first[1], lump.first[2]] };
 }
 
+/** Less than a picogram is nothing: a quotient by it would be noise. */
+export const NOTHING = 1e-12;
+
 /** Centroid, or null where there is nothing. @example centroid(emptyLump()) // → null */
 export function centroid(lump: Lump): Vec3 | null {
   const { amount, first } = lump;
-  return amount === 0 ? null : [first[0] / amount, first[1] / amount, first[2] / amount];
+  return amount < NOTHING ? null : [first[0] / amount, first[1] / amount, first[2] / amount];
 }

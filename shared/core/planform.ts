@@ -1,3 +1,4 @@
+import { NOTHING } from './lump.ts';
 import type { Surface } from './plan.ts';
 import type { Planform } from './result.ts';
 import { areaBetween } from './section-integrals.ts';
@@ -114,7 +115,7 @@ export function planformOf(surface: Surface, line: SurfaceLine = surfaceLine(sur
     areaDeveloped: halves * chords.area,
     areaProjected,
     span,
-    aspectRatio: areaProjected > 0 ? span ** 2 / areaProjected : null,
+    aspectRatio: areaProjected > NOTHING ? span ** 2 / areaProjected : null,
     ...meanChord(chords),
   };
 }

@@ -123,12 +123,12 @@ export function pointOf(station: Station, x: number, z: number): Vec3 {
 
 /** Value at s of a pair that holds at `from` and at `to`. @example pairAt([2, 4], 0, 100, 50) // → 3 */
 export function pairAt(pair: Pair, from: number, to: number, s: number): number {
-  return to > from ? pair[0] + ((pair[1] - pair[0]) * (s - from)) / (to - from) : pair[0];
+  return to - from > EDGE ? pair[0] + ((pair[1] - pair[0]) * (s - from)) / (to - from) : pair[0];
 }
 
 /** Change per mm of such a pair. */
 export function pairSlope(pair: Pair, from: number, to: number): number {
-  return to > from ? (pair[1] - pair[0]) / (to - from) : 0;
+  return to - from > EDGE ? (pair[1] - pair[0]) / (to - from) : 0;
 }
 
 /** Gauss–Legendre nodes and weights on (0, 1), five points: exact for polynomials up to the ninth degree. */
@@ -160,7 +160,7 @@ export function samplesOver(
   for (const panel of line.panels) {
     const a = Math.max(from, panel.start);
     const b = Math.min(to, panel.end);
-    if (b <= a) continue;
+    if (b - a <= EDGE) continue;
     const edges = [a, ...breaks.filter((s) => s > a + EDGE && s < b - EDGE).sort((p, q) => p - q), b];
     for (let i = 1; i < edges.length; i++) {
       const low = edges[i - 1] ?? a;

@@ -1,4 +1,5 @@
-import { covers, developedAt, ribExtent, skinOver, stripAt, stripZ, type Half } from '../half.ts';
+import { developedAt, skinOver, stripZ } from '../fit.ts';
+import { covers, ribExtent, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Strip } from '../plan.ts';
 import { areaBetween } from '../section-integrals.ts';
@@ -64,9 +65,8 @@ function ribOnSkins(half: Half, station: Station, thickness: number, joints: Joi
 function stripUnderSkins(half: Half, strip: Strip, joints: Joints): void {
   if (strip.seat !== 'top' && strip.seat !== 'bottom') return;
   const face = strip.seat === 'top' ? 'upper' : 'lower';
-  const ends = half.skins.flatMap((skin) => [skin.from, skin.to]);
   const [from, to] = [Math.min(strip.from, strip.to), Math.max(strip.from, strip.to)];
-  for (const { station, ds } of samplesOver(half.line, from, to, ends)) {
+  for (const { station, ds } of samplesOver(half.line, from, to, half.skinEnds)) {
     const place = stripAt(strip, station);
     if (station.chord <= 0 || skinOver(half, station, face, place.centre / station.chord) <= 0) continue;
     const along = Math.hypot(1, stripSkew(strip, station)) * ds;

@@ -1,10 +1,10 @@
-import { developedAt, covers, heightsAt, ribExtent, skinOver, stripAt, stripZ, type Half } from '../half.ts';
+import { developedAt, heightsAt, skinOver, stripZ } from '../fit.ts';
+import { covers, ribExtent, ribStations, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Ribs } from '../plan.ts';
 import { areaBetween, ordinateAt, type Sums } from '../section-integrals.ts';
 import { pointOf, stationAt, type Station } from '../stations.ts';
 import type { Basis, Measure } from './measure.ts';
-import { ribStations } from '../half.ts';
 
 /**
  * Net area of a rib with its first moments about nose and chord line, mm² and mm³: the section between nose and

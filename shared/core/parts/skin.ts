@@ -1,4 +1,5 @@
-import { covers, developedAt, type Half } from '../half.ts';
+import { developedAt } from '../fit.ts';
+import { covers, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { CapStrips, Covering, Skin, TipBlock } from '../plan.ts';
 import { heightAt } from '../section-integrals.ts';

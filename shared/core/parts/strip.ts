@@ -1,4 +1,5 @@
-import { covers, heightsAt, stripAt, stripZ, type Half, type StripAt } from '../half.ts';
+import { heightsAt, stripZ } from '../fit.ts';
+import { covers, stripAt, type Half, type StripAt } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Strip } from '../plan.ts';
 import { pairAt, pairSlope, pointOf, samplesOver, stationAt, type Station } from '../stations.ts';
@@ -48,7 +49,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();
   const total = { length: 0, area: 0, volume: 0 };
-  for (const { station, ds } of samplesOver(half.line, from, to)) {
+  for (const { station, ds } of samplesOver(half.line, from, to, half.skinEnds)) {
     const place = stripAt(part, station);
     const along = Math.hypot(1, stripSkew(part, station)) * ds;
     const { area, shift } = stripProfile(part.profile, place.width, place.height, part.wall);

@@ -1,4 +1,5 @@
-import { covers, heightsAt, stripAt, type Half } from '../half.ts';
+import { heightsAt } from '../fit.ts';
+import { covers, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Web } from '../plan.ts';
 import { ordinateAt } from '../section-integrals.ts';
@@ -36,10 +37,12 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
     area += height * width;
     addAmount(lump, height * width * (basis === 'volume' ? part.thickness : 1), at);
   };
-  const ends = half.strips.flatMap((strip) => [strip.from, strip.to]);
+  const ends = [...half.skinEnds, ...half.strips.flatMap((strip) => [strip.from, strip.to])];
   for (const { station, ds } of samplesOver(half.line, from, to, ends)) add(station, ds);
   for (const { part: ribs, stations } of half.ribs) {
     for (const station of stations) if (covers({ from, to }, station.s)) add(station, -ribs.thickness);
   }
+  // Ribs closer than they are thick leave no bay.
+  if (area <= 0) return { pieces: 1, length: to - from, area: 0, volume: 0, lump: emptyLump() };
   return { pieces: 1, length: to - from, area, volume: area * part.thickness, lump };
 }

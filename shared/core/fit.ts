@@ -1,0 +1,90 @@
+import { covers, type Half, type StripAt } from './half.ts';
+import type { Strip } from './plan.ts';
+import { arcBetween, heightAt, ordinateAt, wrapArc, type Sums } from './section-integrals.ts';
+import type { Station } from './stations.ts';
+
+/** How skins, cap strips and strips lie on the section: what a part finds over and under it at a station. */
+const TOUCH = 1e-9;
+
+/** The faces that a skin, cap strip or covering lies on, each with its x/c limits. */
+export function facesOf(part: {
+  seat: 'top' | 'bottom' | 'both' | 'wrap';
+  start?: number;
+  end?: number;
+}): { face: 'upper' | 'lower'; from: number; to: number }[] {
+  const [start, end] = [part.start ?? 0, part.end ?? 1];
+  if (part.seat === 'wrap') {
+    return [
+      { face: 'upper', from: 0, to: start },
+      { face: 'lower', from: 0, to: end },
+    ];
+  }
+  const range = { from: Math.min(start, end), to: Math.max(start, end) };
+  return (
+    part.seat === 'both'
+      ? (['upper', 'lower'] as const)
+      : part.seat === 'top'
+        ? (['upper'] as const)
+        : (['lower'] as const)
+  ).map((face) => ({ face, ...range }));
+}
+
+/** Developed length with first moments, mm and mm², that such a part takes at a station, inside an extent of x/c. */
+export function developedAt(
+  part: Parameters<typeof facesOf>[0],
+  station: Station,
+  extent: [number, number] = [0, 1],
+): Sums {
+  const { section, chord } = station;
+  const faces = facesOf(part);
+  const sum: Sums = { amount: 0, x: 0, z: 0 };
+  const roundNose = faces.length === 2 && faces.every((f) => f.from <= 0) && extent[0] <= 0;
+  const arcs = roundNose
+    ? [wrapArc(section, Math.min(faces[0]?.to ?? 0, extent[1]), Math.min(faces[1]?.to ?? 0, extent[1]))]
+    : faces.flatMap(({ face, from, to }) => {
+        const [a, b] = [Math.max(from, extent[0]), Math.min(to, extent[1])];
+        return b > a ? [arcBetween(section, face, a, b)] : [];
+      });
+  for (const arc of arcs) {
+    sum.amount += arc.amount * chord;
+    sum.x += arc.x * chord * chord;
+    sum.z += arc.z * chord * chord;
+  }
+  return sum;
+}
+
+/**
+ * Thickness of the skins that lie over x/c on a face at a station, mm. A skin that ends there covers it; where one
+ * ends and another begins (a butt joint over a spar) the thicker side counts, not both.
+ */
+export function skinOver(half: Half, station: Station, face: 'upper' | 'lower', x: number): number {
+  let [over, ending, starting] = [0, 0, 0];
+  for (const skin of half.skins) {
+    if (!covers(skin, station.s)) continue;
+    for (const range of facesOf(skin)) {
+      if (range.face !== face || x < range.from - TOUCH || x > range.to + TOUCH) continue;
+      if (x > range.to - TOUCH) ending += skin.thickness;
+      else if (x < range.from + TOUCH) starting += skin.thickness;
+      else over += skin.thickness;
+    }
+  }
+  return over + Math.max(ending, starting);
+}
+
+/** Height of the section at x/c, mm, and of what is left of it under the skins there. */
+export function heightsAt(half: Half, station: Station, x: number): { section: number; underSkins: number } {
+  const section = heightAt(station.section, x) * station.chord;
+  const skins = skinOver(half, station, 'upper', x) + skinOver(half, station, 'lower', x);
+  return { section, underSkins: section - skins };
+}
+
+/** z of a strip's centre above the chord line, mm: outer face flush with the section, or with a skin's underside. */
+export function stripZ(half: Half, strip: Strip, station: Station, place: StripAt): number {
+  const { section, chord } = station;
+  const x = chord > 0 ? place.centre / chord : 0;
+  const upper = ordinateAt(section, 'upper', x) * chord;
+  const lower = ordinateAt(section, 'lower', x) * chord;
+  if (strip.seat === 'top') return upper - skinOver(half, station, 'upper', x) - place.height / 2;
+  if (strip.seat === 'bottom') return lower + skinOver(half, station, 'lower', x) + place.height / 2;
+  return (upper + lower) / 2;
+}

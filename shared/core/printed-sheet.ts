@@ -1,0 +1,155 @@
+import { Decimal } from 'decimal.js';
+import { apportion } from './apportion.ts';
+import { massUncertainty } from './balance.ts';
+import type { Estimate, Line } from './result.ts';
+import { sheetGroups } from './sheet-groups.ts';
+
+/**
+ * Figures as printed: a decimal point, a plain minus, no thousands marks, a fixed count of decimals per column
+ * (`digits`). Masses g, arms mm aft of the datum, moments g·mm, shares % of the mass. `arm` is null where nothing
+ * has a mass.
+ */
+export interface PrintedFigures {
+  mass: string;
+  /** standard uncertainty of the mass, g */
+  u: string;
+  arm: string | null;
+  moment: string;
+  share: string;
+}
+
+export interface PrintedRow extends PrintedFigures {
+  /** id of the estimate's line */
+  id: string;
+  name: string;
+  /** key of the material, null for items */
+  material: string | null;
+}
+
+export interface PrintedGroup extends PrintedFigures {
+  key: string;
+  name: string;
+  rows: PrintedRow[];
+}
+
+export interface PrintedSheet {
+  groups: PrintedGroup[];
+  total: PrintedFigures;
+  /** decimals of each column */
+  digits: Record<Column | 'u' | 'arm', number>;
+}
+
+type Column = 'mass' | 'moment' | 'share';
+type Printed = Record<Column, Decimal>;
+
+/** Below this mass, g, a sheet prints hundredths of a gram. */
+const LIGHT = 20;
+
+/**
+ * The balance sheet by group and part, as printed on screen, on paper and in CSV. Printed masses, moments and
+ * shares add up to the last digit: parts to their group, groups to the total; no printed figure lies as much as one
+ * unit of its last digit from the exact one. Uncertainties add in quadrature, so that column is rounded alone, and
+ * never down to nothing; arms are exact arms, rounded.
+ */
+export function printedSheet(estimate: Pick<Estimate, 'lines'>): PrintedSheet {
+  const { lines } = estimate;
+  const mass = exactSum(lines, 'mass');
+  const moment = exactSum(lines, 'moment');
+  const fine = mass.lessThan(LIGHT) ? 2 : 1;
+  const digits = { mass: fine, u: fine, arm: 1, moment: fine - 1, share: 1 };
+  const shareOf = (part: Decimal) => (mass.isZero() ? new Decimal(0) : part.times(100).div(mass));
+
+  const groups = sheetGroups(lines).map((group) => ({
+    ...group,
+    mass: exactSum(group.lines, 'mass'),
+    moment: exactSum(group.lines, 'moment'),
+  }));
+  const total: Printed = {
+    mass: mass.toDecimalPlaces(digits.mass, Decimal.ROUND_HALF_UP),
+    moment: moment.toDecimalPlaces(digits.moment, Decimal.ROUND_HALF_UP),
+    share: new Decimal(mass.isZero() ? 0 : 100),
+  };
+  const byGroup = spread(groups, total, digits, shareOf);
+
+  const write = (printed: Printed, of: readonly Line[], arm: Decimal | null): PrintedFigures => ({
+    mass: printed.mass.toFixed(digits.mass),
+    u: printedUncertainty(massUncertainty(of), digits.u),
+    arm: arm === null ? null : plain(arm.toDecimalPlaces(digits.arm, Decimal.ROUND_HALF_UP), digits.arm),
+    moment: plain(printed.moment, digits.moment),
+    share: printed.share.toFixed(digits.share),
+  });
+  const armOf = (of: { mass: Decimal; moment: Decimal }) =>
+    of.mass.isZero() ? null : of.moment.div(of.mass);
+
+  return {
+    groups: groups.map((group, i): PrintedGroup => {
+      const printed = at(byGroup, i);
+      const exact = group.lines.map((line) => ({
+        mass: new Decimal(line.mass),
+        moment: new Decimal(line.moment),
+      }));
+      const byRow = spread(exact, printed, digits, shareOf);
+      return {
+        key: group.key,
+        name: group.name,
+        ...write(printed, group.lines, armOf(group)),
+        rows: group.lines.map((line, j) => ({
+          id: line.id,
+          name: line.name,
+          material: line.material,
+          ...write(at(byRow, j), [line], new Decimal(line.at[0])),
+        })),
+      };
+    }),
+    total: write(total, lines, armOf({ mass, moment })),
+    digits,
+  };
+}
+
+/** Each column apportioned to its printed total. */
+function spread(
+  parts: readonly { mass: Decimal; moment: Decimal }[],
+  total: Printed,
+  digits: Record<Column, number>,
+  shareOf: (mass: Decimal) => Decimal,
+): Printed[] {
+  const masses = apportion(
+    parts.map((part) => part.mass),
+    total.mass,
+    digits.mass,
+  );
+  const moments = apportion(
+    parts.map((part) => part.moment),
+    total.moment,
+    digits.moment,
+  );
+  const shares = apportion(
+    parts.map((part) => shareOf(part.mass)),
+    total.share,
+    digits.share,
+  );
+  return parts.map((_, i) => ({ mass: at(masses, i), moment: at(moments, i), share: at(shares, i) }));
+}
+
+/** What is printed of one is at hand for each, by construction. */
+function at<T>(list: readonly T[], index: number): T {
+  const value = list[index];
+  if (value === undefined) throw new RangeError(`nothing at ${index}`);
+  return value;
+}
+
+function exactSum(lines: readonly Line[], column: 'mass' | 'moment'): Decimal {
+  return Decimal.sum(0, ...lines.map((line) => line[column]));
+}
+
+/** JCGM 100:2008, 7.2.6, lets an uncertainty be rounded up: a small one never prints as none. */
+function printedUncertainty(u: number, digits: number): string {
+  const unit = new Decimal(10).pow(-digits);
+  const rounded = new Decimal(u).toDecimalPlaces(digits, Decimal.ROUND_HALF_UP);
+  return (u > 0 && rounded.lessThan(unit) ? unit : rounded).toFixed(digits);
+}
+
+/** Without a minus before a nought. */
+function plain(value: Decimal, digits: number): string {
+  return (value.isZero() ? new Decimal(0) : value).toFixed(digits);
+}

@@ -8,7 +8,11 @@ function line(id: string, group: string, mass: number, x: number, u: number): Li
   return { ...blank, id, name: id, group, mass, u, at: [x, 0, 0], moment: mass * x };
 }
 // By hand: 5 + 3 + 2 = 10 g, balance (5·(−20) + 3·10 + 2·70)/10 = 7 mm.
-const lines = [line('lead', 'nose', 5, -20, 0.7), line('wing', 'wing', 3, 10, 0.5), line('tail', 'tail', 2, 70, 0.3)];
+const lines = [
+  line('lead', 'nose', 5, -20, 0.7),
+  line('wing', 'wing', 3, 10, 0.5),
+  line('tail', 'tail', 2, 70, 0.3),
+];
 const totals: Totals = { mass: 10, u: 0, at: [7, 0, 0], wingMass: 0, byGroup: {}, inertia: null };
 
 describe('contributions', () => {
@@ -33,7 +37,10 @@ describe('contributions', () => {
     const square = (found: { u: number }[]) => Math.sqrt(found.reduce((sum, { u }) => sum + u * u, 0));
     expect(square(massContributions({ lines }))).toBeCloseTo(massUncertainty(lines), 12);
     const weighed = lines.map((l) => ({ mass: l.mass, x: l.at[0], u: l.u }));
-    expect(square(balanceContributions({ lines, totals }))).toBeCloseTo(balanceUncertainty(weighed) ?? Number.NaN, 12);
+    expect(square(balanceContributions({ lines, totals }))).toBeCloseTo(
+      balanceUncertainty(weighed) ?? Number.NaN,
+      12,
+    );
   });
 
   it('leaves out what is exactly known', () => {

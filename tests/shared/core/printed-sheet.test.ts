@@ -13,7 +13,11 @@ function line(id: string, group: string, surface: string | null, mass: number, x
 const anyLine = fc.record({
   group: fc.constantFrom('wing', 'Gear', 'fuselage'),
   surface: fc.constantFrom(null, null, 'wing', 'fin'),
-  mass: fc.oneof(fc.constant(0), fc.double({ min: 0, max: 900, noNaN: true }), fc.integer({ max: 90, min: 1 })),
+  mass: fc.oneof(
+    fc.constant(0),
+    fc.double({ min: 0, max: 900, noNaN: true }),
+    fc.integer({ max: 90, min: 1 }),
+  ),
   x: fc.double({ min: -400, max: 900, noNaN: true }),
   u: fc.double({ min: 0, max: 3, noNaN: true }),
 });
@@ -65,7 +69,9 @@ describe('printedSheet', () => {
   it('leaves what is exact to the last digit as it is', () => {
     fc.assert(
       fc.property(anyLines, fc.integer({ min: 1, max: 900 }), (lines, tenths) => {
-        const { groups, digits } = printedSheet({ lines: [...lines, line('lead', 'ballast', null, tenths / 10, -150)] });
+        const { groups, digits } = printedSheet({
+          lines: [...lines, line('lead', 'ballast', null, tenths / 10, -150)],
+        });
         const lead = groups.find((g) => g.key === 'ballast')?.rows[0];
         expect(lead?.mass).toBe(new Decimal(tenths).div(10).toFixed(digits.mass));
       }),
@@ -99,7 +105,11 @@ describe('printedSheet', () => {
 
   it('joins a solid of the group Wing to the surface wing, and names groups with a capital', () => {
     const { groups } = printedSheet({
-      lines: [line('rib', 'ribs', 'wing', 2, 0), line('rx', 'gear', null, 3, 0), line('joiner', 'Wing', null, 5, 0)],
+      lines: [
+        line('rib', 'ribs', 'wing', 2, 0),
+        line('rx', 'gear', null, 3, 0),
+        line('joiner', 'Wing', null, 5, 0),
+      ],
     });
     expect(groups.map((g) => [g.name, g.mass])).toEqual([
       ['Wing', '7.00'],

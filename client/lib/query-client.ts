@@ -1,9 +1,16 @@
-import { QueryClient } from '@tanstack/react-query';
-import { isPassing } from './api.ts';
+import { QueryCache, QueryClient } from '@tanstack/react-query';
+import { ApiError, isPassing } from './api.ts';
 
 /** What was fetched stays fresh for half a minute; only what may pass by itself is tried again. */
 export function createQueryClient(): QueryClient {
-  return new QueryClient({
+  const client: QueryClient = new QueryClient({
+    queryCache: new QueryCache({
+      // A session that ended elsewhere is noticed by whatever is asked next.
+      onError: (error) => {
+        if (error instanceof ApiError && error.status === 401)
+          void client.invalidateQueries({ queryKey: ['session'] });
+      },
+    }),
     defaultOptions: {
       queries: {
         staleTime: 30_000,
@@ -13,4 +20,5 @@ export function createQueryClient(): QueryClient {
       mutations: { retry: false, networkMode: 'always' },
     },
   });
+  return client;
 }

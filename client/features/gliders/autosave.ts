@@ -35,8 +35,10 @@ export interface Desk {
   problem: string | null;
   /** No connection, as opposed to a server in trouble. */
   offline: boolean;
-  /** ISO time of unsent edits that were put back on opening. */
-  restored: string | null;
+  /** The session has ended; signing in again cures it. */
+  signedOut: boolean;
+  /** Unsent edits were put back on opening: when they were made, and the plan they were made over. */
+  restored: { at: string; over: Plan } | null;
 }
 
 export type DeskEvent =
@@ -45,7 +47,7 @@ export type DeskEvent =
   | { type: 'redone' }
   | { type: 'sent' }
   | { type: 'acknowledged'; kept: Kept }
-  | { type: 'failed'; passing: boolean; offline: boolean; problem: string }
+  | { type: 'failed'; passing: boolean; offline: boolean; signedOut: boolean; problem: string }
   | { type: 'outdated'; current: Kept }
   | { type: 'refreshed'; kept: Kept }
   | { type: 'keptMine' }
@@ -61,15 +63,16 @@ export function startDesk(kept: Kept, draft: Draft | null): Desk {
     theirs: null,
     problem: null,
     offline: false,
+    signedOut: false,
     restored: null,
   };
   if (draft === null || same(draft.plan, kept.plan)) return clean;
   const restored = {
     ...clean,
     ...onDesk(startHistory(draft.plan, [kept.plan]), kept.plan),
-    restored: draft.at,
+    restored: { at: draft.at, over: kept.plan },
   };
-  const arrived = draft.sent !== null && same(draft.sent, kept.plan);
+  const arrived = draft.sent !== null && sameOnceChecked(draft.sent, kept.plan);
   if (draft.version >= kept.version || arrived) return restored;
   return { ...restored, base: { ...kept, version: draft.version }, phase: 'conflict', theirs: kept };
 }
@@ -106,13 +109,14 @@ export function reduce(desk: Desk, event: DeskEvent): Desk {
     case 'acknowledged':
       return settled(desk, { ...event.kept, plan: desk.sent ?? event.kept.plan });
     case 'failed': {
-      const { passing, offline, problem } = event;
+      const { passing, offline, signedOut, problem } = event;
       // What went into a broken line may have arrived, so it stays in `sent`.
       return {
         ...desk,
         phase: passing ? 'waiting' : 'refused',
         sent: passing ? desk.sent : null,
         offline,
+        signedOut,
         problem,
       };
     }
@@ -154,7 +158,16 @@ function moved(desk: Desk, history: History<Plan>): Desk {
 }
 
 function settled(desk: Desk, base: Kept): Desk {
-  return { ...desk, base, phase: 'idle', sent: null, theirs: null, problem: null, offline: false };
+  return {
+    ...desk,
+    base,
+    phase: 'idle',
+    sent: null,
+    theirs: null,
+    problem: null,
+    offline: false,
+    signedOut: false,
+  };
 }
 
 /** The server keeps names trimmed; that makes no other plan of it. */

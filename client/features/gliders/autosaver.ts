@@ -125,6 +125,7 @@ function eventOf(error: unknown): DeskEvent {
     type: 'failed',
     passing: isPassing(error),
     offline: error instanceof NetworkError,
+    signedOut: error instanceof ApiError && error.status === 401,
     problem: wording(error),
   };
 }

@@ -14,15 +14,17 @@ interface DeskNoticesProps {
   saver: Autosaver;
   /** Opens a glider that was made from this one. */
   onOpen: (gliderId: string) => void;
+  /** Leads to signing in and back here. */
+  onSignIn: () => void;
 }
 
 /** What stands between the plan on the desk and the one that is stored. */
-export function DeskNotices({ workspace, saver, onOpen }: DeskNoticesProps) {
+export function DeskNotices({ workspace, saver, onOpen, onSignIn }: DeskNoticesProps) {
   const desk = useSyncExternalStore(saver.subscribe, saver.getDesk);
   const create = useCreateGlider();
   const wish = useWish();
   const say = useToast();
-  const [seen, setSeen] = useState<string | null>(null);
+  const [seen, setSeen] = useState(false);
 
   const keepAsNew = () => {
     const { check, theirs, history } = saver.getDesk();
@@ -64,10 +66,18 @@ export function DeskNotices({ workspace, saver, onOpen }: DeskNoticesProps) {
         className="mb-3"
         actions={
           <>
-            <Button onClick={saver.retry}>Try again</Button>
-            <Button onClick={keepAsNew} pending={create.isPending}>
-              Keep as a new glider
-            </Button>
+            {desk.signedOut ? (
+              <Button variant="primary" onClick={onSignIn}>
+                Sign in
+              </Button>
+            ) : (
+              <Button onClick={saver.retry}>Try again</Button>
+            )}
+            {!desk.signedOut && (
+              <Button onClick={keepAsNew} pending={create.isPending}>
+                Keep as a new glider
+              </Button>
+            )}
           </>
         }
       >
@@ -76,26 +86,24 @@ export function DeskNotices({ workspace, saver, onOpen }: DeskNoticesProps) {
     );
   }
   if (workspace.saveState === 'invalid') return <InvalidNotice problem={workspace.problem} />;
-  if (desk.restored !== null && desk.restored !== seen) {
+  const { restored } = desk;
+  if (restored !== null && !seen) {
+    const drop = () => {
+      setSeen(true);
+      workspace.edit(() => restored.over, 'drop restored edits');
+    };
     return (
       <Notice
         tone="ink"
         className="mb-3"
         actions={
           <>
-            <Button
-              onClick={() => {
-                setSeen(desk.restored);
-                workspace.undo();
-              }}
-            >
-              Drop them
-            </Button>
-            <Button onClick={() => setSeen(desk.restored)}>Keep them</Button>
+            <Button onClick={drop}>Drop them</Button>
+            <Button onClick={() => setSeen(true)}>Keep them</Button>
           </>
         }
       >
-        Edits of {formatMoment(desk.restored)} that had not reached the server were put back.
+        Edits of {formatMoment(restored.at)} that had not reached the server were put back.
       </Notice>
     );
   }

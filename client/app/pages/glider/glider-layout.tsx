@@ -1,4 +1,4 @@
-import { useQuery } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { Link, useNavigate, useParams } from 'react-router-dom';
 import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths, PLACES } from '#client/app/paths.ts';
@@ -8,7 +8,7 @@ import { LeaveGuard } from '#client/features/gliders/leave-guard.tsx';
 import { gliderQueries } from '#client/features/gliders/queries.ts';
 import { useKeeper, useWorkspace } from '#client/features/gliders/workspace-context.ts';
 import { WorkspaceProvider } from '#client/features/gliders/workspace.tsx';
-import { useUser } from '#client/features/session/queries.ts';
+import { sessionQuery, useUser } from '#client/features/session/queries.ts';
 import { RequireSession } from '#client/features/session/require-session.tsx';
 import { useTitle } from '#client/hooks/use-title.ts';
 import { GliderFrame } from './glider-frame.tsx';
@@ -46,6 +46,7 @@ function Desk({ id }: { id: string }) {
   const workspace = useWorkspace();
   const keeper = useKeeper();
   const navigate = useNavigate();
+  const client = useQueryClient();
   useTitle(workspace.plan.name);
   useCrumbs([{ label: 'Bench', href: paths.bench }, { label: workspace.plan.name }]);
   const hrefOf = (place: (typeof PLACES)[number]) => paths.glider(id, place);
@@ -62,6 +63,7 @@ function Desk({ id }: { id: string }) {
               workspace={workspace}
               saver={keeper.saver}
               onOpen={(gliderId) => void navigate(paths.glider(gliderId))}
+              onSignIn={() => client.setQueryData(sessionQuery.queryKey, { user: null })}
             />
           )
         }

@@ -1,0 +1,20 @@
+import { useNavigate } from 'react-router-dom';
+import { useCrumbs } from '#client/app/crumbs.tsx';
+import { paths } from '#client/app/paths.ts';
+import { Bench } from '#client/features/gliders/bench.tsx';
+import { RequireSession } from '#client/features/session/require-session.tsx';
+import { useTitle } from '#client/hooks/use-title.ts';
+import { SheetPaper } from '../sheet-paper.tsx';
+
+export function BenchPage() {
+  useTitle('Bench');
+  useCrumbs([{ label: 'Bench' }]);
+  const navigate = useNavigate();
+  return (
+    <RequireSession signInHref={paths.signIn}>
+      <SheetPaper>
+        <Bench hrefOf={(id) => paths.glider(id)} onOpen={(id) => void navigate(paths.glider(id))} />
+      </SheetPaper>
+    </RequireSession>
+  );
+}

@@ -90,13 +90,26 @@ function intervalOf(nodes: Float64Array, x: number): number {
 
 const clamp01 = (x: number) => Math.min(1, Math.max(0, x));
 
-/** Value at x of a running integral; inside an interval `shape` says how its share of the interval grows. */
-function runTo(run: Running, nodes: Float64Array, x: number, shape: (i: number, f: number) => number): Sums {
+/** The fore part of an interval of nodes, as a share of what the interval holds. */
+interface Fore {
+  share: number;
+  /** how far its middle lies before that of the whole interval, along x and z */
+  x: number;
+  z: number;
+}
+
+/** Value at x of a running integral; `fore` says what of an interval lies before the share f of its width. */
+function runTo(run: Running, nodes: Float64Array, x: number, fore: (i: number, f: number) => Fore): Sums {
   const i = intervalOf(nodes, x);
   const width = (nodes[i + 1] ?? 1) - (nodes[i] ?? 0);
-  const share = shape(i, width > 0 ? (x - (nodes[i] ?? 0)) / width : 0);
-  const at = (a: Float64Array) => (a[i] ?? 0) + share * ((a[i + 1] ?? 0) - (a[i] ?? 0));
-  return { amount: at(run.amount), x: at(run.x), z: at(run.z) };
+  const part = fore(i, width > 0 ? (x - (nodes[i] ?? 0)) / width : 0);
+  const grown = (a: Float64Array) => part.share * ((a[i + 1] ?? 0) - (a[i] ?? 0));
+  const amount = grown(run.amount);
+  return {
+    amount: (run.amount[i] ?? 0) + amount,
+    x: (run.x[i] ?? 0) + grown(run.x) - amount * part.x,
+    z: (run.z[i] ?? 0) + grown(run.z) - amount * part.z,
+  };
 }
 
 const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x: a.x - b.x, z: a.z - b.z });
@@ -107,23 +120,39 @@ const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x
  */
 export function areaBetween(section: Section, from: number, to: number): Sums {
   const run = (setOf(section).area ??= runningOf(section, (i, j) => areaPiece(section, i, j)));
-  const thickness = (i: number) => Math.max(0, (section.upper[i] ?? 0) - (section.lower[i] ?? 0));
-  // Inside an interval the thickness is taken as linear, so the area grows as a parabola.
-  const grow = (i: number, f: number) => {
+  const { x, upper, lower } = section;
+  const thickness = (i: number) => Math.max(0, (upper[i] ?? 0) - (lower[i] ?? 0));
+  const middle = (i: number) => ((upper[i] ?? 0) + (lower[i] ?? 0)) / 2;
+  // Inside an interval the thickness is taken as linear, so the area grows as a parabola and its middle moves aft.
+  const fore = (i: number, f: number): Fore => {
     const [t0, t1] = [thickness(i), thickness(i + 1)];
-    return t0 + t1 > 0 ? (f * (2 * t0 + f * (t1 - t0))) / (t0 + t1) : f;
+    if (t0 + t1 <= 0) return { share: f, x: 0, z: 0 };
+    const reached = t0 + f * (t1 - t0);
+    const back =
+      (t0 + 2 * t1) / (3 * (t0 + t1)) -
+      (t0 + reached > 0 ? (f * (t0 + 2 * reached)) / (3 * (t0 + reached)) : 0);
+    return {
+      share: (f * (t0 + reached)) / (t0 + t1),
+      x: back * ((x[i + 1] ?? 1) - (x[i] ?? 0)),
+      z: back * (middle(i + 1) - middle(i)),
+    };
   };
   const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
-  return difference(runTo(run, section.x, b, grow), runTo(run, section.x, a, grow));
+  return difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
 }
 
 /** Developed length of one face between two x/c with its first moments, unit chord. */
 export function arcBetween(section: Section, face: FaceName, from: number, to: number): Sums {
   const set = setOf(section);
   const run = (set[face] ??= runningOf(section, (i, j) => arcPiece(section, face, i, j)));
-  const linear = (_: number, f: number) => f;
+  const { x, [face]: z } = section;
+  const fore = (i: number, f: number): Fore => ({
+    share: f,
+    x: ((1 - f) / 2) * ((x[i + 1] ?? 1) - (x[i] ?? 0)),
+    z: ((1 - f) / 2) * ((z[i + 1] ?? 0) - (z[i] ?? 0)),
+  });
   const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
-  return difference(runTo(run, section.x, b, linear), runTo(run, section.x, a, linear));
+  return difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
 }
 
 /** From x/c `start` on top, forward round the nose, to `end` on the bottom. */

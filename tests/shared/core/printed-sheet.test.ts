@@ -78,10 +78,10 @@ describe('printedSheet', () => {
     );
   });
 
-  it('adds in decimals, so that 0.7 + 0.1 + 0.05 is 0.85 and not a little less', () => {
-    const lines = [0.7, 0.1, 0.05, 40].map((mass, i) => line(`item-${i}`, 'gear', null, mass, 0));
-    expect(0.7 + 0.1 + 0.05).toBeLessThan(0.85);
-    expect(printedSheet({ lines }).total.mass).toBe('40.9');
+  it('adds in decimals, so that 20.1 + 20.2 + 0.05 is 40.35 and not a little less', () => {
+    const lines = [20.1, 20.2, 0.05].map((mass, i) => line(`item-${i}`, 'gear', null, mass, 0));
+    expect(20.1 + 20.2 + 0.05).toBeLessThan(40.35);
+    expect(printedSheet({ lines }).total.mass).toBe('40.4');
   });
 
   it('prints hundredths for a model under 20 g', () => {
@@ -124,7 +124,7 @@ describe('printedSheet', () => {
       '0.0',
       null,
       '0.0',
-      '0',
+      '0.0',
     ]);
   });
 });

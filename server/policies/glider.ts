@@ -1,0 +1,28 @@
+import type { GliderAbilities, GliderRole } from '#shared/schemas/glider.ts';
+import { forbidden } from '#server/errors.ts';
+import { POLICY, type GliderAction } from './table.ts';
+
+export function mayOnGlider(role: GliderRole, action: GliderAction): boolean {
+  const allowed: readonly GliderRole[] = POLICY.glider[action];
+  return allowed.includes(role);
+}
+
+const DOING: Record<GliderAction, string> = {
+  read: 'see this glider',
+  edit: 'change this glider',
+  saveSheet: 'save sheets of this glider',
+  delete: 'delete this glider',
+};
+
+/** @throws AppError `forbidden` */
+export function authorizeGlider(role: GliderRole, action: GliderAction): void {
+  if (!mayOnGlider(role, action)) throw forbidden(`As its ${role} you may not ${DOING[action]}.`);
+}
+
+export function gliderAbilities(role: GliderRole): GliderAbilities {
+  return {
+    edit: mayOnGlider(role, 'edit'),
+    saveSheet: mayOnGlider(role, 'saveSheet'),
+    delete: mayOnGlider(role, 'delete'),
+  };
+}

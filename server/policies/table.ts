@@ -1,0 +1,36 @@
+import type { GliderRole } from '#shared/schemas/glider.ts';
+
+/** What the asker is to a row of materials: to everybody's rows by site role, to a private one as its keeper. */
+export type MaterialStanding = 'visitor' | 'user' | 'admin' | 'keeper';
+
+/**
+ * Who may do what. Every service asks this table and nothing else; a test walks every role through every route.
+ * Who has no role on a glider, or no standing to a material, is answered as if it did not exist.
+ */
+export const POLICY = {
+  glider: {
+    read: ['owner', 'builder', 'pilot', 'reader'],
+    edit: ['owner', 'builder'],
+    saveSheet: ['owner', 'builder', 'pilot'],
+    delete: ['owner'],
+  },
+  material: {
+    read: ['visitor', 'user', 'admin', 'keeper'],
+    readUses: ['user', 'admin', 'keeper'],
+    edit: ['admin', 'keeper'],
+    delete: ['admin', 'keeper'],
+  },
+  site: {
+    addOwnMaterial: ['user', 'admin'],
+    addSharedMaterial: ['admin'],
+    addGlider: ['user', 'admin'],
+  },
+} as const satisfies {
+  glider: Record<string, readonly GliderRole[]>;
+  material: Record<string, readonly MaterialStanding[]>;
+  site: Record<string, readonly ('user' | 'admin')[]>;
+};
+
+export type GliderAction = keyof typeof POLICY.glider;
+export type MaterialAction = keyof typeof POLICY.material;
+export type SiteAction = keyof typeof POLICY.site;

@@ -1,0 +1,41 @@
+import type { GliderDto, GliderRole, GliderSaveDto, GliderSummaryDto } from '#shared/schemas/glider.ts';
+import type { GliderSave } from '#server/models/glider-save.ts';
+import type { Glider } from '#server/models/glider.ts';
+import { gliderAbilities } from '#server/policies/glider.ts';
+import { presentFigures } from './figures.ts';
+
+/** `updatedBy` is the name of who saved last. */
+export function presentGlider(row: Glider, role: GliderRole, updatedBy: string): GliderDto {
+  return {
+    id: row.id,
+    name: row.name,
+    role,
+    can: gliderAbilities(role),
+    version: row.version,
+    plan: row.plan,
+    updatedAt: row.updatedAt.toISOString(),
+    updatedBy,
+  };
+}
+
+export function presentGliderSummary(row: Glider, role: GliderRole, ownerName: string): GliderSummaryDto {
+  return {
+    id: row.id,
+    name: row.name,
+    role,
+    ownerName,
+    version: row.version,
+    figures: presentFigures(row),
+    outline: row.outline,
+    updatedAt: row.updatedAt.toISOString(),
+  };
+}
+
+export function presentGliderSave(row: GliderSave, savedBy: string): GliderSaveDto {
+  return {
+    version: row.version,
+    savedAt: row.savedAt.toISOString(),
+    savedBy,
+    figures: presentFigures(row),
+  };
+}

@@ -32,7 +32,7 @@ export function initGliderSave(sequelize: Sequelize): void {
       gliderId: { type: DataTypes.UUID, primaryKey: true },
       version: { type: DataTypes.INTEGER, primaryKey: true },
       plan: { type: DataTypes.JSONB, allowNull: false },
-      ...figureColumns,
+      ...figureColumns(),
       savedBy: { type: DataTypes.UUID, allowNull: false },
       savedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },

@@ -38,7 +38,7 @@ export function initGlider(sequelize: Sequelize): void {
       name: { type: DataTypes.TEXT, allowNull: false },
       plan: { type: DataTypes.JSONB, allowNull: false },
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
-      ...figureColumns,
+      ...figureColumns(),
       outline: { type: DataTypes.JSONB, allowNull: false },
       updatedBy: { type: DataTypes.UUID, allowNull: false },
       updatedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },

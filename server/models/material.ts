@@ -31,14 +31,14 @@ export class Material extends Model<InferAttributes<Material>, InferCreationAttr
 
 export function initMaterial(sequelize: Sequelize): void {
   const figure = (field: string) => ({ type: DataTypes.DOUBLE, allowNull: true, field });
-  const text = { type: DataTypes.TEXT, allowNull: false };
+  const text = () => ({ type: DataTypes.TEXT, allowNull: false });
   Material.init(
     {
       id: { type: DataTypes.UUID, primaryKey: true, defaultValue: DataTypes.UUIDV4 },
-      key: text,
+      key: text(),
       ownerId: { type: DataTypes.UUID, allowNull: true },
-      name: text,
-      category: text,
+      name: text(),
+      category: text(),
       density: figure('density_kg_m3'),
       areal: figure('areal_g_m2'),
       spread: figure('spread_g_m2'),
@@ -46,9 +46,9 @@ export function initMaterial(sequelize: Sequelize): void {
       modulus: figure('modulus_gpa'),
       strength: figure('strength_mpa'),
       moisture: figure('moisture'),
-      form: text,
-      source: text,
-      basis: text,
+      form: text(),
+      source: text(),
+      basis: text(),
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       updatedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },

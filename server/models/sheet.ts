@@ -31,22 +31,22 @@ export class Sheet extends Model<InferAttributes<Sheet>, InferCreationAttributes
 }
 
 export function initSheet(sequelize: Sequelize): void {
-  const text = { type: DataTypes.TEXT, allowNull: false };
+  const text = () => ({ type: DataTypes.TEXT, allowNull: false });
   Sheet.init(
     {
       id: { type: DataTypes.UUID, primaryKey: true, defaultValue: DataTypes.UUIDV4 },
       ownerId: { type: DataTypes.UUID, allowNull: false },
       gliderId: { type: DataTypes.UUID, allowNull: false },
       number: { type: DataTypes.INTEGER, allowNull: false },
-      gliderName: text,
-      note: text,
+      gliderName: text(),
+      note: text(),
       plan: { type: DataTypes.JSONB, allowNull: false },
       result: { type: DataTypes.JSONB, allowNull: false },
-      calculator: text,
-      sha256: { ...text, field: 'sha256' },
-      ...figureColumns,
+      calculator: text(),
+      sha256: text(),
+      ...figureColumns(),
       savedBy: { type: DataTypes.UUID, allowNull: false },
-      savedByName: text,
+      savedByName: text(),
       savedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },
     { sequelize, tableName: 'sheets' },

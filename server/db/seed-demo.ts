@@ -1,0 +1,55 @@
+import { randomUUID } from 'node:crypto';
+import type { Transaction } from 'sequelize';
+import { hashPassword } from '#server/auth/password.ts';
+import { GliderMember } from '#server/models/glider-member.ts';
+import { Glider } from '#server/models/glider.ts';
+import { User } from '#server/models/user.ts';
+import { insertGlider } from '#server/services/gliders.ts';
+import { insertSheet } from '#server/services/sheets.ts';
+import { database, inTransaction } from '#server/services/transaction.ts';
+import { readDemoPlan, readPeople, SeedError, type People } from './seed-files.ts';
+import { SEED_LOCK } from './seed-materials.ts';
+
+/**
+ * Adds the demo's people and gliders where nobody has an account yet, whole or not at all.
+ * @returns whether it was added
+ */
+export async function seedDemo(): Promise<boolean> {
+  if ((await User.count()) > 0) return false;
+  const { people, gliders } = await readPeople();
+  const hashes = await Promise.all(people.map(({ password }) => hashPassword(password)));
+  return inTransaction(async (transaction) => {
+    await database().query(`SELECT pg_advisory_xact_lock(${SEED_LOCK})`, { transaction });
+    if ((await User.count({ transaction })) > 0) return false;
+    const users = new Map<string, User>();
+    for (const [i, { key, name, email, role }] of people.entries()) {
+      const user = await User.create({ name, email, role, passwordHash: hashes[i] ?? '' }, { transaction });
+      users.set(key, user);
+    }
+    for (const glider of gliders) await addGlider(glider, users, transaction);
+    return true;
+  });
+}
+
+async function addGlider(
+  { file, owner, members, sheets }: People['gliders'][number],
+  users: ReadonlyMap<string, User>,
+  transaction: Transaction,
+): Promise<void> {
+  const person = (key: string) => {
+    const user = users.get(key);
+    if (!user) throw new SeedError(`data/demo/people.json has no person “${key}”.`);
+    return user;
+  };
+  const { id: ownerId, name } = person(owner);
+  const id = randomUUID();
+  await insertGlider({ id, ownerId, plan: await readDemoPlan(file), transaction });
+  await GliderMember.bulkCreate(
+    members.map((member) => ({ ownerId, gliderId: id, userId: person(member.person).id, role: member.role })),
+    { transaction },
+  );
+  const glider = await Glider.findByPk(id, { transaction, rejectOnEmpty: true });
+  for (const { note } of sheets) {
+    await insertSheet({ id: randomUUID(), glider, note, savedBy: { id: ownerId, name }, transaction });
+  }
+}

@@ -1,0 +1,48 @@
+import { Transaction } from 'sequelize';
+import type { GliderRole } from '#shared/schemas/glider.ts';
+import type { UserDto } from '#shared/schemas/session.ts';
+import { notFound } from '#server/errors.ts';
+import { GliderMember } from '#server/models/glider-member.ts';
+import { Glider } from '#server/models/glider.ts';
+import { authorizeGlider } from '#server/policies/glider.ts';
+import type { GliderAction } from '#server/policies/table.ts';
+
+/**
+ * The asker's role on a glider.
+ * @throws AppError `not_found` where there is none
+ */
+export async function gliderRoleOf(
+  actor: UserDto,
+  gliderId: string,
+  noun: 'glider' | 'sheet' = 'glider',
+  transaction?: Transaction,
+): Promise<GliderRole> {
+  const member = await GliderMember.findOne({
+    where: { gliderId, userId: actor.id },
+    ...(transaction && { transaction }),
+  });
+  if (!member) throw notFound(noun);
+  return member.role;
+}
+
+/** Refuses unless the asker may do this with the glider. */
+export async function allowOnGlider(actor: UserDto, gliderId: string, action: GliderAction): Promise<void> {
+  authorizeGlider(await gliderRoleOf(actor, gliderId), action);
+}
+
+/**
+ * A glider locked for a change, so that two changes at once are made one after the other.
+ * @throws AppError `not_found` for a glider that the asker has no role on, `forbidden` for too low a role
+ */
+export async function lockGlider(
+  actor: UserDto,
+  gliderId: string,
+  action: GliderAction,
+  transaction: Transaction,
+): Promise<{ glider: Glider; role: GliderRole }> {
+  const role = await gliderRoleOf(actor, gliderId, 'glider', transaction);
+  authorizeGlider(role, action);
+  const glider = await Glider.findByPk(gliderId, { transaction, lock: Transaction.LOCK.UPDATE });
+  if (!glider) throw notFound('glider');
+  return { glider, role };
+}

@@ -1,0 +1,24 @@
+import { Op } from 'sequelize';
+import { lucia } from '#server/auth/lucia.ts';
+import { IdempotencyKey } from '#server/models/idempotency-key.ts';
+import { database } from './transaction.ts';
+
+const HOUR_MS = 3_600_000;
+/** A client that was away keeps trying to send what it made; a month is as long as its session lives. */
+const KEY_LIFE_MS = 30 * 24 * HOUR_MS;
+
+/** Deletes what has had its time: sessions, counters, idempotency keys. */
+export async function tidy(now = new Date()): Promise<void> {
+  await lucia.deleteExpiredSessions();
+  await IdempotencyKey.destroy({
+    where: { createdAt: { [Op.lt]: new Date(now.getTime() - KEY_LIFE_MS) } },
+  });
+  await database().query('DELETE FROM rate_counters WHERE resets_at < now()');
+}
+
+/** Tidies every hour. @returns what stops it */
+export function tidyHourly(failed: (error: unknown) => void): () => void {
+  const timer = setInterval(() => void tidy().catch(failed), HOUR_MS);
+  timer.unref();
+  return () => clearInterval(timer);
+}

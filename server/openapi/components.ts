@@ -1,0 +1,58 @@
+import { z } from 'zod';
+import { estimate, estimateInput } from '#shared/schemas/estimate.ts';
+import { glider, gliderInput, gliderList, gliderSaveList } from '#shared/schemas/glider.ts';
+import { material, materialInput, materialList, materialUses } from '#shared/schemas/material.ts';
+import { planSchema } from '#shared/schemas/plan.ts';
+import { problem } from '#shared/schemas/problem.ts';
+import { session, signIn, user } from '#shared/schemas/session.ts';
+import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
+import { health } from '#server/routes/health.ts';
+import { newUser } from '#server/routes/users.ts';
+
+/** The name in the description of every schema that a body or an answer has. */
+const NAMES: Record<string, z.ZodType> = {
+  Plan: planSchema,
+  EstimateInput: estimateInput,
+  Estimate: estimate,
+  GliderInput: gliderInput,
+  Glider: glider,
+  GliderList: gliderList,
+  GliderSaveList: gliderSaveList,
+  SheetInput: sheetInput,
+  Sheet: sheet,
+  SheetList: sheetList,
+  MaterialInput: materialInput,
+  Material: material,
+  MaterialList: materialList,
+  MaterialUses: materialUses,
+  NewUser: newUser,
+  SignIn: signIn,
+  User: user,
+  Session: session,
+  Health: health,
+  Problem: problem,
+};
+
+export type JsonSchema = z.core.JSONSchema.BaseSchema;
+
+const placeOf = (name: string) => `#/components/schemas/${name}`;
+
+/** Points to a schema; one without a name is a mistake in the list above. */
+export function reference(schema: z.ZodType): JsonSchema {
+  const name = Object.keys(NAMES).find((candidate) => NAMES[candidate] === schema);
+  if (name === undefined) throw new Error('A schema of an endpoint has no name in openapi/components.ts.');
+  return { $ref: placeOf(name) };
+}
+
+/** JSON Schema of everything named, each pointing to the others. */
+export function componentSchemas(): Record<string, JsonSchema> {
+  const registry = z.registry<{ id: string }>();
+  for (const [id, schema] of Object.entries(NAMES)) registry.add(schema, { id });
+  const { schemas } = z.toJSONSchema(registry, { uri: placeOf, io: 'input' });
+  return Object.fromEntries(Object.entries(schemas).map(([name, schema]) => [name, inlineSchema(schema)]));
+}
+
+/** Without the marks of a document of its own. */
+export function inlineSchema({ $schema: _dialect, $id: _id, ...schema }: JsonSchema): JsonSchema {
+  return schema;
+}

@@ -1,0 +1,19 @@
+import type { Endpoint } from '#server/http/endpoint.ts';
+import { estimateEndpoints } from './estimates.ts';
+import { gliderEndpoints } from './gliders.ts';
+import { healthEndpoints } from './health.ts';
+import { materialEndpoints } from './materials.ts';
+import { sessionEndpoints } from './session.ts';
+import { sheetEndpoints } from './sheets.ts';
+import { userEndpoints } from './users.ts';
+
+/** Everything that the API answers to, except its own description. */
+export const ENDPOINTS: readonly Endpoint[] = [
+  ...estimateEndpoints,
+  ...gliderEndpoints,
+  ...sheetEndpoints,
+  ...materialEndpoints,
+  ...userEndpoints,
+  ...sessionEndpoints,
+  ...healthEndpoints,
+];

@@ -141,7 +141,10 @@ export function areaBetween(section: Section, from: number, to: number): Sums {
   return difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
 }
 
-/** Developed length of one face between two x/c with its first moments, unit chord. */
+/**
+ * Developed length of one face between two x/c with its first moments, unit chord. From the nose on, the upper face
+ * takes in the hair's breadth of a cambered section that lies in front of x = 0.
+ */
 export function arcBetween(section: Section, face: FaceName, from: number, to: number): Sums {
   const set = setOf(section);
   const run = (set[face] ??= runningOf(section, (i, j) => arcPiece(section, face, i, j)));
@@ -152,7 +155,13 @@ export function arcBetween(section: Section, face: FaceName, from: number, to: n
     z: ((1 - f) / 2) * ((z[i + 1] ?? 0) - (z[i] ?? 0)),
   });
   const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
-  return difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
+  const arc = difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
+  if (face === 'lower' || a > 0 || b <= 0) return arc;
+  return {
+    amount: arc.amount + section.noseOnTop,
+    x: arc.x,
+    z: arc.z + (section.noseOnTop * (section.upper[0] ?? 0)) / 2,
+  };
 }
 
 /** From x/c `start` on top, forward round the nose, to `end` on the bottom. */

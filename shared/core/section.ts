@@ -11,7 +11,9 @@ export interface Section {
   x: Float64Array;
   upper: Float64Array;
   lower: Float64Array;
-  /** developed length of nose at x = 0 that a wrapped skin covers, of the chord; 0 for a plate, whose edges carry no skin */
+  /** developed length in front of x = 0 that belongs to the upper face, of the chord: a cambered section's nose */
+  noseOnTop: number;
+  /** upright face at x = 0 that only a skin round the nose covers; 0 for a plate, whose edges carry no skin */
   noseFace: number;
 }
 
@@ -74,7 +76,7 @@ function interpolate(face: readonly [number, number][], x: number): number {
 /**
  * Reads a section on a grid. A plate of constant thickness depends on the chord (mm) that it is read at.
  * @example readSection({ flat: 3 }, 100).upper[0] // → 0.015
- * @example readSection({ naca: '0012' }, 100).noseFace // → 0
+ * @example readSection({ naca: '0012' }, 100).noseOnTop // → 0
  */
 export function readSection(
   spec: SectionSpec,
@@ -83,17 +85,17 @@ export function readSection(
 ): Section {
   if ('flat' in spec) {
     const half = chord > 0 ? spec.flat / 2 / chord : 0;
-    return { x, upper: x.map(() => half), lower: x.map(() => -half), noseFace: 0 };
+    return { x, upper: x.map(() => half), lower: x.map(() => -half), noseOnTop: 0, noseFace: 0 };
   }
   if ('naca' in spec) {
     const upper = x.map((v) => nacaOrdinate(spec.naca, v, 1));
     const lower = x.map((v) => nacaOrdinate(spec.naca, v, -1));
-    return { x, upper, lower, noseFace: nacaNoseArc(spec.naca) };
+    return { x, upper, lower, noseOnTop: nacaNoseArc(spec.naca), noseFace: 0 };
   }
   const faces = facesOf(spec);
   const upper = x.map((v) => interpolate(faces.upper, v));
   const lower = x.map((v) => interpolate(faces.lower, v));
-  return { x, upper, lower, noseFace: Math.abs((upper[0] ?? 0) - (lower[0] ?? 0)) };
+  return { x, upper, lower, noseOnTop: 0, noseFace: Math.abs((upper[0] ?? 0) - (lower[0] ?? 0)) };
 }
 
 /** A section and its partner at a panel's other end, on one grid. */
@@ -141,6 +143,7 @@ export function blendSections(a: Section, b: Section, share: number): Section {
     x: a.x,
     upper: mix(a.upper, b.upper),
     lower: mix(a.lower, b.lower),
+    noseOnTop: a.noseOnTop + share * (b.noseOnTop - a.noseOnTop),
     noseFace: a.noseFace + share * (b.noseFace - a.noseFace),
   };
 }

@@ -43,18 +43,17 @@ export function Header() {
 
 function MainLinks({ user }: { user: UserDto | null | undefined }) {
   const link = ({ isActive }: { isActive: boolean }) => cn(ITEM, isActive && 'font-semibold text-pencil');
-  if (!user) {
-    return (
-      <NavLink to="/sample" className={link}>
-        Sample
-      </NavLink>
-    );
-  }
   return (
     <>
-      <NavLink to={paths.bench} className={link}>
-        Bench
-      </NavLink>
+      {user ? (
+        <NavLink to={paths.bench} className={link}>
+          Bench
+        </NavLink>
+      ) : (
+        <NavLink to="/sample" className={link}>
+          Sample
+        </NavLink>
+      )}
       <NavLink to={paths.materials} className={link}>
         Materials
       </NavLink>
@@ -93,8 +92,8 @@ function DeskMenu({ user }: { user: UserDto | null | undefined }) {
     >
       <div className="sm:hidden">
         {user && <MenuItem onSelect={() => void navigate(paths.bench)}>Bench</MenuItem>}
-        {user && <MenuItem onSelect={() => void navigate(paths.materials)}>Materials</MenuItem>}
         {!user && <MenuItem onSelect={() => void navigate(paths.sample())}>Sample glider</MenuItem>}
+        <MenuItem onSelect={() => void navigate(paths.materials)}>Materials</MenuItem>
         {!user && <MenuItem onSelect={() => void navigate(paths.signIn())}>Sign in</MenuItem>}
         <MenuLine />
       </div>

@@ -1,0 +1,51 @@
+import type { MaterialDto } from '#shared/schemas/material.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
+import { FIGURES } from './columns.tsx';
+import { MaterialMenu, type MaterialActions } from './material-menu.tsx';
+import { MaterialNotes, UsedBy } from './materials-table.tsx';
+import { Swatch } from './swatch.tsx';
+
+/** The same rows for a narrow screen: name and known figures, the rest one press away. */
+export function MaterialCards({
+  materials,
+  ...actions
+}: MaterialActions & { materials: readonly MaterialDto[] }) {
+  return (
+    <ul className="border-t border-strong-rule">
+      {materials.map((row) => (
+        <li key={row.id} className="border-b border-rule py-2.5">
+          <div className="flex items-center gap-3">
+            <Swatch material={row} />
+            <h2 className="min-w-0 flex-1 font-semibold">
+              {row.name}
+              {!row.shared && <span className="ml-1.5 text-note font-normal text-graphite">your own</span>}
+            </h2>
+            <MaterialMenu row={row} {...actions} />
+          </div>
+          <dl className="mt-1 flex flex-wrap gap-x-4 gap-y-1 text-note">
+            {FIGURES.map(({ id, label, quantity }) => {
+              const value = row[id];
+              return value === null ? null : (
+                <div key={id} className="flex gap-1.5">
+                  <dt className="text-graphite">{label}</dt>
+                  <dd>{formatQuantity(value, quantity)}</dd>
+                </div>
+              );
+            })}
+          </dl>
+          <div className="flex items-baseline gap-4">
+            <details className="min-w-0 flex-1">
+              <summary className="inline-flex min-h-row items-center text-note text-ink">
+                Source: {row.basis}
+              </summary>
+              <MaterialNotes row={row} />
+            </details>
+            <span className="shrink-0 text-note text-graphite">
+              used by <UsedBy row={row} {...actions} />
+            </span>
+          </div>
+        </li>
+      ))}
+    </ul>
+  );
+}

@@ -1,7 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { hash, verify } from '@node-rs/argon2';
 import { unavailable } from '#server/errors.ts';
-import { BoundedQueue, QueueFull } from './bounded-queue.ts';
+import { BoundedQueue, QueueFull } from '#server/bounded-queue.ts';
 
 /**
  * argon2id with 19 MiB, two passes and one lane: OWASP Password Storage Cheat Sheet. The algorithm is the
@@ -9,6 +9,7 @@ import { BoundedQueue, QueueFull } from './bounded-queue.ts';
  */
 const PARAMETERS = { memoryCost: 19_456, timeCost: 2, parallelism: 1 };
 
+/** Each takes 19 MiB and a processor for some 20 ms: a flood must neither fill the memory nor starve the rest. */
 const queue = new BoundedQueue({ atOnce: 2, mostWaiting: 64 });
 
 async function queued<T>(task: () => Promise<T>): Promise<T> {

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from 'sequelize';
 import { hashPassword } from '#server/auth/password.ts';
+import { estimatePlan } from '#server/estimating/estimate-plan.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { User } from '#server/models/user.ts';
@@ -43,13 +44,22 @@ async function addGlider(
   };
   const { id: ownerId, name } = person(owner);
   const id = randomUUID();
-  await insertGlider({ id, ownerId, plan: await readDemoPlan(file), transaction });
+  const plan = await readDemoPlan(file);
+  const result = await estimatePlan(plan);
+  await insertGlider({ id, ownerId, plan, result, transaction });
   await GliderMember.bulkCreate(
     members.map((member) => ({ ownerId, gliderId: id, userId: person(member.person).id, role: member.role })),
     { transaction },
   );
   const glider = await Glider.findByPk(id, { transaction, rejectOnEmpty: true });
   for (const { note } of sheets) {
-    await insertSheet({ id: randomUUID(), glider, note, savedBy: { id: ownerId, name }, transaction });
+    await insertSheet({
+      id: randomUUID(),
+      glider,
+      result,
+      note,
+      savedBy: { id: ownerId, name },
+      transaction,
+    });
   }
 }

@@ -1,5 +1,5 @@
-import { estimate } from '#shared/core/estimate.ts';
 import { estimate as estimateSchema, estimateInput } from '#shared/schemas/estimate.ts';
+import { estimatePlan } from '#server/estimating/estimate-plan.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
 
 export const estimateEndpoints: Endpoint[] = [
@@ -12,6 +12,6 @@ export const estimateEndpoints: Endpoint[] = [
     limits: ['estimates'],
     body: estimateInput,
     answer: { status: 200, schema: estimateSchema },
-    handle: ({ body }) => ({ body: estimate(body.plan) }),
+    handle: async ({ body }) => ({ body: await estimatePlan(body.plan) }),
   }),
 ];

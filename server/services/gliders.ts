@@ -1,9 +1,10 @@
 import type { Transaction } from 'sequelize';
-import { estimate } from '#shared/core/estimate.ts';
+import type { Estimate } from '#shared/core/result.ts';
 import type { GliderDto } from '#shared/schemas/glider.ts';
 import type { PlanDto } from '#shared/schemas/plan.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import { AppError, notFound } from '#server/errors.ts';
+import { estimatePlan } from '#server/estimating/estimate-plan.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { GliderSave } from '#server/models/glider-save.ts';
 import { Glider } from '#server/models/glider.ts';
@@ -13,7 +14,7 @@ import { authorizeSite } from '#server/policies/site.ts';
 import { presentGlider } from '#server/presenters/glider.ts';
 import { canonicalJson } from './canonical-json.ts';
 import { figuresOf } from './figures.ts';
-import { gliderRoleOf, lockGlider } from './glider-access.ts';
+import { allowOnGlider, gliderRoleOf, lockGlider } from './glider-access.ts';
 import { linkMaterials } from './glider-materials.ts';
 import { makeOnce } from './idempotency.ts';
 import { planOutline } from '#shared/drawing/outline.ts';
@@ -34,9 +35,10 @@ export async function createGlider(
   key: string | undefined,
 ): Promise<GliderDto> {
   authorizeSite(actor, 'addGlider');
+  const result = await estimatePlan(plan);
   const id = await inTransaction((transaction) =>
     makeOnce({ userId: actor.id, key, purpose: 'glider', transaction }, (newId) =>
-      insertGlider({ id: newId, ownerId: actor.id, plan, transaction }),
+      insertGlider({ id: newId, ownerId: actor.id, plan, result, transaction }),
     ),
   );
   return getGlider(actor, id);
@@ -46,12 +48,13 @@ interface NewGlider {
   id: string;
   ownerId: string;
   plan: PlanDto;
+  result: Estimate;
   transaction: Transaction;
 }
 
 /** A glider with its owner, its first save and its materials. */
-export async function insertGlider({ id, ownerId, plan, transaction }: NewGlider): Promise<void> {
-  const figures = figuresOf(estimate(plan));
+export async function insertGlider({ id, ownerId, plan, result, transaction }: NewGlider): Promise<void> {
+  const figures = figuresOf(result);
   const savedAt = new Date();
   await Glider.create(
     {
@@ -78,7 +81,14 @@ export async function insertGlider({ id, ownerId, plan, transaction }: NewGlider
  * Saves a plan made from `version`.
  * @throws AppError `stale_version` with the current glider when somebody saved in between
  */
-export function saveGlider(actor: UserDto, id: string, version: number, plan: PlanDto): Promise<GliderDto> {
+export async function saveGlider(
+  actor: UserDto,
+  id: string,
+  version: number,
+  plan: PlanDto,
+): Promise<GliderDto> {
+  await allowOnGlider(actor, id, 'edit');
+  const figures = figuresOf(await estimatePlan(plan));
   return inTransaction(async (transaction) => {
     const { glider, role } = await lockGlider(actor, id, 'edit', transaction);
     if (glider.version !== version) {
@@ -90,7 +100,6 @@ export function saveGlider(actor: UserDto, id: string, version: number, plan: Pl
         members: { current },
       });
     }
-    const figures = figuresOf(estimate(plan));
     const updatedAt = new Date();
     await glider.update(
       {

@@ -1,12 +1,13 @@
 import { createHash } from 'node:crypto';
 import { Op, type Transaction } from 'sequelize';
 import { z } from 'zod';
-import { estimate } from '#shared/core/estimate.ts';
+import type { Estimate } from '#shared/core/result.ts';
 import { CALCULATOR_VERSION } from '#shared/core/version.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import type { SheetDto, SheetListDto } from '#shared/schemas/sheet.ts';
 import { notFound } from '#server/errors.ts';
-import type { Glider } from '#server/models/glider.ts';
+import { estimatePlan } from '#server/estimating/estimate-plan.ts';
+import { Glider } from '#server/models/glider.ts';
 import { Sheet } from '#server/models/sheet.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
 import { presentSheet, presentSheetSummary } from '#server/presenters/sheet.ts';
@@ -32,10 +33,16 @@ export async function createSheet(
   note: string,
   key: string | undefined,
 ): Promise<SheetDto> {
+  await allowOnGlider(actor, gliderId, 'saveSheet');
+  const seen = await Glider.findByPk(gliderId);
+  if (!seen) throw notFound('glider');
+  const early = await estimatePlan(seen.plan);
   const id = await inTransaction(async (transaction) => {
     const { glider } = await lockGlider(actor, gliderId, 'saveSheet', transaction);
+    // Saved in between: the sheet is of what is saved now.
+    const result = glider.version === seen.version ? early : await estimatePlan(glider.plan);
     return makeOnce({ userId: actor.id, key, purpose: `sheet of ${gliderId}`, transaction }, (newId) =>
-      insertSheet({ id: newId, glider, note, savedBy: actor, transaction }),
+      insertSheet({ id: newId, glider, result, note, savedBy: actor, transaction }),
     );
   });
   return getSheet(actor, id);
@@ -45,13 +52,20 @@ interface NewSheet {
   id: string;
   /** locked, so that no two sheets take one number */
   glider: Glider;
+  result: Estimate;
   note: string;
   savedBy: { id: string; name: string };
   transaction: Transaction;
 }
 
-export async function insertSheet({ id, glider, note, savedBy, transaction }: NewSheet): Promise<void> {
-  const result = estimate(glider.plan);
+export async function insertSheet({
+  id,
+  glider,
+  result,
+  note,
+  savedBy,
+  transaction,
+}: NewSheet): Promise<void> {
   const last = await Sheet.max<number | null, Sheet>('number', {
     where: { gliderId: glider.id },
     transaction,

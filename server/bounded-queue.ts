@@ -1,10 +1,7 @@
 /** Refused because as many are waiting already as may. */
 export class QueueFull extends Error {}
 
-/**
- * Lets so many tasks run at once and so many wait; more are refused at once. Hashing a password takes 19 MiB and a
- * processor for some 20 ms, so that a flood of sign-ins must neither fill the memory nor starve the rest.
- */
+/** Lets so many tasks run at once and so many wait; more are refused at once. */
 export class BoundedQueue {
   readonly #atOnce: number;
   readonly #mostWaiting: number;

@@ -1,0 +1,5 @@
+// A worker thread starts without the loader that the program was started with.
+import { register } from 'tsx/esm/api';
+
+register();
+await import('./estimate-job.ts');

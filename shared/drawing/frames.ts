@@ -1,0 +1,49 @@
+import type { Surface } from '#shared/core/plan.ts';
+import { pointOf, type Station, type SurfaceLine } from '#shared/core/stations.ts';
+import type { Point } from './shape.ts';
+
+/**
+ * How a point of a surface is seen. `above`: x aft, y to starboard. `side`: x aft, z up. `board`: x aft, s along
+ * the panels as they are laid on the board, so that nothing is foreshortened. The port half has −y and −s.
+ */
+export type FrameName = 'above' | 'side' | 'board';
+export type SideName = 'starboard' | 'port';
+
+/** Where a point lies in the view: `x` mm behind the station's leading edge, `z` above its chord line. */
+export type Frame = (station: Station, x: number, z?: number) => Point;
+
+export function frameOf(name: FrameName, side: SideName = 'starboard'): Frame {
+  const sign = side === 'port' ? -1 : 1;
+  switch (name) {
+    case 'above':
+      return (station, x, z = 0) => {
+        const [bodyX, y] = pointOf(station, x, z);
+        return [bodyX, sign * y];
+      };
+    case 'side':
+      return (station, x, z = 0) => {
+        const [bodyX, , bodyZ] = pointOf(station, x, z);
+        return [bodyX, bodyZ];
+      };
+    case 'board':
+      return (station, x) => [station.leadingEdge + x, sign * station.s];
+  }
+}
+
+/** Least foreshortening at which a surface's parts are still worth drawing. */
+const EDGE_ON = 0.3;
+
+/** True where a view meets a surface so flatly that only its sections are to be seen, as a fin from above. */
+export function isEdgeOn(name: FrameName, line: SurfaceLine): boolean {
+  if (name === 'board' || line.length <= 0) return false;
+  const seen = line.panels.reduce(
+    (sum, panel) => sum + (panel.end - panel.start) * Math.abs(name === 'above' ? panel.cos : panel.sin),
+    0,
+  );
+  return seen / line.length < EDGE_ON;
+}
+
+/** The halves that a surface has. */
+export function sidesOf(surface: Pick<Surface, 'mirrored'>): SideName[] {
+  return surface.mirrored ? ['starboard', 'port'] : ['starboard'];
+}

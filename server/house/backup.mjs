@@ -1,6 +1,6 @@
 import './node-version.mjs';
 
-const { existsSync, renameSync, rmSync, statSync } = await import('node:fs');
+const { existsSync, renameSync, rmSync, statSync, writeFileSync } = await import('node:fs');
 const { live } = await import('./life.mjs');
 const { explain, HouseError, say } = await import('./messages.mjs');
 const { clientProgram, openDatabase } = await import('./database.mjs');
@@ -19,6 +19,7 @@ live(async () => {
   const url = await openDatabase();
   // Written beside and then moved: a backup broken off must not take the place of a good one.
   const unfinished = `${file}.unfinished`;
+  writeFileSync(unfinished, '', { mode: 0o600 });
   const dump = ['-Fc', '--no-owner', '--no-privileges', '-f', unfinished, '-d', url];
   const { code, output } = await run(clientProgram('pg_dump'), dump, { env: plainEnv() });
   if (code !== 0) {

@@ -1,6 +1,7 @@
 import { execFileSync } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
 import {
+  chmodSync,
   chownSync,
   existsSync,
   mkdirSync,
@@ -14,6 +15,7 @@ import {
 } from 'node:fs';
 import { join } from 'node:path';
 import { explain, HouseError, say } from './messages.mjs';
+import { isRoot } from './paths.mjs';
 import { plainEnv } from './postgres.mjs';
 import { run, tail } from './run.mjs';
 
@@ -25,6 +27,24 @@ const OPEN_PLACE = '/var/lib/featherbeam';
 
 /** @param {string} folder */
 export const dataOf = (folder) => join(folder, 'data');
+
+/** A folder that other users may pass through, whatever this user's habit is. @param {string} folder */
+function makeOpenFolder(folder) {
+  const habit = process.umask(0o022);
+  try {
+    mkdirSync(folder, { recursive: true });
+  } finally {
+    process.umask(habit);
+  }
+}
+
+/** @param {string} home */
+export function makeHome(home) {
+  if (!isRoot) return void mkdirSync(home, { recursive: true, mode: 0o700 });
+  // PostgreSQL's user only passes through; what lies in the folder keeps its own permissions.
+  makeOpenFolder(home);
+  chmodSync(home, 0o711);
+}
 
 /** @param {string} folder @param {Account} account */
 function hand(folder, { uid, gid }) {
@@ -57,7 +77,7 @@ export function clusterFolder(home, account) {
     mkdirSync(place, { mode: 0o700 });
     return hand(realpathSync(place), account);
   }
-  mkdirSync(OPEN_PLACE, { recursive: true });
+  makeOpenFolder(OPEN_PLACE);
   const elsewhere = hand(mkdtempSync(join(OPEN_PLACE, 'cluster-')), account);
   symlinkSync(elsewhere, place);
   say(`PostgreSQL’s user cannot reach ${home}, so the database lies in ${elsewhere}.`);

@@ -1,10 +1,16 @@
-import { chmodSync, mkdirSync, mkdtempSync, rmSync } from 'node:fs';
+import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { clusterFolder, databaseUrl, initialise, passwordsOf, versionOf } from './cluster-files.mjs';
+import {
+  clusterFolder,
+  databaseUrl,
+  initialise,
+  makeHome,
+  passwordsOf,
+  versionOf,
+} from './cluster-files.mjs';
 import { freePort } from './machine.mjs';
 import { explain, HouseError } from './messages.mjs';
-import { isRoot } from './paths.mjs';
 import { findPostgres, OLDEST_POSTGRES, plainEnv, postgresAccount } from './postgres.mjs';
 import { keepWatch, launch, stopServer } from './postmaster.mjs';
 import { run, tail } from './run.mjs';
@@ -18,9 +24,7 @@ export async function startCluster({ home, throwaway = false }) {
   if (!home && !throwaway) throw new HouseError('A cluster that is kept needs a home.');
   const account = postgresAccount();
   const place = home ?? mkdtempSync(join(tmpdir(), 'featherbeam-'));
-  mkdirSync(place, { recursive: true });
-  // PostgreSQL's user only passes through; what lies in the folder keeps its own permissions.
-  if (isRoot) chmodSync(place, 0o711);
+  makeHome(place);
   const folder = clusterFolder(place, account);
   const postgres = requirePostgres(versionOf(folder), folder);
   const passwords = passwordsOf(folder);

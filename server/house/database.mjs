@@ -23,7 +23,7 @@ export async function openDatabase({ alone = false } = {}) {
       throw new HouseError('Featherbeam is just being started: wait until it answers.');
     return databaseUrl(running.databasePort, passwordsOf(clusterFolder(home, postgresAccount())).featherbeam);
   }
-  const own = claim(home, 'a command on its database');
+  const own = await claim(home, 'a command on its database');
   atEnd(own.release);
   await ensurePostgres();
   const cluster = await startCluster({ home });

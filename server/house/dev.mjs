@@ -18,7 +18,7 @@ const home = process.env.FEATHERBEAM_HOME
 
 async function database() {
   if (process.env.DATABASE_URL) return process.env.DATABASE_URL;
-  const own = claim(home, 'npm run dev');
+  const own = await claim(home, 'npm run dev');
   atEnd(own.release);
   await ensurePostgres();
   const cluster = await startCluster({ home });

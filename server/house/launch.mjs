@@ -22,7 +22,7 @@ export const interruptedCode = () => (isUp ? 0 : 130);
 
 /**
  * Our own cluster, which ends with us.
- * @param {ReturnType<typeof claim>} own
+ * @param {Awaited<ReturnType<typeof claim>>} own
  */
 async function ownDatabase(own) {
   await ensurePostgres();
@@ -37,12 +37,12 @@ export async function launchProduct() {
   const port = portFrom(process.env.PORT, 4310);
   const host = process.env.HOST || '127.0.0.1';
   const address = addressOf(host, port);
-  const given = process.env.DATABASE_URL;
-  const own = given ? null : claim(home, address);
-  if (own) atEnd(own.release);
-  await requireFree(port, host);
   requireSpace(root, packagesAreCurrent() ? LEAST_MB : PACKAGES_MB);
   requireSpace(home, LEAST_MB);
+  const given = process.env.DATABASE_URL;
+  const own = given ? null : await claim(home, address);
+  if (own) atEnd(own.release);
+  await requireFree(port, host);
   await ensurePackages();
   await ensureClient();
   const url = own ? await ownDatabase(own) : given;
@@ -56,6 +56,7 @@ export async function launchProduct() {
   };
   const server = serve({ ...process.env, ...settings });
   atEnd(server.stop);
+  if (own) atEnd(own.leave);
   if (await isHealthy(address, server.exited)) {
     isUp = true;
     say(`\nFeatherbeam is at ${address}`);

@@ -36,8 +36,16 @@ export function end(code) {
  */
 export function live(command, interrupted = () => 130) {
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void end(interrupted()));
+  watchParent(() => void end(interrupted()));
   command().then(end, (error) => {
     if (!isEnding()) console.error(wording(error));
     return end(1);
   });
+}
+
+/** An npm that is killed outright passes no signal on, but its child gets another parent. @param {() => void} orphaned */
+function watchParent(orphaned) {
+  if (!process.env.npm_lifecycle_event) return;
+  const parent = process.ppid;
+  setInterval(() => process.ppid !== parent && orphaned(), 500).unref();
 }

@@ -1,8 +1,10 @@
-import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { setTimeout as pause } from 'node:timers/promises';
+import { makeHome } from './cluster-files.mjs';
 import { HouseError } from './messages.mjs';
 
-/** @typedef {{ pid: number, born: string, address: string, databasePort?: number }} Running */
+/** @typedef {{ pid: number, born: string, address: string, databasePort?: number, leaving?: boolean }} Running */
 
 const note = (/** @type {string} */ home) => join(home, 'running.json');
 
@@ -32,18 +34,23 @@ export function runningIn(home) {
  * @param {string} home
  * @param {string} address what the house will serve, for the sentence that the other one gets
  */
-export function claim(home, address) {
-  const other = runningIn(home);
+export async function claim(home, address) {
+  const isLeftOver = existsSync(note(home));
+  let other = runningIn(home);
+  for (let wait = 0; other?.leaving && wait < 100; wait += 1) {
+    await pause(100);
+    other = runningIn(home);
+  }
   if (other) {
     throw new HouseError(
       `Featherbeam already runs from ${home} (${other.address}, process ${other.pid}): stop it first, ` +
         'or give this one a folder of its own with FEATHERBEAM_HOME.',
     );
   }
-  mkdirSync(home, { recursive: true });
+  makeHome(home);
   /** @type {Running} */
   const own = { pid: process.pid, born: bornOf(process.pid), address };
-  rmSync(note(home), { force: true });
+  if (isLeftOver) rmSync(note(home), { force: true });
   try {
     write(home, own, 'wx');
   } catch (error) {
@@ -53,6 +60,8 @@ export function claim(home, address) {
   return {
     /** Lets backups find the database. @param {number} databasePort */
     tellPort: (databasePort) => write(home, { ...own, databasePort }, 'w'),
+    /** Lets the next start wait for this one's end instead of refusing. */
+    leave: () => write(home, { ...own, leaving: true }, 'w'),
     release: () => rmSync(note(home), { force: true }),
   };
 }

@@ -89,10 +89,10 @@ function totalsOf(lines: readonly LineWithLump[], laid: readonly Laid[]): Totals
   const wings = new Set(
     laid.filter(({ surface }) => surface.role === 'wing').map(({ surface }) => surface.key),
   );
-  const byGroup: Record<string, number> = {};
+  const byGroup = new Map<string, number>();
   let wingMass = 0;
   for (const { line } of lines) {
-    byGroup[line.group] = (byGroup[line.group] ?? 0) + line.mass;
+    byGroup.set(line.group, (byGroup.get(line.group) ?? 0) + line.mass);
     if (line.surface !== null && wings.has(line.surface)) wingMass += line.mass;
   }
   return {
@@ -100,7 +100,7 @@ function totalsOf(lines: readonly LineWithLump[], laid: readonly Laid[]): Totals
     u: massUncertainty(lines.map(({ line }) => line)),
     at: centroid(sum),
     wingMass,
-    byGroup,
+    byGroup: Object.fromEntries(byGroup),
     inertia: inertiaOf(sum),
   };
 }

@@ -7,7 +7,7 @@ export function SheetPaper({ narrow = false, children }: { narrow?: boolean; chi
     <div
       className={cn(
         'border border-strong-rule bg-sheet px-4 py-6 sm:px-7 print:border-0 print:p-0',
-        narrow ? 'mx-auto mt-2 w-full max-w-xl sm:mt-8 sm:px-10 sm:py-9' : 'flex-1',
+        narrow ? 'mx-auto mt-2 w-full max-w-lg sm:mt-8 sm:px-10 sm:py-9' : 'flex-1',
       )}
     >
       {children}

@@ -1,5 +1,4 @@
 import { useNavigate } from 'react-router-dom';
-import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths } from '#client/app/paths.ts';
 import { Bench } from '#client/features/gliders/bench.tsx';
 import { RequireSession } from '#client/features/session/require-session.tsx';
@@ -8,7 +7,6 @@ import { SheetPaper } from '../sheet-paper.tsx';
 
 export function BenchPage() {
   useTitle('Bench');
-  useCrumbs([{ label: 'Bench' }]);
   const navigate = useNavigate();
   return (
     <RequireSession signInHref={paths.signIn}>

@@ -1,4 +1,3 @@
-import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths } from '#client/app/paths.ts';
 import { QueryView } from '#client/components/query-view.tsx';
 import { MaterialsBrowser } from '#client/features/materials/materials-browser.tsx';
@@ -8,7 +7,6 @@ import { SheetPaper } from '../sheet-paper.tsx';
 
 export function MaterialsPage() {
   useTitle('Materials');
-  useCrumbs([{ label: 'Materials' }]);
   const session = useSession();
   return (
     <SheetPaper>

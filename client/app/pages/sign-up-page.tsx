@@ -14,9 +14,7 @@ export function SignUpPage() {
   return (
     <SheetPaper narrow>
       <h1 className="text-figure font-semibold">Sign up</h1>
-      <p className="mt-1 mb-6 text-graphite">
-        Your gliders are then kept, saved as you type, and yours alone.
-      </p>
+      <p className="mt-1 mb-6 text-graphite">Your gliders are kept, and save themselves as you type.</p>
       <SignUpForm />
       <p className="mt-6">
         Signed up before?{' '}

@@ -34,7 +34,7 @@ export function Amount({ value, quantity, u, of, flash = false, className, ...op
         {figure}
       </span>
       {!missing && u !== undefined && u !== null && (
-        <span className="text-graphite">
+        <span className="text-[0.82em] font-normal text-graphite">
           {` ±${NARROW_SPACE}${formatQuantity(u, quantity, { ...options, plus: false, bare: true })}`}
         </span>
       )}

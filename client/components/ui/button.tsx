@@ -6,7 +6,7 @@ export type ButtonVariant = 'primary' | 'quiet' | 'danger' | 'plain';
 const BASE =
   'inline-flex min-h-row items-center justify-center gap-1.5 rounded-md border px-3 font-semibold no-underline ' +
   'transition-colors duration-150 disabled:cursor-not-allowed disabled:opacity-60 aria-disabled:opacity-60 ' +
-  'pointer-coarse:px-4';
+  'pointer-coarse:px-3.5';
 const VARIANTS: Record<ButtonVariant, string> = {
   primary: 'border-ink bg-ink text-on-ink enabled:hover:border-ink-deep enabled:hover:bg-ink-deep',
   quiet: 'border-ink bg-transparent text-ink enabled:hover:bg-ink-wash',

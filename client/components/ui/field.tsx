@@ -57,7 +57,13 @@ export function Field(props: FieldProps) {
       <div className="min-w-0">
         <div className="flex items-baseline gap-2">
           <div className="min-w-0 flex-1">{control}</div>
-          {suffix && <span className="min-w-[2.5em] shrink-0 text-note text-graphite">{suffix}</span>}
+          {suffix && (
+            <span
+              className={cn('shrink-0 text-note text-graphite', inline ? 'min-w-[5em]' : 'min-w-[2.5em]')}
+            >
+              {suffix}
+            </span>
+          )}
         </div>
         {hint && (
           <p id={hintId} className="mt-1 text-note text-graphite">
@@ -81,7 +87,7 @@ function FieldError({
 }) {
   if (!error && !keepRoom) return null;
   return (
-    <p id={id} className={cn('text-note text-red', keepRoom && 'min-h-[1.125rem]')}>
+    <p id={id} className={cn('mt-0.5 text-note text-red', keepRoom && 'min-h-[1.125rem]')}>
       {error && (
         <>
           <span aria-hidden="true">▲ </span>

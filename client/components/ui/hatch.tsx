@@ -8,10 +8,10 @@ export type HatchKind = MaterialCategory | 'gear';
 const GRADES = [120, 170, 240] as const;
 /** Grain of each grade: weight of line and distance between lines, in drawing units. */
 const GRAIN = [
-  { weight: 0.5, step: 7 },
-  { weight: 0.9, step: 6 },
-  { weight: 1.3, step: 5 },
-  { weight: 1.6, step: 3.6 },
+  { weight: 0.45, step: 6 },
+  { weight: 0.8, step: 4.6 },
+  { weight: 1.1, step: 3.6 },
+  { weight: 1.5, step: 2.9 },
 ] as const;
 
 /** 0 light, 1 medium, 2 hard balsa, 3 heavier woods; medium where the density is not known. */

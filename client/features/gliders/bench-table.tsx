@@ -4,7 +4,7 @@ import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
 import { formatMoment } from '#client/lib/moments.ts';
 import type { GliderSummaryDto } from '#shared/schemas/glider.ts';
 import { GliderMenu } from './glider-menu.tsx';
-import { OutlinePicture } from './outline-picture.tsx';
+import { halfSpanOf, OutlinePicture } from './outline-picture.tsx';
 
 interface BenchTableProps {
   gliders: readonly GliderSummaryDto[];
@@ -16,6 +16,7 @@ const ROLE_WORDS = { owner: '', builder: 'you build', pilot: 'you fly', reader: 
 /** The gliders as ruled rows; on the phone the figures stand under the name. */
 export function BenchTable({ gliders, hrefOf }: BenchTableProps) {
   const names = gliders.map(({ name }) => name);
+  const widest = Math.max(1, ...gliders.map(({ outline }) => halfSpanOf(outline)));
   return (
     <Table caption="Gliders on the bench">
       <thead className="max-sm:sr-only">
@@ -33,9 +34,9 @@ export function BenchTable({ gliders, hrefOf }: BenchTableProps) {
           </Th>
         </tr>
       </thead>
-      <tbody>
+      <tbody className="max-sm:border-t max-sm:border-strong-rule">
         {gliders.map((glider) => (
-          <BenchRow key={glider.id} glider={glider} names={names} href={hrefOf(glider.id)} />
+          <BenchRow key={glider.id} glider={glider} names={names} widest={widest} href={hrefOf(glider.id)} />
         ))}
       </tbody>
     </Table>
@@ -45,10 +46,12 @@ export function BenchTable({ gliders, hrefOf }: BenchTableProps) {
 interface BenchRowProps {
   glider: GliderSummaryDto;
   names: string[];
+  /** half span of the largest, mm: the pictures are to one scale */
+  widest: number;
   href: string;
 }
 
-function BenchRow({ glider, names, href }: BenchRowProps) {
+function BenchRow({ glider, names, widest, href }: BenchRowProps) {
   const { name, figures, outline, role, ownerName, updatedAt } = glider;
   const mass = <Amount value={figures.mass} quantity="mass" />;
   const balance = <Amount value={figures.percentMac} quantity="percentMac" of="MAC" />;
@@ -56,8 +59,8 @@ function BenchRow({ glider, names, href }: BenchRowProps) {
   const moment = <time dateTime={updatedAt}>{formatMoment(updatedAt)}</time>;
   return (
     <tr className="group relative hover:bg-ink-wash">
-      <Td className="h-16 w-36 max-sm:w-20 max-sm:pt-4 max-sm:align-top">
-        <OutlinePicture outline={outline} className="h-9 w-32 max-sm:h-7 max-sm:w-[4.5rem]" />
+      <Td className="h-16! w-36 max-sm:w-20 max-sm:pt-4 max-sm:align-top">
+        <OutlinePicture outline={outline} widest={widest} className="h-9 w-32 max-sm:h-7 max-sm:w-[4.5rem]" />
       </Td>
       <RowTh className="max-sm:py-3">
         <Link

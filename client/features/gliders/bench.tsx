@@ -24,6 +24,8 @@ export function Bench({ hrefOf, onOpen }: BenchProps) {
   const query = useInfiniteQuery({ ...gliderQueries.list(sought), placeholderData: (before) => before });
   const { hasNextPage, isFetchingNextPage, fetchNextPage } = query;
 
+  const nothingYet = search === '' && sought === '' && query.data?.length === 0;
+
   // Newest first is the server's order; any other is only true of the whole list.
   const needsAll = order !== 'changed' && hasNextPage && !isFetchingNextPage;
   useEffect(() => {
@@ -35,25 +37,9 @@ export function Bench({ hrefOf, onOpen }: BenchProps) {
       <div className="flex flex-wrap items-end gap-x-4 gap-y-3">
         <h1 className="text-figure font-semibold">Bench</h1>
         <div className="ml-auto flex flex-wrap items-end gap-3 max-sm:w-full">
-          <div className="w-52 max-sm:flex-1">
-            <TextField
-              label="Search by name"
-              type="search"
-              keepRoom={false}
-              value={search}
-              maxLength={120}
-              onChange={(event) => setSearch(event.target.value)}
-            />
-          </div>
-          <div className="w-36">
-            <Select
-              label="Order"
-              keepRoom={false}
-              value={order}
-              options={BENCH_ORDERS}
-              onValue={(value) => setOrder(BENCH_ORDERS.find((o) => o.value === value)?.value ?? 'changed')}
-            />
-          </div>
+          {!nothingYet && (
+            <BenchTools search={search} onSearch={setSearch} order={order} onOrder={setOrder} />
+          )}
           <NewGliderMenu onOpen={onOpen} />
         </div>
       </div>
@@ -70,6 +56,39 @@ export function Bench({ hrefOf, onOpen }: BenchProps) {
             Show more
           </Button>
         )}
+      </div>
+    </>
+  );
+}
+
+interface BenchToolsProps {
+  search: string;
+  onSearch: (search: string) => void;
+  order: BenchOrder;
+  onOrder: (order: BenchOrder) => void;
+}
+
+function BenchTools({ search, onSearch, order, onOrder }: BenchToolsProps) {
+  return (
+    <>
+      <div className="w-52 max-sm:w-full">
+        <TextField
+          label="Search by name"
+          type="search"
+          keepRoom={false}
+          value={search}
+          maxLength={120}
+          onChange={(event) => onSearch(event.target.value)}
+        />
+      </div>
+      <div className="w-36 max-sm:flex-1">
+        <Select
+          label="Order"
+          keepRoom={false}
+          value={order}
+          options={BENCH_ORDERS}
+          onValue={(value) => onOrder(BENCH_ORDERS.find((o) => o.value === value)?.value ?? 'changed')}
+        />
       </div>
     </>
   );

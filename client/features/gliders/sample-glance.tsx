@@ -1,18 +1,30 @@
 import type { ReactNode } from 'react';
 import { Amount } from '#client/components/ui/amount.tsx';
+import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { Select } from '#client/components/ui/select.tsx';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Item, Part, Plan } from '#shared/core/plan.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
-import { GliderPicture } from './glider-picture.tsx';
+import { PlanPicture } from './plan-picture.tsx';
 import { balanceVerdict } from './verdict.ts';
 
+interface SampleGlanceProps {
+  workspace: Workspace;
+  /** The plan that the figures are of. */
+  plan: Plan;
+  onStartAgain: (() => void) | undefined;
+  /** The beam, drawn under the plan. */
+  beam: ReactNode;
+  /** What stands over the figures. */
+  children: ReactNode;
+}
+
 /** The sample at a glance, with one weight and one wood to try: every change shows at once. */
-export function SampleGlance({ workspace, children }: { workspace: Workspace; children: ReactNode }) {
-  const { plan, result, edit } = workspace;
-  const ballast = plan.items.find(({ group }) => group === 'ballast');
-  const sheeting = plan.surfaces.flatMap(({ parts }) => parts).find(({ kind }) => kind === 'skin');
+export function SampleGlance({ workspace, plan, onStartAgain, beam, children }: SampleGlanceProps) {
+  const { result, edit, canUndo } = workspace;
+  const ballast = workspace.plan.items.find(({ group }) => group === 'ballast');
+  const sheeting = workspace.plan.surfaces.flatMap(({ parts }) => parts).find(({ kind }) => kind === 'skin');
   const verdict = balanceVerdict(plan, result);
   return (
     <div className="grid items-start gap-x-12 gap-y-6 lg:grid-cols-[minmax(20rem,26rem)_1fr]">
@@ -32,9 +44,16 @@ export function SampleGlance({ workspace, children }: { workspace: Workspace; ch
             <Amount value={result.balance.staticMargin} quantity="fineShare" flash />
           </Figure>
         </dl>
-        {verdict && <VerdictLine {...verdict} />}
+        <div className="min-h-6">{verdict && <VerdictLine {...verdict} />}</div>
         <div className="mt-5 grid max-w-sm gap-x-2">
-          <p className="caption mb-2">Try it</p>
+          <div className="mb-2 flex min-h-row items-center justify-between">
+            <p className="caption">Try it</p>
+            {canUndo && onStartAgain && (
+              <Button variant="plain" className="text-note" onClick={onStartAgain}>
+                Start again
+              </Button>
+            )}
+          </div>
           {ballast && (
             <NumberField
               inline
@@ -61,8 +80,13 @@ export function SampleGlance({ workspace, children }: { workspace: Workspace; ch
           )}
         </div>
       </div>
-      <div className="mx-auto w-full max-w-2xl">
-        <GliderPicture plan={plan} result={result} />
+      <div className="mx-auto w-full max-w-3xl">
+        <PlanPicture
+          plan={plan}
+          balance={result.balance.x}
+          label={`${plan.name} from above, with its balance point.`}
+        />
+        <div className="mt-6">{beam}</div>
       </div>
     </div>
   );
@@ -78,11 +102,12 @@ function Figure({ label, children }: { label: string; children: ReactNode }) {
 }
 
 function VerdictLine({ kind, text }: { kind: 'inside' | 'close' | 'outside'; text: string }) {
-  if (kind === 'inside') return <p className="mt-2 text-note text-graphite">Balances: {text} % MAC</p>;
+  if (kind === 'inside')
+    return <p className="mt-2 text-note text-graphite">It balances where it should: {text} % MAC.</p>;
   return (
     <p className={`mt-2 text-note ${kind === 'outside' ? 'text-red' : 'text-ochre'}`}>
       <span aria-hidden="true">{kind === 'outside' ? '▲ ' : '◆ '}</span>
-      {kind === 'outside' ? 'Out of balance: ' : 'Too close to call: '}
+      {kind === 'outside' ? 'Out of balance: ' : 'Too close to be sure: '}
       {text}
     </p>
   );

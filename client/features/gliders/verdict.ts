@@ -23,13 +23,10 @@ export function balanceVerdict(
     const by = formatQuantity(Math.abs(outside.byMm), 'length');
     return { kind: 'outside', text: `${by} ${outside.byMm > 0 ? 'behind' : 'ahead of'} wanted` };
   }
-  const wanted = formatNumber(target.percentMac, 1);
   const toEdge = target.tolerance - Math.abs(percentMac - target.percentMac);
-  if (uPercentMac !== null && toEdge < uPercentMac) {
-    return {
-      kind: 'close',
-      text: `near the edge of ${wanted} ±${NARROW_SPACE}${formatNumber(target.tolerance, 1)}`,
-    };
-  }
-  return { kind: 'inside', text: `wanted ${wanted}` };
+  const [low, high] = [target.percentMac - target.tolerance, target.percentMac + target.tolerance];
+  const range = `${formatNumber(low, 1)}–${formatNumber(high, 1)}${NARROW_SPACE}%`;
+  if (uPercentMac !== null && toEdge < uPercentMac)
+    return { kind: 'close', text: `near the edge of ${range}` };
+  return { kind: 'inside', text: `wanted ${formatNumber(target.percentMac, 1)}` };
 }

@@ -52,6 +52,7 @@ export const columns = helper.columns([
     helper.accessor((row) => row[id] ?? undefined, {
       id,
       sortUndefined: 'last',
+      sortDescFirst: false,
       sortFn: (a, b) => (a.original[id] ?? 0) - (b.original[id] ?? 0),
     }),
   ),

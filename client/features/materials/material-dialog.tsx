@@ -110,7 +110,7 @@ export function MaterialDialog({ row, from, isAdmin, onClose }: MaterialDialogPr
             Somebody else saved this material while you were editing. Yours is not saved yet.
           </Notice>
         )}
-        <div className="grid gap-x-6 sm:grid-cols-2">
+        <div className="grid gap-x-6 gap-y-1.5 sm:grid-cols-[2fr_1fr]">
           <TextField {...name} inputRef={nameRef} label="Name" error={errors.name?.message} />
           <Select
             {...category}
@@ -119,6 +119,8 @@ export function MaterialDialog({ row, from, isAdmin, onClose }: MaterialDialogPr
             options={CATEGORY_OPTIONS}
             error={errors.category?.message}
           />
+        </div>
+        <div className="mt-1.5 grid gap-x-6 gap-y-1.5 sm:grid-cols-3">
           {NUMBER_FIELDS.map(({ id, label, quantity, required, hint }) => (
             <Controller
               key={id}
@@ -142,10 +144,17 @@ export function MaterialDialog({ row, from, isAdmin, onClose }: MaterialDialogPr
             />
           ))}
         </div>
-        <TextArea {...form} inputRef={formRef} label="Form, cut, thickness" error={errors.form?.message} />
-        <div className="grid gap-x-6 sm:grid-cols-[1fr_14rem]">
+        <TextArea
+          {...form}
+          rows={2}
+          inputRef={formRef}
+          label="Form, cut, thickness"
+          error={errors.form?.message}
+        />
+        <div className="mt-1.5 grid gap-x-6 sm:grid-cols-[1fr_13rem]">
           <TextArea
             {...source}
+            rows={2}
             inputRef={sourceRef}
             label="Source of the figures"
             error={errors.source?.message}

@@ -84,6 +84,7 @@ function SortTh({ header, numeric = false, unit, children }: SortThProps) {
         onClick={() => header?.column.toggleSorting()}
         className={cn(
           'inline-flex min-h-row items-center gap-1 font-semibold whitespace-nowrap hover:text-ink',
+          numeric && 'flex-row-reverse',
           sorted && 'text-pencil',
         )}
       >

@@ -24,7 +24,7 @@ export function SignInForm() {
   const { ref: passwordRef, ...password } = register('password');
 
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="flex max-w-sm flex-col gap-2">
+    <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-2.5">
       {errors.root?.message && (
         <Notice tone="red" live className="mb-2">
           {errors.root.message}
@@ -46,7 +46,13 @@ export function SignInForm() {
         autoComplete="current-password"
         error={errors.password?.message}
       />
-      <Button type="submit" variant="primary" pending={formState.isSubmitting} pendingText="Signing in …">
+      <Button
+        type="submit"
+        variant="primary"
+        className="mt-2"
+        pending={formState.isSubmitting}
+        pendingText="Signing in …"
+      >
         Sign in
       </Button>
     </form>

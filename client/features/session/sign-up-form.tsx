@@ -26,7 +26,7 @@ export function SignUpForm() {
   const { ref: passwordRef, ...password } = register('password');
 
   return (
-    <form noValidate onSubmit={(event) => void submit(event)} className="flex max-w-sm flex-col gap-2">
+    <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-2.5">
       {errors.root?.message && (
         <Notice tone="red" live className="mb-2">
           {errors.root.message}
@@ -57,7 +57,13 @@ export function SignUpForm() {
         hint={`At least ${LIMITS.password.min} characters; a few words in a row do well.`}
         error={errors.password?.message}
       />
-      <Button type="submit" variant="primary" pending={formState.isSubmitting} pendingText="Signing up …">
+      <Button
+        type="submit"
+        variant="primary"
+        className="mt-2"
+        pending={formState.isSubmitting}
+        pendingText="Signing up …"
+      >
         Sign up
       </Button>
     </form>

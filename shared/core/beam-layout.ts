@@ -53,7 +53,7 @@ const COST = {
   postOverLabel: 30,
   side: 0.4,
 };
-const PASSES = 6;
+const PASSES = 4;
 
 /**
  * Depth and side of the label for weights hung from one bar, so that no weight or label covers another and, where
@@ -67,36 +67,70 @@ export function layHung(
 ): HungPlace[] {
   const placed: Placed[] = [];
   hung.forEach((of, i) => {
-    placed[i] = best(of, placed.slice(0, i), width, posts);
+    placed[i] = best(of, placed.slice(0, i), { width, posts });
   });
   for (let pass = 0; pass < PASSES; pass++) {
-    let moved = false;
-    hung.forEach((of, i) => {
-      const others = placed.filter((_, j) => j !== i);
-      const next = best(of, others, width, posts);
-      const before = placed[i];
-      if (before && next.place.string === before.place.string && next.place.side === before.place.side)
-        return;
-      if (before && costOf(next, others, width, posts) >= costOf(before, others, width, posts)) return;
-      placed[i] = next;
-      moved = true;
-    });
-    if (!moved) break;
+    const one = moveOne(placed, { width, posts });
+    const two = moveTwo(placed, { width, posts });
+    if (!one && !two) break;
   }
   return placed.map(({ place }) => place);
 }
 
-function best(of: HungLabel, others: readonly Placed[], width: number, posts: readonly number[]): Placed {
+interface Ground {
+  width: number;
+  posts: readonly number[];
+}
+
+/** Gives each its best place among the others as they are; true where that changed one. */
+function moveOne(placed: Placed[], ground: Ground): boolean {
+  let moved = false;
+  placed.forEach((before, i) => {
+    const others = placed.filter((_, j) => j !== i);
+    const next = best(before.of, others, ground);
+    if (costOf(next, others, ground) >= costOf(before, others, ground)) return;
+    placed[i] = next;
+    moved = true;
+  });
+  return moved;
+}
+
+/** Two that stand in each other's way may both have to move; true where that helped. */
+function moveTwo(placed: Placed[], ground: Ground): boolean {
+  let moved = false;
+  placed.forEach((_, i) => {
+    placed.forEach((__, j) => {
+      const [a, b] = [placed[i], placed[j]];
+      if (!a || !b || i === j || between(a, b) === 0) return;
+      const others = placed.filter((___, k) => k !== i && k !== j);
+      let least = costOf(a, others, ground) + costOf(b, others, ground) + between(a, b);
+      for (const next of candidates(a.of)) {
+        const alone = costOf(next, others, ground);
+        if (alone >= least) continue;
+        const other = best(b.of, [...others, next], ground);
+        const cost = alone + costOf(other, others, ground) + between(next, other);
+        if (cost >= least - 1e-9) continue;
+        least = cost;
+        [placed[i], placed[j]] = [next, other];
+        moved = true;
+      }
+    });
+  });
+  return moved;
+}
+
+function best(of: HungLabel, others: readonly Placed[], ground: Ground): Placed {
   let found = placeAt(of, 0, 'right');
-  let least = costOf(found, others, width, posts);
-  for (let row = 0; row < ROWS; row++) {
-    for (const side of SIDES) {
-      const candidate = placeAt(of, row, side);
-      const cost = costOf(candidate, others, width, posts);
-      if (cost < least) [found, least] = [candidate, cost];
-    }
+  let least = costOf(found, others, ground);
+  for (const candidate of candidates(of)) {
+    const cost = costOf(candidate, others, ground);
+    if (cost < least) [found, least] = [candidate, cost];
   }
   return found;
+}
+
+function candidates(of: HungLabel): Placed[] {
+  return Array.from({ length: ROWS }, (_, row) => SIDES.map((side) => placeAt(of, row, side))).flat();
 }
 
 function placeAt(of: HungLabel, row: number, side: LabelSide): Placed {
@@ -116,15 +150,19 @@ function placeAt(of: HungLabel, row: number, side: LabelSide): Placed {
   };
 }
 
-function costOf(mine: Placed, others: readonly Placed[], width: number, posts: readonly number[]): number {
+function costOf(mine: Placed, others: readonly Placed[], { width, posts }: Ground): number {
   let cost = (mine.place.string - SHORTEST) / ROW + SIDES.indexOf(mine.place.side) * COST.side;
   if (mine.label.x0 < 0 || mine.label.x1 > width) cost += COST.outside;
   for (const post of posts) if (crosses(mine.label, post)) cost += COST.postOverLabel;
-  for (const other of others) {
-    for (const a of [mine.weight, mine.label]) {
-      for (const b of [other.weight, other.label]) if (overlap(a, b)) cost += COST.overlap;
-    }
-    cost += stringCost(mine, other) + stringCost(other, mine);
+  for (const other of others) cost += between(mine, other);
+  return cost;
+}
+
+/** What two cost by standing in each other's way. */
+function between(a: Placed, b: Placed): number {
+  let cost = stringCost(a, b) + stringCost(b, a);
+  for (const mine of [a.weight, a.label]) {
+    for (const other of [b.weight, b.label]) if (overlap(mine, other)) cost += COST.overlap;
   }
   return cost;
 }

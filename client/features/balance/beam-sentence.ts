@@ -1,0 +1,25 @@
+import type { Beam } from '#shared/core/beam.ts';
+import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+
+const mm = (value: number) => formatQuantity(value, 'length');
+
+/** The beam for those who do not see it. */
+export function beamSentence({ masses, wanted, balance, leftOver, neutralPoint }: Beam): string {
+  const hung = masses
+    .map(({ name, mass, x }) => `${name} ${formatQuantity(mass, 'mass')} at ${mm(x)}`)
+    .join(', ');
+  const sentences = [
+    `Hung on the beam from nose to tail: ${hung}.`,
+    `It balances at ${mm(balance.x)}${balance.percentMac === null ? '' : `, ${formatNumber(balance.percentMac, 1)} % of the mean aerodynamic chord`}.`,
+  ];
+  if (wanted) {
+    const pull = formatQuantity(Math.abs(leftOver), 'moment');
+    const end = leftOver > 0 ? 'tail' : 'nose';
+    const level = Math.round(Math.abs(leftOver)) === 0;
+    sentences.push(
+      `The wanted point is ${mm(wanted.x)}; about it the beam ${level ? 'is level' : `tips ${end} down by ${pull}`}.`,
+    );
+  }
+  if (neutralPoint !== null) sentences.push(`The neutral point is at ${mm(neutralPoint)}.`);
+  return sentences.join(' ');
+}

@@ -1,0 +1,126 @@
+import { ballastFor } from '#shared/core/ballast.ts';
+import type { Beam } from '#shared/core/beam.ts';
+import type { Plan, Target } from '#shared/core/plan.ts';
+import type { Estimate } from '#shared/core/result.ts';
+import { isBallast } from '#shared/core/wood-trial.ts';
+import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+
+/** The answer of the page: how it balances, and what to do about it. */
+export interface Verdict {
+  kind: 'none' | 'inside' | 'close' | 'outside';
+  headline: string;
+  /** the fact behind it, and the range asked for */
+  detail: string;
+  /** what puts it right */
+  advice: string | null;
+}
+
+const mm = (value: number) => formatQuantity(value, 'length');
+const percent = (value: number) => formatNumber(value, 1);
+
+/** How the plan balances, in words. `nose` is the arm at which ballast is thought of, mm. */
+export function verdictOf(
+  { target, items }: Pick<Plan, 'target' | 'items'>,
+  { totals }: Pick<Estimate, 'totals'>,
+  beam: Beam | null,
+  nose: number,
+): Verdict {
+  if (!beam) {
+    return {
+      kind: 'none',
+      headline: 'Nothing has a mass yet',
+      detail: 'Draw a part or add an item; its mass hangs on the beam at once.',
+      advice: null,
+    };
+  }
+  const { x, percentMac, uPercentMac } = beam.balance;
+  if (percentMac === null) {
+    return {
+      kind: 'none',
+      headline: `Balances ${placeOf(x)}`,
+      detail: 'Without a wing there is no chord to tell it by.',
+      advice: null,
+    };
+  }
+  if (!target || !beam.wanted) {
+    return {
+      kind: 'none',
+      headline: `Balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC`,
+      detail: `That is ${placeOf(x)}. No balance point is asked for yet.`,
+      advice: null,
+    };
+  }
+  const by = x - beam.wanted.x;
+  const off = Math.abs(percentMac - target.percentMac);
+  const advice = adviceOf(totals.mass, x, beam.wanted.x, nose, items, target);
+  const offset = offsetOf(by);
+  const range = rangeOf(target);
+  if (off > target.tolerance) {
+    const detail = `It balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC; ${range} is asked for.`;
+    return { kind: 'outside', headline: capital(`${offset} the wanted balance point`), detail, advice };
+  }
+  const close = uPercentMac !== null && target.tolerance - off < uPercentMac;
+  const on = Math.abs(by) < 0.05;
+  return {
+    kind: close ? 'close' : 'inside',
+    headline: `Balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC, inside ${range}`,
+    detail: close
+      ? `${capital(offset)} the wanted point; ±${NARROW_SPACE}${percent(uPercentMac)}${NARROW_SPACE}% of doubt reaches over the edge.`
+      : on
+        ? 'On the wanted point. Nothing to add.'
+        : `${capital(offset)} the wanted point. Nothing has to be added.`,
+    advice: close ? advice : null,
+  };
+}
+
+function adviceOf(
+  mass: number,
+  from: number,
+  to: number,
+  nose: number,
+  items: Plan['items'],
+  { percentMac }: Target,
+): string | null {
+  const found = ballastFor(mass, from, to, nose);
+  const grams = (value: number) => formatQuantity(value, 'mass', { fine: mass < 20 });
+  const then = `it balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC`;
+  if ('mass' in found) {
+    return found.mass === 0 ? null : `Put ${grams(found.mass)} at the nose (${mm(nose)}) and ${then}.`;
+  }
+  if (found.refused !== 'wrong_side') return null;
+  const lead = foremostBallast(items, to);
+  if (!lead) return 'It is nose-heavy without any ballast: move gear aft, or lengthen the tail.';
+  const off = ballastFor(mass, from, to, lead.at[0]);
+  const takeOff = 'takeOff' in off ? off.takeOff : null;
+  if (takeOff === null || takeOff > lead.mass) {
+    return `Even without its ${grams(lead.mass)} of ballast at ${mm(lead.at[0])} it stays nose-heavy: move gear aft.`;
+  }
+  return `Take ${grams(takeOff)} of the ballast at ${mm(lead.at[0])} off and ${then}.`;
+}
+
+/** The ballast furthest ahead of a place, whose loss moves the balance aft most. */
+export function foremostBallast(items: Plan['items'], before: number): Plan['items'][number] | null {
+  return items
+    .filter((item) => isBallast(item) && item.at[0] < before && item.mass > 0)
+    .reduce<Plan['items'][number] | null>(
+      (best, item) => (best && best.at[0] <= item.at[0] ? best : item),
+      null,
+    );
+}
+
+function offsetOf(by: number): string {
+  return `${mm(Math.abs(by))} ${by > 0 ? 'behind' : 'ahead of'}`;
+}
+
+function rangeOf({ percentMac, tolerance }: Target): string {
+  return `${percent(percentMac - tolerance)}–${percent(percentMac + tolerance)}${NARROW_SPACE}%`;
+}
+
+/** An arm in words: `33.3 mm aft of the datum`. */
+export function placeOf(x: number): string {
+  return `${mm(Math.abs(x))} ${x < 0 ? 'ahead of' : 'aft of'} the datum`;
+}
+
+function capital(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}

@@ -17,9 +17,9 @@ export interface Cluster {
    * The address of a database for the role `featherbeam`, which owns the database `featherbeam` (the default)
    * and may create others: connect to `postgres` for that.
    */
-  url(database?: string): string;
+  url: (database?: string) => string;
   /** Stops the server; a second call waits for the first. */
-  stop(): Promise<void>;
+  stop: () => Promise<void>;
 }
 
 /** PostgreSQL's server programs, 15 or newer and the newest there are, or those of one major version. */

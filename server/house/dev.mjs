@@ -1,7 +1,7 @@
 import './node-version.mjs';
 
-const { homedir } = await import('node:os');
-const { join } = await import('node:path');
+const os = await import('node:os');
+const path = await import('node:path');
 const { startCluster } = await import('./cluster.mjs');
 const { ensurePostgres } = await import('./debian.mjs');
 const { atEnd, live } = await import('./life.mjs');
@@ -13,8 +13,8 @@ const { claim } = await import('./running.mjs');
 
 /** A home of its own, so that trying things out never touches the gliders kept by `npm start`. */
 const home = process.env.FEATHERBEAM_HOME
-  ? homeFor({ env: process.env, clone: root, asRoot: isRoot, userHome: homedir() })
-  : `${homeFor({ env: {}, clone: root, asRoot: isRoot, userHome: homedir() })}-dev`;
+  ? homeFor({ env: process.env, clone: root, asRoot: isRoot, userHome: os.homedir() })
+  : `${homeFor({ env: {}, clone: root, asRoot: isRoot, userHome: os.homedir() })}-dev`;
 
 async function database() {
   if (process.env.DATABASE_URL) return process.env.DATABASE_URL;
@@ -39,12 +39,12 @@ live(
       FEATHERBEAM_HOME: home,
     };
     const env = { ...process.env, ...api, DATABASE_URL: await database() };
-    const tool = (/** @type {string[]} */ path) => join(root, 'node_modules', ...path);
+    const tool = (/** @type {string[]} */ parts) => path.join(root, 'node_modules', ...parts);
     const watching = [
       tool(['tsx', 'dist', 'cli.mjs']),
       'watch',
       '--clear-screen=false',
-      join('server', 'index.ts'),
+      path.join('server', 'index.ts'),
     ];
     const server = run(process.execPath, watching, { env, show: true });
     const client = run(process.execPath, [tool(['vite', 'bin', 'vite.js'])], { env, show: true });

@@ -59,11 +59,10 @@ export async function launchProduct() {
   if (own) atEnd(own.leave);
   if (await isHealthy(address, server.exited)) {
     isUp = true;
-    say(`\nFeatherbeam is at ${address}`);
+    say(`\nOpen ${address} in a browser; Ctrl-C here stops it.`);
     const people = join(root, 'data', 'demo', 'people.json');
     for (const line of existsSync(people) ? demoLines(JSON.parse(readFileSync(people, 'utf8'))) : [])
       say(line);
-    say('Ctrl-C stops it.\n');
   }
   return server.exited;
 }

@@ -14,16 +14,17 @@ export const isEnding = () => ending !== undefined;
 /** @param {number} code @returns {Promise<never>} */
 export function end(code) {
   ending ??= (async () => {
+    let result = code;
     for (const child of children) child.kill('SIGTERM');
     for (const step of endings.toReversed()) {
       try {
         await step();
       } catch (error) {
         console.error(wording(error));
-        code ||= 1;
+        result ||= 1;
       }
     }
-    process.exit(code);
+    process.exit(result);
   })();
   return ending;
 }

@@ -24,7 +24,7 @@ export function serve(env) {
   return {
     exited,
     /** Asks for a clean end and insists after a while. */
-    async stop() {
+    stop: async () => {
       child.kill('SIGTERM');
       const insist = setTimeout(() => child.kill('SIGKILL'), 20_000);
       await exited;
@@ -34,21 +34,19 @@ export function serve(env) {
 }
 
 /**
- * Waits until the health check answers 200; false if `given` settles first.
+ * Waits until the health check answers 200; false if `givenUp` settles first.
  * @param {string} address
- * @param {Promise<unknown>} given up
+ * @param {Promise<unknown>} givenUp
  */
-export async function isHealthy(address, given) {
-  let over = false;
-  void given.then(() => (over = true));
-  while (!over) {
+export async function isHealthy(address, givenUp) {
+  const ended = givenUp.then(() => true);
+  for (;;) {
     try {
       const answer = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(2000) });
       if (answer.ok) return true;
     } catch {
       // Not listening yet.
     }
-    await pause(100);
+    if (await Promise.race([ended, pause(100, false)])) return false;
   }
-  return false;
 }

@@ -5,6 +5,7 @@ import { demoLines } from '#server/house/demo.mjs';
 import { explain, HouseError, wording } from '#server/house/messages.mjs';
 import { homeFor } from '#server/house/paths.mjs';
 import { closingLine, countReport, type Report } from '#server/house/test-report.mjs';
+import { importsOf, sourcesIn } from './sources.ts';
 
 const report = (changes: Partial<Report> = {}): Report => ({
   numPassedTests: 7,
@@ -131,8 +132,7 @@ describe('the scripts', () => {
     }
   });
 
-  it('need nothing but Node’s own modules until packages are there', async () => {
-    const { sourcesIn, importsOf } = await import('./sources.ts');
+  it('need nothing but Node’s own modules until packages are there', () => {
     const house = sourcesIn(['server/house'], /\.mjs$/);
     const foreign = house.flatMap((file) =>
       importsOf(file).filter(({ written }) => !/^(node:|\.\/[a-z-]+\.d?\.?m[jt]s$)/.test(written)),

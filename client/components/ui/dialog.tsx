@@ -26,19 +26,18 @@ export function Dialog({ open, onOpenChange, title, description, wide = false, c
             wide ? 'sm:w-[min(46rem,94vw)]' : 'sm:w-[min(30rem,94vw)]',
           )}
         >
-          <div className="flex items-start justify-between gap-4">
-            <Radix.Title className="text-heading font-semibold">{title}</Radix.Title>
-            <Radix.Close
-              aria-label="Close"
-              className="-mt-1 -mr-2 grid size-row shrink-0 place-items-center rounded-md text-ink hover:bg-ink-wash"
-            >
-              <svg viewBox="0 0 12 12" width="12" height="12" aria-hidden="true">
-                <path d="M1 1 11 11M11 1 1 11" stroke="currentColor" strokeWidth="1.6" />
-              </svg>
-            </Radix.Close>
-          </div>
+          <Radix.Title className="pr-12 text-heading font-semibold">{title}</Radix.Title>
           {description && <Radix.Description className="mt-1 text-graphite">{description}</Radix.Description>}
           <div className="mt-4">{children}</div>
+          {/* Last in order, so that the focus begins with what the dialog is about. */}
+          <Radix.Close
+            aria-label="Close"
+            className="absolute top-3.5 right-3.5 grid size-row place-items-center rounded-md text-ink hover:bg-ink-wash"
+          >
+            <svg viewBox="0 0 12 12" width="12" height="12" aria-hidden="true">
+              <path d="M1 1 11 11M11 1 1 11" stroke="currentColor" strokeWidth="1.6" />
+            </svg>
+          </Radix.Close>
         </Radix.Content>
       </Radix.Portal>
     </Radix.Root>

@@ -19,7 +19,7 @@ export function checkPlan(plan: unknown): PlanCheck {
   return { ok: false, issues };
 }
 
-/** The first thing wrong, with its place in words: `wing, panel 2, tip chord: Must be more than 0 mm.` */
+/** The first thing wrong, with its place in words: `Wing, panel 2, tip chord: Must be more than 0 mm.` */
 export function firstIssue(plan: Plan, issues: ReadonlyMap<string, string>): string | null {
   for (const [path, message] of issues) return `${placeInWords(plan, path)}: ${message}`;
   return null;
@@ -41,7 +41,8 @@ function placeInWords(document: unknown, path: string): string {
     else if (!(step in SINGULAR)) words.push(spaced(step));
     list = step;
   }
-  return words.length > 0 ? words.join(', ') : 'The plan';
+  const text = words.length > 0 ? words.join(', ') : 'the plan';
+  return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 const SINGULAR: Record<string, string> = {

@@ -2,7 +2,6 @@ import { Link } from 'react-router-dom';
 import { Button, buttonClass } from '#client/components/ui/button.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
 import type { Workspace } from '#client/lib/workspace.ts';
-import { InvalidNotice } from './desk-notices.tsx';
 import { useCreateGlider } from './mutations.ts';
 import type { SampleDesk } from './sample-desk.ts';
 import { useWish } from './use-wish.ts';
@@ -37,31 +36,28 @@ export function SampleNotice({ workspace, sample, signedIn, signUpHref, onOpen }
   };
 
   return (
-    <>
-      <div className="no-print mb-2 flex flex-wrap items-center gap-x-3 text-note text-graphite">
-        <span>Sample: nothing is stored{signedIn ? '.' : '; sign up to keep it.'}</span>
-        {signedIn ? (
-          <Button
-            variant="plain"
-            className="text-note"
-            onClick={keep}
-            pending={create.isPending}
-            pendingText="Saving …"
-          >
-            Save a copy to the bench
-          </Button>
-        ) : (
-          <Link to={signUpHref} className={buttonClass('plain', 'text-note')}>
-            Sign up
-          </Link>
-        )}
-        {workspace.canUndo && (
-          <Button variant="plain" className="text-note" onClick={sample.startAgain}>
-            Start again
-          </Button>
-        )}
-      </div>
-      {workspace.saveState === 'invalid' && <InvalidNotice problem={workspace.problem} />}
-    </>
+    <div className="flex flex-wrap items-center gap-x-2 text-note text-graphite max-sm:mb-1">
+      <span>Sample: nothing is stored{signedIn ? '.' : '; sign up to keep it.'}</span>
+      {signedIn ? (
+        <Button
+          variant="plain"
+          className="text-note"
+          onClick={keep}
+          pending={create.isPending}
+          pendingText="Saving …"
+        >
+          Save a copy to the bench
+        </Button>
+      ) : (
+        <Link to={signUpHref} className={buttonClass('plain', 'text-note')}>
+          Sign up
+        </Link>
+      )}
+      {workspace.canUndo && (
+        <Button variant="plain" className="text-note" onClick={sample.startAgain}>
+          Start again
+        </Button>
+      )}
+    </div>
   );
 }

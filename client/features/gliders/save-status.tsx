@@ -1,7 +1,6 @@
-import type { ReactNode } from 'react';
 import { cn } from '#client/lib/cn.ts';
-import type { SaveState, Workspace } from '#client/lib/workspace.ts';
 import { formatMoment } from '#client/lib/moments.ts';
+import type { SaveState, Workspace } from '#client/lib/workspace.ts';
 
 const WORDS: Record<SaveState, string> = {
   saved: 'Saved',
@@ -12,32 +11,48 @@ const WORDS: Record<SaveState, string> = {
   invalid: 'Not saved: see above',
 };
 
-/** Where the work is: on the server, on its way, or only here. */
-export function SaveStatus({ workspace, brief = false }: { workspace: Workspace; brief?: boolean }) {
-  const { kind, saveState, savedAt, canEdit, problem } = workspace;
-  if (kind === 'sample')
-    return <Line mark="○">{saveState === 'invalid' ? 'Not valid yet' : 'Sample, not stored'}</Line>;
-  if (!canEdit) return <Line mark="○">Read only</Line>;
-  const trouble = saveState === 'conflict' || saveState === 'invalid' || saveState === 'offline';
-  const refused = saveState === 'unsaved' && problem !== undefined;
-  return (
-    <Line mark={saveState === 'saved' ? '●' : trouble || refused ? '▲' : '○'} trouble={trouble || refused}>
-      {refused ? 'Not saved: see above' : WORDS[saveState]}
-      {saveState === 'saved' && savedAt && !brief ? ` ${formatMoment(savedAt)}` : ''}
-    </Line>
-  );
+interface SaveStatusProps {
+  workspace: Workspace;
+  /** The mark alone, its words read aloud. */
+  brief?: boolean;
 }
 
-function Line({ mark, trouble = false, children }: { mark: string; trouble?: boolean; children: ReactNode }) {
+/** Where the work is: on the server, on its way, or only here. */
+export function SaveStatus({ workspace, brief = false }: SaveStatusProps) {
+  const { words, mark, trouble } = statusOf(workspace);
   return (
     <span
       role="status"
       className={cn('whitespace-nowrap', trouble ? 'font-semibold text-ochre' : 'text-graphite')}
     >
-      <span aria-hidden="true" className="mr-1.5 text-[0.75em]">
+      <span aria-hidden="true" className={cn('text-[0.75em]', !brief && 'mr-1.5')}>
         {mark}
       </span>
-      {children}
+      <span className={brief ? 'sr-only' : undefined}>{words}</span>
     </span>
   );
+}
+
+interface Status {
+  words: string;
+  mark: '●' | '○' | '▲';
+  trouble: boolean;
+}
+
+function statusOf({ kind, saveState, savedAt, canEdit, problem }: Workspace): Status {
+  const calm = (words: string, mark: Status['mark'] = '○'): Status => ({ words, mark, trouble: false });
+  const troubled = (words: string): Status => ({ words, mark: '▲', trouble: true });
+  if (kind === 'sample')
+    return saveState === 'invalid' ? troubled('Not valid yet') : calm('Sample, not stored');
+  if (!canEdit) return calm('Read only');
+  switch (saveState) {
+    case 'saved':
+      return calm(`${WORDS.saved} ${savedAt ? formatMoment(savedAt) : ''}`.trim(), '●');
+    case 'saving':
+      return calm(WORDS.saving);
+    case 'unsaved':
+      return problem === undefined ? calm(WORDS.unsaved) : troubled(WORDS.invalid);
+    default:
+      return troubled(WORDS[saveState]);
+  }
 }

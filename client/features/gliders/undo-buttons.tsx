@@ -1,12 +1,12 @@
 import { useEffect } from 'react';
+import { cn } from '#client/lib/cn.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 
 const BUTTON =
   'grid size-row place-items-center rounded-md text-ink enabled:hover:bg-ink-wash disabled:text-graphite disabled:opacity-50';
 
-/** Undo and redo, also by keyboard where no field has its own. */
-export function UndoButtons({ workspace }: { workspace: Workspace }) {
-  const { undo, redo, canUndo, canRedo, canEdit } = workspace;
+/** Undo and redo by keyboard, where no field has its own. */
+export function useUndoKeys({ undo, redo }: Pick<Workspace, 'undo' | 'redo'>): void {
   useEffect(() => {
     const onKeyDown = (event: KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.altKey || isField(event.target)) return;
@@ -19,10 +19,18 @@ export function UndoButtons({ workspace }: { workspace: Workspace }) {
     addEventListener('keydown', onKeyDown);
     return () => removeEventListener('keydown', onKeyDown);
   }, [undo, redo]);
+}
 
+interface UndoButtonsProps {
+  workspace: Workspace;
+  className?: string;
+}
+
+export function UndoButtons({ workspace, className }: UndoButtonsProps) {
+  const { undo, redo, canUndo, canRedo, canEdit } = workspace;
   if (!canEdit) return null;
   return (
-    <div className="flex">
+    <div className={cn('flex', className)}>
       <button
         type="button"
         aria-label="Undo"

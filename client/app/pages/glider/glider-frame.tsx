@@ -3,7 +3,7 @@ import { NavLink, Outlet, useLocation } from 'react-router-dom';
 import type { Place } from '#client/app/paths.ts';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { TitleBlock } from '#client/features/gliders/title-block.tsx';
-import { UndoButtons } from '#client/features/gliders/undo-buttons.tsx';
+import { UndoButtons, useUndoKeys } from '#client/features/gliders/undo-buttons.tsx';
 import { useWorkspace } from '#client/features/gliders/workspace-context.ts';
 import { cn } from '#client/lib/cn.ts';
 
@@ -18,18 +18,21 @@ const LABELS: Record<Place, string> = {
 interface GliderFrameProps {
   places: readonly Place[];
   hrefOf: (place: Place) => string;
-  /** What stands over the sheet: conflicts, restored edits, that a sample is not stored. */
+  /** What stands over the sheet: conflicts, restored edits. */
   notices?: ReactNode;
+  /** A quiet line beside the tabs. */
+  aside?: ReactNode;
 }
 
 /** The sheet of paper with its index tabs along the top edge and the title block at the lower right. */
-export function GliderFrame({ places, hrefOf, notices }: GliderFrameProps) {
+export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps) {
   const workspace = useWorkspace();
   const { pathname } = useLocation();
+  useUndoKeys(workspace);
   return (
     <div className="flex flex-1 flex-col print:block">
       {notices}
-      <div className="no-print flex items-end justify-between gap-2">
+      <div className="no-print flex flex-wrap-reverse items-end gap-x-4">
         <nav aria-label={`Places of ${workspace.plan.name}`} className="-mb-px min-w-0 overflow-x-auto">
           <ul className="flex">
             {places.map((place) => (
@@ -41,7 +44,10 @@ export function GliderFrame({ places, hrefOf, notices }: GliderFrameProps) {
             ))}
           </ul>
         </nav>
-        <UndoButtons workspace={workspace} />
+        <div className="ml-auto flex items-center gap-x-3 max-sm:ml-0 max-sm:w-full">
+          {aside}
+          <UndoButtons workspace={workspace} className="max-sm:hidden" />
+        </div>
       </div>
       <div className="flex flex-1 flex-col border border-strong-rule bg-sheet print:block print:border-0">
         <div className="flex min-h-0 flex-1 flex-col print:block">
@@ -58,7 +64,7 @@ export function GliderFrame({ places, hrefOf, notices }: GliderFrameProps) {
 function tabClass({ isActive }: { isActive: boolean }): string {
   return cn(
     'flex min-h-9 items-center border border-b-0 px-4 whitespace-nowrap no-underline pointer-coarse:min-h-11',
-    'focus-visible:-outline-offset-2 max-sm:px-3',
+    'focus-visible:-outline-offset-2 max-sm:px-2.5',
     isActive
       ? 'rounded-t-md border-strong-rule bg-sheet font-semibold text-pencil'
       : 'border-transparent text-graphite hover:text-ink',

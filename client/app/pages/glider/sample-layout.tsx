@@ -2,6 +2,7 @@ import { useNavigate } from 'react-router-dom';
 import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths, SAMPLE_PLACES, type Place } from '#client/app/paths.ts';
 import { samplePlan } from '#client/features/gliders/sample-plan.ts';
+import { InvalidNotice } from '#client/features/gliders/desk-notices.tsx';
 import { SampleNotice } from '#client/features/gliders/sample-notice.tsx';
 import { useKeeper, useWorkspace } from '#client/features/gliders/workspace-context.ts';
 import { SampleWorkspaceProvider } from '#client/features/gliders/workspace.tsx';
@@ -31,7 +32,8 @@ function Desk() {
     <GliderFrame
       places={SAMPLE_PLACES}
       hrefOf={hrefOf}
-      notices={
+      notices={workspace.saveState === 'invalid' && <InvalidNotice problem={workspace.problem} />}
+      aside={
         keeper.kind === 'sample' && (
           <SampleNotice
             workspace={workspace}

@@ -4,7 +4,7 @@ export class HouseError extends Error {}
 /** @param {string} line */
 export const say = (line) => console.log(line);
 
-const SPACE = /ENOSPC|EDQUOT|No space left on device|disk quota exceeded/i;
+const SPACE = /ENOSPC|EDQUOT|No space left on device|disk quota exceeded|Check free disk space/i;
 const REGISTRY =
   /ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH|EHOSTUNREACH|ERR_SOCKET_TIMEOUT|network (request|timeout)/;
 

@@ -51,6 +51,7 @@ describe('the sentence for a failure', () => {
     const words = [
       'npm error code ENOSPC',
       'initdb: error: could not write: No space left on device',
+      'HINT:  Check free disk space.',
       'Error: EDQUOT: disk quota exceeded, write',
     ];
     for (const said of words) expect(explain(said)).toMatch(/^The disk is full/);

@@ -1,0 +1,82 @@
+// @vitest-environment happy-dom
+import { describe, expect, it, vi } from 'vitest';
+import { NumberField } from '#client/components/ui/number-field.tsx';
+import type { ParseProblem } from '#shared/units/parse.ts';
+import { leave, mount, only, press, type } from '#tests/client/lib/mount.tsx';
+
+type Change = (value: number | null, problem: ParseProblem | null) => void;
+
+async function field(value: number | null, onChange: Change = () => undefined) {
+  const node = (now: number | null) => (
+    <NumberField label="Width" quantity="length" value={now} above={0} onChange={onChange} />
+  );
+  const mounted = await mount(node(value));
+  return {
+    ...mounted,
+    input: only<HTMLInputElement>(mounted.element, 'input'),
+    set: (now: number | null) => mounted.show(node(now)),
+  };
+}
+
+describe('number field', () => {
+  it('gives on 1/16 in as 1.5875 mm (25.4 / 16, NIST SP 811) and keeps the text as typed', async () => {
+    const onChange = vi.fn<Change>();
+    const { input, set } = await field(3, onChange);
+    await type(input, '1/16 in');
+    expect(onChange).toHaveBeenLastCalledWith(1.5875, null);
+    await set(1.5875);
+    expect(input.value).toBe('1/16 in');
+  });
+
+  it('does not re-format 2,50 under the cursor', async () => {
+    const { input, set } = await field(3);
+    await type(input, '2,50');
+    await set(2.5);
+    expect(input.value).toBe('2,50');
+  });
+
+  it('calls an empty field missing, not 0', async () => {
+    const onChange = vi.fn<Change>();
+    const { input } = await field(3, onChange);
+    await type(input, '');
+    expect(onChange).toHaveBeenLastCalledWith(null, 'missing');
+    expect(input.value).toBe('');
+  });
+
+  it('says what is wrong once the field is left, and ties it to the field', async () => {
+    const { element, input } = await field(3);
+    await type(input, '12..5');
+    expect(input.getAttribute('aria-invalid')).toBeNull();
+    await leave(input);
+    expect(input.getAttribute('aria-invalid')).toBe('true');
+    const told = input.getAttribute('aria-describedby') ?? '';
+    expect(element.querySelector(`#${CSS.escape(told)}`)?.textContent).toContain('one decimal mark');
+  });
+
+  it('hands a negative width on and says at once that it is refused', async () => {
+    const onChange = vi.fn<Change>();
+    const { element, input, set } = await field(3, onChange);
+    await type(input, '-3');
+    await set(-3);
+    expect(onChange).toHaveBeenLastCalledWith(-3, null);
+    expect(element.textContent).toContain('Must be more than 0 mm.');
+  });
+
+  it('follows a value that was changed by something else, such as an undo', async () => {
+    const { input, set } = await field(3);
+    await type(input, '5');
+    await set(5);
+    await set(3);
+    expect(input.value).toBe('3');
+  });
+
+  it('steps with the arrow keys, tenfold with shift', async () => {
+    const onChange = vi.fn<Change>();
+    const { input, set } = await field(20, onChange);
+    await press(input, 'ArrowUp');
+    expect(onChange).toHaveBeenLastCalledWith(21, null);
+    await set(21);
+    await press(input, 'ArrowDown', { shiftKey: true });
+    expect(onChange).toHaveBeenLastCalledWith(11, null);
+  });
+});

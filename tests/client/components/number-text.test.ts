@@ -1,0 +1,71 @@
+import { describe, expect, it } from 'vitest';
+import { besideOf, rangeText, stepped, textOf } from '#client/components/ui/number-text.ts';
+
+// Expected texts follow from 1 in = 25.4 mm exactly (NIST SP 811); the choice of what to show is our own.
+describe('text of a field that was not typed into', () => {
+  it('shows 1.5875 mm as the 1/16 in that it is sold as', () => {
+    expect(textOf(1.5875, 'length', 'mm')).toBe('1/16 in');
+  });
+
+  it('leaves whole tenths of a mm metric, though 25.4 mm is also an inch', () => {
+    expect(textOf(25.4, 'length', 'mm')).toBe('25.4');
+  });
+
+  it('does not take 1.59 mm for 1/16 in', () => {
+    expect(textOf(1.59, 'length', 'mm')).toBe('1.59');
+  });
+
+  it('shows a share in per cent without noise of binary fractions', () => {
+    expect(textOf(0.07, 'share', 'percent')).toBe('7');
+  });
+
+  it('writes a true minus', () => {
+    expect(textOf(-132, 'length', 'mm')).toBe('\u2212132');
+  });
+
+  it('shows nothing, and not 0, for what is not there', () => {
+    expect([textOf(null, 'mass', 'g'), textOf(NaN, 'mass', 'g')]).toEqual(['', '']);
+  });
+});
+
+describe('what stands behind a field', () => {
+  it('says what inches are in mm', () => {
+    expect(besideOf('1/16 in', 'length', 'mm')).toBe('1.59\u202fmm');
+  });
+
+  it('names the fraction that a metric size happens to be', () => {
+    expect(besideOf('12.7', 'length', 'mm')).toBe('mm · 1/2 in');
+  });
+
+  it('is the bare unit while the text is no number', () => {
+    expect(besideOf('1/', 'length', 'mm')).toBe('mm');
+  });
+});
+
+describe('arrow keys', () => {
+  it('step by a whole mm', () => {
+    expect(stepped('380', 'length', 'mm', 1)).toBe('381');
+  });
+
+  it('step by sixteenths in a field typed in inches', () => {
+    expect(stepped('1/16 in', 'length', 'mm', 1)).toBe('1/8 in');
+  });
+
+  it('count ribs one by one', () => {
+    expect(stepped('12', 'count', 'one', -1)).toBe('11');
+  });
+
+  it('leave an unfinished text alone', () => {
+    expect(stepped('1/', 'length', 'mm', 1)).toBe('1/');
+  });
+});
+
+describe('size of a value', () => {
+  it('refuses the bound itself where more is asked for', () => {
+    expect(rangeText(0, { quantity: 'length', unit: 'mm', above: 0 })).toBe('Must be more than 0 mm.');
+  });
+
+  it('names the bound in the unit of the field', () => {
+    expect(rangeText(0.95, { quantity: 'share', unit: 'percent', max: 0.9 })).toBe('Must be at most 90 %.');
+  });
+});

@@ -2,7 +2,6 @@ import {
   BaseError,
   ConnectionAcquireTimeoutError,
   ConnectionError,
-  DatabaseError,
   ForeignKeyConstraintError,
   UniqueConstraintError,
 } from 'sequelize';
@@ -45,6 +44,6 @@ export function isUnavailable(error: unknown): boolean {
   ) {
     return true;
   }
-  // The driver gives no code when the socket closes in the middle of a query.
-  return error instanceof DatabaseError && /connection terminated|connection ended/i.test(error.message);
+  // The driver gives no code when the socket closes in the middle of a query, or before the next on the same client.
+  return error instanceof Error && /connection (terminated|ended|error)|not queryable/i.test(error.message);
 }

@@ -20,8 +20,8 @@ function asAppError(error: unknown): AppError {
   const refusal = bodyError(error) ?? addressError(error);
   if (refusal) return refusal;
   if (failureOf(error).sqlState === '53100') return unavailable('The disk of the database is full.');
-  if (isUnavailable(error)) return unavailable('The database does not answer just now. Nothing was changed.');
-  return new AppError('internal', 'Something went wrong here; nothing was changed. It has been noted.');
+  if (isUnavailable(error)) return unavailable('The database does not answer just now. Try again.');
+  return new AppError('internal', 'Something went wrong here. It has been noted.');
 }
 
 /** What reading a body throws, told by its `type`. */

@@ -7,7 +7,7 @@ import type { Env } from '#server/env.ts';
  * Only these of an error: what the database's errors carry besides (statements, values, details) may hold what
  * users typed, hashes included.
  */
-function errorForLog(error: unknown): object {
+export function errorForLog(error: unknown): object {
   if (!(error instanceof Error)) return { message: String(error) };
   const code = 'code' in error ? error.code : undefined;
   return { type: error.name, message: error.message, code, stack: error.stack };

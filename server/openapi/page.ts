@@ -42,7 +42,7 @@ const WHO = { public: 'anybody', anyone: 'anybody', 'signed-in': 'signed in' } a
 function row(endpoint: Endpoint): string {
   const refused = problemsOf(endpoint).map((code) => `<a href="#${code}">${code}</a>`);
   return `<tr><th scope="row"><code>${endpoint.method.toUpperCase()} /api${escape(endpoint.path)}</code></th>
-<td>${escape(endpoint.summary)}</td><td>${WHO[endpoint.access]}</td><td>${endpoint.answer.status}</td>
+<td>${escape(endpoint.summary).replace(/`(.+?)`/g, '<code>$1</code>')}</td><td>${WHO[endpoint.access]}</td><td>${endpoint.answer.status}</td>
 <td>${refused.join(' ')}</td></tr>`;
 }
 

@@ -64,6 +64,6 @@ export function sheetCsv({ plan, result }: Pick<SheetDto, 'plan' | 'result'>): s
 /** @example sheetFileName({ gliderName: 'Dunlin', number: 2 }, 'csv') // → 'Dunlin, sheet 2.csv' */
 export function sheetFileName(sheet: Pick<SheetDto, 'gliderName' | 'number'>, extension: string): string {
   // Signs that one or the other system does not allow in a name.
-  const name = sheet.gliderName.replace(/[\\/:*?"<>|\p{C}]/gu, ' ').trim();
+  const name = sheet.gliderName.replace(/[\\/:*?"<>|\p{C}\s]+/gu, ' ').trim();
   return `${name || 'Glider'}, sheet ${sheet.number}.${extension}`;
 }

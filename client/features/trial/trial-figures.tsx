@@ -1,0 +1,69 @@
+import { RowTh, Td, Tr } from '#client/components/ui/table.tsx';
+import type { TrialRefusal, TrialResult } from '#shared/core/wood-trial.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Quantity } from '#shared/units/quantities.ts';
+
+type Figure = 'wingMass' | 'bare' | 'percentMac' | 'ballast' | 'allUp' | 'wingLoading';
+
+const ROWS: readonly {
+  figure: Figure;
+  label: string;
+  quantity: Quantity;
+  strong?: boolean;
+  fine?: boolean;
+}[] = [
+  { figure: 'wingMass', label: 'Wing', quantity: 'mass' },
+  { figure: 'bare', label: 'All but ballast', quantity: 'mass' },
+  { figure: 'percentMac', label: 'Balance before trim, MAC', quantity: 'percentMac' },
+  { figure: 'ballast', label: 'Ballast that trims it', quantity: 'mass' },
+  { figure: 'allUp', label: 'All up', quantity: 'mass', strong: true },
+  { figure: 'wingLoading', label: 'Wing loading', quantity: 'loading', fine: true },
+];
+
+/** What each trial comes to, and how far it is from the plan as drawn. */
+export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
+  const [drawn] = results;
+  return (
+    <tbody className="[&>tr:first-child>*]:border-t [&>tr:first-child>*]:border-t-strong-rule">
+      {ROWS.map(({ figure, label, quantity, strong = false, fine = false }) => (
+        <Tr key={figure} strong={strong}>
+          <RowTh className="sticky left-0 z-1 bg-sheet max-sm:py-1 max-sm:text-note">{label}</RowTh>
+          {results.map((result, index) => {
+            const value = result[figure];
+            const base = drawn?.[figure] ?? null;
+            return (
+              <Td key={index} numeric>
+                {value === null && figure === 'ballast' ? (
+                  <span className="text-note font-normal whitespace-normal text-red">
+                    <span aria-hidden="true">▲ </span>
+                    {refusalText(result.refused)}
+                  </span>
+                ) : (
+                  formatQuantity(value, quantity, { fine })
+                )}
+                {index > 0 && value !== null && base !== null && (
+                  <span className="text-note font-normal text-graphite max-sm:block sm:ml-2 sm:inline-block sm:min-w-12">
+                    {formatQuantity(value - base, quantity, { bare: true, plus: true, fine })}
+                  </span>
+                )}
+              </Td>
+            );
+          })}
+        </Tr>
+      ))}
+    </tbody>
+  );
+}
+
+function refusalText(refused: TrialRefusal | null): string {
+  switch (refused?.refused) {
+    case 'at_wanted_point':
+      return 'none: the arm lies on the balance point';
+    case 'wrong_side':
+      return refused.takeOff === null
+        ? 'none: nose-heavy without any'
+        : `none: ${formatQuantity(refused.takeOff, 'mass')} too heavy there already`;
+    default:
+      return '–';
+  }
+}

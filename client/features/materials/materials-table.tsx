@@ -66,7 +66,7 @@ export function MaterialsTable({ materials, ...actions }: MaterialsTableProps) {
 }
 
 interface SortThProps {
-  header: Header<typeof features, MaterialDto, unknown> | undefined;
+  header: Header<typeof features, MaterialDto> | undefined;
   numeric?: boolean;
   unit?: string;
   children: ReactNode;

@@ -3,6 +3,7 @@ import { useForm } from 'react-hook-form';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { TextField } from '#client/components/ui/text-field.tsx';
+import { ApiError } from '#client/lib/api.ts';
 import { showRefusal } from '#client/lib/form-errors.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { signUp, type SignUp } from '#shared/schemas/session.ts';
@@ -18,7 +19,11 @@ export function SignUpForm() {
 
   const submit = handleSubmit((values) =>
     mutation.mutateAsync(values).catch((error: unknown) => {
-      showRefusal<SignUp>(error, ['name', 'email', 'password'], setError);
+      if (error instanceof ApiError && error.code === 'email_taken') {
+        setError('email', { type: 'server', message: error.message }, { shouldFocus: true });
+      } else {
+        showRefusal<SignUp>(error, ['name', 'email', 'password'], setError);
+      }
     }),
   );
   const { ref: nameRef, ...name } = register('name');

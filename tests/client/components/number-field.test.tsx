@@ -2,7 +2,7 @@
 import { describe, expect, it, vi } from 'vitest';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import type { ParseProblem } from '#shared/units/parse.ts';
-import { leave, mount, only, press, type } from '#tests/client/lib/mount.tsx';
+import { leave, mount, onlyInput, press, type } from '#tests/client/lib/mount.tsx';
 
 type Change = (value: number | null, problem: ParseProblem | null) => void;
 
@@ -13,7 +13,7 @@ async function field(value: number | null, onChange: Change = () => undefined) {
   const mounted = await mount(node(value));
   return {
     ...mounted,
-    input: only<HTMLInputElement>(mounted.element, 'input'),
+    input: onlyInput(mounted.element),
     set: (now: number | null) => mounted.show(node(now)),
   };
 }

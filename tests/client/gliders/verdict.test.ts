@@ -3,8 +3,12 @@ import { balanceVerdict } from '#client/features/gliders/verdict.ts';
 import type { Balance } from '#shared/core/result.ts';
 
 const balance = (percentMac: number | null, uPercentMac = 0.5): Balance => ({
-  ...{ x: 70, u: 1, neutralPoint: null, staticMargin: null },
-  ...{ percentMac, uPercentMac },
+  x: 70,
+  u: 1,
+  percentMac,
+  uPercentMac,
+  neutralPoint: null,
+  staticMargin: null,
 });
 const plan = { target: { percentMac: 52, tolerance: 2 } };
 const outside = {

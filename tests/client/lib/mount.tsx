@@ -19,11 +19,10 @@ export async function mount(node: ReactNode): Promise<Mounted> {
   return { element, show, unmount: () => act(async () => root.unmount()) };
 }
 
-/** Types into a field as a person does: the browser's setter, then the event that React listens to. */
+/** Types into a field as a person does: past the setter that React puts on it, then the event that it listens to. */
 export async function type(input: HTMLInputElement, text: string): Promise<void> {
-  const setter = Object.getOwnPropertyDescriptor(HTMLInputElement.prototype, 'value')?.set;
   await act(async () => {
-    setter?.call(input, text);
+    Reflect.set(HTMLInputElement.prototype, 'value', text, input);
     input.dispatchEvent(new Event('input', { bubbles: true }));
   });
 }
@@ -41,9 +40,15 @@ export async function leave(target: HTMLElement): Promise<void> {
 }
 
 /** The only element of that kind; a test that finds none or two is wrong about the page. */
-export function only<T extends HTMLElement>(root: ParentNode, selector: string): T {
-  const found = root.querySelectorAll<T>(selector);
+export function only(root: ParentNode, selector: string): HTMLElement {
+  const found = root.querySelectorAll<HTMLElement>(selector);
   const [first] = found;
   if (!first || found.length > 1) throw new Error(`${found.length} elements fit ${selector}`);
   return first;
+}
+
+export function onlyInput(root: ParentNode, selector = 'input'): HTMLInputElement {
+  const element = only(root, selector);
+  if (!(element instanceof HTMLInputElement)) throw new Error(`${selector} is no input`);
+  return element;
 }

@@ -2,21 +2,27 @@ import { describe, expect, it } from 'vitest';
 import { countMaterials, filterMaterials } from '#client/features/materials/filter.ts';
 import type { MaterialDto } from '#shared/schemas/material.ts';
 
-function row(name: string, fields: Partial<MaterialDto> = {}): MaterialDto {
-  return {
-    ...{ id: name, key: name, name, category: 'wood', density: 112, areal: null, spread: null, cv: 0.08 },
-    ...{
-      modulus: null,
-      strength: null,
-      moisture: null,
-      form: '',
-      source: 'weighed',
-      basis: 'own measurement',
-    },
-    ...{ shared: true, version: 1, usedBy: 0, can: { edit: false, delete: false } },
-    ...fields,
-  };
-}
+const balsa: MaterialDto = {
+  id: '1',
+  key: 'balsa',
+  name: 'Balsa',
+  category: 'wood',
+  density: 112,
+  areal: null,
+  spread: null,
+  cv: 0.08,
+  modulus: null,
+  strength: null,
+  moisture: null,
+  form: '',
+  source: 'weighed',
+  basis: 'own measurement',
+  shared: true,
+  version: 1,
+  usedBy: 0,
+  can: { edit: false, delete: false },
+};
+const row = (name: string, fields: Partial<MaterialDto> = {}): MaterialDto => ({ ...balsa, name, ...fields });
 const table = [
   row('Balsa, light'),
   row('Balsa, hard', { form: 'C cut, for ribs' }),

@@ -3,7 +3,7 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { act } from 'react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import { SignUpForm } from '#client/features/session/sign-up-form.tsx';
-import { mount, only, type } from '#tests/client/lib/mount.tsx';
+import { mount, only, onlyInput, type } from '#tests/client/lib/mount.tsx';
 
 async function form() {
   const client = new QueryClient();
@@ -12,7 +12,7 @@ async function form() {
       <SignUpForm />
     </QueryClientProvider>,
   );
-  const input = (name: string) => only<HTMLInputElement>(element, `input[name=${name}]`);
+  const input = (name: string) => onlyInput(element, `input[name=${name}]`);
   const submit = () =>
     act(async () => {
       only(element, 'form').dispatchEvent(new Event('submit', { bubbles: true, cancelable: true }));
@@ -40,35 +40,42 @@ describe('sign up', () => {
     expect(fetched).not.toHaveBeenCalled();
   });
 
-  it('puts what the server refuses at the field that its pointer names', async () => {
-    const problem = {
-      ...{
-        type: 'about:blank',
-        title: 'Conflict',
-        status: 409,
-        code: 'email_taken',
-        detail: 'That address is taken.',
-      },
-      errors: [{ pointer: '#/email', detail: 'Somebody has signed up with this address.' }],
-    };
-    vi.stubGlobal('fetch', () => Promise.resolve(new Response(JSON.stringify(problem), { status: 409 })));
-    const { submit, errorOf, input } = await form();
+  const refuse = (problem: object) =>
+    vi.stubGlobal('fetch', () =>
+      Promise.resolve(
+        new Response(JSON.stringify({ type: 'about:blank', title: 'No', ...problem }), { status: 409 }),
+      ),
+    );
+  const fill = async ({ input }: Awaited<ReturnType<typeof form>>) => {
     await type(input('name'), 'Ines');
     await type(input('email'), 'ines@larkmoor.example');
     await type(input('password'), 'a row of words');
-    await submit();
-    expect(errorOf('email')).toContain('Somebody has signed up with this address.');
-    expect(input('password').value).toBe('a row of words');
+  };
+
+  it('puts what the server refuses at the field that its pointer names', async () => {
+    const errors = [{ pointer: '#/password', detail: 'Too common.' }];
+    refuse({ status: 400, code: 'invalid_input', detail: 'Not accepted.', errors });
+    const shown = await form();
+    await fill(shown);
+    await shown.submit();
+    expect(shown.errorOf('password')).toContain('Too common.');
+    expect(shown.input('password').value).toBe('a row of words');
+  });
+
+  it('says at the address that it is taken', async () => {
+    refuse({ status: 409, code: 'email_taken', detail: 'This address has an account already.' });
+    const shown = await form();
+    await fill(shown);
+    await shown.submit();
+    expect(shown.errorOf('email')).toContain('has an account already');
   });
 
   it('says at the top what belongs to no field, and loses nothing', async () => {
     vi.stubGlobal('fetch', () => Promise.reject(new TypeError('no route')));
-    const { element, submit, input } = await form();
-    await type(input('name'), 'Ines');
-    await type(input('email'), 'ines@larkmoor.example');
-    await type(input('password'), 'a row of words');
-    await submit();
-    expect(only(element, '[role=alert]').textContent).toContain('cannot be reached');
-    expect(input('name').value).toBe('Ines');
+    const shown = await form();
+    await fill(shown);
+    await shown.submit();
+    expect(only(shown.element, '[role=alert]').textContent).toContain('cannot be reached');
+    expect(shown.input('name').value).toBe('Ines');
   });
 });

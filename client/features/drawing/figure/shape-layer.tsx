@@ -1,0 +1,44 @@
+import { memo, useMemo } from 'react';
+import type { Shape } from '#shared/drawing/shape.ts';
+import { hoveredLook, lookOf, pickedLook, type Look } from './shape-look.ts';
+import { pathOf, type Sheet } from './sheet.ts';
+
+interface ShapeLayerProps {
+  shapes: readonly Shape[];
+  sheet: Sheet;
+}
+
+/** The drawing in pencil. Renders only when what is drawn or its scale changes, not when a part is picked. */
+export const ShapeLayer = memo(function ShapeLayer({ shapes, sheet }: ShapeLayerProps) {
+  return shapes.map((shape, i) => {
+    const look = lookOf(shape);
+    return look && <ShapePath key={i} shape={shape} sheet={sheet} look={look} />;
+  });
+});
+
+interface LitLayerProps extends ShapeLayerProps {
+  picked: string | null;
+  hovered: string | null;
+}
+
+/** What is picked and what the pointer is over, in ink over the pencil. */
+export function LitLayer({ shapes, sheet, picked, hovered }: LitLayerProps) {
+  const lit = useMemo(
+    () => shapes.filter(({ line }) => line !== null && (line === picked || line === hovered)),
+    [shapes, picked, hovered],
+  );
+  return (
+    <g pointerEvents="none">
+      {lit.map((shape, i) => {
+        const look = shape.line === picked ? pickedLook(shape) : hoveredLook(shape);
+        return look && <ShapePath key={i} shape={shape} sheet={sheet} look={look} />;
+      })}
+    </g>
+  );
+}
+
+function ShapePath({ shape, sheet, look }: { shape: Shape; sheet: Sheet; look: Look }) {
+  const outer = pathOf(sheet, shape.points, shape.closed);
+  const d = shape.hole ? `${outer}${pathOf(sheet, shape.hole, true)}` : outer;
+  return <path d={d} fillRule={shape.hole ? 'evenodd' : undefined} {...look} strokeLinejoin="round" />;
+}

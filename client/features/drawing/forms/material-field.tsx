@@ -1,0 +1,72 @@
+import { Select, type OptionGroup } from '#client/components/ui/select.tsx';
+import type { MaterialCategory, Plan, PlanMaterial } from '#shared/core/plan.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
+import { choices, type Fits, type TableMaterial } from '../edits/materials.ts';
+
+interface MaterialFieldProps {
+  materials: Plan['materials'];
+  table: readonly TableMaterial[];
+  fits: Fits;
+  value: string;
+  error: string | undefined;
+  readOnly: boolean;
+  onValue: (choice: TableMaterial) => void;
+}
+
+const CATEGORIES: Record<MaterialCategory, string> = {
+  wood: 'Wood',
+  composite: 'Composite',
+  metal: 'Metal',
+  sheet: 'Ply and board',
+  covering: 'Covering',
+  finish: 'Finish',
+  adhesive: 'Glue',
+};
+
+/** By what a material is weighed, in words. */
+export function figureOf({ density, areal, spread }: PlanMaterial): string {
+  if (density !== undefined) return formatQuantity(density, 'density');
+  if (areal !== undefined) return formatQuantity(areal, 'areal');
+  return spread === undefined ? '' : formatQuantity(spread, 'spread');
+}
+
+/** What a part is made of: the plan's own materials and, besides, those of the materials table. */
+export function MaterialField({
+  materials,
+  table,
+  fits,
+  value,
+  error,
+  readOnly,
+  onValue,
+}: MaterialFieldProps) {
+  const offered = choices({ materials }, table, fits);
+  const current = materials[value];
+  const all =
+    current && !offered.some(({ key }) => key === value)
+      ? [{ key: value, material: current }, ...offered]
+      : offered;
+  const categories = [...new Set(all.map(({ material }) => material.category))];
+  const groups = categories.map((category): OptionGroup => ({
+    label: CATEGORIES[category],
+    options: all
+      .filter(({ material }) => material.category === category)
+      .map(({ key, material }) => ({ value: key, label: `${material.name}, ${figureOf(material)}` })),
+  }));
+  const missing = current ? [] : [{ value, label: 'Choose a material', disabled: true }];
+  return (
+    <Select
+      inline
+      label="Material"
+      value={value}
+      options={[...missing, ...groups]}
+      error={error}
+      keepRoom={false}
+      disabled={readOnly}
+      onValue={(key) => {
+        const choice = all.find((other) => other.key === key);
+        if (choice) onValue(choice);
+      }}
+    />
+  );
+}

@@ -1,0 +1,50 @@
+import { TextField } from '#client/components/ui/text-field.tsx';
+import type { Workspace } from '#client/lib/workspace.ts';
+import type { Plan } from '#shared/core/plan.ts';
+import type { Estimate } from '#shared/core/result.ts';
+import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { LIMITS } from '#shared/schemas/limits.ts';
+
+type HeadlineProps = Pick<Workspace, 'plan' | 'result' | 'edit' | 'canEdit' | 'issues'>;
+
+/** What is drawn, in a sentence, and the glider's name. */
+export function Headline({ plan, result, edit, canEdit, issues }: HeadlineProps) {
+  return (
+    <header className="flex flex-wrap items-end justify-between gap-x-8 gap-y-2">
+      <div className="min-w-0">
+        <h1 className="text-heading font-semibold">{drawnSentence(plan, result)}</h1>
+        <p className="text-note text-graphite">
+          {canEdit
+            ? 'Pick a part in the list or in the drawing; every change is drawn and weighed at once.'
+            : 'You may look at this plan but not change it.'}
+        </p>
+      </div>
+      <div className="w-64 max-w-full">
+        <TextField
+          inline
+          label="Glider"
+          value={plan.name}
+          maxLength={LIMITS.name.max}
+          error={issues.get('name')}
+          keepRoom={false}
+          readOnly={!canEdit}
+          autoComplete="off"
+          onChange={(event) => {
+            const name = event.target.value;
+            edit((p) => ({ ...p, name }), 'name');
+          }}
+        />
+      </div>
+    </header>
+  );
+}
+
+function drawnSentence(plan: Plan, { planform, lines, totals }: Estimate): string {
+  const wing = plan.surfaces.find(({ role }) => role === 'wing');
+  const form = wing && planform[wing.key];
+  const parts = lines.length === 1 ? '1 part' : `${lines.length} parts`;
+  const weigh =
+    lines.length === 0 ? 'no parts yet' : `${parts} weighing ${formatQuantity(totals.mass, 'mass')}`;
+  if (!form) return lines.length === 0 ? 'An empty sheet' : `No wing yet, ${weigh}`;
+  return `${formatNumber(form.span, 0)} mm of span, ${formatQuantity(form.areaProjected, 'area')} of wing, ${weigh}`;
+}

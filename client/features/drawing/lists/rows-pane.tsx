@@ -1,0 +1,161 @@
+import { useEffect, useLayoutEffect, useMemo, useRef, useState, type ReactNode } from 'react';
+import { Button } from '#client/components/ui/button.tsx';
+import type { Workspace } from '#client/lib/workspace.ts';
+import type { Plan } from '#shared/core/plan.ts';
+import type { Recipe } from '../edits/plan-edits.ts';
+import { copiedRow, movedRow, withoutRow } from '../edits/rows.ts';
+import type { Hover } from '../hover.ts';
+import { ListRow } from './list-row.tsx';
+import type { RowOps } from './row-tools.tsx';
+import type { FocusWish } from './focus-wish.ts';
+
+/** What every list of the drawing needs of the desk. */
+export interface Desk {
+  plan: Plan;
+  edit: Workspace['edit'];
+  undo: () => void;
+  canEdit: boolean;
+  issues: Workspace['issues'];
+  picked: string | null;
+  pick: (line: string | null) => void;
+  /** g, by line */
+  masses: ReadonlyMap<string, number>;
+  hover: Hover;
+  narrow: boolean;
+  wish: FocusWish;
+}
+
+interface RowsPaneProps<T> {
+  desk: Desk;
+  title: string;
+  /** heads of the columns of size and mass */
+  sizeHead: string;
+  rows: readonly T[];
+  lineOf: (row: T) => string;
+  noteOf?: (row: T) => string;
+  sizeOf: (row: T) => string;
+  /** where a row stands in the plan, such as `items/3` */
+  pathOf: (index: number) => string;
+  change: (rows: (rows: T[]) => T[]) => Recipe;
+  formOf: (row: T, index: number) => ReactNode;
+  /** told where there are no rows */
+  empty: string;
+  /** the control that adds one */
+  add: ReactNode;
+}
+
+/** A list whose rows are picked, opened, copied, moved and removed, with the focus always somewhere sensible. */
+export function RowsPane<T extends { id: string; name: string }>(props: RowsPaneProps<T>) {
+  const { desk, title, rows, lineOf, noteOf, sizeOf, pathOf, formOf, empty, add } = props;
+  const { plan, picked, narrow, hover, wish, canEdit, masses } = desk;
+  const list = useRef<HTMLUListElement>(null);
+  const [removed, setRemoved] = useState<{ name: string; before: Plan; after: Plan | null } | null>(null);
+  if (removed && removed.after === null && plan !== removed.before) setRemoved({ ...removed, after: plan });
+  const ops = useOps(props, (name) => setRemoved({ name, before: plan, after: null }));
+  useEffect(() => wish.grant(list.current));
+
+  return (
+    <section aria-label={title}>
+      <div className="flex items-baseline gap-x-2 border-b border-strong-rule px-2 pb-1 text-note text-graphite">
+        <h2 className="caption flex-1">{title}</h2>
+        <span className="shrink-0">{rows.length > 0 && props.sizeHead}</span>
+        <span className="w-18 shrink-0 text-right">{rows.length > 0 && 'Mass'}</span>
+      </div>
+      {rows.length === 0 && <p className="px-2 py-3 text-note text-graphite">{empty}</p>}
+      <ul ref={list}>
+        {rows.map((row, i) => {
+          const line = lineOf(row);
+          return (
+            <ListRow
+              key={row.id}
+              id={row.id}
+              line={line}
+              name={row.name}
+              note={noteOf?.(row) ?? ''}
+              size={sizeOf(row)}
+              mass={masses.get(line)}
+              picked={picked === line}
+              first={i === 0}
+              last={i === rows.length - 1}
+              wrong={desk.issues.size > 0 && hasIssue(desk.issues, `${pathOf(i)}/`)}
+              form={picked === line ? formOf(row, i) : null}
+              {...{ hover, ops, narrow, canEdit }}
+            />
+          );
+        })}
+      </ul>
+      <div className="flex flex-wrap items-center gap-x-3 gap-y-1 pt-2">
+        {canEdit && add}
+        <p role="status" className="flex min-h-row items-center gap-x-2 text-note text-graphite">
+          {removed?.after === plan && (
+            <>
+              “{removed.name}” removed.
+              <Button variant="plain" className="text-note" onClick={desk.undo}>
+                Undo
+              </Button>
+            </>
+          )}
+        </p>
+      </div>
+    </section>
+  );
+}
+
+function hasIssue(issues: Workspace['issues'], under: string): boolean {
+  for (const path of issues.keys()) if (path.startsWith(under)) return true;
+  return false;
+}
+
+/** Operations that stay the same object while what they act on changes. */
+function useOps<T extends { id: string; name: string }>(
+  props: RowsPaneProps<T>,
+  onRemoved: (name: string) => void,
+): RowOps {
+  const latest = useRef({ props, onRemoved });
+  useLayoutEffect(() => {
+    latest.current = { props, onRemoved };
+  });
+  return useMemo((): RowOps => {
+    const now = () => latest.current.props;
+    const lineAt = (i: number) => {
+      const row = now().rows[i];
+      return row ? now().lineOf(row) : null;
+    };
+    return {
+      pick: (line) => now().desk.pick(line),
+      close: (line) => {
+        now().desk.wish.ask(line, 'row');
+        now().desk.pick(null);
+      },
+      copy: (id) => {
+        const { desk, rows, change, lineOf } = now();
+        const { copy } = copiedRow(rows, id);
+        if (!copy) return;
+        desk.edit(
+          change((all) => copiedRow(all, id).rows),
+          `copy ${id}`,
+        );
+        desk.wish.ask(lineOf(copy), 'form');
+        desk.pick(lineOf(copy));
+      },
+      move: (id, by) =>
+        now().desk.edit(
+          now().change((all) => movedRow(all, id, by)),
+          `move ${id}`,
+        ),
+      remove: (id) => {
+        const { desk, rows, change } = now();
+        const at = rows.findIndex((row) => row.id === id);
+        const row = rows[at];
+        if (!row) return;
+        latest.current.onRemoved(row.name);
+        desk.wish.ask(lineAt(at + 1) ?? lineAt(at - 1), 'row');
+        desk.pick(null);
+        desk.edit(
+          change((all) => withoutRow(all, id)),
+          `remove ${id}`,
+        );
+      },
+    };
+  }, []);
+}

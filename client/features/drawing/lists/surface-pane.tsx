@@ -1,0 +1,132 @@
+import { Button } from '#client/components/ui/button.tsx';
+import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
+import type { Part, Surface } from '#shared/core/plan.ts';
+import { fitsPart, inTable, preferred, type TableMaterial } from '../edits/materials.ts';
+import { newPart, PART_CHOICES, WISHES, type PartChoice } from '../edits/new-part.ts';
+import { changeParts, dropUnused, inTurn, keepMaterial } from '../edits/plan-edits.ts';
+import { freshId, freshName, withRow } from '../edits/rows.ts';
+import type { Form } from '../forms/form.ts';
+import { PartForm } from '../forms/part-form.tsx';
+import { PanelsTable } from './panels-table.tsx';
+import { RowsPane, type Desk } from './rows-pane.tsx';
+import { SectionsTable } from './sections-table.tsx';
+import { partNote, partSize } from './size-text.ts';
+import { SurfaceSettings } from './surface-settings.tsx';
+
+interface SurfacePaneProps {
+  desk: Desk;
+  surface: Surface;
+  index: number;
+  table: readonly TableMaterial[];
+  onRemoved: () => void;
+}
+
+/** One surface on the left of its drawing: panels, sections, parts. */
+export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfacePaneProps) {
+  const change = (parts: (parts: Part[]) => Part[]) => changeParts(index, parts);
+  const add = (choice: PartChoice) => {
+    const bare = newPart(choice, surface);
+    const material = preferred(desk.plan, table, fitsPart(bare), WISHES[choice]);
+    const part = {
+      ...bare,
+      id: freshId(
+        idOf(bare.name),
+        surface.parts.map((p) => p.id),
+      ),
+      name: freshName(
+        bare.name,
+        surface.parts.map((p) => p.name),
+      ),
+      material: material?.key ?? '',
+    } as Part; // a NewPart with the two fields it lacks; the compiler does not put the union together again
+    const recipe = change((parts) => [...parts, part]);
+    desk.edit(
+      material ? inTurn(keepMaterial(material.key, material.material), recipe) : recipe,
+      `add ${part.id}`,
+    );
+    desk.wish.ask(`${surface.key}/${part.id}`, 'form');
+    desk.pick(`${surface.key}/${part.id}`);
+  };
+  return (
+    <div className="grid gap-y-6">
+      <div>
+        <PanelsTable desk={desk} surface={surface} index={index} />
+        <SectionsTable desk={desk} surface={surface} index={index} />
+      </div>
+      <RowsPane
+        desk={desk}
+        title="Parts"
+        sizeHead="mm"
+        rows={surface.parts}
+        lineOf={(part) => `${surface.key}/${part.id}`}
+        noteOf={partNote}
+        sizeOf={partSize}
+        pathOf={(i) => `surfaces/${index}/parts/${i}`}
+        change={change}
+        empty="No parts yet. Begin with ribs and spars, or with a sheet for a plate tail."
+        add={<AddPart onAdd={add} />}
+        formOf={(part, i) => (
+          <OnePart desk={desk} surface={surface} index={index} table={table} part={part} at={i} />
+        )}
+      />
+      <SurfaceSettings desk={desk} surface={surface} index={index} onRemoved={onRemoved} />
+    </div>
+  );
+}
+
+const idOf = (name: string) =>
+  name
+    .toLowerCase()
+    .replace(/[^a-z0-9]+/g, '-')
+    .replace(/^-|-$/g, '');
+
+interface OnePartProps extends Omit<SurfacePaneProps, 'onRemoved'> {
+  part: Part;
+  at: number;
+}
+
+function OnePart({ desk, surface, index, table, part, at }: OnePartProps) {
+  const change = (fn: (part: Part) => Part, what: string) =>
+    desk.edit(
+      changeParts(index, (parts) => withRow(parts, part.id, fn)),
+      `${surface.key}/${part.id}: ${what}`,
+    );
+  const form: Form<Part> = {
+    value: part,
+    // The fields come from this part's own kind, so the result is of that kind again.
+    set: (changes, field) => change((p) => ({ ...p, ...changes }) as Part, field),
+    issue: (path) => desk.issues.get(`surfaces/${index}/parts/${at}/${path}`),
+    readOnly: !desk.canEdit,
+  };
+  const onMaterial = ({ key, material }: TableMaterial) =>
+    desk.edit(
+      inTurn(
+        keepMaterial(key, material),
+        changeParts(index, (parts) => withRow(parts, part.id, (p) => ({ ...p, material: key }))),
+        dropUnused(part.material, inTable(table)),
+      ),
+      `${surface.key}/${part.id}: material`,
+    );
+  return (
+    <PartForm
+      key={part.id}
+      form={form}
+      mirrored={surface.mirrored}
+      materials={desk.plan.materials}
+      table={table}
+      onMaterial={onMaterial}
+    />
+  );
+}
+
+function AddPart({ onAdd }: { onAdd: (choice: PartChoice) => void }) {
+  return (
+    <Menu align="start" trigger={<Button>Add a part</Button>}>
+      {PART_CHOICES.map(({ choice, label }) => (
+        <MenuItem key={choice} onSelect={() => onAdd(choice)}>
+          {label}
+        </MenuItem>
+      ))}
+    </Menu>
+  );
+}

@@ -18,7 +18,7 @@ const schema = z.object({
   PORT: whole(0, 65_535).default(4310),
   HOST: z.string().default('127.0.0.1'),
   NODE_ENV: z.enum(['production', 'development', 'test']).default('production'),
-  LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),
+  LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('warn'),
   /** The built client. */
   FEATHERBEAM_CLIENT_DIR: z.string().default('node_modules/.cache/featherbeam/client'),
   /** Multiplies every rate limit. */

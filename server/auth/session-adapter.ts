@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import type { Adapter, DatabaseSession, DatabaseUser } from 'lucia';
 import { Op } from 'sequelize';
 import { Session } from '#server/models/session.ts';
-import { User } from '#server/models/user.ts';
+import type { User } from '#server/models/user.ts';
 
 /** What the database keeps of a session id: who reads the table cannot sign in with what he finds. */
 export const hashSessionId = (sessionId: string) => createHash('sha256').update(sessionId).digest('hex');

@@ -1,5 +1,5 @@
 import type { Request, RequestHandler, Response } from 'express';
-import { z } from 'zod';
+import type { z } from 'zod';
 import type { UserDto } from '#shared/schemas/session.ts';
 import type { ProblemCode } from '#server/errors.ts';
 import { readIdempotencyKey, readIfMatch } from './conditions.ts';

@@ -1,5 +1,5 @@
 import type { Request } from 'express';
-import { z } from 'zod';
+import type { z } from 'zod';
 import { pointerOf, type FieldProblem } from '#shared/schemas/problem.ts';
 import { invalidInput } from '#server/errors.ts';
 import { boundsProblems, MOST_PROBLEMS } from './bounds.ts';

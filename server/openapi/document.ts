@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { problem } from '#shared/schemas/problem.ts';
+import { lucia } from '#server/auth/lucia.ts';
 import { PROBLEMS, type ProblemCode } from '#server/errors.ts';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import { componentSchemas, inlineSchema, reference, type JsonSchema } from './components.ts';
@@ -52,7 +53,7 @@ export function openApiDocument(endpoints: readonly Endpoint[]): OpenApiDocument
     },
     servers: [{ url: '/api' }],
     components: {
-      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: 'featherbeam_session' } },
+      securitySchemes: { session: { type: 'apiKey', in: 'cookie', name: lucia.sessionCookieName } },
       schemas: componentSchemas(),
     },
     paths,

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 import { invalidInput } from '#server/errors.ts';
 
 /** What a page of a list is asked with. */

@@ -29,10 +29,10 @@ describe('when the connections to the database break under load', () => {
     const { user, agent } = await makePerson(app);
     const gliders = await Promise.all(Array.from({ length: 8 }, () => makeGlider({ owner: user })));
     const statuses: number[] = [];
-    let cutting = true;
+    const cutting = new AbortController();
     const saving = gliders.map(async ({ id }) => {
       let version = 1;
-      while (cutting) {
+      while (!cutting.signal.aborted) {
         const call = agent.put(`/api/gliders/${id}`).set('If-Match', `"${version}"`);
         const res = await call.send({ plan: smallPlan({ name: `Save ${version}` }) });
         statuses.push(res.status);
@@ -47,7 +47,7 @@ describe('when the connections to the database break under load', () => {
       await new Promise((resolve) => setTimeout(resolve, 120));
       cut += await cutConnections();
     }
-    cutting = false;
+    cutting.abort();
     await Promise.all(saving);
 
     vi.mocked(console.warn).mockClear();

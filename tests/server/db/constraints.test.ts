@@ -70,7 +70,7 @@ describe('the numbers typed into CHECK constraints', () => {
     ['glider_members_role', gliderRole.options],
   ])('%s lists the words of the schema', async (constraint, words) => {
     const listed = [...(await definitionOf(constraint)).matchAll(/'([^']+)'/g)].map(([, word]) => word);
-    expect(listed.toSorted()).toEqual([...words].toSorted());
+    expect(new Set(listed)).toEqual(new Set(words));
   });
 });
 

@@ -49,7 +49,7 @@ describe('POST /api/gliders/:id/sheets', () => {
     const owner = await makePerson(app);
     const glider = await makeGlider({ owner: owner.user });
     const answers = await Promise.all([1, 2, 3, 4].map(() => save(owner, glider.id)));
-    expect(answers.map(({ body }) => body.number).toSorted()).toEqual([1, 2, 3, 4]);
+    expect(new Set(answers.map(({ body }) => body.number))).toEqual(new Set([1, 2, 3, 4]));
   });
 
   it('makes one sheet for one key', async () => {

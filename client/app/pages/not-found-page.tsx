@@ -2,11 +2,12 @@ import { Link } from 'react-router-dom';
 import { paths } from '#client/app/paths.ts';
 import { buttonClass } from '#client/components/ui/button.tsx';
 import { useTitle } from '#client/hooks/use-title.ts';
+import { SheetPaper } from '../sheet-paper.tsx';
 
 export function NotFoundPage() {
   useTitle('Nothing here');
   return (
-    <div className="max-w-xl py-10">
+    <SheetPaper narrow>
       <h1 className="text-figure font-semibold">There is no such page</h1>
       <p className="mt-2">The address is wrong, or what stood here was deleted.</p>
       <p className="mt-5 flex flex-wrap gap-3">
@@ -17,6 +18,6 @@ export function NotFoundPage() {
           Open the sample glider
         </Link>
       </p>
-    </div>
+    </SheetPaper>
   );
 }

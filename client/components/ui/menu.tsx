@@ -14,7 +14,8 @@ export function Menu({ trigger, align = 'end', children }: MenuProps) {
   return (
     <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
+      {/* Inside the page's main part, so that no landmark is left when it opens. */}
+      <DropdownMenu.Portal container={document.getElementById('main')}>
         <DropdownMenu.Content
           align={align}
           sideOffset={4}

@@ -1,4 +1,5 @@
 import type { ComponentProps, ReactNode } from 'react';
+import { useOverflowing } from '#client/hooks/use-overflowing.ts';
 import { cn } from '#client/lib/cn.ts';
 
 interface TableProps extends ComponentProps<'table'> {
@@ -8,15 +9,12 @@ interface TableProps extends ComponentProps<'table'> {
   children: ReactNode;
 }
 
-/** A ruled table. On a narrow screen it scrolls in its own frame, reachable by keyboard. */
+/** A ruled table. Where it is too wide it scrolls in its own frame, which the keyboard then reaches. */
 export function Table({ caption, showCaption = false, className, children, ...rest }: TableProps) {
+  const [frame, overflowing] = useOverflowing<HTMLDivElement>();
+  const reachable = overflowing ? { role: 'region', 'aria-label': caption, tabIndex: 0 } : {};
   return (
-    <div
-      role="region"
-      aria-label={caption}
-      tabIndex={0}
-      className="relative max-w-full overflow-x-auto print:overflow-visible"
-    >
+    <div ref={frame} {...reachable} className="relative max-w-full overflow-x-auto print:overflow-visible">
       <table {...rest} className={cn('w-full border-collapse', className)}>
         <caption className={showCaption ? 'caption pb-2 text-left' : 'sr-only'}>{caption}</caption>
         {children}

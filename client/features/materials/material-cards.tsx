@@ -22,7 +22,7 @@ export function MaterialCards({
             </h2>
             <MaterialMenu row={row} {...actions} />
           </div>
-          <dl className="mt-1 flex flex-wrap gap-x-4 gap-y-1 text-note">
+          <dl className="mt-1 flex flex-wrap gap-x-4 gap-y-1 items-baseline text-note">
             {FIGURES.map(({ id, label, quantity }) => {
               const value = row[id];
               return value === null ? null : (
@@ -32,20 +32,25 @@ export function MaterialCards({
                 </div>
               );
             })}
+            <div className="flex items-baseline gap-1.5">
+              <dt className="text-graphite">Used by</dt>
+              <dd>
+                <UsedBy row={row} {...actions} />
+              </dd>
+            </div>
           </dl>
-          <div className="flex items-baseline gap-4">
-            <details className="min-w-0 flex-1">
-              <summary className="inline-flex min-h-row items-center text-note text-ink">
-                Source: {row.basis}
-              </summary>
-              <MaterialNotes row={row} />
-            </details>
-            <span className="shrink-0 text-note text-graphite">
-              used by <UsedBy row={row} {...actions} />
-            </span>
-          </div>
+          <details>
+            <summary className="inline-flex min-h-row items-center text-note text-ink">
+              {capital(row.basis)}
+            </summary>
+            <MaterialNotes row={row} />
+          </details>
         </li>
       ))}
     </ul>
   );
+}
+
+function capital(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
 }

@@ -152,7 +152,7 @@ function MaterialRow({ row, open, onToggle, ...actions }: MaterialRowProps) {
       </tr>
       {open && (
         <tr className="bg-ink-wash">
-          <Td colSpan={FIGURES.length + 5} id={detailId} className="h-auto pt-0 pr-6 pb-3 pl-[3.25rem]">
+          <Td colSpan={FIGURES.length + 5} id={detailId} className="h-auto pt-0 pr-6 pb-3 pl-[2.9rem]!">
             <MaterialNotes row={row} />
           </Td>
         </tr>
@@ -166,12 +166,7 @@ export function MaterialNotes({ row }: { row: MaterialDto }) {
   return (
     <div className="max-w-3xl text-note">
       {row.form && <p>{row.form}</p>}
-      <p className="mt-1 text-graphite">
-        {row.basis === 'published'
-          ? 'Published: '
-          : `${row.basis.charAt(0).toUpperCase()}${row.basis.slice(1)}: `}
-        {row.source}
-      </p>
+      <p className="mt-1 text-graphite">Source: {row.source}</p>
     </div>
   );
 }
@@ -185,7 +180,7 @@ export function UsedBy({ row, onUses }: Pick<MaterialRowProps, 'row' | 'onUses'>
       type="button"
       onClick={() => onUses(row)}
       aria-label={`${row.name} is used by ${row.usedBy}: show where`}
-      className="link min-h-row min-w-8 text-right"
+      className="link min-h-row min-w-8 text-right max-lg:min-w-11 max-lg:text-left"
     >
       {row.usedBy}
     </button>

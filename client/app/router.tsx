@@ -1,7 +1,6 @@
 import { createBrowserRouter, Navigate, type RouteObject } from 'react-router-dom';
 import { Layout } from './layout.tsx';
 import { ErrorPage } from './pages/error-page.tsx';
-import { HomePage } from './pages/home-page.tsx';
 import { NotFoundPage } from './pages/not-found-page.tsx';
 
 /** The places of a glider, each in a file of its own that is fetched when it is first opened. */
@@ -37,7 +36,10 @@ const routes: RouteObject[] = [
       {
         errorElement: <ErrorPage />,
         children: [
-          { index: true, element: <HomePage /> },
+          {
+            index: true,
+            lazy: async () => ({ Component: (await import('./pages/home-page.tsx')).HomePage }),
+          },
           {
             path: 'sign-in',
             lazy: async () => ({ Component: (await import('./pages/sign-in-page.tsx')).SignInPage }),

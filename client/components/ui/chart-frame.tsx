@@ -33,9 +33,7 @@ export function ChartFrame({ title, sentence, columns, rows, children, className
       </figcaption>
       <div className="mt-3">{children}</div>
       <details className="mt-2 print:hidden">
-        <summary className="inline-flex min-h-row items-center text-note font-semibold text-ink">
-          Table
-        </summary>
+        <summary className="opens text-note font-semibold">Table</summary>
         <Table caption={title} className="mt-1 text-note">
           <thead>
             <tr>

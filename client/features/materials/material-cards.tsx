@@ -40,9 +40,7 @@ export function MaterialCards({
             </div>
           </dl>
           <details>
-            <summary className="inline-flex min-h-row items-center text-note text-ink">
-              {capital(row.basis)}
-            </summary>
+            <summary className="opens text-note">{capital(row.basis)}</summary>
             <MaterialNotes row={row} />
           </details>
         </li>

@@ -1,6 +1,6 @@
+import { printedSheet, type PrintedFigures } from '#shared/core/printed-sheet.ts';
 import type { SheetDto } from '#shared/schemas/sheet.ts';
 import { csvTable, type Cell } from './csv.ts';
-import { printedColumn } from './printed-column.ts';
 
 const HEAD = [
   'Line',
@@ -10,55 +10,37 @@ const HEAD = [
   'Pieces',
   'Mass g',
   'Uncertainty g',
-  'x mm',
-  'y mm',
-  'z mm',
+  'Arm mm',
   'Moment g mm',
+  'Share %',
 ];
-
-const MASS_DIGITS = 2;
-const ARM_DIGITS = 1;
-const MOMENT_DIGITS = 1;
 
 const text = (value: string): Cell => ({ text: value });
 const number = (value: string): Cell => ({ number: value });
-const rounded = (value: number, digits: number) => number(printedColumn([value], digits).total);
 
-/** A balance sheet as a table: one row a line, and a last row whose masses and moments are the columns' sums. */
+/**
+ * A balance sheet as a table, with the figures that are printed on screen and paper: one row a part, and a last row
+ * with what the columns add up to.
+ */
 export function sheetCsv({ plan, result }: Pick<SheetDto, 'plan' | 'result'>): string {
-  const masses = printedColumn(
-    result.lines.map((line) => line.mass),
-    MASS_DIGITS,
+  const { groups, total } = printedSheet(result);
+  const pieces = new Map(result.lines.map((line) => [line.id, line.pieces]));
+  const materialName = (key: string) => plan.materials[key]?.name ?? key;
+  const rows = groups.flatMap((group) =>
+    group.rows.map((row) => [
+      text(row.id),
+      text(row.name),
+      text(group.name),
+      row.material === null ? null : text(materialName(row.material)),
+      number(String(pieces.get(row.id) ?? '')),
+      ...figures(row),
+    ]),
   );
-  const moments = printedColumn(
-    result.lines.map((line) => line.moment),
-    MOMENT_DIGITS,
-  );
-  const arms = (at: readonly number[] | null): Cell[] =>
-    at ? at.map((value) => rounded(value, ARM_DIGITS)) : [null, null, null];
-  const rows = result.lines.map((line, i) => [
-    text(line.id),
-    text(line.name),
-    text(line.group),
-    line.material === null ? null : text(plan.materials[line.material]?.name ?? line.material),
-    number(String(line.pieces)),
-    number(masses.lines[i] ?? ''),
-    rounded(line.u, MASS_DIGITS),
-    ...arms(line.at),
-    number(moments.lines[i] ?? ''),
-  ]);
-  const total = [
-    text('Total'),
-    null,
-    null,
-    null,
-    null,
-    number(masses.total),
-    rounded(result.totals.u, MASS_DIGITS),
-    ...arms(result.totals.at),
-    number(moments.total),
-  ];
-  return csvTable([HEAD.map(text), ...rows, total]);
+  return csvTable([HEAD.map(text), ...rows, [text('Total'), null, null, null, null, ...figures(total)]]);
+}
+
+function figures({ mass, u, arm, moment, share }: PrintedFigures): Cell[] {
+  return [number(mass), number(u), arm === null ? null : number(arm), number(moment), number(share)];
 }
 
 /** @example sheetFileName({ gliderName: 'Dunlin', number: 2 }, 'csv') // → 'Dunlin, sheet 2.csv' */

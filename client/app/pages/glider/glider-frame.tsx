@@ -64,7 +64,7 @@ export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps
 function tabClass({ isActive }: { isActive: boolean }): string {
   return cn(
     'flex min-h-9 items-center border border-b-0 px-4 whitespace-nowrap no-underline pointer-coarse:min-h-11',
-    'focus-visible:-outline-offset-2 max-sm:px-2.5',
+    'focus-visible:-outline-offset-2 max-sm:px-2',
     isActive
       ? 'rounded-t-md border-strong-rule bg-sheet font-semibold text-pencil'
       : 'border-transparent text-graphite hover:text-ink',

@@ -8,7 +8,8 @@ const BASE =
   'transition-colors duration-150 disabled:cursor-not-allowed disabled:opacity-60 aria-disabled:opacity-60 ' +
   'pointer-coarse:px-3.5';
 const VARIANTS: Record<ButtonVariant, string> = {
-  primary: 'border-ink bg-ink text-on-ink enabled:hover:border-ink-deep enabled:hover:bg-ink-deep',
+  primary:
+    'forced-color-adjust-none border-ink bg-ink text-on-ink enabled:hover:border-ink-deep enabled:hover:bg-ink-deep',
   quiet: 'border-ink bg-transparent text-ink enabled:hover:bg-ink-wash',
   danger: 'border-red bg-transparent text-red enabled:hover:bg-red-wash',
   plain: 'border-transparent bg-transparent px-2 text-ink enabled:hover:bg-ink-wash',

@@ -40,7 +40,7 @@ export function ToastProvider({ children }: { children: ReactNode }) {
         {messages.map((message) => (
           <div
             key={message.id}
-            className="pointer-events-auto flex max-w-md items-center gap-3 rounded-md bg-pencil py-1.5 pr-1.5 pl-4 text-sheet shadow-float"
+            className="pointer-events-auto flex max-w-md items-center gap-3 rounded-md bg-pencil forced-color-adjust-none py-1.5 pr-1.5 pl-4 text-sheet shadow-float"
           >
             <span>{message.text}</span>
             <button

@@ -37,7 +37,9 @@ export function layoutSheet(sheet: PrintedSheet, name: string): SheetLayout {
   const columns = [all.slice(0, half), all.slice(half)];
   if (heightOf(columns) >= LOWEST_ROW) return laid(columns, 0);
   const groups = all.filter(({ kind }) => kind !== 'part');
-  return laid([groups], all.length - groups.length);
+  const middle = Math.ceil(groups.length / 2);
+  const few = groups.length <= ONE_COLUMN;
+  return laid(few ? [groups] : [groups.slice(0, middle), groups.slice(middle)], all.length - groups.length);
 }
 
 function rowsOf({ groups, total }: PrintedSheet, name: string): SheetRow[] {

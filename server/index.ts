@@ -57,6 +57,8 @@ async function main(): Promise<void> {
     stopTidying();
     const closed = new Promise((resolve) => server.close(resolve));
     server.closeIdleConnections();
+    // A query that hangs must not keep the program from ending.
+    setTimeout(() => process.exit(1), 2 * STOP_PATIENCE_MS).unref();
     const impatience = setTimeout(() => server.closeAllConnections(), STOP_PATIENCE_MS);
     await closed;
     clearTimeout(impatience);

@@ -43,11 +43,11 @@ export function pieceAt(
   back: number,
   frame: Frame,
 ): Point[] {
-  const [inner, outer] = [station.s - thickness / 2, station.s + thickness / 2];
+  const half = thickness / 2;
   return [
-    frame({ ...station, s: inner }, front),
-    frame({ ...station, s: outer }, front),
-    frame({ ...station, s: outer }, back),
-    frame({ ...station, s: inner }, back),
+    frame(station, front, 0, -half),
+    frame(station, front, 0, half),
+    frame(station, back, 0, half),
+    frame(station, back, 0, -half),
   ];
 }

@@ -67,7 +67,13 @@ const length = (a: Point, b: Point) => Math.hypot(b[0] - a[0], b[1] - a[1]);
 
 /** True where a point is at least `distance` from every stretch of a line. */
 function isClear(p: Point, line: readonly Point[], distance: number): boolean {
-  return line.every((b, i) => i === 0 || distanceTo(p, line[i - 1] ?? b, b) >= distance);
+  for (let i = 1; i < line.length; i++) {
+    const [a, b] = [line[i - 1] ?? p, line[i] ?? p];
+    // Most stretches lie far off to one side, and that is told without a root.
+    if (Math.min(a[0], b[0]) - p[0] > distance || p[0] - Math.max(a[0], b[0]) > distance) continue;
+    if (distanceTo(p, a, b) < distance) return false;
+  }
+  return true;
 }
 
 /** Distance of a point from the stretch between two others. */

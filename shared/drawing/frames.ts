@@ -9,24 +9,27 @@ import type { Point } from './shape.ts';
 export type FrameName = 'above' | 'side' | 'board';
 export type SideName = 'starboard' | 'port';
 
-/** Where a point lies in the view: `x` mm behind the station's leading edge, `z` above its chord line. */
-export type Frame = (station: Station, x: number, z?: number) => Point;
+/**
+ * Where a point lies in the view: `x` mm behind the station's leading edge, `z` above its chord line, and `beyond`
+ * mm farther along the panel.
+ */
+export type Frame = (station: Station, x: number, z?: number, beyond?: number) => Point;
 
 export function frameOf(name: FrameName, side: SideName = 'starboard'): Frame {
   const sign = side === 'port' ? -1 : 1;
   switch (name) {
     case 'above':
-      return (station, x, z = 0) => {
+      return (station, x, z = 0, beyond = 0) => {
         const [bodyX, y] = pointOf(station, x, z);
-        return [bodyX, sign * y];
+        return [bodyX, sign * (y + beyond * station.panel.cos)];
       };
     case 'side':
-      return (station, x, z = 0) => {
+      return (station, x, z = 0, beyond = 0) => {
         const [bodyX, , bodyZ] = pointOf(station, x, z);
-        return [bodyX, bodyZ];
+        return [bodyX, bodyZ + beyond * station.panel.sin];
       };
     case 'board':
-      return (station, x) => [station.leadingEdge + x, sign * station.s];
+      return (station, x, _z, beyond = 0) => [station.leadingEdge + x, sign * (station.s + beyond)];
   }
 }
 

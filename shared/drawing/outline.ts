@@ -16,7 +16,7 @@ export function tipCurve(last: Station, length: number, frame: Frame, steps = TI
   const section = areaBetween(last.section, 0, 1);
   const middle = (section.amount > 0 ? section.x / section.amount : 0.5) * last.chord;
   const at = (angle: number, edge: number) =>
-    frame({ ...last, s: last.s + length * Math.sin(angle) }, middle + (edge - middle) * Math.cos(angle));
+    frame(last, middle + (edge - middle) * Math.cos(angle), 0, length * Math.sin(angle));
   const angles = Array.from({ length: steps + 1 }, (_, i) => (i * Math.PI) / 2 / steps);
   const leading = angles.map((angle) => at(angle, 0));
   const trailing = angles.slice(0, -1).map((angle) => at(angle, last.chord));

@@ -4,8 +4,9 @@ import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { SurfaceRole } from '#shared/core/plan.ts';
 import { newSurface } from './edits/new-rows.ts';
+import { Fold } from './fold.tsx';
 import { FlightForm } from './forms/flight-form.tsx';
-import { Headline } from './headline.tsx';
+import { Headline, NameField } from './headline.tsx';
 import { Hover } from './hover.ts';
 import { FocusWish } from './lists/focus-wish.ts';
 import { IndexTabs } from './lists/index-tabs.tsx';
@@ -66,14 +67,15 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
         {tab.kind === 'solids' && <SolidsPane desk={desk} table={table} />}
         {tab.kind === 'items' && <ItemsPane desk={desk} />}
       </div>
-      <details className="mt-4 border-t border-rule pt-1">
-        <summary className="inline-flex min-h-row items-center px-2 text-note font-semibold text-ink">
-          Wanted balance and flight
-        </summary>
-        <div className="px-2 pt-1">
+      <Fold
+        summary={narrow ? 'Name, wanted balance and flight' : 'Wanted balance and flight'}
+        className="mt-4 border-t border-rule px-2 pt-1"
+      >
+        <div className="grid gap-y-3 pt-1">
+          {narrow && <NameField {...{ plan, edit, canEdit, issues }} />}
           <FlightForm {...{ plan, edit, issues, canEdit }} />
         </div>
-      </details>
+      </Fold>
     </div>
   );
   const views = (
@@ -95,7 +97,7 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
   return (
     <div className="flex flex-1 flex-col">
       <div className="px-4 pt-5 pb-4 sm:px-7">
-        <Headline {...{ plan, result, edit, canEdit, issues }} />
+        <Headline {...{ plan, result, edit, canEdit, issues, narrow }} />
       </div>
       {narrow ? (
         <div className="border-t border-rule px-4 pb-10">

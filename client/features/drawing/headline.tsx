@@ -5,10 +5,16 @@ import type { Estimate } from '#shared/core/result.ts';
 import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 
-type HeadlineProps = Pick<Workspace, 'plan' | 'result' | 'edit' | 'canEdit' | 'issues'>;
+type NameFieldProps = Pick<Workspace, 'plan' | 'edit' | 'canEdit' | 'issues'>;
+
+interface HeadlineProps extends NameFieldProps {
+  result: Estimate;
+  /** a small screen, where the name has its field further down */
+  narrow: boolean;
+}
 
 /** What is drawn, in a sentence, and the glider's name. */
-export function Headline({ plan, result, edit, canEdit, issues }: HeadlineProps) {
+export function Headline({ plan, result, edit, canEdit, issues, narrow }: HeadlineProps) {
   return (
     <header className="flex flex-wrap items-end justify-between gap-x-8 gap-y-2">
       <div className="min-w-0">
@@ -19,23 +25,31 @@ export function Headline({ plan, result, edit, canEdit, issues }: HeadlineProps)
             : 'You may look at this plan but not change it.'}
         </p>
       </div>
-      <div className="w-64 max-w-full">
-        <TextField
-          inline
-          label="Glider"
-          value={plan.name}
-          maxLength={LIMITS.name.max}
-          error={issues.get('name')}
-          keepRoom={false}
-          readOnly={!canEdit}
-          autoComplete="off"
-          onChange={(event) => {
-            const name = event.target.value;
-            edit((p) => ({ ...p, name }), 'name');
-          }}
-        />
-      </div>
+      {!narrow && (
+        <div className="w-56 max-w-full">
+          <NameField {...{ plan, edit, canEdit, issues }} />
+        </div>
+      )}
     </header>
+  );
+}
+
+/** The glider's name. */
+export function NameField({ plan, edit, canEdit, issues }: NameFieldProps) {
+  return (
+    <TextField
+      label="Glider"
+      value={plan.name}
+      maxLength={LIMITS.name.max}
+      error={issues.get('name')}
+      keepRoom={false}
+      readOnly={!canEdit}
+      autoComplete="off"
+      onChange={(event) => {
+        const name = event.target.value;
+        edit((p) => ({ ...p, name }), 'name');
+      }}
+    />
   );
 }
 

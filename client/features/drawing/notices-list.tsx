@@ -3,6 +3,7 @@ import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import type { Notice as CoreNotice } from '#shared/core/notices.ts';
 import type { Plan } from '#shared/core/plan.ts';
+import { Fold } from './fold.tsx';
 
 interface NoticesListProps {
   notices: readonly CoreNotice[];
@@ -25,16 +26,13 @@ export function NoticesList({ notices, plan, onPick }: NoticesListProps) {
         <OneNotice key={i} words={one} onPick={onPick} />
       ))}
       {rest.length > 0 && (
-        <details>
-          <summary className="inline-flex min-h-row items-center text-note font-semibold text-ink">
-            {rest.length === 1 ? 'One more' : `${rest.length} more`}
-          </summary>
+        <Fold summary={rest.length === 1 ? 'One more' : `${rest.length} more`}>
           <div className="grid gap-y-1.5">
             {rest.map((one, i) => (
               <OneNotice key={i} words={one} onPick={onPick} />
             ))}
           </div>
-        </details>
+        </Fold>
       )}
     </section>
   );

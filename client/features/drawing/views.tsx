@@ -68,7 +68,9 @@ export function Views(props: ViewsProps) {
           onPick={onPick}
           station={cut}
           onStation={onStation}
-          maxHeight={narrow ? within(150, height * 0.28, 260) : within(240, height * 0.46, 470)}
+          maxHeight={
+            narrow ? within(150, height * 0.28, 260) : within(240, height * (surface ? 0.46 : 0.6), 560)
+          }
         />
         {stale && (
           <p role="status" className="text-note text-ochre">

@@ -1,7 +1,7 @@
 import { polygonArea } from 'd3-polygon';
 import { describe, expect, it } from 'vitest';
 import { developedAt } from '#shared/core/fit.ts';
-import { webHeight } from '#shared/core/parts/web.ts';
+import { webRoom } from '#shared/core/parts/web.ts';
 import { ribArea } from '#shared/core/parts/ribs.ts';
 import type { Part, SectionSpec, Strip, Surface } from '#shared/core/plan.ts';
 import { areaBetween } from '#shared/core/section-integrals.ts';
@@ -193,7 +193,7 @@ describe('a shear web in the section', () => {
     const [piece, ...rest] = drawn(surface, 200, 'web');
     const half = layOut(surface, 'starboard');
     expect(rest).toEqual([]);
-    expectNearly(areaOf(piece!) / 1.5, webHeight(half, web, stationAt(half.line, 200)), ROUNDING);
+    expectNearly(areaOf(piece!) / 1.5, webRoom(half, web, stationAt(half.line, 200)).height, ROUNDING);
   });
 
   it('is parted by a strip through its middle', () => {
@@ -205,7 +205,7 @@ describe('a shear web in the section', () => {
     const pieces = drawn(surface, 200, 'web');
     expect(pieces).toHaveLength(2);
     const height = pieces.reduce((sum, piece) => sum + areaOf(piece) / 1.5, 0);
-    expectNearly(height, webHeight(half, web, stationAt(half.line, 200)), ROUNDING);
+    expectNearly(height, webRoom(half, web, stationAt(half.line, 200)).height, ROUNDING);
   });
 
   it('is dashed where a rib stands in its place', () => {

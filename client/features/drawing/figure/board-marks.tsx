@@ -32,6 +32,9 @@ export function BoardMarks({ surface, side, sheet, dimensionAt, station, brief }
   const numbers = ribNumbers(surface);
   return (
     <g pointerEvents="none">
+      <MacLine mac={mac} px={px} brief={brief} />
+      {!brief && <Spans surface={surface} tip={tipLength(surface, side)} px={px} y={dimensionAt} />}
+      {station !== null && <Cut from={px(at(station).leadingEdge, station)} to={trailing(station)} />}
       {thinned(numbers, sheet.scale).map(({ s, number }) => {
         const [x, y] = trailing(s);
         return (
@@ -40,9 +43,6 @@ export function BoardMarks({ surface, side, sheet, dimensionAt, station, brief }
           </SheetText>
         );
       })}
-      <MacLine mac={mac} px={px} brief={brief} />
-      {!brief && <Spans surface={surface} tip={tipLength(surface, side)} px={px} y={dimensionAt} />}
-      {station !== null && <Cut from={px(at(station).leadingEdge, station)} to={trailing(station)} />}
     </g>
   );
 }
@@ -113,8 +113,8 @@ function Cut({
   return (
     <g stroke="var(--ink)" fill="var(--ink)">
       <path d={`M${x} ${y0}V${y1}`} strokeWidth={1} strokeDasharray="8 3 2 3" />
-      <path d={`M${x} ${y0 - 14}V${y0 - 3}M${x} ${y1 + 3}V${y1 + 14}`} strokeWidth={2.2} />
-      <path d={`M${x} ${y0 - 14}h-8m0 -3v6l-5 -3zM${x} ${y1 + 14}h-8m0 -3v6l-5 -3z`} strokeWidth={1} />
+      <path d={`M${x} ${y0 - 14}V${y0 - 3}M${x} ${y1 + 18}V${y1 + 28}`} strokeWidth={2.2} />
+      <path d={`M${x} ${y0 - 14}h-8m0 -3v6l-5 -3zM${x} ${y1 + 28}h-8m0 -3v6l-5 -3z`} strokeWidth={1} />
     </g>
   );
 }

@@ -9,17 +9,34 @@ export interface Label {
 /** Least distance of two lines of small type, px. */
 const APART = 14;
 
-/** The labels with places at which none lies on another, each as near to its line as that allows, inside the paper. */
+interface Cluster {
+  labels: Label[];
+  top: number;
+}
+
+/**
+ * The labels with places at which none lies on another, inside the paper. Words that would touch are stacked about
+ * the middle of their lines, so that none strays far.
+ */
 export function spread(labels: readonly Label[], low: number, high: number): (Label & { place: number })[] {
-  const sorted = [...labels].sort((a, b) => a.at - b.at);
-  const places = sorted.map(({ at }) => Math.min(high, Math.max(low, at)));
-  // Pushed down in order, then back up from the bottom edge.
-  for (let i = 1; i < places.length; i++) {
-    places[i] = Math.max(places[i] ?? 0, (places[i - 1] ?? 0) + APART);
+  const clusters: Cluster[] = [];
+  for (const label of [...labels].sort((a, b) => a.at - b.at)) {
+    let cluster = clusterOf([label], low, high);
+    let before = clusters.at(-1);
+    while (before && before.top + before.labels.length * APART > cluster.top) {
+      clusters.pop();
+      cluster = clusterOf([...before.labels, ...cluster.labels], low, high);
+      before = clusters.at(-1);
+    }
+    clusters.push(cluster);
   }
-  for (let i = places.length - 1; i >= 0; i--) {
-    const below = i === places.length - 1 ? high : (places[i + 1] ?? high) - APART;
-    places[i] = Math.min(places[i] ?? 0, below);
-  }
-  return sorted.map((label, i) => ({ ...label, place: places[i] ?? label.at }));
+  return clusters.flatMap(({ labels: stack, top }) =>
+    stack.map((label, i) => ({ ...label, place: top + i * APART })),
+  );
+}
+
+function clusterOf(labels: Label[], low: number, high: number): Cluster {
+  const middle = labels.reduce((sum, { at }) => sum + at, 0) / labels.length;
+  const reach = (labels.length - 1) * APART;
+  return { labels, top: Math.max(low, Math.min(high - reach, middle - reach / 2)) };
 }

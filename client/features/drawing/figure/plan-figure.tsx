@@ -39,7 +39,7 @@ export interface PlanFigureProps {
 }
 
 const MARGINS: Margins = { top: 36, right: 118, bottom: 66, left: 24 };
-const BRIEF: Margins = { top: 24, right: 12, bottom: 24, left: 12 };
+const BRIEF: Margins = { top: 24, right: 12, bottom: 38, left: 12 };
 /** Not larger than one and a half times its size on paper. */
 const MAX_SCALE = (1.5 * 96) / 25.4;
 /** How near to a thin part the pointer must be, px. */
@@ -117,7 +117,7 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
     <figure aria-labelledby={`${id}-title`} className="min-w-0">
       <FigureHead
         id={`${id}-title`}
-        title={planTitle(view, surface, side)}
+        title={planTitle(view, surface, side, brief)}
         note={scaleNote(sheet)}
         view={view}
         views={surface ? ['half', 'whole', 'side'] : ['whole', 'side']}

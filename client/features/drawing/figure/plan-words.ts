@@ -10,9 +10,16 @@ export function surfaceTitle({ key }: Pick<Surface, 'key'>): string {
   return key === '' ? 'No name' : key.charAt(0).toUpperCase() + key.slice(1);
 }
 
-export function planTitle(view: PlanViewName, surface: Surface | null, side: SideName): string {
-  if (view === 'side') return 'Side elevation';
-  if (view === 'whole' || !surface) return 'Plan, whole model';
+/** What the plan shows; in brief, for a phone, without what can be seen. */
+export function planTitle(
+  view: PlanViewName,
+  surface: Surface | null,
+  side: SideName,
+  brief: boolean,
+): string {
+  if (view === 'side') return brief ? 'Side' : 'Side elevation';
+  if (view === 'whole' || !surface) return brief ? 'Plan' : 'Plan, whole model';
+  if (brief) return surfaceTitle(surface);
   const half = surface.mirrored ? `, ${side} half` : '';
   return `${surfaceTitle(surface)}${half}, laid flat`;
 }

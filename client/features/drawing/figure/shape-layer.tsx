@@ -8,11 +8,16 @@ interface ShapeLayerProps {
   sheet: Sheet;
 }
 
+/** Thinner lines on a small drawing, so that ribs do not run together; px per mm. */
+const weightAt = (scale: number) => Math.min(1, Math.max(0.4, scale));
+
 /** The drawing in pencil. Renders only when what is drawn or its scale changes, not when a part is picked. */
 export const ShapeLayer = memo(function ShapeLayer({ shapes, sheet }: ShapeLayerProps) {
+  const weight = weightAt(sheet.scale);
   return shapes.map((shape, i) => {
     const look = lookOf(shape);
-    return look && <ShapePath key={i} shape={shape} sheet={sheet} look={look} />;
+    const thin = look && { ...look, strokeWidth: look.strokeWidth * weight };
+    return thin && <ShapePath key={i} shape={shape} sheet={sheet} look={thin} />;
   });
 });
 

@@ -15,7 +15,7 @@ const DASHED = '4 3';
 /** Surfaces of cloth and dope are seen only when they are picked. */
 const UNSEEN: ReadonlySet<ShapeKind> = new Set(['covering', 'finish']);
 /** Wide areas whose contents must stay readable through their hatch. */
-const WIDE: ReadonlySet<ShapeKind> = new Set(['skin', 'sheet', 'plate', 'bar']);
+const WIDE: ReadonlySet<ShapeKind> = new Set(['skin', 'sheet', 'plate', 'bar', 'ribs']);
 
 export function lookOf(shape: Shape): Look | null {
   if (UNSEEN.has(shape.kind)) return null;

@@ -1,4 +1,5 @@
 import { NumberField } from '#client/components/ui/number-field.tsx';
+import { unitLabel } from '#shared/format/numbers.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import type { Form, KeysOf } from './form.ts';
 
@@ -34,6 +35,8 @@ export function NumberOf<T>({
       error={form.issue(field)}
       readOnly={form.readOnly}
       optional={optional}
+      // Plain numbers keep the room of a unit, so that fields end in one line.
+      {...(unitLabel(quantity) === '' && { suffix: '\u00a0' })}
       {...(hint !== undefined && { hint })}
       {...(step !== undefined && { step })}
       onChange={(value, problem) => {

@@ -20,12 +20,14 @@ interface ParsedFieldProps<T> {
 export function ParsedField<T>(props: ParsedFieldProps<T>) {
   const { label, value, format, parse, onValue, readOnly, hint, inline = true, hideLabel = false } = props;
   const [typed, setTyped] = useState<{ text: string; meant: string | null } | null>(null);
+  const [left, setLeft] = useState(false);
   const shown = format(value);
   const own = typed !== null && (typed.meant === null || typed.meant === shown);
   const text = own ? typed.text : shown;
   const parsed = parse(text);
   const take = (next: string) => {
     const read = parse(next);
+    setLeft(false);
     setTyped({ text: next, meant: 'value' in read ? format(read.value) : null });
     if ('value' in read) onValue(read.value);
   };
@@ -36,7 +38,9 @@ export function ParsedField<T>(props: ParsedFieldProps<T>) {
       autoComplete="off"
       spellCheck={false}
       value={text}
-      error={props.error ?? ('problem' in parsed ? parsed.problem : undefined)}
+      // What is only half typed is not scolded.
+      error={props.error ?? ('problem' in parsed && (left || !own) ? parsed.problem : undefined)}
+      onBlur={() => setLeft(true)}
       onChange={(event) => take(event.target.value)}
     />
   );

@@ -1,5 +1,6 @@
 import type { Part, Plan, PlanMaterial, Side } from '#shared/core/plan.ts';
 import { fitsPart, type TableMaterial } from '../edits/materials.ts';
+import { Fold } from '../fold.tsx';
 import { ChoiceOf, TextOf } from './choice-of.tsx';
 import type { Form } from './form.ts';
 import { figureOf, MaterialField } from './material-field.tsx';
@@ -59,11 +60,8 @@ function GroupField({ form }: { form: Form<Part> }) {
 export function SourceNote({ material }: { material: PlanMaterial | undefined }) {
   if (!material?.source) return null;
   return (
-    <details className="text-note text-graphite">
-      <summary className="inline-flex min-h-row items-center">
-        {material.name}, {figureOf(material)}: where from
-      </summary>
-      <p className="pb-1">{material.source}</p>
-    </details>
+    <Fold quiet summary={`${material.name}, ${figureOf(material)}: where from`}>
+      <p className="pb-1 text-note text-graphite">{material.source}</p>
+    </Fold>
   );
 }

@@ -21,9 +21,11 @@ export function parseSection(text: string, before: SectionSpec): Parsed<SectionS
   }
   if ('points' in before && typed !== '' && !/^plate\b/i.test(typed))
     return { value: { ...before, name: typed } };
-  const plate = /^(?:plate|flat)?\s*(.+)$/i.exec(typed)?.[1] ?? '';
-  const read = parseQuantity(plate, 'length');
-  if ('value' in read && read.value > 0) return { value: { flat: read.value } };
+  // A bare number may be the beginning of four digits; a plate says so, has a unit, or was one before.
+  const [, word, size = ''] = /^(plate|flat)?\s*(.*)$/i.exec(typed) ?? [];
+  const isPlate = word !== undefined || 'flat' in before || /[a-z"″]/i.test(size);
+  const read = parseQuantity(size, 'length');
+  if (isPlate && 'value' in read && read.value > 0) return { value: { flat: read.value } };
   return { problem: 'Write four digits such as 4409, or a plate such as 3 mm.' };
 }
 

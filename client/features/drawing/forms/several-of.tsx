@@ -1,6 +1,6 @@
 import { useId, type ReactNode } from 'react';
 import { NumberField } from '#client/components/ui/number-field.tsx';
-import { unitLabel } from '#shared/format/numbers.ts';
+import { formatQuantity, roundTo, unitLabel } from '#shared/format/numbers.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import type { Form, KeysOf } from './form.ts';
 
@@ -38,6 +38,7 @@ export function NumbersRow({ label, quantity, cells, between, readOnly }: Number
             <div className="min-w-0 flex-1">
               <NumberField
                 compact
+                className="min-w-0!"
                 {...cell}
                 label={`${label}, ${cell.label}`}
                 quantity={quantity}
@@ -47,7 +48,7 @@ export function NumbersRow({ label, quantity, cells, between, readOnly }: Number
             </div>
           </div>
         ))}
-        <span className="min-w-[2.5em] shrink-0 text-note text-graphite">{unitLabel(quantity)}</span>
+        <span className="min-w-[2.5em] shrink-0 text-note text-graphite">{besideAll(cells, quantity)}</span>
       </div>
     </div>
   );
@@ -58,6 +59,15 @@ interface RowOfProps<T, K> {
   field: K;
   label: string;
   quantity: Quantity;
+}
+
+/** The unit; where all are one size that is sold by its fraction of an inch, that size in mm. */
+function besideAll(cells: readonly Cell[], quantity: Quantity): string {
+  const value = cells[0]?.value;
+  const isFraction = quantity === 'length' && value !== undefined && roundTo(value, 1) !== value;
+  return isFraction && cells.every((cell) => cell.value === value)
+    ? formatQuantity(value, 'length', { fine: true })
+    : unitLabel(quantity);
 }
 
 /** A value at the beginning of a range and one at its end. The second follows the first while they are the same. */

@@ -30,7 +30,7 @@ export function IndexTabs({ plan, tab, onTab, canEdit, onAdd }: IndexTabsProps) 
     { key: 'items', tab: { kind: 'items' }, label: 'Items' },
   ];
   return (
-    <nav aria-label="Parts of the plan" className="flex flex-wrap items-end gap-x-4">
+    <nav aria-label="Parts of the plan" className="flex flex-wrap items-end gap-x-3 sm:gap-x-4">
       {tabs.map(({ key, tab: own, label }) => (
         <button
           key={key}

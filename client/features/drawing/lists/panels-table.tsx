@@ -69,7 +69,7 @@ export function PanelsTable({ desk, surface, index }: PanelsTableProps) {
             <Tr key={i}>
               <th
                 scope="row"
-                className="h-row px-1 text-left align-baseline text-note font-normal text-graphite"
+                className="h-row px-1 pt-2 text-left align-top text-note font-normal text-graphite"
               >
                 {i + 1}
               </th>

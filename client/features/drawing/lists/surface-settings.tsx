@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import type { Surface, SurfaceRole } from '#shared/core/plan.ts';
 import { changeSurface } from '../edits/plan-edits.ts';
+import { Fold } from '../fold.tsx';
 import { ChoiceOf, TextOf, TickOf } from '../forms/choice-of.tsx';
 import type { Form } from '../forms/form.ts';
 import { PlaceOf } from '../forms/several-of.tsx';
@@ -43,15 +44,13 @@ export function SurfaceSettings({ desk, surface, index, onRemoved }: SurfaceSett
   };
   const wrong = [...desk.issues.keys()].some((path) => /^surfaces\/\d+\/(key|role|apex|mirrored)/.test(path));
   return (
-    <details
+    <Fold
+      summary={`Name and place of the ${surface.key}`}
       open={open || wrong}
       onToggle={(event) => setOpen(event.currentTarget.open)}
-      className="border-t border-rule pt-1"
+      className="border-t border-rule px-2 pt-1"
     >
-      <summary className="inline-flex min-h-row items-center px-2 text-note font-semibold text-ink">
-        Name and place of the {surface.key}
-      </summary>
-      <div className="grid gap-y-1.5 px-2 pt-1">
+      <div className="grid gap-y-1.5 pt-1">
         <TextOf form={form} field="key" label="Name" />
         <ChoiceOf form={form} field="role" label="Role" options={ROLES} />
         <PlaceOf form={form} field="apex" label="Root leading edge x, y, z" />
@@ -64,6 +63,6 @@ export function SurfaceSettings({ desk, surface, index, onRemoved }: SurfaceSett
           </div>
         )}
       </div>
-    </details>
+    </Fold>
   );
 }

@@ -88,12 +88,18 @@ function tipChords(surface: Surface, line: SurfaceLine): ChordIntegrals[] {
   });
 }
 
-/** Span of one half from the plane of symmetry (or from the root, if not mirrored), projected, tip blocks in. */
-function reach(surface: Surface, line: SurfaceLine): number {
-  const last = line.panels.at(-1);
-  const tip = surface.parts.reduce((most, p) => (p.kind === 'tipBlock' ? Math.max(most, p.length) : most), 0);
-  const own = line.panels.reduce((sum, p) => sum + (p.end - p.start) * Math.abs(p.cos), 0);
-  return own + tip * Math.abs(last?.cos ?? 1) + (surface.mirrored ? Math.max(0, surface.apex[1]) : 0);
+/** Span from tip to tip (or of the one half, if not mirrored), projected, the tip blocks of each side in. */
+function spanOf(surface: Surface, line: SurfaceLine): number {
+  const cos = Math.abs(line.panels.at(-1)?.cos ?? 1);
+  const panels = line.panels.reduce((sum, p) => sum + (p.end - p.start) * Math.abs(p.cos), 0);
+  const longest = (side: 'port' | 'starboard') =>
+    surface.parts.reduce((most, part) => {
+      const there =
+        part.kind === 'tipBlock' && (part.side ?? 'both') !== (side === 'port' ? 'starboard' : 'port');
+      return there ? Math.max(most, part.length) : most;
+    }, 0);
+  if (!surface.mirrored) return panels + longest('starboard') * cos;
+  return 2 * (Math.max(0, surface.apex[1]) + panels) + (longest('port') + longest('starboard')) * cos;
 }
 
 /** MAC and its place from chord integrals. The caller sees to it that there is an area. */
@@ -110,7 +116,7 @@ export function planformOf(surface: Surface, line: SurfaceLine = surfaceLine(sur
   const chords = chordIntegrals(surface, line);
   const halves = surface.mirrored ? 2 : 1;
   const areaProjected = halves * chords.projected;
-  const span = halves * reach(surface, line);
+  const span = spanOf(surface, line);
   return {
     areaDeveloped: halves * chords.area,
     areaProjected,

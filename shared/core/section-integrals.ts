@@ -142,6 +142,24 @@ export function areaBetween(section: Section, from: number, to: number): Sums {
 }
 
 /**
+ * Mean square of the area's distance along x from its centroid between two x/c, unit chord: what a rib adds to the
+ * inertia by its own extent. Eight slices give it to half a percent, ample for a share of a share.
+ */
+export function spreadBetween(section: Section, from: number, to: number): number {
+  const slices = 8;
+  const width = (to - from) / slices;
+  let [amount, x, xx] = [0, 0, 0];
+  for (let i = 0; i < slices; i++) {
+    const slice = areaBetween(section, from + i * width, from + (i + 1) * width);
+    if (slice.amount <= 0) continue;
+    amount += slice.amount;
+    x += slice.x;
+    xx += slice.x ** 2 / slice.amount + (slice.amount * width ** 2) / 12;
+  }
+  return amount > 0 ? Math.max(0, xx / amount - (x / amount) ** 2) : 0;
+}
+
+/**
  * Developed length of one face between two x/c with its first moments, unit chord. From the nose on, the upper face
  * takes in the hair's breadth of a cambered section that lies in front of x = 0.
  */

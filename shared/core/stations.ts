@@ -35,7 +35,8 @@ export interface Station {
   /** x of the leading edge */
   leadingEdge: number;
   leadingEdgeSlope: number;
-  section: Section;
+  /** made when first asked for: much is asked of a station that needs no section */
+  readonly section: Section;
 }
 
 function blender(panel: Panel): Pick<PanelLine, 'root' | 'tip' | 'sectionAt'> {
@@ -103,7 +104,9 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
     chordSlope: (c1 - c0) / span,
     leadingEdge: x0 + share * (x1 - x0),
     leadingEdgeSlope: (x1 - x0) / span,
-    section: panel.sectionAt(share),
+    get section() {
+      return panel.sectionAt(share);
+    },
   };
 }
 

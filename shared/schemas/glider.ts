@@ -54,7 +54,10 @@ export const gliderSave = z.strictObject({
   savedBy: z.string(),
   figures: gliderFigures,
 });
-export const gliderSaveList = z.strictObject({ saves: z.array(gliderSave), nextCursor: z.string().nullable() });
+export const gliderSaveList = z.strictObject({
+  saves: z.array(gliderSave),
+  nextCursor: z.string().nullable(),
+});
 
 export type GliderRole = z.infer<typeof gliderRole>;
 export type GliderAbilities = z.infer<typeof gliderAbilities>;

@@ -2,7 +2,15 @@ import { z } from 'zod';
 import { LIMITS } from './limits.ts';
 import { positive, title, within } from './plan-parts.ts';
 
-export const materialCategory = z.enum(['wood', 'composite', 'metal', 'sheet', 'covering', 'finish', 'adhesive']);
+export const materialCategory = z.enum([
+  'wood',
+  'composite',
+  'metal',
+  'sheet',
+  'covering',
+  'finish',
+  'adhesive',
+]);
 /** How sure a figure is: read in a published source, common practice of the trade, or remembered. */
 export const materialBasis = z.enum(['published', 'common practice', 'from memory', 'own measurement']);
 

@@ -10,7 +10,8 @@ export interface ReferenceIssue {
 type Loose = Record<string, unknown>;
 const isRecord = (value: unknown): value is Loose =>
   typeof value === 'object' && value !== null && !Array.isArray(value);
-const records = (value: unknown): Loose[] => (Array.isArray(value) ? value.map((v) => (isRecord(v) ? v : {})) : []);
+const records = (value: unknown): Loose[] =>
+  Array.isArray(value) ? value.map((v) => (isRecord(v) ? v : {})) : [];
 const missing = (value: unknown) => value === undefined;
 
 export function referenceIssues(plan: unknown): ReferenceIssue[] {
@@ -25,7 +26,10 @@ export function referenceIssues(plan: unknown): ReferenceIssue[] {
     ...duplicates(records(plan['items']), 'id', ['items']),
     ...duplicates(solids, 'id', ['solids']),
     ...solids.flatMap((solid, i) => [
-      ...materialUse(solid, ['solids', i], materials, ['density', ...(solid['shape'] === 'plate' ? ['areal'] : [])]),
+      ...materialUse(solid, ['solids', i], materials, [
+        'density',
+        ...(solid['shape'] === 'plate' ? ['areal'] : []),
+      ]),
       ...(solid['profile'] === 'tube' && missing(solid['wall'])
         ? [{ path: ['solids', i, 'wall'], message: 'A tube needs its wall thickness.' }]
         : []),
@@ -53,7 +57,11 @@ function duplicates(rows: Loose[], field: string, path: (string | number)[]): Re
   });
 }
 
-function surfaceIssues(surface: Loose, path: (string | number)[], materials: Loose | undefined): ReferenceIssue[] {
+function surfaceIssues(
+  surface: Loose,
+  path: (string | number)[],
+  materials: Loose | undefined,
+): ReferenceIssue[] {
   const parts = records(surface['parts']);
   const at = (i: number) => [...path, 'parts', i];
   return [
@@ -112,8 +120,10 @@ function partIssues(part: Loose, path: (string | number)[]): ReferenceIssue[] {
   if (part['kind'] === 'strip') {
     const seat = part['seat'];
     const inside = seat === 'top' || seat === 'bottom' || seat === 'middle';
-    if (inside && missing(part['at'])) issues.push(issue('at', 'Must say where on the chord the strip lies.'));
-    if (inside && missing(part['letIn'])) issues.push(issue('letIn', 'Must say whether the strip is let in.'));
+    if (inside && missing(part['at']))
+      issues.push(issue('at', 'Must say where on the chord the strip lies.'));
+    if (inside && missing(part['letIn']))
+      issues.push(issue('letIn', 'Must say whether the strip is let in.'));
     if (part['profile'] === 'tube' && missing(part['wall']))
       issues.push(issue('wall', 'A tube needs its wall thickness.'));
   }

@@ -100,7 +100,12 @@ export const planMaterial = z.strictObject({
 const planShape = z.strictObject({
   version: z.literal(1),
   name: title(),
-  materials: z.record(identifier(), planMaterial),
+  materials: z
+    .record(identifier(), planMaterial)
+    .refine(
+      (materials) => Object.keys(materials).length <= LIMITS.materials.max,
+      `Must have at most ${LIMITS.materials.max} materials.`,
+    ),
   surfaces: z.array(surface).max(LIMITS.surfaces.max),
   items: z.array(item).max(LIMITS.items.max),
   solids: z.array(solid).max(LIMITS.solids.max),

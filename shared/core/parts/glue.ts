@@ -1,3 +1,4 @@
+import { breaksUnderSkins } from '../breaks.ts';
 import { developedAt, skinOver, stripZ } from '../fit.ts';
 import { covers, ribExtent, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
@@ -62,18 +63,26 @@ function ribOnSkins(half: Half, station: Station, thickness: number, joints: Joi
   }
 }
 
+const FACES = {
+  top: ['upper'],
+  bottom: ['lower'],
+  middle: [],
+  nose: ['upper', 'lower'],
+  tail: ['upper', 'lower'],
+} as const;
+
+/** A spar lies under the skin of its own face; an edge fills the section and touches the skins of both. */
 function stripUnderSkins(half: Half, strip: Strip, joints: Joints): void {
-  if (strip.seat !== 'top' && strip.seat !== 'bottom') return;
-  const face = strip.seat === 'top' ? 'upper' : 'lower';
+  const faces = FACES[strip.seat];
+  if (faces.length === 0 || half.skins.length === 0) return;
   const [from, to] = [Math.min(strip.from, strip.to), Math.max(strip.from, strip.to)];
-  for (const { station, ds } of samplesOver(half.line, from, to, half.skinEnds)) {
+  for (const { station, ds } of samplesOver(half.line, from, to, breaksUnderSkins(half, strip, from, to))) {
+    if (station.chord <= 0) continue;
     const place = stripAt(strip, station);
-    if (station.chord <= 0 || skinOver(half, station, face, place.centre / station.chord) <= 0) continue;
-    const along = Math.hypot(1, stripSkew(strip, station)) * ds;
-    addAmount(
-      joints,
-      place.width * along,
-      pointOf(station, place.centre, stripZ(half, strip, station, place)),
-    );
+    const x = place.centre / station.chord;
+    const touching = faces.filter((face) => skinOver(half, station, face, x) > 0).length;
+    if (touching === 0) continue;
+    const area = touching * place.width * Math.hypot(1, stripSkew(strip, station)) * ds;
+    addAmount(joints, area, pointOf(station, place.centre, stripZ(half, strip, station, place)));
   }
 }

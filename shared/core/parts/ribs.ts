@@ -2,7 +2,7 @@ import { developedAt, heightsAt, skinOver, stripZ } from '../fit.ts';
 import { covers, ribExtent, ribStations, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Ribs } from '../plan.ts';
-import { areaBetween, ordinateAt, type Sums } from '../section-integrals.ts';
+import { areaBetween, ordinateAt, spreadBetween, type Sums } from '../section-integrals.ts';
 import { pointOf, stationAt, type Station } from '../stations.ts';
 import type { Basis, Measure } from './measure.ts';
 
@@ -71,9 +71,13 @@ export function measureRibs(half: Half, part: Ribs, basis: Basis): Measure {
     if (net.amount <= 0) continue;
     const left = net.amount * (1 - part.lightening);
     area += left;
-    const width = (to - from) * station.chord;
     const at = pointOf(station, net.x / net.amount, net.z / net.amount);
-    addAmount(lump, basis === 'volume' ? left * part.thickness : left, at, width ** 2 / 18);
+    addAmount(
+      lump,
+      basis === 'volume' ? left * part.thickness : left,
+      at,
+      spreadBetween(station.section, from, to) * station.chord ** 2,
+    );
   }
   return { pieces, length: null, area, volume: area * part.thickness, lump };
 }

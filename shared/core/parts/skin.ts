@@ -2,7 +2,7 @@ import { developedAt } from '../fit.ts';
 import { covers, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { CapStrips, Covering, Skin, TipBlock } from '../plan.ts';
-import { heightAt } from '../section-integrals.ts';
+import { areaBetween, heightAt } from '../section-integrals.ts';
 import { pointOf, samplesOver, stationAt } from '../stations.ts';
 import { clippedRange } from './range.ts';
 import type { Basis, Measure } from './measure.ts';
@@ -82,8 +82,14 @@ function coverTip(half: Half, part: Covering, tip: TipBlock, lump: Measure['lump
   const last = stationAt(half.line, half.line.length);
   const arc = developedAt({ seat: part.seat }, last);
   if (arc.amount <= 0) return;
-  // The outline is half an ellipse: area π/4 of the rectangle, centroid 4/(3π) of the length out.
-  const beyond = { ...last, s: last.s + (4 / (3 * Math.PI)) * tip.length };
-  const at = pointOf(beyond, arc.x / arc.amount, arc.z / arc.amount);
+  // The outline is half an ellipse: area π/4 of the rectangle, centroid 4/(3π) of the length out. Its slices shrink
+  // towards the section's centroid, so the mean arc lies 8/(3π) of the way from there.
+  const area = areaBetween(last.section, 0, 1);
+  const mean = 8 / (3 * Math.PI);
+  const towards = (arcMean: number, centre: number) => centre + mean * (arcMean - centre);
+  const centre = area.amount > 0 ? [area.x / area.amount, area.z / area.amount] : [0, 0];
+  const x = towards(arc.x / arc.amount, (centre[0] ?? 0) * last.chord);
+  const z = towards(arc.z / arc.amount, (centre[1] ?? 0) * last.chord);
+  const at = pointOf({ ...last, s: last.s + (4 / (3 * Math.PI)) * tip.length }, x, z);
   addAmount(lump, arc.amount * tip.length * (Math.PI / 4) * add, at, spreadOf(0, 1, last.chord));
 }

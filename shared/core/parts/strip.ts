@@ -1,3 +1,4 @@
+import { breaksUnderSkins, signChanges } from '../breaks.ts';
 import { heightsAt, stripZ } from '../fit.ts';
 import { covers, stripAt, type Half, type StripAt } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
@@ -49,7 +50,12 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();
   const total = { length: 0, area: 0, volume: 0 };
-  for (const { station, ds } of samplesOver(half.line, from, to, half.skinEnds)) {
+  const breaks = breaksUnderSkins(half, part, from, to);
+  if (basis === 'area') {
+    const broadSide = (station: Station) => stripAt(part, station).width - stripAt(part, station).height;
+    breaks.push(...signChanges(half.line, from, to, 1, broadSide));
+  }
+  for (const { station, ds } of samplesOver(half.line, from, to, breaks)) {
     const place = stripAt(part, station);
     const along = Math.hypot(1, stripSkew(part, station)) * ds;
     const { area, shift } = stripProfile(part.profile, place.width, place.height, part.wall);
@@ -59,7 +65,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
     total.area += face * along;
     total.volume += area * along;
     const at = pointOf(station, place.centre + shift * place.width, stripZ(half, part, station, place));
-    addAmount(lump, (basis === 'volume' ? area : face) * along, at);
+    addAmount(lump, (basis === 'volume' ? area : face) * along, at, place.width ** 2 / 12);
   }
   checkStrip(half, part, from, to);
   return {
@@ -101,6 +107,8 @@ function checkOverlap(half: Half, part: Strip, station: Station, place: StripAt,
   for (const other of half.strips) {
     if (other === part) return;
     if (other.seat !== part.seat || !covers(other, station.s)) continue;
+    // Strips butted end to end meet at a station without sharing room.
+    if (Math.min(part.to, other.to) - Math.max(part.from, other.from) <= 1e-6) continue;
     const o = stripAt(other, station);
     const overBy = Math.min(place.back, o.back) - Math.max(place.front, o.front);
     if (overBy > 1e-6) {

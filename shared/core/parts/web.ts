@@ -1,4 +1,5 @@
-import { heightsAt } from '../fit.ts';
+import { breaksOverWeb, signChanges } from '../breaks.ts';
+import { skinOver } from '../fit.ts';
 import { covers, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Web } from '../plan.ts';
@@ -7,16 +8,24 @@ import { pairAt, pointOf, samplesOver, type Station } from '../stations.ts';
 import { clippedRange } from './range.ts';
 import type { Basis, Measure } from './measure.ts';
 
-/** Height left for a shear web, mm: the section there, less skins over it, less strips whose width holds it. */
-export function webHeight(half: Half, web: Web, station: Station): number {
+/**
+ * Height left for a shear web, mm, and the z of its middle above the chord line: the section there, less skins over
+ * it, less the strips whose width holds it. Negative where these leave no room.
+ */
+export function webRoom(half: Half, web: Web, station: Station): { height: number; middle: number } {
   const x = pairAt(web.at, web.from, web.to, station.s);
-  let height = heightsAt(half, station, x).underSkins;
+  const { section, chord } = station;
+  let top = ordinateAt(section, 'upper', x) * chord - skinOver(half, station, 'upper', x);
+  let bottom = ordinateAt(section, 'lower', x) * chord + skinOver(half, station, 'lower', x);
   for (const strip of half.strips) {
     if (!covers(strip, station.s)) continue;
-    const place = stripAt(strip, station);
-    if (Math.abs(place.centre - x * station.chord) <= place.width / 2 + 1e-9) height -= place.height;
+    const { centre, width, height } = stripAt(strip, station);
+    if (Math.abs(centre - x * chord) > width / 2 + 1e-9) continue;
+    if (strip.seat === 'top') top -= height;
+    else if (strip.seat === 'bottom') bottom += height;
+    else [top, bottom] = [top - height / 2, bottom + height / 2];
   }
-  return height;
+  return { height: top - bottom, middle: (top + bottom) / 2 };
 }
 
 /** A shear web, grain upright, in the bays between ribs: height integrated over s, less each rib's own room. */
@@ -26,19 +35,20 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
   const lump = emptyLump();
   let area = 0;
   const add = (station: Station, width: number) => {
-    const height = webHeight(half, part, station);
+    const { height, middle } = webRoom(half, part, station);
     if (height <= 0) {
       half.notice({ code: 'web_without_height', path, station: station.s });
       return;
     }
     const x = pairAt(part.at, part.from, part.to, station.s);
-    const middle = (ordinateAt(station.section, 'upper', x) + ordinateAt(station.section, 'lower', x)) / 2;
-    const at = pointOf(station, x * station.chord, middle * station.chord);
+    const at = pointOf(station, x * station.chord, middle);
     area += height * width;
     addAmount(lump, height * width * (basis === 'volume' ? part.thickness : 1), at);
   };
-  const ends = [...half.skinEnds, ...half.strips.flatMap((strip) => [strip.from, strip.to])];
-  for (const { station, ds } of samplesOver(half.line, from, to, ends)) add(station, ds);
+  const breaks = breaksOverWeb(half, part, from, to);
+  // Where the room closes the web ends, on the way between two breaks.
+  breaks.push(...signChanges(half.line, from, to, 8, (station) => webRoom(half, part, station).height));
+  for (const { station, ds } of samplesOver(half.line, from, to, breaks)) add(station, ds);
   for (const { part: ribs, stations } of half.ribs) {
     for (const station of stations) if (covers({ from, to }, station.s)) add(station, -ribs.thickness);
   }

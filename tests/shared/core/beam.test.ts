@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { layHung, type HungLabel } from '#shared/core/beam-layout.ts';
+import { layHung } from '#shared/core/beam-layout.ts';
+import type { HungLabel } from '#shared/core/beam-places.ts';
 import { beamOf, TILT_LIMIT, tiltOf } from '#shared/core/beam.ts';
 import type { Balance, Line, Totals } from '#shared/core/result.ts';
 import { rulerOf, spreadLabels } from '#shared/core/ruler.ts';

@@ -3,7 +3,6 @@ import dunlin from '#data/demo/gliders/dunlin.json';
 import plover from '#data/demo/gliders/plover.json';
 import whimbrel from '#data/demo/gliders/whimbrel.json';
 import { estimate } from '#shared/core/estimate.ts';
-import type { Plan } from '#shared/core/plan.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { differences } from './compare.ts';
 import { builtPlans } from './plans-built.ts';
@@ -13,19 +12,10 @@ import { mixedPlans } from './plans-mixed.ts';
 import { shapedPlans } from './plans-shaped.ts';
 import { secondOpinion } from './second-opinion.ts';
 
-/** Glue in joints is compared in a plan of its own, where no edge lies under a skin. */
-const withoutJoints = (plan: Plan): Plan => ({
-  ...plan,
-  surfaces: plan.surfaces.map((surface) => ({
-    ...surface,
-    parts: surface.parts.filter((part) => part.kind !== 'glue' || part.method !== 'joints'),
-  })),
-});
-
 /** Thousands of slices take a second or two for each glider, more on a busy machine. */
 const SLOW = 60_000;
 
-const demo = [dunlin, plover, whimbrel].map((plan) => withoutJoints(planSchema.parse(plan)));
+const demo = [dunlin, plover, whimbrel].map((plan) => planSchema.parse(plan));
 
 /**
  * A second calculator, of thin slices and plain sums, written from the rules alone: it shares no formula with the

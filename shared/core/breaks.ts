@@ -1,0 +1,74 @@
+import { facesOf } from './fit.ts';
+import { stripAt, type Half } from './half.ts';
+import type { Strip, Web } from './plan.ts';
+import { pairAt, stationAt, type Station, type SurfaceLine } from './stations.ts';
+
+/**
+ * Stations where what is integrated along a surface jumps: a strip that slips out from under a skin, a web that
+ * leaves a strip. Integrals are split there, for a sample rule holds only where the integrand is smooth.
+ */
+export function signChanges(
+  line: SurfaceLine,
+  from: number,
+  to: number,
+  pieces: number,
+  f: (station: Station) => number,
+): number[] {
+  const found: number[] = [];
+  for (const panel of line.panels) {
+    const [a, b] = [Math.max(from, panel.start), Math.min(to, panel.end)];
+    if (b <= a) continue;
+    const at = (s: number) => f(stationAt(line, s, panel));
+    let low = a;
+    let atLow = at(low);
+    for (let i = 1; i <= pieces; i++) {
+      const high = a + ((b - a) * i) / pieces;
+      const atHigh = at(high);
+      if (atLow * atHigh < 0) found.push(bisect(at, low, high, atLow));
+      [low, atLow] = [high, atHigh];
+    }
+  }
+  return found;
+}
+
+function bisect(f: (s: number) => number, low: number, high: number, atLow: number): number {
+  // 50 halvings take any panel below a billionth of a millimetre.
+  for (let i = 0; i < 50; i++) {
+    const middle = (low + high) / 2;
+    if (f(middle) * atLow > 0) low = middle;
+    else high = middle;
+  }
+  return (low + high) / 2;
+}
+
+/** x/c at which skins begin or end, each once; a nose or tail of the section is no edge. */
+function skinEdges(half: Half): number[] {
+  const edges = half.skins.flatMap((skin) => facesOf(skin).flatMap(({ from, to }) => [from, to]));
+  return [...new Set(edges)].filter((x) => x > 0 && x < 1);
+}
+
+/** Where skins over a strip begin, end or slip off its centre line. */
+export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: number): number[] {
+  // The centre line's x/c is linear (or, on an edge, its distance to the skin's edge): one crossing at the most.
+  const crossings = skinEdges(half).flatMap((edge) =>
+    signChanges(half.line, from, to, 1, (station) => stripAt(strip, station).centre - edge * station.chord),
+  );
+  return [...half.skinEnds, ...crossings];
+}
+
+/** Where skins or strips over a web begin, end or slip off it. */
+export function breaksOverWeb(half: Half, web: Web, from: number, to: number): number[] {
+  const x = (station: Station) => pairAt(web.at, web.from, web.to, station.s);
+  const skins = skinEdges(half).flatMap((edge) =>
+    signChanges(half.line, from, to, 1, (station) => x(station) - edge),
+  );
+  const strips = half.strips.flatMap((strip) => {
+    const side = (sign: 1 | -1) =>
+      signChanges(half.line, Math.max(from, strip.from), Math.min(to, strip.to), 4, (station) => {
+        const place = stripAt(strip, station);
+        return place.centre - x(station) * station.chord + (sign * place.width) / 2;
+      });
+    return [strip.from, strip.to, ...side(1), ...side(-1)];
+  });
+  return [...half.skinEnds, ...skins, ...strips];
+}

@@ -1,0 +1,67 @@
+import { spawn, type ChildProcess } from 'node:child_process';
+import { fileURLToPath } from 'node:url';
+import type { TestProject } from 'vitest/node';
+import { startCluster } from '#server/house/cluster.mjs';
+
+declare module 'vitest' {
+  interface ProvidedContext {
+    /** address of the served product */
+    baseUrl: string;
+  }
+}
+
+const ROOT = fileURLToPath(new URL('../../', import.meta.url));
+const PATIENCE_MS = 60_000;
+
+/** The product as `npm start` serves it: real server, real PostgreSQL, built client, demo scenario. */
+export default async function setup(project: TestProject) {
+  const cluster = await startCluster({ throwaway: true });
+  const server = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+    cwd: ROOT,
+    env: {
+      ...process.env,
+      DATABASE_URL: cluster.url(),
+      PORT: '0',
+      NODE_ENV: 'production',
+      LOG_LEVEL: 'error',
+      FEATHERBEAM_RATE_LIMIT_SCALE: '1000',
+    },
+    stdio: ['ignore', 'pipe', 'inherit'],
+  });
+  try {
+    project.provide('baseUrl', await addressOf(server));
+  } catch (error) {
+    await stop(server);
+    await cluster.stop();
+    throw error;
+  }
+  return async () => {
+    await stop(server);
+    await cluster.stop();
+  };
+}
+
+function addressOf(server: ChildProcess): Promise<string> {
+  return new Promise((resolve, reject) => {
+    const late = setTimeout(() => reject(new Error('the server did not start in time')), PATIENCE_MS);
+    let said = '';
+    server.stdout?.setEncoding('utf8').on('data', (text: string) => {
+      said += text;
+      const found = /listens on (http:\S+)/.exec(said)?.[1];
+      if (!found) return;
+      clearTimeout(late);
+      resolve(found);
+    });
+    server.once('exit', (code) => {
+      clearTimeout(late);
+      reject(new Error(`the server ended with ${code}:\n${said}`));
+    });
+  });
+}
+
+async function stop(server: ChildProcess): Promise<void> {
+  if (server.exitCode !== null) return;
+  const ended = new Promise((resolve) => server.once('exit', resolve));
+  server.kill('SIGTERM');
+  await ended;
+}

@@ -1,4 +1,4 @@
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useMemo, useState } from 'react';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { Skeleton } from '#client/components/ui/skeleton.tsx';
@@ -44,8 +44,9 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   const [lit, setLit] = useState<string | null>(null);
   const [asked, setAsked] = useState<string | null>(null);
 
-  const beam = beamOf(result, wingReference(plan), plan.target);
-  const sheet = printedSheet(result);
+  // Kept while only the light moves over the sheet.
+  const beam = useMemo(() => beamOf(result, wingReference(plan), plan.target), [result, plan]);
+  const sheet = useMemo(() => printedSheet(result), [result]);
   const nose = noseOf(plan) ?? [0, 0, 0];
   const tip = tipOf(plan);
   const verdict = verdictOf(plan, result, beam, nose[0]);

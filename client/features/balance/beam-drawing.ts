@@ -1,4 +1,5 @@
-import { layHung, type HungPlace } from '#shared/core/beam-layout.ts';
+import { layHung } from '#shared/core/beam-layout.ts';
+import type { HungPlace } from '#shared/core/beam-places.ts';
 import { TILT_LIMIT, type Beam, type HungMass } from '#shared/core/beam.ts';
 import { radians } from '#shared/core/frame.ts';
 import { rulerOf, type Ruler } from '#shared/core/ruler.ts';

@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { useId, useMemo } from 'react';
 import { useWidth } from '#client/hooks/use-width.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan } from '#shared/core/plan.ts';
@@ -27,7 +27,7 @@ interface BeamViewProps {
 export function BeamView({ beam, plan, lines, lit, onLight, picked, onOpen, outside }: BeamViewProps) {
   const [frame, width] = useWidth<HTMLDivElement>();
   const sentence = useId();
-  const drawing = drawBeam(beam, width);
+  const drawing = useMemo(() => drawBeam(beam, width), [beam, width]);
   const { pivotX, barY, toX, height, rulerY, slope } = drawing;
 
   return (

@@ -28,30 +28,31 @@ export function Facts({ plan, result, beam }: FactsProps) {
       <h2 className="caption">Balance in figures</h2>
       <dl className="mt-1">
         {factsOf(plan, result, beam).map(({ label, figure, why }) => (
-          <div key={label} className="border-b border-rule">
-            <div className="flex min-h-row items-center justify-between gap-4">
-              <dt className="text-graphite">{label}</dt>
-              <dd className="text-right font-semibold">
-                {why ? (
-                  <button
-                    type="button"
-                    aria-expanded={asked === label}
-                    onClick={() => setAsked(asked === label ? null : label)}
-                    className={cn(
-                      'min-h-row underline decoration-strong-rule decoration-dotted underline-offset-4 hover:text-ink hover:decoration-ink',
-                      asked === label && 'text-ink decoration-ink',
-                    )}
-                  >
-                    {figure}
-                    <span className="sr-only">: ask why</span>
-                  </button>
-                ) : (
-                  figure
-                )}
-              </dd>
-            </div>
+          <div
+            key={label}
+            className="grid min-h-row grid-cols-[auto_1fr] items-center gap-x-4 border-b border-rule"
+          >
+            <dt className="text-graphite">{label}</dt>
+            <dd className="text-right font-semibold">
+              {why ? (
+                <button
+                  type="button"
+                  aria-expanded={asked === label}
+                  onClick={() => setAsked(asked === label ? null : label)}
+                  className={cn(
+                    'min-h-row underline decoration-strong-rule decoration-dotted underline-offset-4 hover:text-ink hover:decoration-ink',
+                    asked === label && 'text-ink decoration-ink',
+                  )}
+                >
+                  {figure}
+                  <span className="sr-only">: ask why</span>
+                </button>
+              ) : (
+                figure
+              )}
+            </dd>
             {asked === label && why && (
-              <dd className="pb-3">
+              <dd className="col-span-2 pb-3">
                 <WhyPanel why={why} />
               </dd>
             )}

@@ -24,7 +24,7 @@ export function Hung({ hung, y, fill, lit, picked, onLight, onOpen }: HungProps)
     <g
       role="button"
       tabIndex={0}
-      aria-label={`${mass.name}, ${figure} at ${formatQuantity(mass.x, 'length')}. Show its parts.`}
+      aria-label={`${mass.name} ${figure} at ${formatQuantity(mass.x, 'length')}. Show its parts.`}
       onPointerEnter={() => onLight(mass.key)}
       onPointerLeave={() => onLight(null)}
       onFocus={() => onLight(mass.key)}
@@ -67,7 +67,7 @@ export function Hung({ hung, y, fill, lit, picked, onLight, onOpen }: HungProps)
             fill={lit || picked ? 'var(--ink)' : 'var(--pencil)'}
             className="text-note font-semibold"
           >
-            {mass.name}
+            {`${mass.name} `}
           </text>
           <text x={textX} y={textY + 27} fill="var(--graphite)" className="text-label">
             {figure}

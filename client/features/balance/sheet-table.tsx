@@ -127,7 +127,7 @@ function FigureRow({ name, said, figures, digits, look, why, onAsk }: FigureRowP
   const line = look.last ? 'border-b-0 border-t border-t-strong-rule' : undefined;
   const id = useId();
   const under = (text: string) => (
-    <span className="block text-label font-normal text-graphite sm:hidden">{text}</span>
+    <span className="block text-label font-normal text-graphite sm:hidden"> {text}</span>
   );
   return (
     <>
@@ -138,14 +138,15 @@ function FigureRow({ name, said, figures, digits, look, why, onAsk }: FigureRowP
             type="button"
             aria-expanded={why !== null}
             aria-controls={why ? id : undefined}
-            aria-label={`${said} ${show(figures.mass, 'mass')} g: ask why`}
             onClick={onAsk}
             className={cn(
               '-mr-1 min-h-row rounded-sm px-1 underline decoration-strong-rule decoration-dotted underline-offset-4 hover:text-ink hover:decoration-ink',
               why && 'text-ink decoration-ink',
             )}
           >
+            <span className="sr-only">{said} </span>
             {show(figures.mass, 'mass')}
+            <span className="sr-only"> g, ask why</span>
             {under(`± ${show(figures.u, 'u')}`)}
           </button>
         </Td>

@@ -35,7 +35,7 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
       </section>
     );
   }
-  const arm = chosen ?? -Math.sign(y) * tip[1];
+  const arm = chosen ?? -Math.sign(y) * roundTo(tip[1], 1);
   const found = ballastFor(mass, y, 0, arm);
   const needed = 'mass' in found ? roundTo(found.mass, 2) : null;
   const heavy = y > 0 ? 'starboard' : 'port';

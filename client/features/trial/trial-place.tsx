@@ -1,4 +1,4 @@
-import { lazy, Suspense, useDeferredValue, useState } from 'react';
+import { lazy, Suspense, useDeferredValue, useMemo, useState } from 'react';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
@@ -48,10 +48,16 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
 
   const woods = woodsOf(plan, table);
   const groups = drawnGroups(plan, result);
-  const trials = kept ?? firstTrials(groups, woods);
+  const trials = useMemo(
+    () => kept ?? firstTrials(drawnGroups(plan, result), woodsOf(plan, table)),
+    [kept, plan, result, table],
+  );
   const arm = chosenArm ?? usualArm(plan);
   const asked = useDeferredValue(trials);
-  const run = runTrials(plan, [{ name: 'As drawn', materials: {} }, ...asked], { arm });
+  const run = useMemo(
+    () => runTrials(plan, [{ name: 'As drawn', materials: {} }, ...asked], { arm }),
+    [plan, asked, arm],
+  );
   const { headline, detail } = trialHeadline(run);
 
   if (groups.length === 0) {

@@ -8,8 +8,8 @@ import type { Beam } from '#shared/core/beam.ts';
 import type { Vec3 } from '#shared/core/frame.ts';
 import { formatQuantity, roundTo } from '#shared/format/numbers.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
-import { withBallast, withLess } from './ballast-edit.ts';
-import { foremostBallast, placeOf } from './verdict.ts';
+import { spareBallast, withBallast, withLess } from './ballast-edit.ts';
+import { placeOf } from './verdict.ts';
 
 interface BallastSolverProps {
   workspace: Workspace;
@@ -31,10 +31,9 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
   const grams = (value: number) => formatQuantity(value, 'mass', { fine });
   const found = ballastFor(mass, from, to, arm);
   const needed = 'mass' in found ? roundTo(found.mass, fine ? 2 : 1) : null;
-  const lead = foremostBallast(plan.items, to);
-  const off = lead && from < to ? ballastFor(mass, from, to, lead.at[0]) : null;
-  const takeOff = off && 'takeOff' in off && off.takeOff !== null ? roundTo(off.takeOff, fine ? 2 : 1) : null;
-  const canTake = lead !== null && takeOff !== null && takeOff > 0 && takeOff <= lead.mass;
+  const spare = from < to ? spareBallast(plan.items, mass, from, to) : null;
+  // Never more than there is: rounding must not ask for it.
+  const takeOff = spare && Math.min(spare.item.mass, roundTo(spare.takeOff, fine ? 2 : 1));
 
   const fit = () => {
     if (needed === null || needed === 0) return;
@@ -45,9 +44,9 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
     say(`${grams(needed)} fitted ${placeOf(arm)}. Undo takes it out again.`);
   };
   const take = () => {
-    if (!lead || takeOff === null) return;
-    edit((p) => withLess(p, lead.id, takeOff), 'take ballast off');
-    say(`${grams(takeOff)} taken off ${lead.name}.`);
+    if (!spare || takeOff === null) return;
+    edit((p) => withLess(p, spare.item.id, takeOff), 'take ballast off');
+    say(`${grams(takeOff)} taken off ${spare.item.name}.`);
   };
 
   return (
@@ -82,9 +81,9 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
             Fit it
           </Button>
         )}
-        {canEdit && canTake && (
+        {canEdit && spare && takeOff !== null && takeOff > 0 && (
           <Button onClick={take}>
-            Take {grams(takeOff)} off {lead.name}
+            Take {grams(takeOff)} off {spare.item.name}
           </Button>
         )}
       </div>

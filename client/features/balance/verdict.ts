@@ -2,8 +2,8 @@ import { ballastFor } from '#shared/core/ballast.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan, Target } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { isBallast } from '#shared/core/wood-trial.ts';
 import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { spareBallast } from './ballast-edit.ts';
 
 /** The answer of the page: how it balances, and what to do about it. */
 export interface Verdict {
@@ -88,24 +88,11 @@ function adviceOf(
     return found.mass === 0 ? null : `Put ${grams(found.mass)} at the nose (${mm(nose)}) and ${then}.`;
   }
   if (found.refused !== 'wrong_side') return null;
-  const lead = foremostBallast(items, to);
-  if (!lead) return 'It is nose-heavy without any ballast: move gear aft, or lengthen the tail.';
-  const off = ballastFor(mass, from, to, lead.at[0]);
-  const takeOff = 'takeOff' in off ? off.takeOff : null;
-  if (takeOff === null || takeOff > lead.mass) {
-    return `Even without its ${grams(lead.mass)} of ballast at ${mm(lead.at[0])} it stays nose-heavy: move gear aft.`;
-  }
-  return `Take ${grams(takeOff)} of the ballast at ${mm(lead.at[0])} off and ${then}.`;
-}
-
-/** The ballast furthest ahead of a place, whose loss moves the balance aft most. */
-export function foremostBallast(items: Plan['items'], before: number): Plan['items'][number] | null {
-  return items
-    .filter((item) => isBallast(item) && item.at[0] < before && item.mass > 0)
-    .reduce<Plan['items'][number] | null>(
-      (best, item) => (best && best.at[0] <= item.at[0] ? best : item),
-      null,
-    );
+  const spare = spareBallast(items, mass, from, to);
+  if (!spare) return 'It is nose-heavy without any ballast: move gear aft, or lengthen the tail.';
+  const { item, takeOff, enough } = spare;
+  const off = `${grams(takeOff)} of the ballast at ${mm(item.at[0])} off`;
+  return enough ? `Take ${off} and ${then}.` : `Take the ${off} first; no piece of ballast alone is enough.`;
 }
 
 function offsetOf(by: number): string {

@@ -73,6 +73,8 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
 
   const change = (index: number, trial: Trial) => keep(trials.map((one, i) => (i === index ? trial : one)));
   const use = (trial: Trial) => {
+    // Kept as they are, or the first ones would be thought out anew from the changed plan.
+    keep([...trials]);
     edit((p) => withWood(p, trial.materials), `wood: ${trial.name}`);
     say(`The plan is now of the wood of “${trial.name}”. Its ballast is left as it was.`);
   };

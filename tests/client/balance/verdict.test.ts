@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { withBallast, withLess } from '#client/features/balance/ballast-edit.ts';
+import { spareBallast, withBallast, withLess } from '#client/features/balance/ballast-edit.ts';
 import { verdictOf } from '#client/features/balance/verdict.ts';
 import { beamOf } from '#shared/core/beam.ts';
 import { estimate } from '#shared/core/estimate.ts';
@@ -63,7 +63,9 @@ describe('verdictOf', () => {
       { mass: 100, at: [20, 0, 0] },
       { mass: 1, at: [-100, 0, 0], group: 'ballast' },
     ] satisfies Partial<Item>[];
-    expect(plain(verdict(plan(short, target)).advice)).toContain('Even without its 1.0 g of ballast');
+    expect(plain(verdict(plan(short, target)).advice)).toBe(
+      'Take the 1.0 g of the ballast at −100.0 mm off first; no piece of ballast alone is enough.',
+    );
   });
 
   it('is inside to the very edge of the range, and close where doubt reaches over it', () => {
@@ -79,6 +81,29 @@ describe('verdictOf', () => {
   it('asks for nothing where nothing is asked, and for parts where nothing has a mass', () => {
     expect(verdict(plan([{ at: [42, 0, 0] }])).kind).toBe('none');
     expect(verdict(plan([])).headline).toBe('Nothing has a mass yet');
+  });
+});
+
+describe('spareBallast', () => {
+  const lead = (id: string, mass: number, x: number): Item => ({
+    id,
+    name: id,
+    group: 'ballast',
+    mass,
+    at: [x, 0, 0],
+  });
+
+  it('passes over a foremost piece that is not enough alone for one that is', () => {
+    // 120 g at 25 mm, wanted at 40: 120·15/(40 + 90) = 13.8 g of the piece at −90 mm.
+    const found = spareBallast([lead('small', 2, -100), lead('large', 20, -90)], 120, 25, 40);
+    expect(found).toMatchObject({ item: { id: 'large' }, enough: true });
+    expect(found?.takeOff).toBeCloseTo(1800 / 130, 9);
+  });
+
+  it('has none behind the wanted point, and no gear to spare', () => {
+    expect(
+      spareBallast([lead('aft', 20, 90), { ...lead('cell', 20, -90), group: 'gear' }], 120, 25, 40),
+    ).toBeNull();
   });
 });
 

@@ -52,8 +52,6 @@ export async function launchProduct() {
     PORT: String(port),
     HOST: host,
     FEATHERBEAM_HOME: home,
-    // A person reads this terminal; every request in it would bury the address.
-    LOG_LEVEL: process.env.LOG_LEVEL || 'warn',
     NODE_ENV: 'production',
   };
   const server = serve({ ...process.env, ...settings });

@@ -1,5 +1,5 @@
 import { wording } from './messages.mjs';
-import { children } from './run.mjs';
+import { endChildren } from './run.mjs';
 
 /** @type {Array<() => unknown>} */
 const endings = [];
@@ -15,7 +15,7 @@ export const isEnding = () => ending !== undefined;
 export function end(code) {
   ending ??= (async () => {
     let result = code;
-    for (const child of children) child.kill('SIGTERM');
+    await endChildren();
     for (const step of endings.toReversed()) {
       try {
         await step();

@@ -9,10 +9,12 @@ const lock = join(root, 'package-lock.json');
 const stamp = join(cache, 'packages.sha256');
 const lockHash = () => createHash('sha256').update(readFileSync(lock)).digest('hex');
 
-/** npm writes its hidden lock last, so a broken-off installation has none. */
+/** Whether what is installed is what the lock file names, and is there: two installations at once destroy each other. */
 export function packagesAreCurrent() {
   const installed = join(root, 'node_modules', '.package-lock.json');
   if (!existsSync(installed)) return false;
+  const folders = Object.keys(JSON.parse(readFileSync(installed, 'utf8')).packages ?? {});
+  if (!folders.every((folder) => existsSync(join(root, folder, 'package.json')))) return false;
   if (existsSync(stamp) && readFileSync(stamp, 'utf8') === lockHash()) return true;
   return statSync(installed).mtimeMs >= statSync(lock).mtimeMs;
 }

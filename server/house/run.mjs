@@ -1,8 +1,8 @@
 import { spawn } from 'node:child_process';
 import { root } from './paths.mjs';
 
-/** Programs still running, so that a stop of the house stops them too. @type {Set<import('node:child_process').ChildProcess>} */
-export const children = new Set();
+/** Programs still running. @type {Set<import('node:child_process').ChildProcess>} */
+const children = new Set();
 
 /**
  * @typedef {object} RunOptions
@@ -57,3 +57,17 @@ export function run(
  * @param {number} [lines]
  */
 export const tail = (output, lines = 15) => output.trimEnd().split('\n').slice(-lines).join('\n');
+
+/** Ends every program that still runs, by force where asking does not help: npm goes on installing otherwise. */
+export async function endChildren() {
+  const running = [...children].filter((child) => child.exitCode === null && child.signalCode === null);
+  const ended = running.map(
+    (child) =>
+      new Promise((done) => {
+        child.once('exit', done);
+        child.kill('SIGTERM');
+        setTimeout(() => child.kill('SIGKILL'), 4000).unref();
+      }),
+  );
+  await Promise.all(ended);
+}

@@ -109,7 +109,7 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
           {beam && <Facts plan={plan} result={result} beam={beam} />}
         </div>
         {beam && (
-          <div className="grid grid-cols-1 gap-y-7">
+          <div className="grid grid-cols-1 gap-y-7 print:hidden">
             <BallastSolver workspace={workspace} beam={beam} nose={nose} />
             {tip && result.totals.at && <TipWeight workspace={workspace} at={result.totals.at} tip={tip} />}
             <WantedFields workspace={workspace} beam={beam} />
@@ -117,7 +117,7 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
         )}
       </div>
       {beam && (
-        <div className="mt-10">
+        <div className="mt-10 print:hidden">
           <SectionBoundary>
             <Suspense fallback={<Skeleton lines={5} />}>
               <Charts plan={plan} result={result} beam={beam} lit={lit} />

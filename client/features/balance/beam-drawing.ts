@@ -38,7 +38,7 @@ const FIGURE_LETTER = 6.4;
 const LABEL_HEIGHT = 31;
 /** Ruler under the lowest weight. */
 const ABOVE_RULER = 14;
-const UNDER_RULER = 30;
+const UNDER_RULER = 40;
 const SMALLEST = 5;
 
 /** Lays the beam out in a width. Depths do not depend on the tilt, so that nothing jumps while figures change. */

@@ -14,7 +14,6 @@ const MOVES = { transition: 'transform 150ms ease-out' };
 export function BeamRuler({ beam, drawing, outside }: BeamRulerProps) {
   const { ruler, rulerY, toX, chordX } = drawing;
   const balance = outside ? 'var(--red)' : 'var(--pencil)';
-  const first = ruler.numbered[0];
   const digits = ruler.step < 1 ? 1 : 0;
   return (
     <g aria-hidden="true">
@@ -46,10 +45,21 @@ export function BeamRuler({ beam, drawing, outside }: BeamRulerProps) {
             className="text-label"
           >
             {formatNumber(mark, digits)}
-            {mark === first && ' mm'}
           </text>
         </g>
       ))}
+      <text
+        x="100%"
+        y={rulerY + 37}
+        textAnchor="end"
+        fill="var(--graphite)"
+        stroke="var(--sheet)"
+        strokeWidth={4}
+        paintOrder="stroke"
+        className="text-label"
+      >
+        mm aft of the datum
+      </text>
       <line
         y1={rulerY - 13}
         y2={rulerY + 5}

@@ -42,7 +42,7 @@ export function BeamView({ beam, plan, lines, lit, onLight, picked, onOpen, outs
         width={width}
         height={height}
         viewBox={`0 0 ${width} ${height}`}
-        className="block max-w-full overflow-visible"
+        className="block max-w-full overflow-visible print:h-auto"
       >
         <BeamRuler beam={beam} drawing={drawing} outside={outside} />
         <g aria-hidden="true">

@@ -13,9 +13,9 @@ interface ChordDetailProps {
 }
 
 const MOVES = { transition: 'transform 150ms ease-out' };
-const BAR = 62;
+const BAR = 56;
 const THICK = 16;
-const LABELS = 34;
+const LABELS = 28;
 const HEIGHT = BAR + THICK + 30;
 
 /** The mean aerodynamic chord drawn larger, as a detail of the ruler: wanted range, balance ±, neutral point. */
@@ -35,11 +35,11 @@ export function ChordDetail({ beam, width, chordX, outside }: ChordDetailProps) 
       width={width}
       height={HEIGHT}
       viewBox={`0 0 ${width} ${HEIGHT}`}
-      className="block max-w-full overflow-visible"
+      className="block max-w-full overflow-visible print:h-auto"
     >
       {chordX && (
         <path
-          d={`M${chordX[0]} -30L${from} ${BAR}M${chordX[1]} -30L${to} ${BAR}`}
+          d={`M${chordX[0]} -40L${from} ${BAR}M${chordX[1]} -40L${to} ${BAR}`}
           stroke="var(--strong-rule)"
           strokeDasharray="2 3"
         />

@@ -11,7 +11,7 @@ export interface NoticeWords {
 }
 
 const mm = (value: number) => formatQuantity(value, 'length', { fine: Math.abs(value) < 1 });
-const at = (station: number) => `${mm(station)} from the root`;
+const at = (station: number) => (station < 0.05 ? 'at the root' : `at ${mm(station)} from the root`);
 
 /** What the calculator has to say of a plan, each code in one or two plain sentences. */
 export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
@@ -34,7 +34,7 @@ export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
     case 'station_past_tip':
       return words(
         'red',
-        `${name} reaches ${at(notice.station)}; the surface ends at ${mm(notice.tip)}. What lies beyond is not counted.`,
+        `${name} reaches ${mm(notice.station)} from the root; the surface ends at ${mm(notice.tip)}. What lies beyond is not counted.`,
       );
     case 'reversed_range':
       return words(
@@ -42,30 +42,27 @@ export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
         `${name} runs from ${mm(notice.from)} to ${mm(notice.to)}, from the tip inward. It is read the other way round.`,
       );
     case 'strip_outside_section':
-      return words(
-        'red',
-        `${name} is ${mm(notice.overBy)} too high for the section at ${at(notice.station)}.`,
-      );
+      return words('red', `${name} is ${mm(notice.overBy)} too high for the section ${at(notice.station)}.`);
     case 'strip_outside_chord':
-      return words('red', `${name} lies ${mm(notice.overBy)} outside the chord at ${at(notice.station)}.`);
+      return words('red', `${name} lies ${mm(notice.overBy)} outside the chord ${at(notice.station)}.`);
     case 'strips_overlap':
       return words(
         'red',
-        `${name} and ${partName(plan, notice.path, notice.other)} share ${mm(notice.overBy)} of room at ${at(notice.station)}.`,
+        `${name} and ${partName(plan, notice.path, notice.other)} share ${mm(notice.overBy)} of room ${at(notice.station)}.`,
       );
     case 'tube_wall_too_thick':
       return words('red', `The wall of ${name} is thicker than the tube allows; it is counted as solid.`);
     case 'rib_notched_through':
-      return words('red', `Notches and sheeting leave nothing of a rib of ${name} at ${at(notice.station)}.`);
+      return words('red', `${name}: notches and sheeting leave nothing of the rib ${at(notice.station)}.`);
     case 'skin_past_trailing_edge':
       return words(
         'red',
         `${name} would reach ${formatQuantity(notice.end, 'share')} of the chord, past the trailing edge.`,
       );
     case 'skin_thicker_than_section':
-      return words('red', `${name} is thicker than the section has room for at ${at(notice.station)}.`);
+      return words('red', `${name} is thicker than the section has room for ${at(notice.station)}.`);
     case 'web_without_height':
-      return words('red', `Spars and sheeting leave ${name} no height at ${at(notice.station)}.`);
+      return words('red', `${name} is left no height by spars and sheeting ${at(notice.station)}.`);
     case 'no_ribs_for_caps':
       return words('plain', `${name}: there are no ribs in that range to carry them.`);
     case 'share_of_no_wood':

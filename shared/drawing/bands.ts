@@ -1,4 +1,4 @@
-import { stationAt, type PanelLine, type Station, type SurfaceLine } from '#shared/core/stations.ts';
+import { stationAt, type Station, type SurfaceLine } from '#shared/core/stations.ts';
 import type { Frame } from './frames.ts';
 import type { Point } from './shape.ts';
 
@@ -8,19 +8,8 @@ export function stationsAlong(line: SurfaceLine, from: number, to: number, steps
   return line.panels.flatMap((panel) => {
     const [a, b] = [Math.max(low, panel.start), Math.min(high, panel.end)];
     if (b <= a) return [];
-    return Array.from({ length: steps + 1 }, (_, i) => known(line, a + ((b - a) * i) / steps, panel));
+    return Array.from({ length: steps + 1 }, (_, i) => stationAt(line, a + ((b - a) * i) / steps, panel));
   });
-}
-
-/** Strips and skins begin and end at the same few stations, and each costs the blending of its section. */
-const stations = new WeakMap<PanelLine, Map<number, Station>>();
-
-function known(line: SurfaceLine, s: number, panel: PanelLine): Station {
-  let own = stations.get(panel);
-  if (!own) stations.set(panel, (own = new Map()));
-  let station = own.get(s);
-  if (!station) own.set(s, (station = stationAt(line, s, panel)));
-  return station;
 }
 
 /** Area in plan between two lines along a surface, each given as mm behind the leading edge at a station. */

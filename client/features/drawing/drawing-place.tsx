@@ -30,7 +30,15 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
   const masses = useMemo(() => new Map(result.lines.map(({ id, mass }) => [id, mass])), [result]);
   const { tab, setTab, station, setStation } = usePlace(plan, selected);
   const desk: Desk = {
-    ...{ plan, edit, undo, canEdit, issues, masses, hover, wish, narrow },
+    plan,
+    edit,
+    undo,
+    canEdit,
+    issues,
+    masses,
+    hover,
+    wish,
+    narrow,
     picked: selected,
     pick: select,
   };

@@ -69,7 +69,9 @@ export function Views(props: ViewsProps) {
           station={cut}
           onStation={onStation}
           maxHeight={
-            narrow ? within(150, height * 0.28, 260) : within(240, height * (surface ? 0.46 : 0.6), 560)
+            narrow
+              ? within(150, height * 0.28, 260)
+              : within(240, height * (!surface ? 0.6 : view === 'half' ? 0.46 : 0.52), 560)
           }
         />
         {stale && (

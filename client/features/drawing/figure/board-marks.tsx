@@ -11,8 +11,8 @@ interface BoardMarksProps {
   surface: Surface;
   side: SideName;
   sheet: Sheet;
-  /** px at which the dimension line runs */
-  dimensionAt: number;
+  /** px at which the dimension line runs; null for none */
+  dimensionAt: number | null;
   /** stations are cut here, mm; null without a section */
   station: number | null;
   brief: boolean;
@@ -32,8 +32,10 @@ export function BoardMarks({ surface, side, sheet, dimensionAt, station, brief }
   const numbers = ribNumbers(surface);
   return (
     <g pointerEvents="none">
-      <MacLine mac={mac} px={px} brief={brief} />
-      {!brief && <Spans surface={surface} tip={tipLength(surface, side)} px={px} y={dimensionAt} />}
+      <MacLine mac={mac} px={px} brief={brief} cutX={station === null ? null : px(0, station)[0]} />
+      {dimensionAt !== null && (
+        <Spans surface={surface} tip={tipLength(surface, side)} px={px} y={dimensionAt} />
+      )}
       {station !== null && <Cut from={px(at(station).leadingEdge, station)} to={trailing(station)} />}
       {thinned(numbers, sheet.scale).map(({ s, number }) => {
         const [x, y] = trailing(s);
@@ -59,9 +61,21 @@ function thinned(stations: readonly number[], scale: number): { s: number; numbe
 
 type Px = (x: number, s: number) => readonly [number, number];
 
-function MacLine({ mac, px, brief }: { mac: ReturnType<typeof macMark>; px: Px; brief: boolean }) {
+interface MacLineProps {
+  mac: ReturnType<typeof macMark>;
+  px: Px;
+  brief: boolean;
+  /** px of the cutting plane, whose arrow the words must leave alone */
+  cutX: number | null;
+}
+
+/** Width of the words, px. */
+const MAC_WORDS = 80;
+
+function MacLine({ mac, px, brief, cutX }: MacLineProps) {
   const [x, y0] = px(mac.x, mac.s);
   const [, y1] = px(mac.x + mac.length, mac.s);
+  const leftward = cutX !== null && cutX > x && cutX < x + MAC_WORDS;
   return (
     <>
       <path
@@ -71,7 +85,11 @@ function MacLine({ mac, px, brief }: { mac: ReturnType<typeof macMark>; px: Px; 
         strokeDasharray="6 4"
       />
       <path d={`M${x - 4} ${y0}h8M${x - 4} ${y1}h8`} stroke="var(--graphite)" strokeWidth={1.2} />
-      <SheetText x={x + 5} y={y0 - (brief ? 4 : 6)}>
+      <SheetText
+        x={leftward ? x - 5 : x + 5}
+        y={y0 - (brief ? 4 : 6)}
+        textAnchor={leftward ? 'end' : 'start'}
+      >
         MAC {formatNumber(mac.length, 1)}
       </SheetText>
     </>

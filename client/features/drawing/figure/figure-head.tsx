@@ -3,7 +3,7 @@ import { cn } from '#client/lib/cn.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
 import type { PlanViewName } from './drawings.ts';
 
-const VIEW_WORDS: Record<PlanViewName, string> = { half: 'Half', whole: 'Whole', side: 'Side' };
+const VIEW_WORDS: Record<PlanViewName, string> = { half: 'Surface', whole: 'Above', side: 'Side' };
 const TOOL =
   'grid min-h-row min-w-row place-items-center rounded-md px-2 text-note text-ink hover:bg-ink-wash ' +
   'aria-disabled:text-graphite aria-disabled:opacity-60 aria-pressed:font-semibold aria-pressed:underline ' +

@@ -9,13 +9,14 @@ import { boundsOf, type Point } from '#shared/drawing/shape.ts';
 import { useHovered, type Hover } from '../hover.ts';
 import { BoardMarks } from './board-marks.tsx';
 import { CrossMarks } from './cross-marks.tsx';
-import { halfLayers, modelLayers, type PlanViewName } from './drawings.ts';
+import { halfLayers, modelLayers, type Layer, type PlanViewName } from './drawings.ts';
 import { FigureHead } from './figure-head.tsx';
 import { planSentence, planTitle } from './plan-words.ts';
 import { LitLayer, ShapeLayer } from './shape-layer.tsx';
 import { FITTED, fromPx, layOnPaper, scaleNote, zoomed, type Margins, type Zoom } from './sheet.ts';
 import { SideMarks } from './side-marks.tsx';
 import { useDrag } from './use-drag.ts';
+import { useSteady } from './use-steady.ts';
 
 export interface PlanFigureProps {
   plan: Plan;
@@ -38,6 +39,7 @@ export interface PlanFigureProps {
   brief: boolean;
 }
 
+const NO_LAYERS: Layer[] = [];
 const MARGINS: Margins = { top: 36, right: 118, bottom: 66, left: 24 };
 const BRIEF: Margins = { top: 24, right: 12, bottom: 38, left: 12 };
 /** Not larger than one and a half times its size on paper. */
@@ -58,33 +60,29 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
     setZoom(FITTED);
   }
   const { materials } = plan;
-  const layers = useMemo(
-    () =>
-      view === 'half' && surface
-        ? halfLayers(surface, materials, side)
-        : modelLayers(plan, view === 'side' ? 'side' : 'above'),
-    // While one half is on the board, the rest of the plan does not matter.
-    [view, surface, materials, side, view === 'half' ? null : plan],
+  const half = useMemo(
+    () => (surface ? halfLayers(surface, materials, side) : NO_LAYERS),
+    [surface, materials, side],
   );
+  // While one half is on the board, the rest of the plan does not matter.
+  const model = useMemo(
+    () => (view === 'half' ? NO_LAYERS : modelLayers(plan, view === 'side' ? 'side' : 'above')),
+    [plan, view],
+  );
+  const layers = view === 'half' ? half : model;
   const shapes = useMemo(() => layers.flatMap((layer) => layer.shapes), [layers]);
   const targets = useMemo(() => targetsOf(shapes), [shapes]);
-  const bounds = useMemo(() => boundsOf(shapes), [shapes]);
+  // Equal bounds give the same sheet, so that an edit which moves no outline leaves every other line alone.
+  const bounds = useSteady(boundsOf(shapes));
   const margins = brief ? BRIEF : MARGINS;
-  const [boundsKey, paperKey] = [JSON.stringify(bounds), `${width} ${maxHeight} ${zoom.factor} ${view}`];
+  const minHeight = brief ? 110 : 170;
+  const axes = view === 'side' ? 'elevation' : 'plan';
+  const { factor } = zoom;
   const paper = useMemo(
     () =>
       bounds &&
-      layOnPaper(bounds, {
-        axes: view === 'side' ? 'elevation' : 'plan',
-        width,
-        margins,
-        maxHeight,
-        minHeight: brief ? 110 : 170,
-        maxScale: MAX_SCALE,
-        zoom,
-      }),
-    // Equal bounds give the same sheet, so that an edit which moves no outline leaves every other line alone.
-    [boundsKey, paperKey, brief],
+      layOnPaper(bounds, { axes, width, margins, maxHeight, minHeight, maxScale: MAX_SCALE, factor }),
+    [bounds, axes, width, margins, maxHeight, minHeight, factor],
   );
   const id = useId();
   const toDrawing = (at: Point): Point | null =>
@@ -145,18 +143,25 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
             ))}
             <Lit {...{ shapes, sheet, picked, hover }} />
             {view === 'half' && surface && (
-              <BoardMarks {...{ surface, side, sheet, station, brief }} dimensionAt={height - 26} />
+              <BoardMarks
+                {...{ surface, side, sheet, station, brief }}
+                dimensionAt={zoom.factor === 1 && !brief ? height - 26 : null}
+              />
             )}
             {view === 'side' ? (
-              <SideMarks {...common} bottom={height - margins.bottom} top={margins.top} />
+              <SideMarks
+                {...common}
+                bottom={height - margins.bottom - zoom.panY}
+                top={margins.top - zoom.panY}
+              />
             ) : (
               <CrossMarks
                 {...common}
                 wantedPercent={plan.target?.percentMac ?? null}
-                left={margins.left}
-                right={right}
-                low={margins.top - 8}
-                high={height - margins.bottom + 8}
+                left={margins.left - zoom.panX}
+                right={right - zoom.panX}
+                low={margins.top - 8 - zoom.panY}
+                high={height - margins.bottom + 8 - zoom.panY}
               />
             )}
           </g>

@@ -10,10 +10,11 @@ import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
 import { useHovered, type Hover } from '../hover.ts';
 import { LitLayer, ShapeLayer } from './shape-layer.tsx';
 import { SheetText } from './sheet-text.tsx';
-import { fromPx, layOnPaper, scaleNote, toPx } from './sheet.ts';
+import { fromPx, layOnPaper, scaleNote, toPx, type Margins } from './sheet.ts';
 import { StationPicker } from './station-picker.tsx';
 import { surfaceTitle } from './plan-words.ts';
 import { useDrag } from './use-drag.ts';
+import { useSteady } from './use-steady.ts';
 
 interface SectionFigureProps {
   surface: Surface;
@@ -28,6 +29,8 @@ interface SectionFigureProps {
   brief: boolean;
 }
 
+const MARGINS: Margins = { top: 10, right: 118, bottom: 34, left: 24 };
+const BRIEF: Margins = { ...MARGINS, right: 12, left: 12 };
 const MAX_SCALE = (3 * 96) / 25.4;
 const REACH = 4;
 
@@ -41,21 +44,20 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
     [surface, station, materials, side],
   );
   const targets = useMemo(() => targetsOf(section.shapes), [section]);
-  const bounds = useMemo(() => boundsOf(section.shapes), [section]);
-  const margins = { top: 10, right: brief ? 12 : 118, bottom: 34, left: brief ? 12 : 24 };
-  const key = JSON.stringify([bounds, width, maxHeight, brief]);
+  const bounds = useSteady(boundsOf(section.shapes));
+  const margins = brief ? BRIEF : MARGINS;
   const paper = useMemo(
     () =>
       bounds &&
       layOnPaper(bounds, {
-        axes: 'elevation',
         width,
         margins,
         maxHeight,
+        axes: 'elevation',
         minHeight: 80,
         maxScale: MAX_SCALE,
       }),
-    [key],
+    [bounds, width, margins, maxHeight],
   );
   const numbers = useMemo(() => ribNumbers(surface), [surface]);
   const find = (at: Point) => paper && lineAt(targets, fromPx(paper.sheet, at), REACH / paper.sheet.scale);
@@ -74,7 +76,8 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
   const rib = numbers.findIndex((s) => Math.abs(s - section.s) < 1e-6);
   const where = `${formatQuantity(section.s, 'length')} from the root`;
   const title = rib >= 0 ? `Section at rib ${rib + 1} · ${where}` : `Section · ${where}`;
-  const thick = `${formatQuantity(section.thickness, 'length')} thick at ${formatQuantity(section.thicknessAt, 'share')}`;
+  const even = section.thicknessAt <= 0 || section.thicknessAt >= 1;
+  const thick = `${formatQuantity(section.thickness, 'length')} thick${even ? '' : ` at ${formatQuantity(section.thicknessAt, 'share')}`}`;
   const [[x0], [x1]] = [toPx(sheet, [0, 0]), toPx(sheet, [section.chord, 0])];
   return (
     <figure aria-labelledby={`${id}-title`} className="min-w-0">
@@ -100,7 +103,7 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
           className="block touch-pan-y"
         >
           <title id={`${id}-sentence`}>
-            {`Section of ${surfaceTitle(surface)}, ${where}: chord ${formatQuantity(section.chord, 'length')}, ${thick} of the chord${section.rib === null ? ', between ribs' : ''}.`}
+            {`Section of ${surfaceTitle(surface)}, ${where}: chord ${formatQuantity(section.chord, 'length')}, ${thick}${even ? '' : ' of the chord'}${section.rib === null ? ', between ribs' : ''}.`}
           </title>
           <ShapeLayer shapes={section.shapes} sheet={sheet} />
           <Lit shapes={section.shapes} sheet={sheet} picked={picked} hover={hover} />

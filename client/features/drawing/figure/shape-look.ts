@@ -31,7 +31,13 @@ export function lookOf(shape: Shape): Look | null {
       return { fill: 'none', stroke: 'var(--graphite)', strokeWidth: 0.8, strokeDasharray: DASHED };
     case 'item':
       return { fill: hatchFill('gear'), stroke: 'var(--pencil)', strokeWidth: 1 };
+    default:
+      return hatchedLook(shape);
   }
+}
+
+/** Parts, hatched by what they are made of; dashed and empty where they lie under something. */
+function hatchedLook(shape: Shape): Look {
   const fill = shape.material ? hatchFill(shape.material.category, shape.material.density) : 'var(--sheet)';
   if (shape.hidden) {
     return { fill: 'none', stroke: 'var(--graphite)', strokeWidth: 0.8, strokeDasharray: DASHED };

@@ -50,19 +50,20 @@ interface Paper {
   minHeight: number;
   /** px per mm that is never exceeded when fitted, so that a small tail is not blown up */
   maxScale?: number;
-  zoom?: Zoom;
+  /** zoom beyond fitting */
+  factor?: number;
 }
 
 /** Lays bounds on paper of a given width, as large as fits, centred; zoomed about the middle of the paper. */
 export function layOnPaper(bounds: Bounds, paper: Paper): { sheet: Sheet; width: number; height: number } {
-  const { axes, width, margins, maxHeight, minHeight, maxScale = Infinity, zoom = FITTED } = paper;
+  const { axes, width, margins, maxHeight, minHeight, maxScale = Infinity, factor = 1 } = paper;
   const size = [bounds.max[0] - bounds.min[0], bounds.max[1] - bounds.min[1]] as const;
   const [across, down] = axes === 'plan' ? [size[1], size[0]] : [size[0], size[1]];
   const room = Math.max(40, width - margins.left - margins.right);
   const tall = Math.max(30, maxHeight - margins.top - margins.bottom);
   const fit = Math.min(room / Math.max(across, 1e-6), tall / Math.max(down, 1e-6), maxScale);
   const height = Math.max(minHeight, Math.ceil(down * fit + margins.top + margins.bottom));
-  const scale = fit * zoom.factor;
+  const scale = fit * factor;
   const middle: Point = [margins.left + room / 2, margins.top + (height - margins.top - margins.bottom) / 2];
   const centre: Point = [(bounds.min[0] + bounds.max[0]) / 2, (bounds.min[1] + bounds.max[1]) / 2];
   const away = toPx({ scale, originX: 0, originY: 0, axes }, centre);

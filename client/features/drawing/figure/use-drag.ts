@@ -14,17 +14,17 @@ const STILL = 4;
 /** Tells a press from a drag. */
 export function useDrag({ onPress, onHover, onDrag }: DragHandlers) {
   const start = useRef<{ id: number; x: number; y: number; last: Point; moved: boolean } | null>(null);
-  const placeOf = (event: PointerEvent<Element>): Point => {
+  const placeOf = (event: PointerEvent): Point => {
     const box = event.currentTarget.getBoundingClientRect();
     return [event.clientX - box.left, event.clientY - box.top];
   };
   return {
-    onPointerDown: (event: PointerEvent<Element>) => {
+    onPointerDown: (event: PointerEvent) => {
       if (event.button !== 0) return;
       const { pointerId: id, clientX: x, clientY: y } = event;
       start.current = { id, x, y, last: [x, y], moved: false };
     },
-    onPointerMove: (event: PointerEvent<Element>) => {
+    onPointerMove: (event: PointerEvent) => {
       const { current } = start;
       if (!current) {
         if (event.pointerType !== 'touch') onHover(placeOf(event));
@@ -38,7 +38,7 @@ export function useDrag({ onPress, onHover, onDrag }: DragHandlers) {
       if (current.moved) onDrag(event.clientX - current.last[0], event.clientY - current.last[1]);
       current.last = [event.clientX, event.clientY];
     },
-    onPointerUp: (event: PointerEvent<Element>) => {
+    onPointerUp: (event: PointerEvent) => {
       const pressed = start.current?.id === event.pointerId && !start.current.moved;
       start.current = null;
       if (pressed) onPress(placeOf(event));

@@ -1,13 +1,14 @@
 import type { PointsSpec, SectionSpec } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { formatNumber } from '#shared/format/numbers.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { parseQuantity } from '#shared/units/parse.ts';
 import type { Parsed } from './parsed-field.tsx';
+import { stationsText } from './station-text.ts';
 
 /** A section as it is written: `4409`, `plate 3 mm`, or the name of own points. */
 export function sectionText(spec: SectionSpec): string {
   if ('naca' in spec) return spec.naca;
-  if ('flat' in spec) return `plate ${formatQuantity(spec.flat, 'length').replace('\u202f', ' ')}`;
+  if ('flat' in spec) return `plate ${stationsText([spec.flat])} mm`;
   return spec.name;
 }
 

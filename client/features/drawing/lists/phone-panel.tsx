@@ -11,16 +11,18 @@ interface PhonePanelProps {
 export function PhonePanel({ id, title, onClose, children }: PhonePanelProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus({ preventScroll: true }), []);
+  useEffect(() => {
+    const onKeyDown = (event: KeyboardEvent) => {
+      if (event.key === 'Escape') onClose();
+    };
+    addEventListener('keydown', onKeyDown);
+    return () => removeEventListener('keydown', onKeyDown);
+  }, [onClose]);
   return (
     <section
       id={id}
       data-form=""
       aria-label={title}
-      onKeyDown={(event) => {
-        if (event.key !== 'Escape') return;
-        event.stopPropagation();
-        onClose();
-      }}
       className="fixed inset-x-0 bottom-0 z-30 flex max-h-[58dvh] flex-col border-t-2 border-ink bg-sheet shadow-float"
     >
       <div className="flex items-center justify-between gap-3 border-b border-rule pl-4">

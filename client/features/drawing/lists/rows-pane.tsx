@@ -44,14 +44,22 @@ interface RowsPaneProps<T> {
   add: ReactNode;
 }
 
+/** What was taken out last; told until the plan changes again. */
+interface Removed {
+  name: string;
+  line: string;
+  before: Plan;
+  after: Plan | null;
+}
+
 /** A list whose rows are picked, opened, copied, moved and removed, with the focus always somewhere sensible. */
 export function RowsPane<T extends { id: string; name: string }>(props: RowsPaneProps<T>) {
   const { desk, title, rows, lineOf, noteOf, sizeOf, pathOf, formOf, empty, add } = props;
   const { plan, picked, narrow, hover, wish, canEdit, masses } = desk;
   const list = useRef<HTMLUListElement>(null);
-  const [removed, setRemoved] = useState<{ name: string; before: Plan; after: Plan | null } | null>(null);
+  const [removed, setRemoved] = useState<Removed | null>(null);
   if (removed && removed.after === null && plan !== removed.before) setRemoved({ ...removed, after: plan });
-  const ops = useOps(props, (name) => setRemoved({ name, before: plan, after: null }));
+  const ops = useOps(props, (name, line) => setRemoved({ name, line, before: plan, after: null }));
   useEffect(() => wish.grant(list.current));
 
   return (
@@ -90,7 +98,14 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
           {removed?.after === plan && (
             <>
               “{removed.name}” removed.
-              <Button variant="plain" className="text-note" onClick={desk.undo}>
+              <Button
+                variant="plain"
+                className="text-note"
+                onClick={() => {
+                  wish.ask(removed.line, 'row');
+                  desk.undo();
+                }}
+              >
                 Undo
               </Button>
             </>
@@ -109,7 +124,7 @@ function hasIssue(issues: Workspace['issues'], under: string): boolean {
 /** Operations that stay the same object while what they act on changes. */
 function useOps<T extends { id: string; name: string }>(
   props: RowsPaneProps<T>,
-  onRemoved: (name: string) => void,
+  onRemoved: (name: string, line: string) => void,
 ): RowOps {
   const latest = useRef({ props, onRemoved });
   useLayoutEffect(() => {
@@ -148,7 +163,7 @@ function useOps<T extends { id: string; name: string }>(
         const at = rows.findIndex((row) => row.id === id);
         const row = rows[at];
         if (!row) return;
-        latest.current.onRemoved(row.name);
+        latest.current.onRemoved(row.name, now().lineOf(row));
         desk.wish.ask(lineAt(at + 1) ?? lineAt(at - 1), 'row');
         desk.pick(null);
         desk.edit(

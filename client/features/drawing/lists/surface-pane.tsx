@@ -27,7 +27,7 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
   const add = (choice: PartChoice) => {
     const bare = newPart(choice, surface);
     const material = preferred(desk.plan, table, fitsPart(bare), WISHES[choice]);
-    const part = {
+    const part: Part = {
       ...bare,
       id: freshId(
         idOf(bare.name),
@@ -38,7 +38,7 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
         surface.parts.map((p) => p.name),
       ),
       material: material?.key ?? '',
-    } as Part; // a NewPart with the two fields it lacks; the compiler does not put the union together again
+    };
     const recipe = change((parts) => [...parts, part]);
     desk.edit(
       material ? inTurn(keepMaterial(material.key, material.material), recipe) : recipe,

@@ -41,7 +41,7 @@ export function Bars({ bars, format, lit = null, about = false }: BarsProps) {
           axisLine={false}
           tickLine={false}
           interval={0}
-          tick={(props: NameProps) => <Name {...props} room={names} start={about ? -figures : 0} />}
+          tick={(props: NameProps) => <Name {...props} room={names} />}
         />
         {about && <ReferenceLine x={0} stroke="var(--ink)" strokeWidth={1.5} />}
         <Bar dataKey="value" isAnimationActive={false}>
@@ -65,14 +65,14 @@ export function Bars({ bars, format, lit = null, about = false }: BarsProps) {
 
 interface NameProps {
   y?: number | string;
-  payload?: { value?: unknown };
+  payload?: { value?: string };
 }
 
-function Name({ y = 0, payload, room, start }: NameProps & { room: number; start: number }) {
-  const name = String(payload?.value ?? '');
+function Name({ y = 0, payload, room }: NameProps & { room: number }) {
+  const name = payload?.value ?? '';
   const letters = Math.floor((room - 10) / LETTER);
   return (
-    <text x={start < 0 ? 0 : 0} y={Number(y)} dy="0.35em" fill="var(--pencil)" className="text-note">
+    <text x={0} y={Number(y)} dy="0.35em" fill="var(--pencil)" className="text-note">
       {name.length > letters ? `${name.slice(0, letters - 1)}…` : name}
     </text>
   );

@@ -68,7 +68,7 @@ export function TrialChart({ results }: { results: readonly TrialResult[] }) {
             interval={0}
             tick={(props: TickProps) => (
               <text x={0} y={Number(props.y ?? 0)} dy="0.35em" fill="var(--pencil)" className="text-note">
-                {clip(String(props.payload?.value ?? ''), names)}
+                {clip(props.payload?.value ?? '', names)}
               </text>
             )}
           />
@@ -113,7 +113,7 @@ export function TrialChart({ results }: { results: readonly TrialResult[] }) {
 
 interface TickProps {
   y?: number | string;
-  payload?: { value?: unknown };
+  payload?: { value?: string };
 }
 
 interface LabelProps {

@@ -60,7 +60,13 @@ describe('woods of a trial', () => {
 
 describe('trialHeadline', () => {
   const trial = (name: string, bare: number, allUp: number | null): TrialResult => ({
-    ...{ name, bare, allUp, wingMass: 0, u: 0, percentMac: null, wingLoading: null },
+    name,
+    bare,
+    allUp,
+    wingMass: 0,
+    u: 0,
+    percentMac: null,
+    wingLoading: null,
     ballast: allUp === null ? null : allUp - bare,
     refused: allUp === null ? { refused: 'wrong_side', takeOff: 1 } : null,
   });

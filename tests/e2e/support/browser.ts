@@ -100,3 +100,6 @@ export async function signIn(page: Page, email: string, password: string): Promi
   await page.getByRole('button', { name: 'Sign in' }).click();
   await page.waitForURL('**/bench');
 }
+
+/** Waits until a value is as expected; generous, for the machine may be busy. */
+export const eventually = <T>(value: () => T) => expect.poll(value, { timeout: 20_000 });

@@ -12,7 +12,12 @@ const nodeTests = (name: string, include: string[], extra: object = {}) => ({
 
 export default defineConfig({
   plugins: [react(), tailwind()],
-  build: { outDir: 'node_modules/.cache/featherbeam/client', emptyOutDir: true, target: 'es2022', sourcemap: false },
+  build: {
+    outDir: 'node_modules/.cache/featherbeam/client',
+    emptyOutDir: true,
+    target: 'es2022',
+    sourcemap: false,
+  },
   server: { host: '127.0.0.1', proxy: { '/api': `http://127.0.0.1:${apiPort}` } },
   test: {
     reporters: ['default'],

@@ -1,4 +1,5 @@
-import { useMemo, useState } from 'react';
+import { useMemo, useRef, useState } from 'react';
+import { useToast } from '#client/components/ui/toast.tsx';
 import { useMedia } from '#client/hooks/use-media.ts';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
@@ -49,6 +50,15 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
     edit((p) => ({ ...p, surfaces: [...p.surfaces, newSurface(p, role)] }), `add a ${role}`);
   };
 
+  const nav = useRef<HTMLElement>(null);
+  const say = useToast();
+  const surfaceRemoved = (key: string, index: number) => {
+    setTab({ kind: 'surface', index: Math.max(0, index - 1) });
+    say(`The ${key} was removed. Undo brings it back.`);
+    // The pressed button has gone with its surface.
+    setTimeout(() => nav.current?.querySelector<HTMLElement>('[aria-current]')?.focus());
+  };
+
   const list = (
     <div className="min-w-0">
       <IndexTabs
@@ -60,6 +70,7 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
         }}
         canEdit={canEdit}
         onAdd={addSurface}
+        navRef={nav}
       />
       <div className="mt-4">
         {tab.kind === 'surface' && surface && (
@@ -69,7 +80,7 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
             surface={surface}
             index={tab.index}
             table={table}
-            onRemoved={() => setTab({ kind: 'surface', index: Math.max(0, tab.index - 1) })}
+            onRemoved={() => surfaceRemoved(surface.key, tab.index)}
           />
         )}
         {tab.kind === 'solids' && <SolidsPane desk={desk} table={table} />}

@@ -25,6 +25,8 @@ export function useDrag({ onPress, onHover, onDrag }: DragHandlers) {
       start.current = { id, x, y, last: [x, y], moved: false };
     },
     onPointerMove: (event: PointerEvent) => {
+      // Let go outside, where nobody told us.
+      if (event.buttons === 0) start.current = null;
       const { current } = start;
       if (!current) {
         if (event.pointerType !== 'touch') onHover(placeOf(event));

@@ -1,3 +1,4 @@
+import type { Ref } from 'react';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import type { Plan, SurfaceRole } from '#shared/core/plan.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
@@ -11,6 +12,7 @@ interface IndexTabsProps {
   onTab: (tab: Tab) => void;
   canEdit: boolean;
   onAdd: (role: SurfaceRole) => void;
+  navRef: Ref<HTMLElement>;
 }
 
 const TAB =
@@ -18,7 +20,7 @@ const TAB =
   'aria-[current]:border-ink aria-[current]:font-semibold aria-[current]:text-pencil';
 
 /** What the plan is made of: its surfaces, its solids, its items. */
-export function IndexTabs({ plan, tab, onTab, canEdit, onAdd }: IndexTabsProps) {
+export function IndexTabs({ plan, tab, onTab, canEdit, onAdd, navRef }: IndexTabsProps) {
   const tabs: { key: string; tab: Tab; label: string }[] = [
     // A surface may be renamed letter by letter; its place is what the tab is known by.
     ...plan.surfaces.map((surface, index) => ({
@@ -30,7 +32,7 @@ export function IndexTabs({ plan, tab, onTab, canEdit, onAdd }: IndexTabsProps) 
     { key: 'items', tab: { kind: 'items' }, label: 'Items' },
   ];
   return (
-    <nav aria-label="Parts of the plan" className="flex flex-wrap items-end gap-x-3 sm:gap-x-4">
+    <nav ref={navRef} aria-label="Parts of the plan" className="flex flex-wrap items-end gap-x-3 sm:gap-x-4">
       {tabs.map(({ key, tab: own, label }) => (
         <button
           key={key}

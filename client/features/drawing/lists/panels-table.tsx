@@ -1,3 +1,4 @@
+import { useRef } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { Table, Th, Tr } from '#client/components/ui/table.tsx';
@@ -36,17 +37,21 @@ export function PanelsTable({ desk, surface, index }: PanelsTableProps) {
       }),
       `${surface.key}: add a panel`,
     );
-  const remove = (i: number) =>
+  const addButton = useRef<HTMLButtonElement>(null);
+  const remove = (i: number) => {
+    // The pressed button goes with its panel.
+    addButton.current?.focus();
     desk.edit(
       changeSurface(index, (s) => ({ ...s, panels: s.panels.filter((_, at) => at !== i) })),
       `${surface.key}: remove panel ${i + 1}`,
     );
+  };
   return (
     <>
       <div className="flex items-center justify-between">
         <h2 className="caption px-2">Panels, root to tip · mm</h2>
         {desk.canEdit && (
-          <Button variant="plain" className="text-note" onClick={add}>
+          <Button ref={addButton} variant="plain" className="text-note" onClick={add}>
             Add a panel
           </Button>
         )}

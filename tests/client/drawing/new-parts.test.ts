@@ -1,0 +1,115 @@
+import { describe, expect, it } from 'vitest';
+import {
+  choices,
+  fitsPart,
+  fitsSolid,
+  preferred,
+  snapshotOf,
+} from '#client/features/drawing/edits/materials.ts';
+import { newPart, PART_CHOICES, WISHES } from '#client/features/drawing/edits/new-part.ts';
+import { newItem, newSolid, newSurface, SOLID_CHOICES } from '#client/features/drawing/edits/new-rows.ts';
+import { noticeWords } from '#client/components/notice-text.ts';
+import { startPlan } from '#client/features/gliders/start-plan.ts';
+import delivered from '#data/materials.json';
+import { estimate } from '#shared/core/estimate.ts';
+import type { Part, Plan, Surface } from '#shared/core/plan.ts';
+import { planSchema } from '#shared/schemas/plan.ts';
+import { DEMO_NAMES, demoPlan } from '#tests/support/plans.ts';
+
+const table = delivered.materials.map((row) => snapshotOf(row as Parameters<typeof snapshotOf>[0]));
+const empty = startPlan('New');
+
+/** The plan with one part more, made of what its builder would reach for. */
+function withNew(plan: Plan, surface: Surface, choice: (typeof PART_CHOICES)[number]['choice']): Plan {
+  const bare = newPart(choice, surface);
+  const material = preferred(plan, table, fitsPart(bare), WISHES[choice]);
+  if (!material) throw new Error(`no material fits ${choice}`);
+  const part: Part = { ...bare, id: 'new', material: material.key };
+  return {
+    ...plan,
+    materials: { ...plan.materials, [material.key]: material.material },
+    surfaces: plan.surfaces.map((s) => (s.key === surface.key ? { ...s, parts: [...s.parts, part] } : s)),
+  };
+}
+
+describe('a new part', () => {
+  it.each(PART_CHOICES)('$label suits every surface of the demo gliders and a blank wing', ({ choice }) => {
+    for (const plan of [empty, ...DEMO_NAMES.map(demoPlan)]) {
+      for (const surface of plan.surfaces) {
+        const after = withNew(plan, surface, choice);
+        expect(planSchema.safeParse(after).error?.issues ?? [], `${plan.name} ${surface.key}`).toEqual([]);
+      }
+    }
+  });
+
+  it('built up in turn on a blank wing, weighs something and fits without a red word', () => {
+    const order = PART_CHOICES.map(({ choice }) => choice).filter((choice) => choice !== 'sheet');
+    const plan = order.reduce((p, choice) => {
+      const added = withNew(p, p.surfaces[0]!, choice);
+      const parts = added.surfaces[0]!.parts.map((part, i) => ({ ...part, id: `p${i}` }));
+      return { ...added, surfaces: [{ ...added.surfaces[0]!, parts }] };
+    }, empty);
+    const { lines, notices } = estimate(plan);
+    expect(lines).toHaveLength(order.length);
+    for (const line of lines) expect(line.mass, line.name).toBeGreaterThan(0);
+    const words = notices.map((notice) => noticeWords(notice, plan));
+    expect(words.filter(({ tone }) => tone === 'red')).toEqual([]);
+  });
+
+  it('is the bottom spar once the top one is there', () => {
+    const after = withNew(empty, empty.surfaces[0]!, 'spar');
+    expect(newPart('spar', empty.surfaces[0]!)).toMatchObject({ seat: 'top', name: 'Spar, top' });
+    expect(newPart('spar', after.surfaces[0]!)).toMatchObject({ seat: 'bottom', name: 'Spar, bottom' });
+  });
+});
+
+describe('new surfaces, solids and items', () => {
+  it('make a plan that balances: a tailplane behind the wing, a fin, a boom and gear', () => {
+    const surfaces = [...empty.surfaces, newSurface(empty, 'tailplane'), newSurface(empty, 'fin')];
+    const solids = SOLID_CHOICES.map(({ choice, wishes }) => {
+      const bare = newSolid(choice);
+      return { ...bare, id: choice, material: preferred(empty, table, fitsSolid(bare), wishes)!.key };
+    });
+    const materials = Object.fromEntries(
+      table
+        .filter(({ key }) => solids.some(({ material }) => material === key))
+        .map(({ key, material }) => [key, material]),
+    );
+    const plan: Plan = { ...empty, materials, surfaces, solids, items: [{ ...newItem(), id: 'item' }] };
+    expect(planSchema.safeParse(plan).error?.issues ?? []).toEqual([]);
+    const { balance, planform } = estimate(plan);
+    expect(balance.neutralPoint).toBeGreaterThan(planform['wing']!.xLeMac);
+    expect(balance.x).not.toBeNull();
+  });
+
+  it('never take a name that is there', () => {
+    expect(newSurface(empty, 'wing').key).toBe('wing-2');
+  });
+});
+
+describe('materials to choose from', () => {
+  it('are the plan’s own first, then the table’s, none twice', () => {
+    const plan = demoPlan('dunlin');
+    const offered = choices(plan, table, fitsPart({ kind: 'ribs' })).map(({ key }) => key);
+    expect(new Set(offered).size).toBe(offered.length);
+    expect(Object.keys(plan.materials)).toContain(offered[0]);
+    expect(offered).toContain('obeche');
+  });
+
+  it('are only those by which the part can be weighed', () => {
+    const keys = (kind: Part['kind'], method?: 'joints' | 'share') =>
+      choices(empty, table, fitsPart({ kind, ...(method && { method }) })).map(({ key }) => key);
+    expect(keys('covering')).toContain('tissue-light');
+    expect(keys('covering')).not.toContain('spruce');
+    expect(keys('tipBlock')).not.toContain('ply-0.8mm');
+    expect(keys('ribs')).toContain('ply-0.8mm');
+    expect(keys('glue', 'joints')).not.toContain('epoxy-filler');
+    expect(keys('glue', 'share')).toContain('epoxy-filler');
+  });
+
+  it('are kept as snapshots without what is not known', () => {
+    const tissue = table.find(({ key }) => key === 'tissue-light');
+    expect(tissue?.material).toMatchObject({ category: 'covering', areal: 12.5 });
+    expect(Object.keys(tissue?.material ?? {})).not.toContain('density');
+  });
+});

@@ -20,7 +20,7 @@ export function Menu({ trigger, align = 'end', children }: MenuProps) {
           align={align}
           sideOffset={4}
           collisionPadding={8}
-          className="z-50 min-w-48 rounded-md border border-strong-rule bg-sheet py-1 shadow-float"
+          className="z-50 max-h-(--radix-dropdown-menu-content-available-height) min-w-48 overflow-y-auto rounded-md border border-strong-rule bg-sheet py-1 shadow-float"
         >
           {children}
         </DropdownMenu.Content>

@@ -16,7 +16,7 @@ interface IndexTabsProps {
 }
 
 const TAB =
-  'min-h-row border-b-2 border-transparent px-0.5 text-graphite hover:text-ink ' +
+  'min-h-row min-w-6 border-b-2 border-transparent px-0.5 pointer-coarse:min-w-11 text-graphite hover:text-ink ' +
   'aria-[current]:border-ink aria-[current]:font-semibold aria-[current]:text-pencil';
 
 /** What the plan is made of: its surfaces, its solids, its items. */
@@ -32,7 +32,11 @@ export function IndexTabs({ plan, tab, onTab, canEdit, onAdd, navRef }: IndexTab
     { key: 'items', tab: { kind: 'items' }, label: 'Items' },
   ];
   return (
-    <nav ref={navRef} aria-label="Parts of the plan" className="flex flex-wrap items-end gap-x-3 sm:gap-x-4">
+    <nav
+      ref={navRef}
+      aria-label="Parts of the plan"
+      className="flex flex-wrap items-end gap-x-1.5 sm:gap-x-4"
+    >
       {tabs.map(({ key, tab: own, label }) => (
         <button
           key={key}

@@ -1,7 +1,5 @@
-import { spawn, type ChildProcess } from 'node:child_process';
-import { fileURLToPath } from 'node:url';
 import type { TestProject } from 'vitest/node';
-import { startCluster } from '#server/house/cluster.mjs';
+import { serve } from '#tests/support/served.ts';
 
 declare module 'vitest' {
   interface ProvidedContext {
@@ -10,58 +8,9 @@ declare module 'vitest' {
   }
 }
 
-const ROOT = fileURLToPath(new URL('../../', import.meta.url));
-const PATIENCE_MS = 60_000;
-
-/** The product as `npm start` serves it: real server, real PostgreSQL, built client, demo scenario. */
+/** One served product for all browser tests; each signs up people of its own. */
 export default async function setup(project: TestProject) {
-  const cluster = await startCluster({ throwaway: true });
-  const server = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
-    cwd: ROOT,
-    env: {
-      ...process.env,
-      DATABASE_URL: cluster.url(),
-      PORT: '0',
-      NODE_ENV: 'production',
-      LOG_LEVEL: 'error',
-      FEATHERBEAM_RATE_LIMIT_SCALE: '1000',
-    },
-    stdio: ['ignore', 'pipe', 'inherit'],
-  });
-  try {
-    project.provide('baseUrl', await addressOf(server));
-  } catch (error) {
-    await stop(server);
-    await cluster.stop();
-    throw error;
-  }
-  return async () => {
-    await stop(server);
-    await cluster.stop();
-  };
-}
-
-function addressOf(server: ChildProcess): Promise<string> {
-  return new Promise((resolve, reject) => {
-    const late = setTimeout(() => reject(new Error('the server did not start in time')), PATIENCE_MS);
-    let said = '';
-    server.stdout?.setEncoding('utf8').on('data', (text: string) => {
-      said += text;
-      const found = /listens on (http:\S+)/.exec(said)?.[1];
-      if (!found) return;
-      clearTimeout(late);
-      resolve(found);
-    });
-    server.once('exit', (code) => {
-      clearTimeout(late);
-      reject(new Error(`the server ended with ${code}:\n${said}`));
-    });
-  });
-}
-
-async function stop(server: ChildProcess): Promise<void> {
-  if (server.exitCode !== null) return;
-  const ended = new Promise((resolve) => server.once('exit', resolve));
-  server.kill('SIGTERM');
-  await ended;
+  const { baseUrl, stop } = await serve();
+  project.provide('baseUrl', baseUrl);
+  return stop;
 }

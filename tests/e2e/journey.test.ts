@@ -1,6 +1,7 @@
 import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { eventually, expectAccessible, openBrowser, picture, visit } from './support/browser.ts';
+import { openBrowser } from '#tests/support/chromium.ts';
+import { expectAccessible, PATIENT, picture, visit } from './support/browser.ts';
 
 /** The main job as somebody new does it: from the printed address to a balance sheet that can be kept. */
 describe('from plan and wood to a balance sheet', () => {
@@ -21,7 +22,7 @@ describe('from plan and wood to a balance sheet', () => {
 
     await page.getByRole('link', { name: 'Open the sample' }).click();
     await page.waitForURL('**/sample/drawing');
-    await eventually(() => titleBlock.textContent()).toContain('221.4');
+    await expect.poll(() => titleBlock.textContent(), PATIENT).toContain('221.4');
     await expectAccessible(page, 'sample drawing');
     await picture(page, 'drawing');
 
@@ -31,7 +32,7 @@ describe('from plan and wood to a balance sheet', () => {
       .first()
       .click();
     await page.getByLabel('Material', { exact: true }).selectOption('balsa-light');
-    await eventually(() => titleBlock.textContent()).not.toContain('221.4');
+    await expect.poll(() => titleBlock.textContent(), PATIENT).not.toContain('221.4');
 
     await page.getByRole('link', { name: 'Sign up' }).first().click();
     await page.getByLabel('Name').fill('Wilma Thatcher');
@@ -56,13 +57,15 @@ describe('from plan and wood to a balance sheet', () => {
     await span.fill('-5');
     await page.getByText('Must be more than 0 mm.').waitFor();
     await span.fill('372,5');
-    await eventually(() => titleBlock.textContent()).toContain('Saved');
+    await expect.poll(() => titleBlock.textContent(), PATIENT).toContain('Saved');
     await page.reload();
-    await eventually(() => page.getByLabel('Panel 1, span', { exact: true }).inputValue()).toBe('372.5');
+    await expect
+      .poll(() => page.getByLabel('Panel 1, span', { exact: true }).inputValue(), PATIENT)
+      .toBe('372.5');
 
     await page.getByRole('link', { name: 'Balance', exact: true }).click();
     await page.getByRole('button', { name: 'Fit it' }).click();
-    await eventually(() => page.getByRole('heading', { level: 1 }).textContent()).toContain('52.0');
+    await expect.poll(() => page.getByRole('heading', { level: 1 }).textContent(), PATIENT).toContain('52.0');
     await expectAccessible(page, 'balance');
     await picture(page, 'balance');
 
@@ -78,18 +81,12 @@ describe('from plan and wood to a balance sheet', () => {
 
     await page.getByRole('link', { name: 'Sheets', exact: true }).click();
     await page.getByLabel('Note on the sheet').fill('Before cutting');
-    await eventually(() => titleBlock.textContent()).toContain('Saved');
+    await expect.poll(() => titleBlock.textContent(), PATIENT).toContain('Saved');
     await page.getByRole('button', { name: 'Save a sheet' }).click();
-    await page
-      .getByRole('link', { name: 'No. 1' })
-      .first()
-      .waitFor();
+    await page.getByRole('link', { name: 'No. 1' }).first().waitFor();
     await expectAccessible(page, 'sheets');
     await picture(page, 'sheets');
-    await page
-      .getByRole('link', { name: 'No. 1' })
-      .first()
-      .click();
+    await page.getByRole('link', { name: 'No. 1' }).first().click();
     await page.waitForURL('**/sheets/*');
     await page.getByLabel(/^Balance sheet 1 of/).waitFor();
     await expectAccessible(page, 'a sheet');

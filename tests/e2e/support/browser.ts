@@ -2,13 +2,7 @@ import { mkdirSync } from 'node:fs';
 import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { fileURLToPath } from 'node:url';
-import {
-  chromium,
-  type Browser,
-  type BrowserContext,
-  type BrowserContextOptions,
-  type Page,
-} from 'playwright-core';
+import type { Browser, BrowserContext, BrowserContextOptions, Page } from 'playwright-core';
 import { expect, inject } from 'vitest';
 
 const SHOTS = fileURLToPath(
@@ -23,22 +17,6 @@ export const PHONE: BrowserContextOptions = {
   isMobile: true,
   deviceScaleFactor: 2,
 };
-
-/** Debian's Chromium; nothing in it calls out. */
-export function openBrowser(): Promise<Browser> {
-  return chromium.launch({
-    executablePath: '/usr/bin/chromium',
-    args: [
-      '--no-sandbox',
-      '--disable-gpu',
-      '--disable-quic',
-      '--no-first-run',
-      '--disable-background-networking',
-      '--disable-component-update',
-      '--disable-sync',
-    ],
-  });
-}
 
 export interface Visit {
   context: BrowserContext;
@@ -101,5 +79,5 @@ export async function signIn(page: Page, email: string, password: string): Promi
   await page.waitForURL('**/bench');
 }
 
-/** Waits until a value is as expected; generous, for the machine may be busy. */
-export const eventually = <T>(value: () => T) => expect.poll(value, { timeout: 20_000 });
+/** How long to wait for a value that is on its way; generous, for the machine may be busy. */
+export const PATIENT = { timeout: 20_000 };

@@ -1,0 +1,64 @@
+import { spawn, type ChildProcess } from 'node:child_process';
+import { fileURLToPath } from 'node:url';
+import { startCluster } from '#server/house/cluster.mjs';
+
+const ROOT = fileURLToPath(new URL('../../', import.meta.url));
+const PATIENCE_MS = 60_000;
+
+export interface Served {
+  /** address of the served product */
+  baseUrl: string;
+  stop: () => Promise<void>;
+}
+
+/** The product as `npm start` serves it: real server, real PostgreSQL of its own, built client, demo scenario. */
+export async function serve(): Promise<Served> {
+  const cluster = await startCluster({ throwaway: true });
+  const server = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+    cwd: ROOT,
+    env: {
+      ...process.env,
+      DATABASE_URL: cluster.url(),
+      PORT: '0',
+      NODE_ENV: 'production',
+      LOG_LEVEL: 'error',
+      FEATHERBEAM_RATE_LIMIT_SCALE: '1000',
+    },
+    stdio: ['ignore', 'pipe', 'inherit'],
+  });
+  const stop = async () => {
+    await end(server);
+    await cluster.stop();
+  };
+  try {
+    return { baseUrl: await addressOf(server), stop };
+  } catch (error) {
+    await stop();
+    throw error;
+  }
+}
+
+function addressOf(server: ChildProcess): Promise<string> {
+  return new Promise((resolve, reject) => {
+    const late = setTimeout(() => reject(new Error('the server did not start in time')), PATIENCE_MS);
+    let said = '';
+    server.stdout?.setEncoding('utf8').on('data', (text: string) => {
+      said += text;
+      const found = /listens on (http:\S+)/.exec(said)?.[1];
+      if (!found) return;
+      clearTimeout(late);
+      resolve(found);
+    });
+    server.once('exit', (code) => {
+      clearTimeout(late);
+      reject(new Error(`the server ended with ${code}:\n${said}`));
+    });
+  });
+}
+
+async function end(server: ChildProcess): Promise<void> {
+  if (server.exitCode !== null) return;
+  const ended = new Promise((resolve) => server.once('exit', resolve));
+  server.kill('SIGTERM');
+  await ended;
+}

@@ -128,7 +128,7 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
         <div className="grid flex-1 grid-cols-[26rem_minmax(0,1fr)] border-t border-rule">
           <div className="border-r border-rule px-5 py-4">{list}</div>
           <div className="min-w-0 px-6 py-4">
-            <div className="sticky top-3 grid gap-y-4">
+            <div className="sticky top-3 grid grid-cols-[minmax(0,1fr)] gap-y-4">
               {views}
               {notices}
             </div>

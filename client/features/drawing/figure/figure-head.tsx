@@ -12,8 +12,8 @@ const TOOL =
 interface FigureHeadProps {
   id: string;
   title: string;
-  /** scale of the drawing */
-  note: string;
+  /** scale of the drawing; null where nothing is drawn */
+  note: string | null;
   view: PlanViewName;
   views: readonly PlanViewName[];
   onView: (view: PlanViewName) => void;
@@ -32,7 +32,7 @@ export function FigureHead(props: FigureHeadProps) {
   return (
     <figcaption className="flex flex-wrap items-center gap-x-3">
       <span id={id} className="caption mr-auto py-1">
-        {title} · {note}
+        {note === null ? title : `${title} · ${note}`}
       </span>
       {onSide && (
         <span className="flex" role="group" aria-label="Half">

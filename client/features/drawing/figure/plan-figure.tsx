@@ -3,19 +3,13 @@ import { useWidth } from '#client/hooks/use-width.ts';
 import type { Plan, Surface } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
-import { lineAt, targetsOf } from '#shared/drawing/hit.ts';
-import { balanceMarks } from '#shared/drawing/marks.ts';
-import { boundsOf, type Point } from '#shared/drawing/shape.ts';
-import { useHovered, type Hover } from '../hover.ts';
-import { BoardMarks } from './board-marks.tsx';
-import { CrossMarks } from './cross-marks.tsx';
+import { boundsOf } from '#shared/drawing/shape.ts';
+import type { Hover } from '../hover.ts';
 import { halfLayers, modelLayers, type Layer, type PlanViewName } from './drawings.ts';
 import { FigureHead } from './figure-head.tsx';
-import { planSentence, planTitle } from './plan-words.ts';
-import { LitLayer, ShapeLayer } from './shape-layer.tsx';
-import { FITTED, fromPx, layOnPaper, scaleNote, zoomed, type Margins, type Zoom } from './sheet.ts';
-import { SideMarks } from './side-marks.tsx';
-import { useDrag } from './use-drag.ts';
+import { PlanDrawing } from './plan-drawing.tsx';
+import { planTitle } from './plan-words.ts';
+import { FITTED, layOnPaper, scaleNote, zoomed, type Margins, type Zoom } from './sheet.ts';
 import { useSteady } from './use-steady.ts';
 
 export interface PlanFigureProps {
@@ -44,12 +38,9 @@ const MARGINS: Margins = { top: 36, right: 118, bottom: 66, left: 24 };
 const BRIEF: Margins = { top: 24, right: 12, bottom: 38, left: 12 };
 /** Not larger than one and a half times its size on paper. */
 const MAX_SCALE = (1.5 * 96) / 25.4;
-/** How near to a thin part the pointer must be, px. */
-const REACH = 6;
-
 /** The plan drawn to scale from the numbers of the valid plan. */
 export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
-  const { plan, result, surface, side, hover, picked, maxHeight, brief, station } = props;
+  const { plan, surface, side, maxHeight, brief } = props;
   const view = surface ? props.view : props.view === 'side' ? 'side' : 'whole';
   const [ref, width] = useWidth<HTMLDivElement>(brief ? 340 : 900);
   const [zoom, setZoom] = useState<Zoom>(FITTED);
@@ -71,7 +62,6 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
   );
   const layers = view === 'half' ? half : model;
   const shapes = useMemo(() => layers.flatMap((layer) => layer.shapes), [layers]);
-  const targets = useMemo(() => targetsOf(shapes), [shapes]);
   // Equal bounds give the same sheet, so that an edit which moves no outline leaves every other line alone.
   const bounds = useSteady(boundsOf(shapes));
   const margins = brief ? BRIEF : MARGINS;
@@ -85,38 +75,12 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
     [bounds, axes, width, margins, maxHeight, minHeight, factor],
   );
   const id = useId();
-  const toDrawing = (at: Point): Point | null =>
-    paper && fromPx(paper.sheet, [at[0] - zoom.panX, at[1] - zoom.panY]);
-  const find = (at: Point) => {
-    const point = toDrawing(at);
-    return point && paper ? lineAt(targets, point, REACH / paper.sheet.scale) : null;
-  };
-  const drag = useDrag({
-    onPress: (at) => {
-      const line = find(at);
-      const point = toDrawing(at);
-      if (line !== null) props.onPick(line);
-      if (view === 'half' && point) props.onStation(Math.abs(point[1]));
-    },
-    onHover: (at) => hover.set(at && find(at)),
-    onDrag: (dx, dy) => {
-      if (zoom.factor > 1) setZoom((z) => ({ ...z, panX: z.panX + dx, panY: z.panY + dy }));
-    },
-  });
-  if (!paper || !bounds) {
-    return <p className="py-6 text-graphite">Nothing is drawn yet. Add a wing on the left.</p>;
-  }
-  const { sheet, height } = paper;
-  const right = width - margins.right;
-  const marks = balanceMarks(plan, result.balance);
-  const outside = result.notices.some(({ code }) => code === 'balance_outside_target');
-  const common = { marks, percentMac: result.balance.percentMac, outside, sheet, brief };
   return (
     <figure aria-labelledby={`${id}-title`} className="min-w-0">
       <FigureHead
         id={`${id}-title`}
         title={planTitle(view, surface, side, brief)}
-        note={scaleNote(sheet)}
+        note={paper && scaleNote(paper.sheet)}
         view={view}
         views={surface ? ['half', 'whole', 'side'] : ['whole', 'side']}
         onView={props.onView}
@@ -128,52 +92,16 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
         brief={brief}
       />
       <div ref={ref} className="min-w-0 overflow-hidden">
-        <svg
-          role="img"
-          aria-labelledby={`${id}-sentence`}
-          width={width}
-          height={height}
-          {...drag}
-          className={zoom.factor > 1 ? 'block cursor-grab touch-none' : 'block touch-pan-y'}
-        >
-          <title id={`${id}-sentence`}>{planSentence(plan, result, view, surface)}</title>
-          <g transform={`translate(${zoom.panX} ${zoom.panY})`}>
-            {layers.map((layer) => (
-              <ShapeLayer key={layer.key} shapes={layer.shapes} sheet={sheet} />
-            ))}
-            <Lit {...{ shapes, sheet, picked, hover }} />
-            {view === 'half' && surface && (
-              <BoardMarks
-                {...{ surface, side, sheet, station, brief }}
-                dimensionAt={zoom.factor === 1 && !brief ? height - 26 : null}
-              />
-            )}
-            {view === 'side' ? (
-              <SideMarks
-                {...common}
-                bottom={height - margins.bottom - zoom.panY}
-                top={margins.top - zoom.panY}
-              />
-            ) : (
-              <CrossMarks
-                {...common}
-                wantedPercent={plan.target?.percentMac ?? null}
-                left={margins.left - zoom.panX}
-                right={right - zoom.panX}
-                low={margins.top - 8 - zoom.panY}
-                high={height - margins.bottom + 8 - zoom.panY}
-              />
-            )}
-          </g>
-        </svg>
+        {paper ? (
+          <PlanDrawing
+            {...props}
+            {...{ view, layers, shapes, paper, margins, zoom }}
+            onPan={(dx, dy) => setZoom((z) => ({ ...z, panX: z.panX + dx, panY: z.panY + dy }))}
+          />
+        ) : (
+          <p className="py-6 text-graphite">Nothing is drawn yet. Add a wing with the + beside the list.</p>
+        )}
       </div>
     </figure>
   );
 });
-
-type LitProps = Pick<PlanFigureProps, 'picked' | 'hover'> &
-  Omit<Parameters<typeof LitLayer>[0], 'hovered' | 'picked'>;
-
-function Lit({ hover, ...rest }: LitProps) {
-  return <LitLayer {...rest} hovered={useHovered(hover)} />;
-}

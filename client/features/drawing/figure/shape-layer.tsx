@@ -1,5 +1,6 @@
 import { memo, useMemo } from 'react';
 import type { Shape } from '#shared/drawing/shape.ts';
+import { useHovered, type Hover } from '../hover.ts';
 import { hoveredLook, lookOf, pickedLook, type Look } from './shape-look.ts';
 import { pathOf, type Sheet } from './sheet.ts';
 
@@ -23,11 +24,14 @@ export const ShapeLayer = memo(function ShapeLayer({ shapes, sheet }: ShapeLayer
 
 interface LitLayerProps extends ShapeLayerProps {
   picked: string | null;
-  hovered: string | null;
+  hover: Hover;
+  /** a section, on which ribs are seen from the side */
+  cut?: boolean;
 }
 
 /** What is picked and what the pointer is over, in ink over the pencil. */
-export function LitLayer({ shapes, sheet, picked, hovered }: LitLayerProps) {
+export function LitLayer({ shapes, sheet, picked, hover, cut = false }: LitLayerProps) {
+  const hovered = useHovered(hover);
   const lit = useMemo(
     () => shapes.filter(({ line }) => line !== null && (line === picked || line === hovered)),
     [shapes, picked, hovered],
@@ -35,7 +39,7 @@ export function LitLayer({ shapes, sheet, picked, hovered }: LitLayerProps) {
   return (
     <g pointerEvents="none">
       {lit.map((shape, i) => {
-        const look = shape.line === picked ? pickedLook(shape) : hoveredLook(shape);
+        const look = shape.line === picked ? pickedLook(shape, cut) : hoveredLook(shape);
         return look && <ShapePath key={i} shape={shape} sheet={sheet} look={look} />;
       })}
     </g>

@@ -61,11 +61,11 @@ const INKED_AS_WASH: ReadonlySet<ShapeKind> = new Set([
   'item',
 ]);
 
-/** The picked part in ink: solid where it is slender, a wash with an ink edge where it is wide. */
-export function pickedLook({ kind, closed }: Shape): Look | null {
+/** The picked part in ink: solid where it is slender, a wash with an ink edge where it is wide, as a rib is when cut. */
+export function pickedLook({ kind, closed }: Shape, cut: boolean): Look | null {
   if (kind === 'notch' || kind === 'lightening' || kind === 'stock') return null;
   if (!closed) return { fill: 'none', stroke: 'var(--ink)', strokeWidth: 3 };
-  if (INKED_AS_WASH.has(kind)) {
+  if (INKED_AS_WASH.has(kind) || (cut && kind === 'ribs')) {
     return { fill: 'var(--ink)', fillOpacity: 0.2, stroke: 'var(--ink)', strokeWidth: 2 };
   }
   return { fill: 'var(--ink)', stroke: 'var(--ink)', strokeWidth: 1.2 };

@@ -9,7 +9,6 @@ import {
 } from 'sequelize';
 import type { PlanDto } from '#shared/schemas/plan.ts';
 import { figureColumns } from './figures.ts';
-import type { GliderMember } from './glider-member.ts';
 import type { User } from './user.ts';
 
 /** A glider as last saved: its plan, and beside it what a list of gliders shows. */
@@ -25,9 +24,9 @@ export class Glider extends Model<InferAttributes<Glider>, InferCreationAttribut
   declare outline: [number, number][];
   declare updatedBy: string;
   declare updatedAt: CreationOptional<Date>;
+  declare archivedAt: CreationOptional<Date | null>;
   declare owner?: NonAttribute<User>;
   declare editor?: NonAttribute<User>;
-  declare members?: NonAttribute<GliderMember[]>;
 }
 
 export function initGlider(sequelize: Sequelize): void {
@@ -42,6 +41,7 @@ export function initGlider(sequelize: Sequelize): void {
       outline: { type: DataTypes.JSONB, allowNull: false },
       updatedBy: { type: DataTypes.UUID, allowNull: false },
       updatedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+      archivedAt: { type: DataTypes.DATE, allowNull: true },
     },
     { sequelize, tableName: 'gliders' },
   );

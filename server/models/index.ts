@@ -25,6 +25,8 @@ export function initModels(sequelize: Sequelize): void {
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
   Glider.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
   Glider.hasMany(GliderMember, { as: 'members', foreignKey: 'gliderId' });
+  GliderMember.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
+  GliderMember.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   GliderMaterial.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
   GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
 }

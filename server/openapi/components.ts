@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { estimate, estimateInput } from '#shared/schemas/estimate.ts';
-import { glider, gliderInput, gliderList, gliderSaveList } from '#shared/schemas/glider.ts';
+import { gliderSaveList } from '#shared/schemas/glider-save.ts';
+import { glider, gliderInput, gliderList } from '#shared/schemas/glider.ts';
 import { material, materialInput, materialList, materialUses } from '#shared/schemas/material.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';

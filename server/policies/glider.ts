@@ -12,6 +12,14 @@ const DOING: Record<GliderAction, string> = {
   edit: 'change this glider',
   saveSheet: 'save sheets of this glider',
   delete: 'delete this glider',
+  nameSave: 'name its saved states',
+  addPhoto: 'add photos to this glider',
+  captionPhoto: 'change the captions of its photos',
+  deletePhoto: 'delete its photos',
+  archive: 'archive this glider',
+  share: 'share this glider',
+  transfer: 'hand this glider over',
+  leave: 'leave this glider; hand it over first',
 };
 
 /** @throws AppError `forbidden` */
@@ -24,5 +32,13 @@ export function gliderAbilities(role: GliderRole): GliderAbilities {
     edit: mayOnGlider(role, 'edit'),
     saveSheet: mayOnGlider(role, 'saveSheet'),
     delete: mayOnGlider(role, 'delete'),
+    nameSave: mayOnGlider(role, 'nameSave'),
+    addPhoto: mayOnGlider(role, 'addPhoto'),
+    captionPhoto: mayOnGlider(role, 'captionPhoto'),
+    deletePhoto: mayOnGlider(role, 'deletePhoto'),
+    archive: mayOnGlider(role, 'archive'),
+    share: mayOnGlider(role, 'share'),
+    transfer: mayOnGlider(role, 'transfer'),
+    leave: mayOnGlider(role, 'leave'),
   };
 }

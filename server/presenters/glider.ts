@@ -1,5 +1,4 @@
-import type { GliderDto, GliderRole, GliderSaveDto, GliderSummaryDto } from '#shared/schemas/glider.ts';
-import type { GliderSave } from '#server/models/glider-save.ts';
+import type { GliderDto, GliderRole, GliderSummaryDto } from '#shared/schemas/glider.ts';
 import type { Glider } from '#server/models/glider.ts';
 import { gliderAbilities } from '#server/policies/glider.ts';
 import { presentFigures } from './figures.ts';
@@ -15,6 +14,7 @@ export function presentGlider(row: Glider, role: GliderRole, updatedBy: string):
     plan: row.plan,
     updatedAt: row.updatedAt.toISOString(),
     updatedBy,
+    archivedAt: row.archivedAt?.toISOString() ?? null,
   };
 }
 
@@ -28,14 +28,6 @@ export function presentGliderSummary(row: Glider, role: GliderRole, ownerName: s
     figures: presentFigures(row),
     outline: row.outline,
     updatedAt: row.updatedAt.toISOString(),
-  };
-}
-
-export function presentGliderSave(row: GliderSave, savedBy: string): GliderSaveDto {
-  return {
-    version: row.version,
-    savedAt: row.savedAt.toISOString(),
-    savedBy,
-    figures: presentFigures(row),
+    archivedAt: row.archivedAt?.toISOString() ?? null,
   };
 }

@@ -1,6 +1,8 @@
-import { glider, gliderInput, gliderList, gliderSaveList } from '#shared/schemas/glider.ts';
+import { gliderSaveList } from '#shared/schemas/glider-save.ts';
+import { glider, gliderInput, gliderList } from '#shared/schemas/glider.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
-import { listGliders, listGliderSaves } from '#server/services/glider-lists.ts';
+import { listGliders } from '#server/services/glider-lists.ts';
+import { listGliderSaves } from '#server/services/glider-log.ts';
 import { createGlider, deleteGlider, getGlider, saveGlider } from '#server/services/gliders.ts';
 import { gliderQuery, idParams, pageQuery } from './inputs.ts';
 
@@ -11,7 +13,7 @@ export const gliderEndpoints: Endpoint[] = [
     method: 'get',
     path: '/gliders',
     tag,
-    summary: 'Your gliders and those shared with you, newest change first',
+    summary: 'Your gliders and those shared with you, in the order asked for',
     access: 'signed-in',
     query: gliderQuery,
     answer: { status: 200, schema: gliderList },

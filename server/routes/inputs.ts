@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { archivedFilter, gliderDirection, gliderOrder } from '#shared/schemas/glider.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 
 /** Path and query of the endpoints. */
@@ -17,6 +18,10 @@ export const pageQuery = z.strictObject({
 
 export const gliderQuery = z.strictObject({
   ...pageQuery.shape,
-  /** part of the name, upper and lower case alike */
+  /** part of the name, whatever its case and accents */
   search: z.string().trim().max(LIMITS.name.max).optional(),
+  sort: gliderOrder.default('changed'),
+  /** `up` from the first name, the least mass, the oldest change */
+  direction: gliderDirection.optional(),
+  archived: archivedFilter.default('no'),
 });

@@ -1,71 +1,88 @@
-import { Op, type WhereOptions } from 'sequelize';
+import { col, fn, Op, where, type Order } from 'sequelize';
 import { z } from 'zod';
-import type { GliderListDto, GliderSaveListDto } from '#shared/schemas/glider.ts';
+import type { ArchivedFilter, GliderDirection, GliderListDto, GliderOrder } from '#shared/schemas/glider.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
-import { GliderSave } from '#server/models/glider-save.ts';
-import { Glider } from '#server/models/glider.ts';
-import { presentGliderSave, presentGliderSummary } from '#server/presenters/glider.ts';
-import { allowOnGlider } from './glider-access.ts';
+import { GliderMember } from '#server/models/glider-member.ts';
+import { presentGliderSummary } from '#server/presenters/glider.ts';
 import { decodeCursor, pageOf, type PageQuery } from './paging.ts';
 
-const gliderPlace = z.tuple([z.iso.datetime(), z.uuid()]);
-const savePlace = z.tuple([z.int32()]);
+type Key = 'changedAt' | 'nameKey' | 'mass';
 
-const escapeLike = (text: string) => text.replace(/[\\%_]/g, (sign) => `\\${sign}`);
+interface BenchOrder {
+  key: Key;
+  column: string;
+  usual: GliderDirection;
+  value: z.ZodType<string | number>;
+}
 
-/** Gliders that the asker has any role on, newest change first. */
-export async function listGliders(
-  actor: UserDto,
-  query: PageQuery & { search?: string | undefined },
-): Promise<GliderListDto> {
-  const after = decodeCursor(query.cursor, gliderPlace);
-  const conditions: WhereOptions<Glider>[] = [];
-  if (query.search) conditions.push({ name: { [Op.iLike]: `%${escapeLike(query.search)}%` } });
-  if (after) {
-    const updatedAt = new Date(after[0]);
-    conditions.push({
-      [Op.or]: [{ updatedAt: { [Op.lt]: updatedAt } }, { updatedAt, id: { [Op.lt]: after[1] } }],
-    });
-  }
-  const found = await Glider.findAll({
-    attributes: { exclude: ['plan'] },
+/** Every order has an index of its own, see the migration of the bench. */
+const ORDERS: Record<GliderOrder, BenchOrder> = {
+  changed: { key: 'changedAt', column: 'changed_at', usual: 'down', value: z.iso.datetime() },
+  name: { key: 'nameKey', column: 'name_key', usual: 'up', value: z.string() },
+  mass: { key: 'mass', column: 'mass_g', usual: 'up', value: z.number() },
+};
+
+export interface BenchQuery extends PageQuery {
+  sort: GliderOrder;
+  direction?: GliderDirection | undefined;
+  archived: ArchivedFilter;
+  search?: string | undefined;
+}
+
+/** What is behind a column of the asker's row of members, in the query below. */
+const memberColumn = (name: string) => col(`GliderMember.${name}`);
+
+/** Gliders that the asker has any role on. The asker's own rows of members are walked along one index. */
+export async function listGliders(actor: UserDto, query: BenchQuery): Promise<GliderListDto> {
+  const { key, column, usual, value } = ORDERS[query.sort];
+  const direction = query.direction ?? usual;
+  const after = decodeCursor(
+    query.cursor,
+    z.tuple([z.literal(`${query.sort} ${direction}`), value, z.uuid()]),
+  );
+  const [way, beyond] = direction === 'up' ? (['ASC', Op.gt] as const) : (['DESC', Op.lt] as const);
+  const order: Order = [
+    [key, way],
+    ['gliderId', way],
+  ];
+  const found = await GliderMember.findAll({
     include: [
-      { association: 'members', where: { userId: actor.id }, required: true },
-      { association: 'owner', attributes: ['name'] },
+      {
+        association: 'glider',
+        attributes: { exclude: ['plan'] },
+        required: true,
+        include: [{ association: 'owner', attributes: ['name'], required: true }],
+      },
     ],
-    where: { [Op.and]: conditions },
-    order: [
-      ['updatedAt', 'DESC'],
-      ['id', 'DESC'],
-    ],
+    where: {
+      [Op.and]: [
+        { userId: actor.id, archived: query.archived === 'only' },
+        ...(query.search
+          ? [where(fn('strpos', memberColumn('name_key'), fn('sort_key', query.search)), Op.gt, 0)]
+          : []),
+        ...(after
+          ? [
+              where(
+                fn('ROW', memberColumn(column), memberColumn('glider_id')),
+                beyond,
+                fn('ROW', after[1], after[2]),
+              ),
+            ]
+          : []),
+      ],
+    },
+    order,
     limit: query.limit + 1,
-    // Each glider joins one row of members, the asker's, so that the limit may count joined rows.
-    subQuery: false,
   });
-  const { rows, nextCursor } = pageOf(found, query.limit, (row) => [row.updatedAt.toISOString(), row.id]);
+  const { rows, nextCursor } = pageOf(found, query.limit, (row) => [
+    `${query.sort} ${direction}`,
+    row[key] instanceof Date ? row[key].toISOString() : row[key],
+    row.gliderId,
+  ]);
   return {
-    gliders: rows.map((row) =>
-      presentGliderSummary(row, row.members?.[0]?.role ?? 'reader', row.owner?.name ?? ''),
+    gliders: rows.flatMap(({ glider, role }) =>
+      glider ? [presentGliderSummary(glider, role, glider.owner?.name ?? '')] : [],
     ),
     nextCursor,
   };
-}
-
-/** Saves of a glider, newest first. */
-export async function listGliderSaves(
-  actor: UserDto,
-  gliderId: string,
-  query: PageQuery,
-): Promise<GliderSaveListDto> {
-  await allowOnGlider(actor, gliderId, 'read');
-  const after = decodeCursor(query.cursor, savePlace);
-  const found = await GliderSave.findAll({
-    attributes: { exclude: ['plan'] },
-    include: [{ association: 'author', attributes: ['name'] }],
-    where: { gliderId, ...(after && { version: { [Op.lt]: after[0] } }) },
-    order: [['version', 'DESC']],
-    limit: query.limit + 1,
-  });
-  const { rows, nextCursor } = pageOf(found, query.limit, (row) => [row.version]);
-  return { saves: rows.map((row) => presentGliderSave(row, row.author?.name ?? '')), nextCursor };
 }

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { LIMITS } from './limits.ts';
 import { planSchema } from './plan.ts';
 
 export const gliderRole = z.enum(['owner', 'builder', 'pilot', 'reader']);
@@ -7,6 +8,17 @@ export const gliderAbilities = z.strictObject({
   edit: z.boolean(),
   saveSheet: z.boolean(),
   delete: z.boolean(),
+  /** name saved states */
+  nameSave: z.boolean(),
+  addPhoto: z.boolean(),
+  captionPhoto: z.boolean(),
+  deletePhoto: z.boolean(),
+  archive: z.boolean(),
+  /** invite, change roles, remove members, make and switch off the read-only link */
+  share: z.boolean(),
+  /** hand the glider over to a member */
+  transfer: z.boolean(),
+  leave: z.boolean(),
 });
 
 /** The figures of the last saved plan, kept beside it for the bench. */
@@ -26,6 +38,8 @@ export const gliderSummary = z.strictObject({
   /** outline of the first wing in plan view, starboard half, mm: the picture on the bench */
   outline: z.array(z.tuple([z.number(), z.number()])),
   updatedAt: z.iso.datetime(),
+  /** since when it is out of the way; null for one in use */
+  archivedAt: z.iso.datetime().nullable(),
 });
 export const gliderList = z.strictObject({
   gliders: z.array(gliderSummary),
@@ -43,21 +57,27 @@ export const glider = z.strictObject({
   plan: planSchema,
   updatedAt: z.iso.datetime(),
   updatedBy: z.string(),
+  /** since when it is out of the way; null for one in use */
+  archivedAt: z.iso.datetime().nullable(),
 });
 
 export const gliderInput = z.strictObject({ plan: planSchema });
 
-/** One save in the log. */
-export const gliderSave = z.strictObject({
-  version: z.int(),
-  savedAt: z.iso.datetime(),
-  savedBy: z.string(),
-  figures: gliderFigures,
+/** What a list of gliders may be ordered by; names and masses begin with the first, changes with the last. */
+export const gliderOrder = z.enum(['changed', 'name', 'mass']);
+export const gliderDirection = z.enum(['up', 'down']);
+export const archivedFilter = z.enum(['no', 'only']);
+
+export const archiveInput = z.strictObject({ archived: z.boolean() });
+export const copiesInput = z.strictObject({
+  ids: z
+    .array(z.uuid())
+    .min(1, 'Name at least one glider.')
+    .max(LIMITS.copies.max, `Copy at most ${LIMITS.copies.max} gliders at once.`)
+    .refine((ids) => new Set(ids).size === ids.length, 'Names a glider twice.'),
 });
-export const gliderSaveList = z.strictObject({
-  saves: z.array(gliderSave),
-  nextCursor: z.string().nullable(),
-});
+/** The copies, in the order in which they were asked for. */
+export const gliderCopies = z.strictObject({ gliders: z.array(gliderSummary) });
 
 export type GliderRole = z.infer<typeof gliderRole>;
 export type GliderAbilities = z.infer<typeof gliderAbilities>;
@@ -66,5 +86,7 @@ export type GliderSummaryDto = z.infer<typeof gliderSummary>;
 export type GliderListDto = z.infer<typeof gliderList>;
 export type GliderDto = z.infer<typeof glider>;
 export type GliderInput = z.infer<typeof gliderInput>;
-export type GliderSaveDto = z.infer<typeof gliderSave>;
-export type GliderSaveListDto = z.infer<typeof gliderSaveList>;
+export type GliderOrder = z.infer<typeof gliderOrder>;
+export type GliderDirection = z.infer<typeof gliderDirection>;
+export type ArchivedFilter = z.infer<typeof archivedFilter>;
+export type GliderCopiesDto = z.infer<typeof gliderCopies>;

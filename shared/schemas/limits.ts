@@ -28,6 +28,19 @@ export const LIMITS = {
   outlinePoints: { min: 3, max: 1_000 },
   email: { max: 254 },
   password: { min: 10, max: 128 },
+  caption: { max: 500 },
+  /** of one glider */
+  photos: { max: 100 },
+  /** bytes of a photo as it is sent */
+  photoBytes: { max: 10_000_000 },
+  /** of a photo as it is sent; a telephone of 2026 takes 50 million */
+  photoPixels: { max: 100_000_000 },
+  /** gliders copied at once */
+  copies: { max: 50 },
+  /** differences kept with a save */
+  changes: { max: 100 },
+  /** waiting for an answer, of one glider */
+  invitations: { max: 30 },
   /** bytes of a JSON body; a plan of 2,000 parts takes about half a megabyte */
   bodyBytes: { max: 4_000_000 },
 } as const;

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { LIMITS } from './limits.ts';
+import { preferences } from './preferences.ts';
 
 export const email = z
   .string()
@@ -30,7 +31,11 @@ export const user = z.strictObject({
   email: z.string(),
   role: z.enum(['admin', 'user']),
 });
-export const session = z.strictObject({ user: user.nullable() });
+export const session = z.strictObject({
+  user: user.nullable(),
+  /** how the user wants to see everything; absent for a visitor */
+  preferences: preferences.optional(),
+});
 
 export type SignIn = z.infer<typeof signIn>;
 export type SignUp = z.infer<typeof signUp>;

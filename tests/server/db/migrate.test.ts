@@ -68,13 +68,14 @@ describe('the steps of the database', () => {
   });
 
   it('leave nothing of a step that fails in the middle', async () => {
-    await migrateDown(sequelize);
+    const failing = names.findIndex((name) => name.endsWith('-sheets'));
+    while ((await migrationStatus(sequelize)).done.length > failing) await migrateDown(sequelize);
     const before = await describeSchema();
     await sequelize.query('CREATE FUNCTION refuse_change() RETURNS integer LANGUAGE sql AS $$ SELECT 1 $$');
     await expect(migrateUp(sequelize)).rejects.toThrow(/refuse_change/);
     await sequelize.query('DROP FUNCTION refuse_change()');
     expect(await describeSchema()).toEqual(before);
-    expect(await migrateUp(sequelize)).toEqual(names.slice(-1));
+    expect(await migrateUp(sequelize)).toEqual(names.slice(failing));
   });
 
   it('are all in the list, in the order of their names', () => {

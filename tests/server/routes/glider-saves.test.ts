@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { glider as gliderSchema, gliderSaveList } from '#shared/schemas/glider.ts';
+import { gliderSaveList } from '#shared/schemas/glider-save.ts';
+import { glider as gliderSchema } from '#shared/schemas/glider.ts';
 import { GliderMaterial } from '#server/models/glider-material.ts';
 import { GliderSave } from '#server/models/glider-save.ts';
 import { Glider } from '#server/models/glider.ts';

@@ -23,7 +23,7 @@ describe('POST /api/gliders', () => {
     const made = gliderSchema.parse(res.body);
 
     expect(made).toMatchObject({ name: 'Redshank', role: 'owner', version: 1, updatedBy: 'Ines', plan });
-    expect(made.can).toEqual({ edit: true, saveSheet: true, delete: true });
+    expect(made.can).toMatchObject({ edit: true, saveSheet: true, delete: true, leave: false });
     expect(res.headers).toMatchObject({ etag: '"1"', location: `/api/gliders/${made.id}` });
     expect(changes(before, await countRows())).toEqual({
       gliders: 1,

@@ -1,4 +1,3 @@
-import { facesOf } from './fit.ts';
 import { stripAt, type Half } from './half.ts';
 import type { Strip, Web } from './plan.ts';
 import { pairAt, stationAt, type Station, type SurfaceLine } from './stations.ts';
@@ -31,26 +30,24 @@ export function signChanges(
   return found;
 }
 
-function bisect(f: (s: number) => number, low: number, high: number, atLow: number): number {
+function bisect(f: (s: number) => number, from: number, to: number, atFrom: number): number {
+  let [low, high] = [from, to];
   // 50 halvings take any panel below a billionth of a millimetre.
   for (let i = 0; i < 50; i++) {
     const middle = (low + high) / 2;
-    if (f(middle) * atLow > 0) low = middle;
+    if (f(middle) * atFrom > 0) low = middle;
     else high = middle;
   }
   return (low + high) / 2;
 }
 
-/** x/c at which skins begin or end, each once; a nose or tail of the section is no edge. */
-function skinEdges(half: Half): number[] {
-  const edges = half.skins.flatMap((skin) => facesOf(skin).flatMap(({ from, to }) => [from, to]));
-  return [...new Set(edges)].filter((x) => x > 0 && x < 1);
-}
-
 /** Where skins over a strip begin, end or slip off its centre line. */
 export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: number): number[] {
+  const { at, seat } = strip;
+  const isAlongEdges = seat !== 'nose' && seat !== 'tail' && at !== undefined && at[0] === at[1];
+  if (isAlongEdges) return half.skinEnds;
   // The centre line's x/c is linear (or, on an edge, its distance to the skin's edge): one crossing at the most.
-  const crossings = skinEdges(half).flatMap((edge) =>
+  const crossings = half.skinEdges.flatMap((edge) =>
     signChanges(half.line, from, to, 1, (station) => stripAt(strip, station).centre - edge * station.chord),
   );
   return [...half.skinEnds, ...crossings];
@@ -59,7 +56,7 @@ export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: num
 /** Where skins or strips over a web begin, end or slip off it. */
 export function breaksOverWeb(half: Half, web: Web, from: number, to: number): number[] {
   const x = (station: Station) => pairAt(web.at, web.from, web.to, station.s);
-  const skins = skinEdges(half).flatMap((edge) =>
+  const skins = half.skinEdges.flatMap((edge) =>
     signChanges(half.line, from, to, 1, (station) => x(station) - edge),
   );
   const strips = half.strips.flatMap((strip) => {

@@ -1,3 +1,4 @@
+import { facesOf } from './faces.ts';
 import { covers, type Half, type StripAt } from './half.ts';
 import type { Strip } from './plan.ts';
 import { arcBetween, heightAt, ordinateAt, wrapArc, type Sums } from './section-integrals.ts';
@@ -5,29 +6,6 @@ import type { Station } from './stations.ts';
 
 /** How skins, cap strips and strips lie on the section: what a part finds over and under it at a station. */
 const TOUCH = 1e-9;
-
-/** The faces that a skin, cap strip or covering lies on, each with its x/c limits. */
-export function facesOf(part: {
-  seat: 'top' | 'bottom' | 'both' | 'wrap';
-  start?: number;
-  end?: number;
-}): { face: 'upper' | 'lower'; from: number; to: number }[] {
-  const [start, end] = [part.start ?? 0, part.end ?? 1];
-  if (part.seat === 'wrap') {
-    return [
-      { face: 'upper', from: 0, to: start },
-      { face: 'lower', from: 0, to: end },
-    ];
-  }
-  const range = { from: Math.min(start, end), to: Math.max(start, end) };
-  return (
-    part.seat === 'both'
-      ? (['upper', 'lower'] as const)
-      : part.seat === 'top'
-        ? (['upper'] as const)
-        : (['lower'] as const)
-  ).map((face) => ({ face, ...range }));
-}
 
 /** Developed length with first moments, mm and mm², that such a part takes at a station, inside an extent of x/c. */
 export function developedAt(
@@ -59,14 +37,11 @@ export function developedAt(
  */
 export function skinOver(half: Half, station: Station, face: 'upper' | 'lower', x: number): number {
   let [over, ending, starting] = [0, 0, 0];
-  for (const skin of half.skins) {
-    if (!covers(skin, station.s)) continue;
-    for (const range of facesOf(skin)) {
-      if (range.face !== face || x < range.from - TOUCH || x > range.to + TOUCH) continue;
-      if (x > range.to - TOUCH) ending += skin.thickness;
-      else if (x < range.from + TOUCH) starting += skin.thickness;
-      else over += skin.thickness;
-    }
+  for (const { skin, from, to } of half.over[face]) {
+    if (x < from - TOUCH || x > to + TOUCH || !covers(skin, station.s)) continue;
+    if (x > to - TOUCH) ending += skin.thickness;
+    else if (x < from + TOUCH) starting += skin.thickness;
+    else over += skin.thickness;
   }
   return over + Math.max(ending, starting);
 }

@@ -1,3 +1,4 @@
+import { facesOf } from './faces.ts';
 import type { Notice } from './notices.ts';
 import type { CapStrips, Part, Ribs, Skin, Strip, Surface } from './plan.ts';
 import { pairAt, stationAt, type Station, type SurfaceLine } from './stations.ts';
@@ -13,7 +14,18 @@ export interface Half {
   ribs: { part: Ribs; stations: Station[] }[];
   /** where skins begin and end along s: integrals of what lies under them are split there */
   skinEnds: number[];
+  /** x/c at which skins begin or end on either face; a nose or tail of the section is no edge */
+  skinEdges: number[];
+  /** what lies over each face, laid out once: it is asked at every sample of every strip */
+  over: Record<'upper' | 'lower', SkinFace[]>;
   notice: (notice: Notice) => void;
+}
+
+/** A skin on one face: its stations, its x/c limits and how thick it is. */
+export interface SkinFace {
+  skin: Skin;
+  from: number;
+  to: number;
 }
 
 /** Two millionths of a millimetre of slack, so that a station typed as the sum of panels is on the surface. */
@@ -21,6 +33,8 @@ const SLACK = 1e-6;
 /** True where a part's range holds a station, ends included. */
 export const covers = (part: { from: number; to: number }, s: number) =>
   s >= part.from - SLACK && s <= part.to + SLACK;
+
+const distinct = (values: number[]) => [...new Set(values)];
 
 /** Stations of a ribs part, mm. @example ribStations({ from: 0, to: 30, count: 4 }) // → [0, 10, 20, 30] */
 export function ribStations(part: Pick<Ribs, 'stations' | 'from' | 'to' | 'count'>): number[] {
@@ -48,8 +62,26 @@ export function halfOf(
       .map((s) => stationAt(line, s)),
   }));
   const skins = of('skin');
-  const skinEnds = skins.flatMap((skin) => [skin.from, skin.to]);
-  return { surface, line, parts, strips: of('strip'), skins, caps: of('capStrips'), ribs, skinEnds, notice };
+  const skinEnds = distinct(skins.flatMap((skin) => [skin.from, skin.to]));
+  const faces = skins.flatMap((skin) => facesOf(skin).map((range) => ({ skin, ...range })));
+  const over = {
+    upper: faces.filter(({ face }) => face === 'upper'),
+    lower: faces.filter(({ face }) => face === 'lower'),
+  };
+  const skinEdges = distinct(faces.flatMap(({ from, to }) => [from, to])).filter((x) => x > 0 && x < 1);
+  return {
+    surface,
+    line,
+    parts,
+    strips: of('strip'),
+    skins,
+    caps: of('capStrips'),
+    ribs,
+    skinEnds,
+    skinEdges,
+    over,
+    notice,
+  };
 }
 
 export interface StripAt {

@@ -17,6 +17,8 @@ export interface PanelLine {
   tip: (chord: number) => Section;
   /** the blended section at a share of the span; parts ask for the same stations, so each is made once */
   sectionAt: (share: number) => Section;
+  /** stations already laid out, by s */
+  known: Map<number, Station>;
 }
 
 /** A surface laid out along its stations, starboard half, in body axes. */
@@ -71,6 +73,7 @@ export function surfaceLine(surface: Surface): SurfaceLine {
       cos,
       sin,
       ...blender(panel),
+      known: new Map(),
     };
     start += panel.span;
     x += panel.sweep;
@@ -92,12 +95,14 @@ export function panelAt(line: SurfaceLine, s: number): PanelLine {
 
 /** The station at s, mm from the root along the panels; inside `panel` if that is given. */
 export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panelAt(line, s)): Station {
+  const known = panel.known.get(s);
+  if (known) return known;
   const span = panel.end - panel.start;
   const share = Math.min(1, Math.max(0, (s - panel.start) / span));
   const [c0, c1] = panel.chord;
   const [x0, x1] = panel.leadingEdge;
   const chord = c0 + share * (c1 - c0);
-  return {
+  const station: Station = {
     s,
     panel,
     chord,
@@ -108,6 +113,8 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
       return panel.sectionAt(share);
     },
   };
+  panel.known.set(s, station);
+  return station;
 }
 
 /**
@@ -164,13 +171,15 @@ export function samplesOver(
     const a = Math.max(from, panel.start);
     const b = Math.min(to, panel.end);
     if (b - a <= EDGE) continue;
-    const edges = [a, ...breaks.filter((s) => s > a + EDGE && s < b - EDGE).sort((p, q) => p - q), b];
-    for (let i = 1; i < edges.length; i++) {
-      const low = edges[i - 1] ?? a;
-      const width = (edges[i] ?? b) - low;
+    const edges = [...breaks.filter((s) => s > a + EDGE && s < b - EDGE).sort((p, q) => p - q), b];
+    let low = a;
+    for (const edge of edges) {
+      const width = edge - low;
+      if (width <= EDGE) continue;
       for (const [node, weight] of GAUSS) {
         samples.push({ station: stationAt(line, low + node * width, panel), ds: weight * width });
       }
+      low = edge;
     }
   }
   return samples;

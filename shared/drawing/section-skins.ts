@@ -1,4 +1,4 @@
-import { facesOf } from '#shared/core/fit.ts';
+import { facesOf } from '#shared/core/faces.ts';
 import { covers, type Half } from '#shared/core/half.ts';
 import type { CapStrips, Covering, Skin } from '#shared/core/plan.ts';
 import type { Station } from '#shared/core/stations.ts';

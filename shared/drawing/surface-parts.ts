@@ -1,4 +1,4 @@
-import { facesOf } from '#shared/core/fit.ts';
+import { facesOf } from '#shared/core/faces.ts';
 import { covers, ribExtent, stripAt, type Half } from '#shared/core/half.ts';
 import type { CapStrips, Covering, Part, Plan, Ribs, Skin, Strip, Web } from '#shared/core/plan.ts';
 import { pairAt, stationAt, type Station } from '#shared/core/stations.ts';

@@ -17,7 +17,7 @@ const range = { from: station, to: station };
 
 const points = fc
   .array(fc.tuple(number(-0.5, 1.5), number(-1, 1)), { minLength: 5, maxLength: 12 })
-  .map((list) => ({ name: 'Odd', points: list as [number, number][] }));
+  .map((list) => ({ name: 'Odd', points: list }));
 const section = fc.oneof(
   fc.constantFrom({ naca: '0012' }, { naca: '4409' }, { naca: '9999' }, { naca: '2001' }, { naca: '0401' }),
   length.map((flat) => ({ flat })),

@@ -50,7 +50,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();
   const total = { length: 0, area: 0, volume: 0 };
-  const breaks = breaksUnderSkins(half, part, from, to);
+  const breaks = [...breaksUnderSkins(half, part, from, to)];
   if (basis === 'area') {
     const broadSide = (station: Station) => stripAt(part, station).width - stripAt(part, station).height;
     breaks.push(...signChanges(half.line, from, to, 1, broadSide));

@@ -59,13 +59,19 @@ export function PanelsTable({ desk, surface, index }: PanelsTableProps) {
       <Table caption={`Panels of the ${surface.key}, root to tip`} className="table-fixed">
         <thead>
           <tr>
-            <Th className="w-6" aria-label="Panel" />
+            <Th className="w-6">
+              <span className="sr-only">Panel</span>
+            </Th>
             {COLUMNS.map(({ field, head }) => (
               <Th key={field} numeric className="px-1">
                 {head}
               </Th>
             ))}
-            {panels.length > 1 && desk.canEdit && <Th className="w-7" aria-label="Remove" />}
+            {panels.length > 1 && desk.canEdit && (
+              <Th className="w-7">
+                <span className="sr-only">Remove</span>
+              </Th>
+            )}
           </tr>
         </thead>
         <tbody>

@@ -25,7 +25,7 @@ export function Layout() {
           event.preventDefault();
           main.current?.focus();
         }}
-        className="fixed top-2 left-2 z-50 -translate-y-16 rounded-md bg-ink px-4 py-2 font-semibold text-on-ink focus:translate-y-0"
+        className="no-print fixed top-2 left-2 z-50 -translate-y-16 rounded-md bg-ink px-4 py-2 font-semibold text-on-ink focus:translate-y-0"
       >
         Skip to the page
       </a>

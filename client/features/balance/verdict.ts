@@ -1,13 +1,14 @@
 import { ballastFor } from '#shared/core/ballast.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan, Target } from '#shared/core/plan.ts';
+import { standingOf, type Standing } from '#shared/core/standing.ts';
 import type { Estimate } from '#shared/core/result.ts';
 import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
 import { spareBallast } from './ballast-edit.ts';
 
 /** The answer of the page: how it balances, and what to do about it. */
 export interface Verdict {
-  kind: 'none' | 'inside' | 'close' | 'outside';
+  kind: 'none' | Standing;
   headline: string;
   /** the fact behind it, and the range asked for */
   detail: string;
@@ -51,18 +52,18 @@ export function verdictOf(
     };
   }
   const by = x - beam.wanted.x;
-  const off = Math.abs(percentMac - target.percentMac);
+  const kind = standingOf(target, percentMac, uPercentMac);
   const advice = adviceOf(totals.mass, x, beam.wanted.x, nose, items, target);
   const offset = offsetOf(by);
   const range = rangeOf(target);
-  if (off > target.tolerance) {
+  if (kind === 'outside') {
     const detail = `It balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC; ${range} is asked for.`;
-    return { kind: 'outside', headline: capital(`${offset} the wanted balance point`), detail, advice };
+    return { kind, headline: capital(`${offset} the wanted balance point`), detail, advice };
   }
-  const close = uPercentMac !== null && target.tolerance - off < uPercentMac;
+  const close = kind === 'close' && uPercentMac !== null;
   const on = Math.abs(by) < 0.05;
   return {
-    kind: close ? 'close' : 'inside',
+    kind,
     headline: `Balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC, inside ${range}`,
     detail: close
       ? `${capital(offset)} the wanted point; ±${NARROW_SPACE}${percent(uPercentMac)}${NARROW_SPACE}% of doubt reaches over the edge.`

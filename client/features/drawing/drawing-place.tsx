@@ -15,7 +15,7 @@ import { ItemsPane } from './lists/items-pane.tsx';
 import type { Desk } from './lists/rows-pane.tsx';
 import { SolidsPane } from './lists/solids-pane.tsx';
 import { SurfacePane } from './lists/surface-pane.tsx';
-import { useMaterialTable } from './material-table.ts';
+import { useMaterialTable } from '#client/hooks/use-material-table.ts';
 import { NoticesList } from './notices-list.tsx';
 import { Views } from './views.tsx';
 import { usePlace } from './use-place.ts';

@@ -1,11 +1,6 @@
+import { snapshotOf } from '#client/lib/material-snapshot.ts';
 import { describe, expect, it } from 'vitest';
-import {
-  choices,
-  fitsPart,
-  fitsSolid,
-  preferred,
-  snapshotOf,
-} from '#client/features/drawing/edits/materials.ts';
+import { choices, fitsPart, fitsSolid, preferred } from '#client/features/drawing/edits/materials.ts';
 import { newPart, PART_CHOICES, WISHES } from '#client/features/drawing/edits/new-part.ts';
 import { newItem, newSolid, newSurface, SOLID_CHOICES } from '#client/features/drawing/edits/new-rows.ts';
 import { noticeWords } from '#client/components/notice-text.ts';

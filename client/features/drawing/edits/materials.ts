@@ -1,46 +1,5 @@
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import type { Part, Plan, PlanMaterial, Solid } from '#shared/core/plan.ts';
-import type { MaterialDto } from '#shared/schemas/material.ts';
-
-/** A material as a plan would hold it, under the key of the table that it comes from. */
-export interface TableMaterial {
-  key: string;
-  material: PlanMaterial;
-}
-
-type Figures = Pick<
-  MaterialDto,
-  | 'key'
-  | 'name'
-  | 'category'
-  | 'density'
-  | 'areal'
-  | 'spread'
-  | 'cv'
-  | 'modulus'
-  | 'strength'
-  | 'moisture'
-  | 'source'
->;
-
-/** The snapshot that a plan keeps of a row of the materials table: what is not known is left out. */
-export function snapshotOf(row: Figures): TableMaterial {
-  const { key, name, category, density, areal, spread, cv, modulus, strength, moisture, source } = row;
-  return {
-    key,
-    material: {
-      name,
-      category,
-      ...(density !== null && { density }),
-      ...(areal !== null && { areal }),
-      ...(spread !== null && { spread }),
-      cv,
-      ...(moisture !== null && { moistureAtDensity: moisture }),
-      ...(modulus !== null && { modulus }),
-      ...(strength !== null && { strength }),
-      source,
-    },
-  };
-}
 
 /** What a part can be made of: whether a material is sold in a way that the part can be weighed by. */
 export type Fits = (material: PlanMaterial) => boolean;

@@ -1,7 +1,8 @@
 import { Select, type OptionGroup } from '#client/components/ui/select.tsx';
 import type { MaterialCategory, Plan, PlanMaterial } from '#shared/core/plan.ts';
 import { formatQuantity } from '#shared/format/numbers.ts';
-import { choices, type Fits, type TableMaterial } from '../edits/materials.ts';
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import { choices, type Fits } from '../edits/materials.ts';
 
 interface MaterialFieldProps {
   materials: Plan['materials'];

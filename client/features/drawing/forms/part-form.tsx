@@ -1,5 +1,6 @@
 import type { Part, Plan, PlanMaterial, Side } from '#shared/core/plan.ts';
-import { fitsPart, type TableMaterial } from '../edits/materials.ts';
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import { fitsPart } from '../edits/materials.ts';
 import { Fold } from '../fold.tsx';
 import { ChoiceOf, TextOf } from './choice-of.tsx';
 import type { Form } from './form.ts';

@@ -1,5 +1,6 @@
 import type { Bar, Plan, Plate, Solid } from '#shared/core/plan.ts';
-import { fitsSolid, type TableMaterial } from '../edits/materials.ts';
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import { fitsSolid } from '../edits/materials.ts';
 import { ChoiceOf, TextOf } from './choice-of.tsx';
 import type { Form } from './form.ts';
 import { MaterialField } from './material-field.tsx';

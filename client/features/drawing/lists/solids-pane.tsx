@@ -1,7 +1,8 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import type { Solid } from '#shared/core/plan.ts';
-import { fitsSolid, inTable, preferred, type TableMaterial } from '../edits/materials.ts';
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import { fitsSolid, inTable, preferred } from '../edits/materials.ts';
 import { newSolid, SOLID_CHOICES } from '../edits/new-rows.ts';
 import { changeSolids, dropUnused, inTurn, keepMaterial } from '../edits/plan-edits.ts';
 import { freshId, freshName, withRow } from '../edits/rows.ts';

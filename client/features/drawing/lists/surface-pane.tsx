@@ -1,7 +1,8 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import type { Part, Surface } from '#shared/core/plan.ts';
-import { fitsPart, inTable, preferred, type TableMaterial } from '../edits/materials.ts';
+import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import { fitsPart, inTable, preferred } from '../edits/materials.ts';
 import { newPart, PART_CHOICES, WISHES, type PartChoice } from '../edits/new-part.ts';
 import { changeParts, dropUnused, inTurn, keepMaterial } from '../edits/plan-edits.ts';
 import { freshId, freshName, withRow } from '../edits/rows.ts';

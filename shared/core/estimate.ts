@@ -9,6 +9,7 @@ import { classAreaOf, planformOf } from './planform.ts';
 import type { Plan, Surface } from './plan.ts';
 import type { Balance, Estimate, Inertia, Line, Planform, Totals } from './result.ts';
 import { selfCrossingAt } from './section.ts';
+import { sparOf } from './spar.ts';
 import { surfaceLine, type SurfaceLine } from './stations.ts';
 
 interface Laid {
@@ -47,6 +48,7 @@ export function estimate(plan: Plan): Estimate {
   const totals = totalsOf(lines, laid);
   const lifts = liftsOf(laid);
   const balance = balanceOf(plan, lines, totals, lifts, tell);
+  const wing = laid.find(({ surface }) => surface.role === 'wing');
   const classArea = classAreaOfAll(laid);
   const wingArea = lifts?.wingArea ?? 0;
   const clMax = plan.flight?.clMax ?? 1;
@@ -67,7 +69,9 @@ export function estimate(plan: Plan): Estimate {
       classLoading: loadingOf(totals.mass, classArea),
     },
     speeds: { stall, reynolds },
-    spar: { stations: [], worst: null },
+    spar: wing
+      ? sparOf(plan, wing.surface, wing.line, totals.mass - totals.wingMass)
+      : { stations: [], worst: null },
     notices,
   };
 }

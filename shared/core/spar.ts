@@ -1,0 +1,101 @@
+import { stripZ } from './fit.ts';
+import { GRAVITY } from './frame.ts';
+import { covers, halfOf, stripAt, type Half } from './half.ts';
+import { stripProfile } from './parts/strip.ts';
+import type { Plan, PlanMaterial, Strip, Surface } from './plan.ts';
+import type { Spar, SparStation } from './result.ts';
+import { bendingMoment, spanLoadOf } from './span-load.ts';
+import { stationAt, type Station, type SurfaceLine } from './stations.ts';
+
+/** A spar strip where a station cuts it. Stiffness in MPa, lengths mm. */
+export interface Flange {
+  area: number;
+  /** of its middle above the chord line */
+  z: number;
+  height: number;
+  modulus: number;
+  /** MPa */
+  strength: number;
+}
+
+/**
+ * Composite bending stiffness of strips about their common axis (transformed section, stiffnesses as weights):
+ * EI in N·mm² and the z of the axis; null where nothing carries.
+ */
+export function bendingStiffness(flanges: readonly Flange[]): { stiffness: number; axis: number } | null {
+  const weight = flanges.reduce((sum, f) => sum + f.modulus * f.area, 0);
+  if (weight <= 0) return null;
+  const axis = flanges.reduce((sum, f) => sum + f.modulus * f.area * f.z, 0) / weight;
+  const stiffness = flanges.reduce(
+    (sum, f) => sum + f.modulus * f.area * ((f.z - axis) ** 2 + f.height ** 2 / 12),
+    0,
+  );
+  return stiffness > 0 ? { stiffness, axis } : null;
+}
+
+/**
+ * The flange that is nearest to its strength under a moment (N·mm): its outer-fibre stress, MPa, and its margin,
+ * strength over stress. Null where nothing carries.
+ */
+export function worstFlange(
+  flanges: readonly Flange[],
+  moment: number,
+): { stress: number; margin: number } | null {
+  const section = bendingStiffness(flanges);
+  if (!section || moment <= 0) return null;
+  return flanges.reduce<{ stress: number; margin: number } | null>((worst, f) => {
+    const arm = Math.abs(f.z - section.axis) + f.height / 2;
+    const stress = (moment * f.modulus * arm) / section.stiffness;
+    if (stress <= 0) return worst;
+    const margin = f.strength / stress;
+    return worst && worst.margin <= margin ? worst : { stress, margin };
+  }, null);
+}
+
+const STATIONS = 21;
+
+function carries(strip: Strip, material: PlanMaterial | undefined): boolean {
+  const isSpar = strip.seat === 'top' || strip.seat === 'bottom';
+  return isSpar && material?.modulus !== undefined && material.strength !== undefined;
+}
+
+function flangesAt(plan: Plan, half: Half, station: Station): Flange[] {
+  return half.strips.flatMap((strip) => {
+    const material = plan.materials[strip.material];
+    if (!carries(strip, material) || !covers(strip, station.s)) return [];
+    const place = stripAt(strip, station);
+    const { area } = stripProfile(strip.profile, place.width, place.height, strip.wall);
+    if (area <= 0) return [];
+    const z = stripZ(half, strip, station, place);
+    const [modulus, strength] = [(material?.modulus ?? 0) * 1000, material?.strength ?? 0];
+    return [{ area, z, height: place.height, modulus, strength }];
+  });
+}
+
+/** Distance of a station from the root along the projected span, mm. */
+function projected(line: SurfaceLine, s: number): number {
+  return line.panels.reduce((sum, p) => sum + Math.max(0, Math.min(s, p.end) - p.start) * Math.abs(p.cos), 0);
+}
+
+/**
+ * Bending along the half span of the first wing: load by Schrenk for the model's mass less the wing's own, times
+ * the load factor (1 where none is asked for). `moment` in N·mm, `stress` in MPa, `margin` = strength over stress;
+ * `worst` is the station, mm from the root, with the least margin. Strengths are averages by density: an estimate,
+ * and no licence to launch hard.
+ */
+export function sparOf(plan: Plan, wing: Surface, line: SurfaceLine, carriedG: number): Spar {
+  const load = spanLoadOf(wing, line);
+  if (!load || carriedG <= 0) return { stations: [], worst: null };
+  const half = halfOf(wing, line, 'starboard', () => {});
+  const share = wing.mirrored ? 0.5 : 1;
+  const force = share * (carriedG / 1000) * GRAVITY * (plan.flight?.loadFactor ?? 1);
+  const stations = Array.from({ length: STATIONS }, (_, i) => (line.length * i) / (STATIONS - 1)).flatMap(
+    (s): SparStation[] => {
+      const moment = bendingMoment(load, force, projected(line, s));
+      const worst = worstFlange(flangesAt(plan, half, stationAt(line, s)), moment);
+      return worst ? [{ s, moment, ...worst }] : [];
+    },
+  );
+  const least = stations.reduce<SparStation | null>((a, b) => (a && a.margin <= b.margin ? a : b), null);
+  return { stations, worst: least?.s ?? null };
+}

@@ -27,10 +27,13 @@ const examples: Example[] = lines.flatMap(({ file, line, where }) => {
   return call && result ? [{ where, file, call, result }] : [];
 });
 
-/** What an example may name: the exports of its own file, and of the files that this one imports. */
+/** The wing that longer examples are worked on. */
+const EXAMPLE_WING = 'shared/core/example-wing.ts';
+
+/** What an example may name: the exports of its own file, of the files that this one imports, and the example wing. */
 async function inScope(file: Source): Promise<object> {
   const paths = importsOf(file).map(({ leads }) => leads);
-  const files = [...paths.filter((path) => path.startsWith('shared/')), file.path];
+  const files = [EXAMPLE_WING, ...paths.filter((path) => path.startsWith('shared/')), file.path];
   const modules = await Promise.all(
     files.map((path) => import(/* @vite-ignore */ pathToFileURL(join(ROOT, path)).href)),
   );

@@ -9,12 +9,17 @@ import {
   type Placed,
 } from './beam-places.ts';
 
+/** Rounds, at the most, in which weights move to better places. */
 const PASSES = 4;
 
 /**
  * Depth and side of the label for weights hung from one bar, so that no weight or label covers another and, where
  * it can be helped, no string crosses one. Deeper rows are used only where the shallow ones are taken. `posts` are
  * upright lines through the drawing that labels keep clear of. Same input, same answer.
+ * @param hung the weights, in the units of the drawing
+ * @param width of the drawing, from x = 0; labels stay inside it where they can
+ * @returns one place for each weight, in the order given
+ * @example layHung([{ key: 'a', x: 100, radius: 10, width: 40, height: 12 }], 200)[0].string // → 30
  */
 export function layHung(
   hung: readonly HungLabel[],

@@ -2,6 +2,7 @@
 export interface HungLabel {
   key: string;
   x: number;
+  /** of the weight */
   radius: number;
   /** size of the label */
   width: number;
@@ -54,15 +55,22 @@ const COST = {
   postOverLabel: 30,
   side: 0.4,
 };
-/** Places that each may take. */
+/** How many places each may take: every row with every side. */
 export const CHOICES = ROWS * SIDES.length;
 
-/** How far a weight and its label may reach to either side. */
+/**
+ * How far a weight with its label may reach to either side of its string, the air around it included.
+ * @example reach({ key: 'a', x: 100, radius: 10, width: 40, height: 12 }) // → 62
+ */
 export function reach({ radius, width }: HungLabel): number {
   return radius + BESIDE + width + GAP;
 }
 
-/** Every place that a weight may take. */
+/**
+ * Every place that a weight may take, `CHOICES` in all: row by row from the shallowest, in each the label to the
+ * right, to the left and below.
+ * @example candidates({ key: 'a', x: 100, radius: 10, width: 40, height: 12 })[0].place // → { key: 'a', string: 30, side: 'right', labelX: 117, labelY: 34, bottom: 50 }
+ */
 export function candidates(of: HungLabel): Placed[] {
   return Array.from({ length: ROWS }, (_, row) => SIDES.map((side) => placeAt(of, row, side))).flat();
 }
@@ -84,7 +92,11 @@ function placeAt(of: HungLabel, row: number, side: LabelSide): Placed {
   };
 }
 
-/** What a place costs by itself. */
+/**
+ * What a place costs by itself, in rows: its depth, its side, a label that leaves the drawing (0 to `width`) or lies
+ * over an upright line (`posts`, each an x).
+ * @example ownCost(candidates({ key: 'a', x: 100, radius: 10, width: 40, height: 12 })[4], 200, []) // → 1.4
+ */
 export function ownCost(mine: Placed, width: number, posts: readonly number[]): number {
   let cost = (mine.place.string - SHORTEST) / ROW + SIDES.indexOf(mine.place.side) * COST.side;
   if (mine.label.x0 < 0 || mine.label.x1 > width) cost += COST.outside;
@@ -92,7 +104,11 @@ export function ownCost(mine: Placed, width: number, posts: readonly number[]): 
   return cost;
 }
 
-/** What two cost by standing in each other's way. */
+/**
+ * What two cost, in rows, by standing in each other's way: weights and labels that overlap, strings over them. The
+ * order of the two makes no difference.
+ * @example between(...[100, 160].map((x) => candidates({ key: 'a', x, radius: 10, width: 40, height: 12 })[0])) // → 400
+ */
 export function between(a: Placed, b: Placed): number {
   let cost = stringCost(a, b) + stringCost(b, a);
   if (overlap(a.weight, b.weight)) cost += COST.overlap;

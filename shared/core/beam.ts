@@ -23,6 +23,7 @@ export interface Beam {
   /** the wanted balance point, or where it balances when none is asked for */
   pivot: number;
   wanted: { x: number; from: number; to: number; percentMac: number } | null;
+  /** where it balances, `u` the standard uncertainty */
   balance: { x: number; u: number; percentMac: number | null; uPercentMac: number | null };
   /** the mean aerodynamic chord */
   chord: { from: number; to: number } | null;
@@ -40,7 +41,11 @@ const SMALL_PERCENT = 2;
 /** … and where there is no chord either, mm. */
 const SMALL_MM = 2;
 
-/** The beam of an estimate; null where nothing has a mass. Without a wing no point can be wanted. */
+/**
+ * The beam of an estimate; null where nothing has a mass. Without a wing (`reference` null) no point can be wanted.
+ * The moment left over is M·(x − x_pivot).
+ * @example beamOf(EXAMPLE_ESTIMATE, { area: 100_000, mac: 100, xLeMac: 0 }, { percentMac: 40, tolerance: 2 }).leftOver // → -503.84
+ */
 export function beamOf(
   estimate: Pick<Estimate, 'lines' | 'totals' | 'balance'>,
   reference: WingReference | null,
@@ -85,8 +90,8 @@ function smallDistance(reference: WingReference | null, target: Target | undefin
 }
 
 /**
- * How far the bar leans, degrees, when the balance point lies `by` mm aft of the pivot: half the limit at `small`,
- * always more for more, never beyond the limit.
+ * How far the bar leans, degrees, when the balance point lies `by` mm aft of the pivot: half the limit at `small` mm
+ * (above 0), always more for more, never beyond the limit.
  * @example tiltOf(2, 2) // → 1.75
  */
 export function tiltOf(by: number, small: number): number {

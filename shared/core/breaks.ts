@@ -2,9 +2,15 @@ import { stripAt, type Half } from './half.ts';
 import type { Strip, Web } from './plan.ts';
 import { pairAt, stationAt, type Station, type SurfaceLine } from './stations.ts';
 
-/**
+/*
  * Stations where what is integrated along a surface jumps: a strip that slips out from under a skin, a web that
  * leaves a strip. Integrals are split there, for a sample rule holds only where the integrand is smooth.
+ */
+
+/**
+ * Stations, mm, between `from` and `to` where `f` changes its sign, found by halving. Each panel is looked at in
+ * `pieces` equal steps: two changes within one step go unseen.
+ * @example signChanges(EXAMPLE_LINE, 0, 500, 1, ({ s }) => s - 200) // → [200]
  */
 export function signChanges(
   line: SurfaceLine,
@@ -41,7 +47,11 @@ function bisect(f: (s: number) => number, from: number, to: number, atFrom: numb
   return (low + high) / 2;
 }
 
-/** Where skins over a strip begin, end or slip off its centre line. */
+/**
+ * Stations, mm, where skins over a strip begin, end or slip off its centre line; in no order, some perhaps twice or
+ * outside `from` and `to`, as `samplesOver` takes them.
+ * @example breaksUnderSkins(EXAMPLE_HALF, EXAMPLE_SPAR, 0, 500) // → [0, 500]
+ */
 export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: number): number[] {
   const { at, seat } = strip;
   const isAlongEdges = seat !== 'nose' && seat !== 'tail' && at !== undefined && at[0] === at[1];
@@ -53,7 +63,10 @@ export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: num
   return [...half.skinEnds, ...crossings];
 }
 
-/** Where skins or strips over a web begin, end or slip off it. */
+/**
+ * Stations, mm, where skins or strips over a web begin, end or slip off it; in no order, as those of a strip.
+ * @example breaksOverWeb(EXAMPLE_HALF, EXAMPLE_WEB, 0, 500) // → [0, 500, 0, 500]
+ */
 export function breaksOverWeb(half: Half, web: Web, from: number, to: number): number[] {
   const x = (station: Station) => pairAt(web.at, web.from, web.to, station.s);
   const skins = half.skinEdges.flatMap((edge) =>

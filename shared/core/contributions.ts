@@ -12,14 +12,20 @@ export interface Contribution {
   share: number;
 }
 
-/** The lines that make the mass uncertain, the largest first; those that add nothing are left out. */
+/**
+ * The lines that make the mass uncertain, the largest first, each with its own uᵢ in g; those that add nothing are
+ * left out. All are taken as independent (JCGM 100:2008, 5.1.2).
+ * @example massContributions(EXAMPLE_ESTIMATE)[0].name // → 'Sheeting'
+ */
 export function massContributions(estimate: Pick<Estimate, 'lines'>): Contribution[] {
   return ranked(estimate.lines, (line) => line.u);
 }
 
 /**
  * The lines that make the balance point uncertain, the largest first: |(xᵢ − x)/M|·uᵢ in mm, to first order
- * (JCGM 100:2008, 5.1.2). A heavy part on the balance point adds nothing, however little is known of it.
+ * (JCGM 100:2008, 5.1.2). A heavy part on the balance point adds nothing, however little is known of it. Empty
+ * where nothing has a mass.
+ * @example balanceContributions(EXAMPLE_ESTIMATE)[0].name // → 'Boom'
  */
 export function balanceContributions(estimate: Pick<Estimate, 'lines' | 'totals'>): Contribution[] {
   const { mass, at } = estimate.totals;
@@ -42,7 +48,11 @@ export interface GroupMoment {
   moment: number;
 }
 
-/** What each group of the sheet pulls about a point, mm aft of the datum, from nose-heavy to tail-heavy. */
+/**
+ * What each group of the sheet pulls about a point `x` mm aft of the datum, Σm·(xᵢ − x), sorted from what pulls the
+ * nose down most to what pulls the tail down most.
+ * @example momentsAbout(EXAMPLE_ESTIMATE, 0).map(({ name, moment }) => [name, moment]) // → [['Ballast', -200], ['Fuselage', 200], ['Wing', 266.4]]
+ */
 export function momentsAbout(estimate: Pick<Estimate, 'lines'>, x: number): GroupMoment[] {
   return sheetGroups(estimate.lines)
     .map(({ key, name, lines }) => ({

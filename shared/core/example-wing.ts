@@ -3,14 +3,9 @@ import { halfOf } from './half.ts';
 import type { CapStrips, Plan, Ribs, Skin, Strip, Surface, Web } from './plan.ts';
 import { stationAt, surfaceLine } from './stations.ts';
 
-/**
- * What the examples beside the functions are worked on where a function asks for more than a few numbers; nothing
- * else uses it. The wing is one that can be reckoned in the head: 1000 mm by 100 mm, without sweep or dihedral, and
- * its section a plate, everywhere 10 mm high. All wood is 100 kg/m³, known to ± 10 %.
- */
 const wood = { material: 'balsa', from: 0, to: 500 } as const;
 
-/** Six ribs, 100 mm apart. */
+/** Six ribs of 2 mm, 100 mm apart. */
 export const EXAMPLE_RIBS: Ribs = {
   ...wood,
   ...{ id: 'ribs', name: 'Ribs', kind: 'ribs', count: 6, thickness: 2, lightening: 0 },
@@ -50,6 +45,10 @@ export const EXAMPLE_CAPS: CapStrips = {
   },
 };
 
+/**
+ * The wing that examples are worked on where a function asks for more than a few numbers; nothing else uses it. Its
+ * figures can be reckoned in the head: 1000 mm by 100 mm, without sweep or dihedral, everywhere 10 mm high.
+ */
 export const EXAMPLE_WING: Surface = {
   key: 'wing',
   role: 'wing',
@@ -64,15 +63,16 @@ export const EXAMPLE_WING: Surface = {
   parts: [EXAMPLE_RIBS, EXAMPLE_SPAR, EXAMPLE_SKIN],
 };
 
+/** The wing's starboard half laid out along its stations. */
 export const EXAMPLE_LINE = surfaceLine(EXAMPLE_WING);
 
-/** Starboard; its notices go nowhere. */
+/** The starboard half with its parts; notices go nowhere. */
 export const EXAMPLE_HALF = halfOf(EXAMPLE_WING, EXAMPLE_LINE, 'starboard', () => undefined);
 
-/** On the second rib. */
+/** The place of the second rib. */
 export const EXAMPLE_STATION = stationAt(EXAMPLE_LINE, 100);
 
-/** The wing on a boom of 5 × 5 mm, with 10 g in the nose. */
+/** The wing on a boom of 5 × 5 mm, all of balsa of 100 kg/m³ ± 10 %, with 10 g in the nose: 19.256 g. */
 export const EXAMPLE_PLAN: Plan = {
   version: 1,
   name: 'Plank',
@@ -95,4 +95,5 @@ export const EXAMPLE_PLAN: Plan = {
   target: { percentMac: 40, tolerance: 2 },
 };
 
+/** What that plan comes to. */
 export const EXAMPLE_ESTIMATE = estimate(EXAMPLE_PLAN);

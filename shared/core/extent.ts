@@ -4,7 +4,8 @@ import { surfaceLine } from './stations.ts';
 
 /**
  * The foremost place of a plan, where nose ballast goes: the least x of items, solids and root leading edges.
- * Null where the plan has nothing.
+ * Body axes, mm; null where the plan has nothing.
+ * @example noseOf(EXAMPLE_PLAN) // → [-20, 0, 0]
  */
 export function noseOf(plan: Pick<Plan, 'items' | 'solids' | 'surfaces'>): Vec3 | null {
   const places: Vec3[] = [
@@ -17,7 +18,11 @@ export function noseOf(plan: Pick<Plan, 'items' | 'solids' | 'surfaces'>): Vec3 
   return places.reduce<Vec3 | null>((nose, place) => (nose && nose[0] <= place[0] ? nose : place), null);
 }
 
-/** Where the outermost panel of a role ends, starboard, at its leading edge; the widest surface counts. */
+/**
+ * Where the outermost panel of a role ends, starboard, at its leading edge: body axes, mm, tip blocks not counted.
+ * The widest surface counts; null where there is none.
+ * @example tipOf(EXAMPLE_PLAN) // → [0, 500, 0]
+ */
 export function tipOf(plan: Pick<Plan, 'surfaces'>, role: SurfaceRole = 'wing'): Vec3 | null {
   const tips = plan.surfaces
     .filter((surface) => surface.role === role)

@@ -4,10 +4,14 @@ import type { Strip } from './plan.ts';
 import { arcBetween, heightAt, ordinateAt, wrapArc, type Sums } from './section-integrals.ts';
 import type { Station } from './stations.ts';
 
-/** How skins, cap strips and strips lie on the section: what a part finds over and under it at a station. */
+/** Two edges closer than this, x/c, meet. */
 const TOUCH = 1e-9;
 
-/** Developed length with first moments, mm and mm², that such a part takes at a station, inside an extent of x/c. */
+/**
+ * Developed length that a skin, cap strip or covering takes at a station, mm, with its first moments about the
+ * leading edge and the chord line, mm². Only what lies inside `extent`, x/c, counts.
+ * @example developedAt(EXAMPLE_SKIN, EXAMPLE_STATION) // → { amount: 50, x: 1250, z: 250 }
+ */
 export function developedAt(
   part: Parameters<typeof facesOf>[0],
   station: Station,
@@ -34,6 +38,7 @@ export function developedAt(
 /**
  * Thickness of the skins that lie over x/c on a face at a station, mm. A skin that ends there covers it; where one
  * ends and another begins (a butt joint over a spar) the thicker side counts, not both.
+ * @example skinOver(EXAMPLE_HALF, EXAMPLE_STATION, 'upper', 0.25) // → 1
  */
 export function skinOver(half: Half, station: Station, face: 'upper' | 'lower', x: number): number {
   let [over, ending, starting] = [0, 0, 0];
@@ -46,14 +51,22 @@ export function skinOver(half: Half, station: Station, face: 'upper' | 'lower', 
   return over + Math.max(ending, starting);
 }
 
-/** Height of the section at x/c, mm, and of what is left of it under the skins there. */
+/**
+ * Height of the section at x/c, mm, and of what is left of it under the skins there (negative where these are
+ * thicker than the section).
+ * @example heightsAt(EXAMPLE_HALF, EXAMPLE_STATION, 0.25) // → { section: 10, underSkins: 9 }
+ */
 export function heightsAt(half: Half, station: Station, x: number): { section: number; underSkins: number } {
   const section = heightAt(station.section, x) * station.chord;
   const skins = skinOver(half, station, 'upper', x) + skinOver(half, station, 'lower', x);
   return { section, underSkins: section - skins };
 }
 
-/** z of a strip's centre above the chord line, mm: outer face flush with the section, or with a skin's underside. */
+/**
+ * z of a strip's centre above the chord line, mm: outer face flush with the section, or with a skin's underside.
+ * Strips of other seats than `top` and `bottom` lie halfway between the faces.
+ * @example stripZ(EXAMPLE_HALF, EXAMPLE_SPAR, EXAMPLE_STATION, stripAt(EXAMPLE_SPAR, EXAMPLE_STATION)) // → 3
+ */
 export function stripZ(half: Half, strip: Strip, station: Station, place: StripAt): number {
   const { section, chord } = station;
   const x = chord > 0 ? place.centre / chord : 0;

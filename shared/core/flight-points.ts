@@ -9,7 +9,9 @@ import type { SurfaceLine } from './stations.ts';
 export interface Lifts {
   /** mm², projected */
   wingArea: number;
+  /** mean aerodynamic chord, mm */
   mac: number;
+  /** its leading edge, mm aft of the datum */
   xLeMac: number;
   /** mm aft of the datum; null where there is no tailplane */
   neutralPoint: number | null;
@@ -21,7 +23,11 @@ interface Laid {
   planform: Planform;
 }
 
-/** Null without a wing, or where the wing casts no shadow. */
+/**
+ * Area, mean chord and neutral point of all wings and all tailplanes together; null without a wing, or where the
+ * wing casts no shadow.
+ * @example liftsOf([{ surface: EXAMPLE_WING, line: EXAMPLE_LINE, planform: planformOf(EXAMPLE_WING) }]) // → { wingArea: 100_000, mac: 100, xLeMac: 0, neutralPoint: null }
+ */
 export function liftsOf(laid: readonly Laid[]): Lifts | null {
   const wing = together(laid, 'wing');
   if (!wing) return null;

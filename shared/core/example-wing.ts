@@ -76,7 +76,7 @@ export const EXAMPLE_STATION = stationAt(EXAMPLE_LINE, 100);
 export const EXAMPLE_PLAN: Plan = {
   version: 1,
   name: 'Plank',
-  materials: { balsa: { name: 'Balsa', category: 'wood', density: 100, cv: 0.1 } },
+  materials: { balsa: { name: 'Balsa', category: 'wood', density: 100, cv: 0.1, modulus: 1, strength: 8 } },
   surfaces: [EXAMPLE_WING],
   items: [{ id: 'nose', name: 'Nose weight', group: 'ballast', mass: 10, u: 0.1, at: [-20, 0, 0] }],
   solids: [

@@ -28,15 +28,21 @@ export interface SkinFace {
   to: number;
 }
 
-/** Two millionths of a millimetre of slack, so that a station typed as the sum of panels is on the surface. */
+/** A millionth of a millimetre of slack, so that a station typed as the sum of panels is on the surface. */
 const SLACK = 1e-6;
-/** True where a part's range holds a station, ends included. */
+/**
+ * True where a part's range holds the station `s`, ends included; all mm.
+ * @example covers({ from: 0, to: 500 }, 500) // → true
+ */
 export const covers = (part: { from: number; to: number }, s: number) =>
   s >= part.from - SLACK && s <= part.to + SLACK;
 
 const distinct = (values: number[]) => [...new Set(values)];
 
-/** Stations of a ribs part, mm. @example ribStations({ from: 0, to: 30, count: 4 }) // → [0, 10, 20, 30] */
+/**
+ * Stations of a ribs part, mm: those given, or else `count` in equal steps, both ends included.
+ * @example ribStations({ from: 0, to: 30, count: 4 }) // → [0, 10, 20, 30]
+ */
 export function ribStations(part: Pick<Ribs, 'stations' | 'from' | 'to' | 'count'>): number[] {
   if (part.stations) return part.stations;
   const { from = 0, to = 0, count = 1 } = part;
@@ -45,7 +51,12 @@ export function ribStations(part: Pick<Ribs, 'stations' | 'from' | 'to' | 'count
     : Array.from({ length: count }, (_, i) => from + ((to - from) * i) / (count - 1));
 }
 
-/** The half `side` of a surface. Parts of the other side are left out. */
+/**
+ * The half `side` of a surface with its parts sorted by kind; parts of the other side are left out. Either half is
+ * laid out as the starboard one: who asks for the port half mirrors what comes out. `notice` is told of every part
+ * that does not fit, by whatever measures it later.
+ * @example halfOf(EXAMPLE_WING, EXAMPLE_LINE, 'port', () => undefined).strips.length // → 1
+ */
 export function halfOf(
   surface: Surface,
   line: SurfaceLine,
@@ -84,6 +95,7 @@ export function halfOf(
   };
 }
 
+/** Place and size of a strip where a station cuts it, mm. */
 export interface StripAt {
   /** mm behind the leading edge: front, centre line, back */
   front: number;
@@ -93,7 +105,11 @@ export interface StripAt {
   height: number;
 }
 
-/** A strip's place and size at a station of its range. */
+/**
+ * A strip's place and size at a station of its range. The front of a nose strip lies on the leading edge, the back
+ * of a tail strip on the trailing edge.
+ * @example stripAt(EXAMPLE_SPAR, EXAMPLE_STATION) // → { front: 22.5, centre: 25, back: 27.5, width: 5, height: 2 }
+ */
 export function stripAt(strip: Strip, { s, chord }: Station): StripAt {
   const width = pairAt(strip.width, strip.from, strip.to, s);
   const height = pairAt(strip.height, strip.from, strip.to, s);
@@ -106,7 +122,11 @@ export function stripAt(strip: Strip, { s, chord }: Station): StripAt {
   return { front: centre - width / 2, centre, back: centre + width / 2, width, height };
 }
 
-/** Extent of the ribs at a station, x/c: from the back of a nose strip to the front of a tail strip. */
+/**
+ * Extent of the ribs at a station, x/c: from the back of a nose strip to the front of a tail strip, or the whole
+ * chord; never reversed, and [0, 0] where there is no chord.
+ * @example ribExtent(EXAMPLE_HALF, EXAMPLE_STATION) // → [0, 1]
+ */
 export function ribExtent(half: Half, station: Station): [from: number, to: number] {
   let [from, to] = [0, 1];
   if (station.chord <= 0) return [0, 0];

@@ -13,17 +13,20 @@ export interface ChordIntegrals {
   area: number;
   /** ∫c cos(dihedral) ds, mm² */
   projected: number;
-  /** ∫c² ds */
+  /** ∫c² ds, mm³ */
   square: number;
-  /** ∫ xLE c ds */
+  /** ∫ xLE c ds, mm³ */
   leadingEdge: number;
-  /** ∫ y c ds */
+  /** ∫ y c ds, mm³ */
   y: number;
 }
 
 const nothing = (): ChordIntegrals => ({ area: 0, projected: 0, square: 0, leadingEdge: 0, y: 0 });
 
-/** Sum of the chord integrals of several surfaces or panels. */
+/**
+ * Sum of the chord integrals of several surfaces or panels; noughts for none.
+ * @example addChords([chordIntegrals(EXAMPLE_WING), chordIntegrals(EXAMPLE_WING)]).area // → 100_000
+ */
 export function addChords(parts: readonly ChordIntegrals[]): ChordIntegrals {
   return parts.reduce(
     (sum, p) => ({
@@ -38,14 +41,18 @@ export function addChords(parts: readonly ChordIntegrals[]): ChordIntegrals {
 }
 
 /**
- * ∫f g over a run on which both are linear.
+ * ∫f g over a run on which both are linear, f from `f0` to `f1` and g from `g0` to `g1`; exact.
  * @example linearProduct(6, 1, 1, 2, 2) // → 12
  */
 export function linearProduct(run: number, f0: number, f1: number, g0: number, g1: number): number {
   return (run * (f0 * (2 * g0 + g1) + f1 * (g0 + 2 * g1))) / 6;
 }
 
-/** Chord integrals of one half, exact for each panel and for tip blocks (half ellipses on the last chord). */
+/**
+ * Chord integrals of one half, exact for each panel and for tip blocks (half ellipses on the last chord). A block on
+ * one side only of a mirrored surface counts by half, so that twice the half is the whole.
+ * @example chordIntegrals(EXAMPLE_WING) // → { area: 50_000, projected: 50_000, square: 5_000_000, leadingEdge: 0, y: 12_500_000 }
+ */
 export function chordIntegrals(surface: Surface, line: SurfaceLine = surfaceLine(surface)): ChordIntegrals {
   const panels = line.panels.map((panel): ChordIntegrals => {
     const span = panel.end - panel.start;
@@ -102,7 +109,10 @@ function spanOf(surface: Surface, line: SurfaceLine): number {
   return 2 * (Math.max(0, surface.apex[1]) + panels) + (longest('port') + longest('starboard')) * cos;
 }
 
-/** MAC and its place from chord integrals. The caller sees to it that there is an area. */
+/**
+ * Mean aerodynamic chord and its place, mm, from chord integrals. The caller sees to it that there is an area.
+ * @example meanChord(chordIntegrals(EXAMPLE_WING)) // → { mac: 100, xLeMac: 0, yMac: 250 }
+ */
 export function meanChord(chords: ChordIntegrals): Pick<Planform, 'mac' | 'xLeMac' | 'yMac'> {
   return {
     mac: chords.square / chords.area,
@@ -111,7 +121,11 @@ export function meanChord(chords: ChordIntegrals): Pick<Planform, 'mac' | 'xLeMa
   };
 }
 
-/** Planform figures of a surface, both halves of a mirrored one. A surface always has a chord, so an area. */
+/**
+ * Planform figures of a surface, mm and mm², both halves of a mirrored one. The plan's schema sees to it that a
+ * surface has a chord, so an area.
+ * @example planformOf(EXAMPLE_WING) // → { areaDeveloped: 100_000, areaProjected: 100_000, span: 1000, aspectRatio: 10, mac: 100, xLeMac: 0, yMac: 250 }
+ */
 export function planformOf(surface: Surface, line: SurfaceLine = surfaceLine(surface)): Planform {
   const chords = chordIntegrals(surface, line);
   const halves = surface.mirrored ? 2 : 1;
@@ -126,7 +140,11 @@ export function planformOf(surface: Surface, line: SurfaceLine = surfaceLine(sur
   };
 }
 
-/** Projected area, mm², that a class counts: carried through the fuselage to the plane of symmetry. */
+/**
+ * Projected area, mm², that a class counts: both halves, and between them the root chord carried through the
+ * fuselage to the plane of symmetry.
+ * @example classAreaOf({ ...EXAMPLE_WING, apex: [0, 20, 0] }) // → 104_000
+ */
 export function classAreaOf(surface: Surface, line: SurfaceLine = surfaceLine(surface)): number {
   const { areaProjected } = planformOf(surface, line);
   const root = surface.panels[0]?.rootChord ?? 0;

@@ -1,7 +1,8 @@
 import type { Section } from './section.ts';
 
 /**
- * Areas and arcs of a section of unit chord between two x/c. Running integrals are made once per section by the
+ * An area or an arc of a section of unit chord between two x/c, with first moments: all are shares of the chord, its
+ * square or its cube. Running integrals are made once per section by the
  * trapezoid rule at two step widths and extrapolated (Richardson), so that 200 nodes give eight digits on a
  * smooth section and exactness on a polygon.
  */
@@ -144,6 +145,7 @@ export function areaBetween(section: Section, from: number, to: number): Sums {
 /**
  * Mean square of the area's distance along x from its centroid between two x/c, unit chord: what a rib adds to the
  * inertia by its own extent. Eight slices give it to half a percent, ample for a share of a share.
+ * @example spreadBetween(readSection({ flat: 3 }, 100), 0, 1).toFixed(6) // → '0.083333'
  */
 export function spreadBetween(section: Section, from: number, to: number): number {
   const slices = 8;
@@ -162,6 +164,7 @@ export function spreadBetween(section: Section, from: number, to: number): numbe
 /**
  * Developed length of one face between two x/c with its first moments, unit chord. From the nose on, the upper face
  * takes in the hair's breadth of a cambered section that lies in front of x = 0.
+ * @example arcBetween(readSection({ flat: 3 }, 100), 'upper', 0.2, 0.7) // → { amount: 0.5, x: 0.225, z: 0.0075 }
  */
 export function arcBetween(section: Section, face: FaceName, from: number, to: number): Sums {
   const set = setOf(section);
@@ -182,7 +185,11 @@ export function arcBetween(section: Section, face: FaceName, from: number, to: n
   };
 }
 
-/** From x/c `start` on top, forward round the nose, to `end` on the bottom. */
+/**
+ * Developed length, unit chord, from x/c `start` on top, forward round the nose, to `end` on the bottom, with its
+ * first moments. A plate's square front edge is not part of it.
+ * @example wrapArc(readSection({ flat: 3 }, 100), 0.3, 0.1).amount // → 0.4
+ */
 export function wrapArc(section: Section, start: number, end: number): Sums {
   const top = arcBetween(section, 'upper', 0, start);
   const bottom = arcBetween(section, 'lower', 0, end);
@@ -194,7 +201,10 @@ export function wrapArc(section: Section, start: number, end: number): Sums {
   };
 }
 
-/** z/c of a face at x/c. */
+/**
+ * z/c of a face at x/c, by straight lines between the section's nodes; beyond nose and tail that at the end.
+ * @example ordinateAt(readSection({ flat: 3 }, 100), 'lower', 0.3) // → -0.015
+ */
 export function ordinateAt(section: Section, face: FaceName, x: number): number {
   const i = intervalOf(section.x, clamp01(x));
   const [x0, x1] = [section.x[i] ?? 0, section.x[i + 1] ?? 1];
@@ -203,7 +213,10 @@ export function ordinateAt(section: Section, face: FaceName, x: number): number 
   return (z[i] ?? 0) + f * ((z[i + 1] ?? 0) - (z[i] ?? 0));
 }
 
-/** Thickness z/c of the section at x/c, never negative. */
+/**
+ * Thickness z/c of the section at x/c, never negative.
+ * @example heightAt(readSection({ flat: 3 }, 100), 0.3) // → 0.03
+ */
 export function heightAt(section: Section, x: number): number {
   return Math.max(0, ordinateAt(section, 'upper', x) - ordinateAt(section, 'lower', x));
 }

@@ -24,8 +24,9 @@ const xOfAngle = (angle: number) => (1 - Math.cos(angle)) / 2;
 const angleOfX = (x: number) => Math.acos(1 - 2 * Math.min(1, Math.max(0, x)));
 
 /**
- * Nodes for sections that must share them: the base grid, the given kinks (corners of a polygon section, places
- * where a curve's formula changes), and the middles between.
+ * Nodes, x/c from 0 to 1, for sections that must share them: the base grid, the given kinks (corners of a polygon
+ * section, places where a curve's formula changes), and the middles between. Always an odd number of them.
+ * @example sectionGrid().length // → 193
  */
 export function sectionGrid(kinks: readonly number[] = []): Float64Array {
   const angles = Array.from({ length: BASE_INTERVALS + 1 }, (_, i) => (i * Math.PI) / BASE_INTERVALS);
@@ -53,7 +54,11 @@ function facesOf(spec: PointsSpec): { upper: [number, number][]; lower: [number,
   return { upper: spec.points.slice(0, nose + 1).reverse(), lower: spec.points.slice(second) };
 }
 
-/** Where a section's ordinates have corners, so that a shared grid has nodes there. */
+/**
+ * x/c where a section's ordinates have corners, so that a shared grid has nodes there: the points of a coordinate
+ * section, the place of greatest camber of a four-digit one.
+ * @example kinksOf({ naca: '4409' }) // → [0.4]
+ */
 export function kinksOf(spec: SectionSpec): number[] {
   if ('points' in spec) return spec.points.map((p) => p[0]);
   if ('naca' in spec) return [Number(spec.naca[1]) / 10];
@@ -74,7 +79,8 @@ function interpolate(face: readonly [number, number][], x: number): number {
 }
 
 /**
- * Reads a section on a grid. A plate of constant thickness depends on the chord (mm) that it is read at.
+ * Reads a section on a grid of x/c, by default its own. A plate of constant thickness depends on the chord (mm) that
+ * it is read at; other sections do not.
  * @example readSection({ flat: 3 }, 100).upper[0] // → 0.015
  * @example readSection({ naca: '0012' }, 100).noseOnTop // → 0
  */
@@ -111,7 +117,11 @@ export interface SectionPair {
 const alreadyRead = new Map<string, SectionPair>();
 const REMEMBERED = 64;
 
-/** Both sections of a panel on the grid that they share. */
+/**
+ * Both sections of a panel on the grid that they share, as functions of the chord in mm. Sections that are alike come
+ * back as one and the same function.
+ * @example readPair({ flat: 3 }, { naca: '0012' }).root(100).upper[0] // → 0.015
+ */
 export function readPair(rootSpec: SectionSpec, tipSpec: SectionSpec): SectionPair {
   const key = 'points' in rootSpec || 'points' in tipSpec ? null : JSON.stringify([rootSpec, tipSpec]);
   const known = key === null ? undefined : alreadyRead.get(key);
@@ -134,7 +144,10 @@ function readerOf(spec: SectionSpec, grid: Float64Array): (chord: number) => Sec
   return () => once;
 }
 
-/** Blend of two sections on one grid, ordinate by ordinate: `share` 0 gives the first, 1 the second. */
+/**
+ * Blend of two sections on one grid, ordinate by ordinate: `share` 0 gives the first, 1 the second.
+ * @example blendSections(readSection({ flat: 2 }, 100), readSection({ flat: 4 }, 100), 0.5).upper[0] // → 0.015
+ */
 export function blendSections(a: Section, b: Section, share: number): Section {
   if (a === b || share === 0) return a;
   if (share === 1) return b;
@@ -148,7 +161,10 @@ export function blendSections(a: Section, b: Section, share: number): Section {
   };
 }
 
-/** x/c where the faces first cross inside the section, or null. Touching at the very ends is no crossing. */
+/**
+ * First x/c of the grid at which the upper face lies below the lower, or null. At the very ends it does not count.
+ * @example selfCrossingAt(readSection({ naca: '0012' }, 100)) // → null
+ */
 export function selfCrossingAt(section: Section): number | null {
   const at = section.x.findIndex(
     (x, i) => x > 0.001 && x < 0.999 && (section.upper[i] ?? 0) < (section.lower[i] ?? 0) - 1e-9,

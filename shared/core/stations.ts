@@ -2,17 +2,24 @@ import { cosDegrees, radians, type Vec3 } from './frame.ts';
 import type { Pair, Panel, Surface } from './plan.ts';
 import { blendSections, readPair, type Section } from './section.ts';
 
-/** One panel of a surface as its stations see it. Everything is linear in s inside a panel. */
+/** One panel of a surface as its stations see it, mm. Everything is linear in s inside a panel. */
 export interface PanelLine {
+  /** from 0 at the root */
   index: number;
+  /** first and last station */
   start: number;
   end: number;
+  /** at root and tip */
   chord: Pair;
+  /** x at root and tip */
   leadingEdge: Pair;
+  /** of the root's leading edge */
   y: number;
   z: number;
+  /** of the dihedral */
   cos: number;
   sin: number;
+  /** the section at either end as it is at a chord */
   root: (chord: number) => Section;
   tip: (chord: number) => Section;
   /** the blended section at a share of the span; parts ask for the same stations, so each is made once */
@@ -55,7 +62,10 @@ function blender(panel: Panel): Pick<PanelLine, 'root' | 'tip' | 'sectionAt'> {
   return { root, tip, sectionAt };
 }
 
-/** Lays a surface out along its stations. */
+/**
+ * Lays a surface out along its stations, starboard half, from its apex outward.
+ * @example surfaceLine(EXAMPLE_WING).length // → 500
+ */
 export function surfaceLine(surface: Surface): SurfaceLine {
   let [x, y, z] = surface.apex;
   let start = 0;
@@ -84,16 +94,27 @@ export function surfaceLine(surface: Surface): SurfaceLine {
   return { length: start, panels };
 }
 
+/** Stations closer than this, mm, are one. */
 const EDGE = 1e-9;
 
-/** Panel that holds station s; a station on a break belongs to the panel inboard of it. */
+/**
+ * Panel that holds station s, mm; a station on a break belongs to the panel inboard of it, one past the tip to the
+ * last panel.
+ * @throws RangeError when the surface has no panel
+ * @example panelAt(EXAMPLE_LINE, 100).end // → 500
+ */
 export function panelAt(line: SurfaceLine, s: number): PanelLine {
   const found = line.panels.find((panel) => s <= panel.end + EDGE) ?? line.panels.at(-1);
   if (!found) throw new RangeError('a surface has at least one panel');
   return found;
 }
 
-/** The station at s, mm from the root along the panels; inside `panel` if that is given. */
+/**
+ * The station at s, mm from the root along the panels; inside `panel` if that is given. Past the tip the chord is
+ * that of the tip.
+ * @throws RangeError when the surface has no panel
+ * @example stationAt(EXAMPLE_LINE, 100).chord // → 100
+ */
 export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panelAt(line, s)): Station {
   const known = panel.known.get(s);
   if (known) return known;
@@ -120,6 +141,7 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
 /**
  * Body coordinates of a point of the station's section: `x` mm behind the leading edge and `z` mm above the chord
  * line, square to the panel. A panel with dihedral leans its section inboard.
+ * @example pointOf(EXAMPLE_STATION, 25, 5) // → [25, 100, 5]
  */
 export function pointOf(station: Station, x: number, z: number): Vec3 {
   const { panel, s } = station;
@@ -131,12 +153,19 @@ export function pointOf(station: Station, x: number, z: number): Vec3 {
   ];
 }
 
-/** Value at s of a pair that holds at `from` and at `to`. @example pairAt([2, 4], 0, 100, 50) // → 3 */
+/**
+ * Value at s of a pair that holds at `from` and at `to`, stations in mm; the first value where the range has no
+ * length.
+ * @example pairAt([2, 4], 0, 100, 50) // → 3
+ */
 export function pairAt(pair: Pair, from: number, to: number, s: number): number {
   return to - from > EDGE ? pair[0] + ((pair[1] - pair[0]) * (s - from)) / (to - from) : pair[0];
 }
 
-/** Change per mm of such a pair. */
+/**
+ * Change per mm of s of such a pair; 0 where its range has no length.
+ * @example pairSlope([2, 4], 0, 100) // → 0.02
+ */
 export function pairSlope(pair: Pair, from: number, to: number): number {
   return to - from > EDGE ? (pair[1] - pair[0]) / (to - from) : 0;
 }
@@ -150,6 +179,7 @@ const GAUSS: readonly [node: number, weight: number][] = [
   [0.9530899229693319, 0.11846344252809454],
 ];
 
+/** One place at which an integral along the surface is sampled. */
 export interface Sample {
   station: Station;
   /** mm of s that the sample stands for */
@@ -157,8 +187,10 @@ export interface Sample {
 }
 
 /**
- * Samples for integrals over [from, to], split at panel breaks and at the further `breaks`, so that each piece is
- * smooth. The range is clipped to the surface.
+ * Samples for integrals over [from, to], mm, split at panel breaks and at the further `breaks`, so that each piece is
+ * smooth: ∫f ds = Σ f(station)·ds, exact for a polynomial up to the ninth degree in each piece. The range is clipped
+ * to the surface; breaks may come in any order, those outside are passed over.
+ * @example samplesOver(EXAMPLE_LINE, 0, 500, [200]).reduce((sum, { ds }) => sum + ds, 0) // → 500
  */
 export function samplesOver(
   line: SurfaceLine,

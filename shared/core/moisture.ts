@@ -1,7 +1,7 @@
 /**
  * Equilibrium moisture content of wood in air, as a fraction of ovendry mass: Hailwood–Horrobin equation, Wood
  * Handbook (FPL-GTR-190, 2010) eq. 4-5, constants for °C (W. T. Simpson, FPL-RN-0268, 1998). One curve serves all
- * species. Between 0 and 1 of relative humidity; null outside, where the equation says nothing.
+ * species. `relativeHumidity` is a fraction from 0 to below 1; null outside, where the equation says nothing.
  * @example equilibriumMoisture(21.1, 0.5)?.toFixed(3) // → '0.092'
  */
 export function equilibriumMoisture(temperatureC: number, relativeHumidity: number): number | null {
@@ -18,7 +18,8 @@ export function equilibriumMoisture(temperatureC: number, relativeHumidity: numb
 }
 
 /**
- * Mass of the same bare wood at another moisture content: m₂ = m₁(1 + x₂)/(1 + x₁), by definition of moisture.
+ * Mass of the same bare wood at another moisture content: m₂ = m₁(1 + x₂)/(1 + x₁), by definition of moisture as a
+ * fraction of ovendry mass. In the unit of `mass`.
  * @example massAtMoisture(110, 0.1, 0) // → 100
  */
 export function massAtMoisture(mass: number, moisture: number, other: number): number {

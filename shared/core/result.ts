@@ -86,15 +86,21 @@ export interface Speeds {
   reynolds: number | null;
 }
 
+/** The spar where a station cuts it. */
 export interface SparStation {
+  /** mm from the root */
   s: number;
+  /** bending moment, N·mm */
   moment: number;
+  /** MPa, in the outer fibre of the strip nearest to its strength */
   stress: number;
+  /** strength over stress */
   margin: number;
 }
 
 export interface Spar {
   stations: SparStation[];
+  /** station of the least margin, mm from the root; null where no strip carries */
   worst: number | null;
 }
 

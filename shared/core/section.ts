@@ -118,8 +118,8 @@ const alreadyRead = new Map<string, SectionPair>();
 const REMEMBERED = 64;
 
 /**
- * Both sections of a panel on the grid that they share, as functions of the chord in mm. Sections that are alike come
- * back as one and the same function.
+ * Both sections of a panel on the grid that they share, as functions of the chord in mm. Sections that are alike
+ * come back as one and the same function.
  * @example readPair({ flat: 3 }, { naca: '0012' }).root(100).upper[0] // → 0.015
  */
 export function readPair(rootSpec: SectionSpec, tipSpec: SectionSpec): SectionPair {

@@ -49,7 +49,12 @@ function measurePlate(plate: Plate, basis: Basis, notice: (notice: Notice) => vo
   return { pieces: plate.count, length: null, area, volume: area * plate.thickness, lump };
 }
 
-/** What a solid measures; `basis` as its material is sold. */
+/**
+ * What a solid measures, mm, mm², mm³, in body axes: a bar by its cross-section along its own length, a plate by its
+ * outline. `basis` says by what its material is sold; `notice` is told of a wall too thick for its tube and of an
+ * outline without area.
+ * @example measureSolid(EXAMPLE_PLAN.solids[0], 'volume', () => undefined).volume // → 10_000
+ */
 export function measureSolid(solid: Solid, basis: Basis, notice: (notice: Notice) => void): Measure {
   return solid.shape === 'bar' ? measureBar(solid, notice) : measurePlate(solid, basis, notice);
 }

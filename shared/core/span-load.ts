@@ -17,7 +17,10 @@ export interface SpanLoad {
   tip: { from: number; chord: number; length: number };
 }
 
-/** The half's planform as the load sees it; null for a wing that casts no shadow. */
+/**
+ * The half's planform as the load sees it; null for a wing that casts no shadow.
+ * @example spanLoadOf(EXAMPLE_WING, EXAMPLE_LINE).semiSpan // → 500
+ */
 export function spanLoadOf(surface: Surface, line: SurfaceLine): SpanLoad | null {
   let at = 0;
   const panels = line.panels.map((panel) => {
@@ -72,7 +75,8 @@ function chordMoment({ panels, tip }: SpanLoad, y: number): number {
 
 /**
  * Bending moment at `y` mm from the root, projected, for a force on the half, N: N·mm. Half of the load goes with
- * the chord, half with the ellipse.
+ * the chord, half with the ellipse. Never negative.
+ * @example bendingMoment(spanLoadOf(EXAMPLE_WING, EXAMPLE_LINE), 1, 0).toFixed(4) // → '231.1033'
  */
 export function bendingMoment(load: SpanLoad, force: number, y: number): number {
   const byChord = (force / load.area) * chordMoment(load, y);

@@ -7,20 +7,23 @@ import type { Spar, SparStation } from './result.ts';
 import { bendingMoment, spanLoadOf } from './span-load.ts';
 import { stationAt, type Station, type SurfaceLine } from './stations.ts';
 
-/** A spar strip where a station cuts it. Stiffness in MPa, lengths mm. */
+/** A spar strip where a station cuts it. Lengths mm. */
 export interface Flange {
+  /** mm² */
   area: number;
   /** of its middle above the chord line */
   z: number;
   height: number;
+  /** bending modulus, MPa */
   modulus: number;
-  /** MPa */
+  /** bending strength, MPa */
   strength: number;
 }
 
 /**
  * Composite bending stiffness of strips about their common axis (transformed section, stiffnesses as weights):
- * EI in N·mm² and the z of the axis; null where nothing carries.
+ * EI = ΣE·A·((z − z_axis)² + h²/12) in N·mm² and the z of the axis, mm; null where nothing carries.
+ * @example bendingStiffness([{ area: 60, z: 0, height: 6, modulus: 1000, strength: 25 }]) // → { stiffness: 180_000, axis: 0 }
  */
 export function bendingStiffness(flanges: readonly Flange[]): { stiffness: number; axis: number } | null {
   const weight = flanges.reduce((sum, f) => sum + f.modulus * f.area, 0);
@@ -34,8 +37,9 @@ export function bendingStiffness(flanges: readonly Flange[]): { stiffness: numbe
 }
 
 /**
- * The flange that is nearest to its strength under a moment (N·mm): its outer-fibre stress, MPa, and its margin,
- * strength over stress. Null where nothing carries.
+ * The flange that is nearest to its strength under a moment (N·mm): its outer-fibre stress M·E·e/EI, MPa, and its
+ * margin, strength over stress. Null where nothing carries, or where there is no moment to carry.
+ * @example worstFlange([{ area: 60, z: 0, height: 6, modulus: 1000, strength: 25 }], 600) // → { stress: 10, margin: 2.5 }
  */
 export function worstFlange(
   flanges: readonly Flange[],
@@ -52,6 +56,7 @@ export function worstFlange(
   }, null);
 }
 
+/** Places along the half span that are looked at, root and tip included. */
 const STATIONS = 21;
 
 function carries(strip: Strip, material: PlanMaterial | undefined): boolean {
@@ -78,10 +83,12 @@ function projected(line: SurfaceLine, s: number): number {
 }
 
 /**
- * Bending along the half span of the first wing: load by Schrenk for the model's mass less the wing's own, times
- * the load factor (1 where none is asked for). `moment` in N·mm, `stress` in MPa, `margin` = strength over stress;
+ * Bending along the half span of a wing: load by Schrenk for `carriedG`, the model's mass less the wing's own, g,
+ * times the plan's load factor (1 where none is asked for). Top and bottom strips carry as far as the plan knows
+ * modulus and strength of their material; without any, or without a load, there are no stations. `moment` in N·mm, `stress` in MPa, `margin` = strength over stress;
  * `worst` is the station, mm from the root, with the least margin. Strengths are averages by density: an estimate,
  * and no licence to launch hard.
+ * @example sparOf(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, 10).worst // → 0
  */
 export function sparOf(plan: Plan, wing: Surface, line: SurfaceLine, carriedG: number): Spar {
   const load = spanLoadOf(wing, line);

@@ -7,12 +7,17 @@ import { surfaceLine } from './stations.ts';
 export interface WingReference {
   /** mm², projected */
   area: number;
+  /** mean aerodynamic chord, mm */
   mac: number;
   /** leading edge of the MAC, mm aft of the datum */
   xLeMac: number;
 }
 
-/** Mean aerodynamic chord and area of a plan's wing, as the estimate takes them; null without a wing. */
+/**
+ * Mean aerodynamic chord and area of a plan's wing, as the estimate takes them; null without a wing, or where it
+ * casts no shadow.
+ * @example wingReference(EXAMPLE_PLAN) // → { area: 100_000, mac: 100, xLeMac: 0 }
+ */
 export function wingReference(plan: Pick<Plan, 'surfaces'>): WingReference | null {
   const lifts = liftsOf(
     plan.surfaces.map((surface) => {

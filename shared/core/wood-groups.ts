@@ -18,7 +18,7 @@ export interface TrialWood {
 const SPAR_WIDTH = 3;
 
 /**
- * Name of the group that a part is cut with.
+ * Name of the group that a part is cut with: its own group, or else one by its kind.
  * @example woodGroupKey({ kind: 'sheet', id: 'fin', name: 'Fin', group: 'Tail ', material: 'balsa', thickness: 3, cutout: 0 }) // → 'tail'
  */
 export function woodGroupKey(part: Part): string {
@@ -41,7 +41,10 @@ export function woodGroupKey(part: Part): string {
   }
 }
 
-/** Groups of wooden parts of all surfaces, in the order of the plan. */
+/**
+ * Groups of wooden parts of all surfaces, in the order of the plan.
+ * @example woodGroups(EXAMPLE_PLAN).map(({ key }) => key) // → ['ribs', 'spars', 'sheeting']
+ */
 export function woodGroups(plan: Plan): WoodGroup[] {
   const groups = new Map<string, WoodGroup>();
   for (const part of plan.surfaces.flatMap(({ parts }) => parts)) {
@@ -56,8 +59,10 @@ export function woodGroups(plan: Plan): WoodGroup[] {
 }
 
 /**
- * The plan with other woods for some groups. A wood whose key stands for another material in the plan goes in
- * under a free key; materials that nothing uses any more stay.
+ * The plan with other woods for some groups, by their keys; the plan given stays as it is. A wood whose key stands
+ * for another material in the plan goes in under a free key; materials that nothing uses any more stay. Parts that are
+ * not of wood keep their material, whatever their group.
+ * @example withWood(EXAMPLE_PLAN, { spars: { key: 'hard', material: { name: 'Hard', category: 'wood', density: 180, cv: 0.1 } } }).surfaces[0].parts[1].material // → 'hard'
  */
 export function withWood(plan: Plan, woods: Readonly<Record<string, TrialWood>>): Plan {
   const materials = { ...plan.materials };

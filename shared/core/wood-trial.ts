@@ -42,14 +42,21 @@ export interface TrialRun {
   results: TrialResult[];
 }
 
-/** Items that trim the model, and that a fair comparison leaves out. */
+/**
+ * True of items that trim the model, and that a fair comparison leaves out: those of the group `ballast`, in whatever
+ * case.
+ * @example isBallast({ group: 'Ballast' }) // → true
+ */
 export function isBallast(item: Pick<Item, 'group'>): boolean {
   return item.group.trim().toLowerCase() === 'ballast';
 }
 
 /**
  * Woods side by side at equal terms: each trial is estimated without the plan's ballast and trimmed by new ballast
- * at `arm`, mm aft of the datum, to the plan's wanted balance point, or to its own where none is wanted.
+ * at `arm`, mm aft of the datum, to the plan's wanted balance point, or to its own where none is wanted. A trial that
+ * cannot be trimmed there says why in `refused`.
+ * @throws RangeError when a part or solid names a material that the plan does not hold
+ * @example runTrials(EXAMPLE_PLAN, [{ name: 'As drawn', materials: {} }], { arm: -20 }).results[0].bare // → 9.256
  */
 export function runTrials(plan: Plan, trials: readonly Trial[], { arm }: { arm: number }): TrialRun {
   const reference = wingReference(plan);

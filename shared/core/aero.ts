@@ -1,5 +1,5 @@
 /**
- * Lift slope of a straight wing per radian, by its aspect ratio: H. B. Helmbold (1942), in the form
+ * Lift slope dC_L/dα of a straight wing per radian, by its aspect ratio: H. B. Helmbold (1942), in the form
  * a = 2π·AR/(2 + √(AR² + 4)); J. D. Anderson, Aircraft Performance and Design, eq. 2.18a. Sweep is left out.
  * @example liftSlope(8).toFixed(5) // → '4.90576'
  */
@@ -8,8 +8,8 @@ export function liftSlope(aspectRatio: number): number {
 }
 
 /**
- * Downwash slope dε/dα = 2a/(π·AR) far behind an elliptically loaded wing (R. C. Nelson, Flight Stability and
- * Automatic Control, ch. 2).
+ * Downwash slope dε/dα = 2a/(π·AR) far behind an elliptically loaded wing of that aspect ratio (R. C. Nelson, Flight
+ * Stability and Automatic Control, ch. 2); `slope` a per radian. A pure number.
  * @example downwashSlope(10).toFixed(5) // → '0.32792'
  */
 export function downwashSlope(aspectRatio: number, slope = liftSlope(aspectRatio)): number {

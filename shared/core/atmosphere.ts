@@ -5,6 +5,7 @@ const LAPSE = 0.0065;
 const GAS = 287.05307;
 const EXPONENT = 5.2558761;
 
+/** State of the air. */
 export interface Air {
   /** K */
   temperature: number;
@@ -17,7 +18,7 @@ export interface Air {
 }
 
 /**
- * Dynamic viscosity of air by Sutherland's law as in the US Standard Atmosphere 1976, Pa·s.
+ * Dynamic viscosity of air by Sutherland's law as in the US Standard Atmosphere 1976, Pa·s; temperature in K.
  * @example (viscosityOfAir(288.15) * 1e5).toFixed(5) // → '1.78938'
  */
 export function viscosityOfAir(temperatureK: number): number {
@@ -25,8 +26,8 @@ export function viscosityOfAir(temperatureK: number): number {
 }
 
 /**
- * Air at a pressure altitude (geopotential metres, below 11,000) and, where the day is not standard, at its
- * temperature in °C.
+ * Air of the US Standard Atmosphere 1976 at a pressure altitude (geopotential metres, below 11,000) and, where the
+ * day is not standard, at its temperature in °C.
  * @example airAt(0).density.toFixed(4) // → '1.2250'
  */
 export function airAt(pressureAltitudeM: number, temperatureC?: number): Air {
@@ -42,7 +43,8 @@ export function airAt(pressureAltitudeM: number, temperatureC?: number): Air {
 }
 
 /**
- * Reynolds number ρ·V·c/μ; `chord` in mm, speed m/s. Without a viscosity that of 15 °C is taken.
+ * Reynolds number ρ·V·c/μ; speed in m/s, `chord` in mm, density in kg/m³ (standard at sea level if not given),
+ * viscosity in Pa·s (that of 15 °C).
  * @example Math.round(reynoldsNumber(5, 100)) // → 34230
  */
 export function reynoldsNumber(

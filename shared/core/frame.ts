@@ -12,7 +12,7 @@ export type Vec3 = [x: number, y: number, z: number];
 /** Standard gravity, m/s² (exact; 3rd CGPM 1901, quoted in NIST SP 811). */
 export const GRAVITY = 9.80665;
 
-/** Radians of an angle in degrees. @example radians(180) // → 3.141592653589793 */
+/** Angle in radians of one in degrees. @example radians(180) // → 3.141592653589793 */
 export function radians(degrees: number): number {
   return (degrees * Math.PI) / 180;
 }

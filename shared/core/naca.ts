@@ -11,7 +11,11 @@ export interface FourDigits {
   thickness: number;
 }
 
-/** @example fourDigits('4409') // → { camber: 0.04, place: 0.4, thickness: 0.09 } */
+/**
+ * What the digits say: camber in hundredths of the chord, its place in tenths, thickness in hundredths. The plan's
+ * schema sees to it that there are four digits.
+ * @example fourDigits('4409') // → { camber: 0.04, place: 0.4, thickness: 0.09 }
+ */
 export function fourDigits(code: string): FourDigits {
   return {
     camber: Number(code[0]) / 100,
@@ -42,7 +46,7 @@ function contourPoint(digits: FourDigits, u: number, face: 1 | -1): { x: number;
 }
 
 /**
- * Ordinate z/c of one face on the vertical through x/c. On a cambered section that vertical meets the contour
+ * Ordinate z/c of one face (1 the upper, −1 the lower) on the vertical through x/c, 0 to 1. On a cambered section that vertical meets the contour
  * over another camber station, found by the secant rule in √x, which stays smooth at the nose. The hair's
  * breadth of nose in front of x = 0 (0.03 % of the chord on a 4412) has no ordinate: `nacaNoseArc` measures it.
  * @example nacaOrdinate('0012', 0.3, 1).toFixed(5) // → '0.06002'

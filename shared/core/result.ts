@@ -9,7 +9,9 @@ export interface Planform {
   span: number;
   /** span² / areaProjected; null for a surface that casts no shadow */
   aspectRatio: number | null;
+  /** mean aerodynamic chord */
   mac: number;
+  /** where its leading edge lies, mm aft of the datum, and how far out on the half */
   xLeMac: number;
   yMac: number;
 }
@@ -41,27 +43,35 @@ export interface Line {
   moment: number;
 }
 
+/** Moments of inertia about the body axes through the balance point, g·mm². */
 export interface Inertia {
   xx: number;
   yy: number;
   zz: number;
 }
 
+/** The whole model. */
 export interface Totals {
+  /** g */
   mass: number;
+  /** standard uncertainty of the mass, g */
   u: number;
-  /** null when nothing has a mass */
+  /** balance point; null when nothing has a mass */
   at: Vec3 | null;
+  /** parts of all wings, g */
   wingMass: number;
+  /** g, by the group of the lines */
   byGroup: Record<string, number>;
-  /** about axes through the balance point, g·mm² */
   inertia: Inertia | null;
 }
 
+/** Where the model balances. `null` where there is no mass, or no wing to tell it by. */
 export interface Balance {
   /** mm aft of the datum */
   x: number | null;
+  /** standard uncertainty of x, mm */
   u: number | null;
+  /** x in % of the wing's mean aerodynamic chord, and its standard uncertainty */
   percentMac: number | null;
   uPercentMac: number | null;
   /** mm aft of the datum; null where there is no tailplane */
@@ -70,6 +80,7 @@ export interface Balance {
   staticMargin: number | null;
 }
 
+/** Mass by area; `null` without the area. */
 export interface Loading {
   /** g/dm² of projected wing area */
   wing: number | null;
@@ -79,8 +90,9 @@ export interface Loading {
   classLoading: number | null;
 }
 
+/** Speeds of flight; `null` without mass or wing. */
 export interface Speeds {
-  /** m/s */
+  /** m/s, at the greatest lift coefficient */
   stall: number | null;
   /** on the MAC, at the stall speed */
   reynolds: number | null;
@@ -98,6 +110,7 @@ export interface SparStation {
   margin: number;
 }
 
+/** Bending of the spar along the half span. */
 export interface Spar {
   stations: SparStation[];
   /** station of the least margin, mm from the root; null where no strip carries */

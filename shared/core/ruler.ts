@@ -1,5 +1,6 @@
 /** Marks of a scale, and which of them carry a number. */
 export interface Ruler {
+  /** from one number to the next */
   step: number;
   /** numbered marks */
   numbered: number[];
@@ -8,8 +9,8 @@ export interface Ruler {
 }
 
 /**
- * Marks from `from` to `to` for a scale drawn `room` wide, numbers at least `gap` apart: steps of 1, 2 or 5 times
- * a power of ten.
+ * Marks from `from` to `to` (above it) for a scale drawn `room` wide, numbers at least `gap` apart in the units of
+ * the drawing: steps of 1, 2 or 5 times a power of ten.
  * @example rulerOf(-30, 120, 300, 60).numbered // → [0, 50, 100]
  */
 export function rulerOf(from: number, to: number, room: number, gap: number): Ruler {

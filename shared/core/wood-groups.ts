@@ -60,8 +60,8 @@ export function woodGroups(plan: Plan): WoodGroup[] {
 
 /**
  * The plan with other woods for some groups, by their keys; the plan given stays as it is. A wood whose key stands
- * for another material in the plan goes in under a free key; materials that nothing uses any more stay. Parts that are
- * not of wood keep their material, whatever their group.
+ * for another material in the plan goes in under a free key; materials that nothing uses any more stay. Parts that
+ * are not of wood keep their material, whatever their group.
  * @example withWood(EXAMPLE_PLAN, { spars: { key: 'hard', material: { name: 'Hard', category: 'wood', density: 180, cv: 0.1 } } }).surfaces[0].parts[1].material // → 'hard'
  */
 export function withWood(plan: Plan, woods: Readonly<Record<string, TrialWood>>): Plan {

@@ -43,8 +43,8 @@ export interface TrialRun {
 }
 
 /**
- * True of items that trim the model, and that a fair comparison leaves out: those of the group `ballast`, in whatever
- * case.
+ * True of items that trim the model, and that a fair comparison leaves out: those of the group `ballast`, in
+ * capitals or not.
  * @example isBallast({ group: 'Ballast' }) // → true
  */
 export function isBallast(item: Pick<Item, 'group'>): boolean {
@@ -53,8 +53,8 @@ export function isBallast(item: Pick<Item, 'group'>): boolean {
 
 /**
  * Woods side by side at equal terms: each trial is estimated without the plan's ballast and trimmed by new ballast
- * at `arm`, mm aft of the datum, to the plan's wanted balance point, or to its own where none is wanted. A trial that
- * cannot be trimmed there says why in `refused`.
+ * at `arm`, mm aft of the datum, to the plan's wanted balance point, or to its own where none is wanted. A trial
+ * that cannot be trimmed there says why in `refused`.
  * @throws RangeError when a part or solid names a material that the plan does not hold
  * @example runTrials(EXAMPLE_PLAN, [{ name: 'As drawn', materials: {} }], { arm: -20 }).results[0].bare // → 9.256
  */

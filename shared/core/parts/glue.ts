@@ -11,7 +11,8 @@ import type { Measure } from './measure.ts';
 
 /**
  * Area of all joints of one half, mm², each at its place: rib × strip, rib × skin, strip × skin over it, and the
- * tip block on the last section.
+ * tip block on the last section. What a glue weighs is its spread, g per m², times this.
+ * @example measureJoints(EXAMPLE_HALF).area // → 3208
  */
 export function measureJoints(half: Half): Measure {
   const lump = emptyLump();

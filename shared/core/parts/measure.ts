@@ -12,5 +12,5 @@ export interface Measure {
   lump: Lump;
 }
 
-/** What the material is sold by: kg/m³, g/m², or g per m² of joint. */
+/** What the material is known by: its density, kg/m³ (`volume`), or its areal mass, g/m² (`area`). */
 export type Basis = 'volume' | 'area';

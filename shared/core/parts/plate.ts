@@ -7,7 +7,8 @@ import type { Basis, Measure } from './measure.ts';
 
 /**
  * Half an ellipsoid on the last section: volume 2/3 · area · length · (1 − hollow), its centroid 3/8 of the length
- * beyond the last station, shrinking towards the section's centroid.
+ * beyond the last station, shrinking towards the section's centroid. mm, mm³.
+ * @example measureTipBlock(EXAMPLE_HALF, { kind: 'tipBlock', id: 'tip', name: 'Tip', material: 'balsa', length: 30, hollow: 0 }).volume // → 20_000
  */
 export function measureTipBlock(half: Half, part: TipBlock): Measure {
   const last = stationAt(half.line, half.line.length);
@@ -23,7 +24,11 @@ export function measureTipBlock(half: Half, part: TipBlock): Measure {
   return { pieces: 1, length: part.length, area: null, volume, lump };
 }
 
-/** A plate of the surface's whole planform, tip blocks' outline in: a sheet tail or wing. */
+/**
+ * A plate of the surface's whole planform, tip blocks' outline in: a sheet tail or wing. Area = planform · (1 −
+ * cutout), mm²; volume = area · thickness, mm³.
+ * @example measureSheet(EXAMPLE_HALF, { kind: 'sheet', id: 'plate', name: 'Plate', material: 'balsa', thickness: 3, cutout: 0 }, 'volume').volume // → 150_000
+ */
 export function measureSheet(half: Half, part: Sheet, basis: Basis): Measure {
   const lump = emptyLump();
   const left = (1 - part.cutout) * (basis === 'volume' ? part.thickness : 1);

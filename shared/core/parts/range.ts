@@ -1,6 +1,10 @@
 import type { Half } from '../half.ts';
 
-/** A part's range, in order and clipped to the surface; what had to be mended is told. */
+/**
+ * A part's range, mm, in order and clipped to the surface's outer end; what had to be mended is told
+ * (`reversed_range`, `station_past_tip`).
+ * @example clippedRange(EXAMPLE_HALF, { id: 'spar', from: 600, to: 400 }) // → [400, 500]
+ */
 export function clippedRange(
   half: Half,
   part: { id: string; from: number; to: number },

@@ -9,7 +9,8 @@ import type { Basis, Measure } from './measure.ts';
 /**
  * Net area of a rib with its first moments about nose and chord line, mm² and mm³: the section between nose and
  * tail strip, less skins and cap strips within that extent, less the notches of let-in strips. Lightening is not
- * taken off here.
+ * taken off here. Negative where these leave nothing.
+ * @example ribArea(EXAMPLE_HALF, EXAMPLE_STATION) // → { amount: 940, x: 48_500, z: -280 }
  */
 export function ribArea(half: Half, station: Station): Sums {
   const { section, chord } = station;
@@ -50,7 +51,11 @@ function notchedThrough(half: Half, station: Station): boolean {
   });
 }
 
-/** Ribs of one half. Volume = net area × share left by lightening × thickness, at each station. */
+/**
+ * Ribs of one half. Volume = net area × share left by lightening × thickness, at each station. A rib past the tip is
+ * told and left out, one that is notched through is told and counts as a piece.
+ * @example measureRibs(EXAMPLE_HALF, EXAMPLE_RIBS, 'volume').volume // → 11_280
+ */
 export function measureRibs(half: Half, part: Ribs, basis: Basis): Measure {
   const path = `${half.surface.key}/${part.id}`;
   const lump = emptyLump();
@@ -82,7 +87,10 @@ export function measureRibs(half: Half, part: Ribs, basis: Basis): Measure {
   return { pieces, length: null, area, volume: area * part.thickness, lump };
 }
 
-/** Height that a rib offers at x/c, mm, between the skins' undersides. */
+/**
+ * Height that a rib offers at x/c, mm, between the skins' undersides; never negative.
+ * @example ribHeight(EXAMPLE_HALF, EXAMPLE_STATION, 0.25) // → 9
+ */
 export function ribHeight(half: Half, station: Station, x: number): number {
   const top = ordinateAt(station.section, 'upper', x) * station.chord - skinOver(half, station, 'upper', x);
   const bottom =

@@ -10,7 +10,11 @@ import type { Basis, Measure } from './measure.ts';
 /** Extent along x of what lies between two x/c of a chord, as a mean square about its middle, mm². */
 const spreadOf = (start: number, end: number, chord: number) => ((end - start) * chord) ** 2 / 12;
 
-/** Sheeting: developed length × chord, integrated over s, × thickness. */
+/**
+ * Sheeting: developed length × chord, integrated over s, × thickness. A skin that runs past the trailing edge, or that
+ * the section has no room for, is told.
+ * @example measureSkin(EXAMPLE_HALF, EXAMPLE_SKIN, 'volume').volume // → 25_000
+ */
 export function measureSkin(half: Half, part: Skin, basis: Basis): Measure {
   const path = `${half.surface.key}/${part.id}`;
   const last = Math.max(part.start, part.end);
@@ -36,7 +40,11 @@ export function measureSkin(half: Half, part: Skin, basis: Basis): Measure {
   return { pieces: 1, length: null, area, volume: area * part.thickness, lump };
 }
 
-/** Cap strips over the ribs that lie in their range: developed length × width × thickness, each rib. */
+/**
+ * Cap strips over the ribs that lie in their range: developed length × width × thickness, each rib. None at all is
+ * told.
+ * @example measureCapStrips(EXAMPLE_HALF, EXAMPLE_CAPS, 'volume').length // → 300
+ */
 export function measureCapStrips(half: Half, part: CapStrips, basis: Basis): Measure {
   clippedRange(half, part);
   const lump = emptyLump();
@@ -60,7 +68,8 @@ export function measureCapStrips(half: Half, part: CapStrips, basis: Basis): Mea
 
 /**
  * Covering or finish: developed length of the whole section × chord, integrated; a tip block in reach takes
- * π/4 of what a prism of its length would, and the overlap is added.
+ * π/4 of what a prism of its length would, and the overlap is added. mm²; the lump too, whatever the material.
+ * @example measureCovering(EXAMPLE_HALF, { ...EXAMPLE_SKIN, kind: 'covering', seat: 'both', overlap: 0.05 }).area // → 105_000
  */
 export function measureCovering(half: Half, part: Covering): Measure {
   const [from, to] = clippedRange(half, part);

@@ -8,7 +8,8 @@ import { clippedRange } from './range.ts';
 import type { Basis, Measure } from './measure.ts';
 
 /**
- * Cross-section area of a strip, mm², and how far behind its centre line the centroid lies, in widths.
+ * Cross-section area of a strip, mm², and how far behind its centre line the centroid lies, in widths. Sizes in mm;
+ * a tube whose `wall` leaves no bore is full, a round one of two sizes is an ellipse.
  * @example stripProfile('triangle', 18, 4) // → { area: 36, shift: -0.16666666666666666 }
  */
 export function stripProfile(
@@ -31,7 +32,10 @@ export function stripProfile(
   }
 }
 
-/** How far the strip's centre line runs aft per mm of s: its skew in plan view. */
+/**
+ * How far the strip's centre line runs aft per mm of s: its skew in plan view.
+ * @example stripSkew({ ...EXAMPLE_SPAR, at: [0.25, 0.3] }, EXAMPLE_STATION) // → 0.01
+ */
 export function stripSkew(strip: Strip, station: Station): number {
   const widthSlope = pairSlope(strip.width, strip.from, strip.to);
   const { chordSlope, leadingEdgeSlope, chord, s } = station;
@@ -45,7 +49,11 @@ export function stripSkew(strip: Strip, station: Station): number {
   );
 }
 
-/** A spar, stringer or edge: its cross-section integrated along its own length, plan-view skew included. */
+/**
+ * A spar, stringer or edge: its cross-section integrated along its own length, plan-view skew included. A strip that
+ * leaves chord or section, or shares room with another, is told. Of a material known by area the broader side counts.
+ * @example measureStrip(EXAMPLE_HALF, EXAMPLE_SPAR, 'volume').volume // → 5000
+ */
 export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();

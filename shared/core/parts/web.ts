@@ -10,7 +10,8 @@ import type { Basis, Measure } from './measure.ts';
 
 /**
  * Height left for a shear web, mm, and the z of its middle above the chord line: the section there, less skins over
- * it, less the strips whose width holds it. Negative where these leave no room.
+ * it, less the strips whose width holds it. The height is negative where these leave no room.
+ * @example webRoom(EXAMPLE_HALF, EXAMPLE_WEB, EXAMPLE_STATION) // → { height: 7, middle: -1.5 }
  */
 export function webRoom(half: Half, web: Web, station: Station): { height: number; middle: number } {
   const x = pairAt(web.at, web.from, web.to, station.s);
@@ -28,7 +29,11 @@ export function webRoom(half: Half, web: Web, station: Station): { height: numbe
   return { height: top - bottom, middle: (top + bottom) / 2 };
 }
 
-/** A shear web, grain upright, in the bays between ribs: height integrated over s, less each rib's own room. */
+/**
+ * A shear web, grain upright, in the bays between ribs: height integrated over s, less rib thickness × height at each
+ * rib. Where there is no height for it, that is told.
+ * @example measureWeb(EXAMPLE_HALF, EXAMPLE_WEB, 'volume').area // → 3416
+ */
 export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
   const path = `${half.surface.key}/${part.id}`;
   const [from, to] = clippedRange(half, part);

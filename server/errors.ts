@@ -43,8 +43,10 @@ export class AppError extends Error {
 }
 
 /** Also for somebody else's row: that it exists is nobody's business. */
-export const notFound = (noun: 'glider' | 'sheet' | 'material') =>
-  new AppError('not_found', `That ${noun} does not exist.`);
+export const notFound = (noun: Noun) => new AppError('not_found', `That ${noun} does not exist.`);
+
+export type Noun =
+  'glider' | 'sheet' | 'material' | 'saved state' | 'photo' | 'member' | 'invitation' | 'session';
 
 export const nothingHere = () => new AppError('not_found', 'There is nothing at this address.');
 

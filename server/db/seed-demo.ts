@@ -5,6 +5,7 @@ import { estimatePlan } from '#server/estimating/estimate-plan.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { User } from '#server/models/user.ts';
+import { headlineOf } from '#server/services/figures.ts';
 import { insertGlider } from '#server/services/gliders.ts';
 import { insertSheet } from '#server/services/sheets.ts';
 import { database, inTransaction } from '#server/services/transaction.ts';
@@ -46,7 +47,7 @@ async function addGlider(
   const id = randomUUID();
   const plan = await readDemoPlan(file);
   const result = await estimatePlan(plan);
-  await insertGlider({ id, ownerId, plan, result, transaction });
+  await insertGlider({ id, ownerId, plan, headline: headlineOf(plan, result), transaction });
   await GliderMember.bulkCreate(
     members.map((member) => ({ ownerId, gliderId: id, userId: person(member.person).id, role: member.role })),
     { transaction },

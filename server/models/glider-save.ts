@@ -7,6 +7,7 @@ import {
   type NonAttribute,
   type Sequelize,
 } from 'sequelize';
+import type { SaveChanges } from '#shared/schemas/glider-save.ts';
 import type { PlanDto } from '#shared/schemas/plan.ts';
 import { figureColumns } from './figures.ts';
 import type { User } from './user.ts';
@@ -22,6 +23,10 @@ export class GliderSave extends Model<InferAttributes<GliderSave>, InferCreation
   declare wingLoading: number | null;
   declare savedBy: string;
   declare savedAt: CreationOptional<Date>;
+  /** null for the first save */
+  declare changes: CreationOptional<SaveChanges | null>;
+  /** the version that was brought back */
+  declare restoredFrom: CreationOptional<number | null>;
   declare author?: NonAttribute<User>;
 }
 
@@ -35,6 +40,8 @@ export function initGliderSave(sequelize: Sequelize): void {
       ...figureColumns(),
       savedBy: { type: DataTypes.UUID, allowNull: false },
       savedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+      changes: { type: DataTypes.JSONB, allowNull: true },
+      restoredFrom: { type: DataTypes.INTEGER, allowNull: true },
     },
     { sequelize, tableName: 'glider_saves' },
   );

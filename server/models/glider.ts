@@ -21,6 +21,8 @@ export class Glider extends Model<InferAttributes<Glider>, InferCreationAttribut
   declare mass: number;
   declare percentMac: number | null;
   declare wingLoading: number | null;
+  /** mm aft of the datum */
+  declare balance: CreationOptional<number | null>;
   declare outline: [number, number][];
   declare updatedBy: string;
   declare updatedAt: CreationOptional<Date>;
@@ -38,6 +40,7 @@ export function initGlider(sequelize: Sequelize): void {
       plan: { type: DataTypes.JSONB, allowNull: false },
       version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       ...figureColumns(),
+      balance: { type: DataTypes.DOUBLE, allowNull: true, field: 'balance_mm' },
       outline: { type: DataTypes.JSONB, allowNull: false },
       updatedBy: { type: DataTypes.UUID, allowNull: false },
       updatedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },

@@ -1,6 +1,7 @@
 import type { Sequelize } from 'sequelize';
 import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
 import { GliderMember, initGliderMember } from './glider-member.ts';
+import { initGliderSaveName } from './glider-save-name.ts';
 import { GliderSave, initGliderSave } from './glider-save.ts';
 import { Glider, initGlider } from './glider.ts';
 import { initIdempotencyKey } from './idempotency-key.ts';
@@ -19,6 +20,7 @@ export function initModels(sequelize: Sequelize): void {
   initGliderMember(sequelize);
   initGliderMaterial(sequelize);
   initGliderSave(sequelize);
+  initGliderSaveName(sequelize);
   initSheet(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { estimate, estimateInput } from '#shared/schemas/estimate.ts';
-import { gliderSaveList } from '#shared/schemas/glider-save.ts';
+import { gliderSave, gliderSaveList, gliderState, saveNameInput } from '#shared/schemas/glider-save.ts';
 import { glider, gliderInput, gliderList } from '#shared/schemas/glider.ts';
 import { material, materialInput, materialList, materialUses } from '#shared/schemas/material.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
@@ -18,7 +18,10 @@ const NAMES: Record<string, z.ZodType> = {
   GliderInput: gliderInput,
   Glider: glider,
   GliderList: gliderList,
+  GliderSave: gliderSave,
   GliderSaveList: gliderSaveList,
+  GliderState: gliderState,
+  SaveNameInput: saveNameInput,
   SheetInput: sheetInput,
   Sheet: sheet,
   SheetList: sheetList,

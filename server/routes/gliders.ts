@@ -1,10 +1,9 @@
-import { gliderSaveList } from '#shared/schemas/glider-save.ts';
 import { glider, gliderInput, gliderList } from '#shared/schemas/glider.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
 import { listGliders } from '#server/services/glider-lists.ts';
-import { listGliderSaves } from '#server/services/glider-log.ts';
-import { createGlider, deleteGlider, getGlider, saveGlider } from '#server/services/gliders.ts';
-import { gliderQuery, idParams, pageQuery } from './inputs.ts';
+import { saveGlider } from '#server/services/glider-saving.ts';
+import { createGlider, deleteGlider, getGlider } from '#server/services/gliders.ts';
+import { gliderQuery, idParams } from './inputs.ts';
 
 const tag = 'Gliders';
 
@@ -57,7 +56,7 @@ export const gliderEndpoints: Endpoint[] = [
     body: gliderInput,
     answer: { status: 200, schema: glider, etag: true },
     handle: async ({ actor, params, ifMatch, body }) => {
-      const saved = await saveGlider(actor, params.id, ifMatch, body.plan);
+      const saved = await saveGlider(actor, params.id, { version: ifMatch, plan: body.plan });
       return { body: saved, version: saved.version };
     },
   }),
@@ -73,16 +72,5 @@ export const gliderEndpoints: Endpoint[] = [
       await deleteGlider(actor, params.id);
       return {};
     },
-  }),
-  endpoint({
-    method: 'get',
-    path: '/gliders/:id/saves',
-    tag,
-    summary: 'Who saved a glider and when, newest first',
-    access: 'signed-in',
-    params: idParams,
-    query: pageQuery,
-    answer: { status: 200, schema: gliderSaveList },
-    handle: async ({ actor, params, query }) => ({ body: await listGliderSaves(actor, params.id, query) }),
   }),
 ];

@@ -5,6 +5,14 @@ import { LIMITS } from '#shared/schemas/limits.ts';
 /** Path and query of the endpoints. */
 export const idParams = z.object({ id: z.uuid() });
 
+export const versionParams = z.object({
+  id: z.uuid(),
+  version: z
+    .string()
+    .regex(/^\d{1,9}$/, 'Must be a version number.')
+    .transform(Number),
+});
+
 export const pageQuery = z.strictObject({
   /** `nextCursor` of the page before */
   cursor: z.string().max(400).optional(),

@@ -1,7 +1,7 @@
 import { Transaction } from 'sequelize';
 import type { GliderRole } from '#shared/schemas/glider.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
-import { notFound } from '#server/errors.ts';
+import { notFound, type Noun } from '#server/errors.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
@@ -14,7 +14,7 @@ import type { GliderAction } from '#server/policies/table.ts';
 export async function gliderRoleOf(
   actor: UserDto,
   gliderId: string,
-  noun: 'glider' | 'sheet' = 'glider',
+  noun: Noun = 'glider',
   transaction?: Transaction,
 ): Promise<GliderRole> {
   const member = await GliderMember.findOne({

@@ -1,23 +1,19 @@
 import type { Transaction } from 'sequelize';
-import type { Estimate } from '#shared/core/result.ts';
 import type { GliderDto } from '#shared/schemas/glider.ts';
 import type { PlanDto } from '#shared/schemas/plan.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
-import { AppError, notFound } from '#server/errors.ts';
+import { notFound } from '#server/errors.ts';
 import { estimatePlan } from '#server/estimating/estimate-plan.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { GliderSave } from '#server/models/glider-save.ts';
 import { Glider } from '#server/models/glider.ts';
-import { User } from '#server/models/user.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
 import { authorizeSite } from '#server/policies/site.ts';
 import { presentGlider } from '#server/presenters/glider.ts';
-import { canonicalJson } from './canonical-json.ts';
-import { figuresOf } from './figures.ts';
-import { allowOnGlider, gliderRoleOf, lockGlider } from './glider-access.ts';
+import { headlineOf, type Headline } from './figures.ts';
+import { gliderRoleOf, lockGlider } from './glider-access.ts';
 import { linkMaterials } from './glider-materials.ts';
 import { makeOnce } from './idempotency.ts';
-import { planOutline } from '#shared/drawing/outline.ts';
 import { inTransaction } from './transaction.ts';
 
 export async function getGlider(actor: UserDto, id: string): Promise<GliderDto> {
@@ -35,10 +31,10 @@ export async function createGlider(
   key: string | undefined,
 ): Promise<GliderDto> {
   authorizeSite(actor, 'addGlider');
-  const result = await estimatePlan(plan);
+  const headline = headlineOf(plan, await estimatePlan(plan));
   const id = await inTransaction((transaction) =>
     makeOnce({ userId: actor.id, key, purpose: 'glider', transaction }, (newId) =>
-      insertGlider({ id: newId, ownerId: actor.id, plan, result, transaction }),
+      insertGlider({ id: newId, ownerId: actor.id, plan, headline, transaction }),
     ),
   );
   return getGlider(actor, id);
@@ -48,13 +44,13 @@ interface NewGlider {
   id: string;
   ownerId: string;
   plan: PlanDto;
-  result: Estimate;
+  headline: Headline;
   transaction: Transaction;
 }
 
 /** A glider with its owner, its first save and its materials. */
-export async function insertGlider({ id, ownerId, plan, result, transaction }: NewGlider): Promise<void> {
-  const figures = figuresOf(result);
+export async function insertGlider({ id, ownerId, plan, headline, transaction }: NewGlider): Promise<void> {
+  const { mass, percentMac, wingLoading } = headline;
   const savedAt = new Date();
   await Glider.create(
     {
@@ -62,8 +58,7 @@ export async function insertGlider({ id, ownerId, plan, result, transaction }: N
       ownerId,
       name: plan.name,
       plan,
-      ...figures,
-      outline: planOutline(plan),
+      ...headline,
       updatedBy: ownerId,
       updatedAt: savedAt,
     },
@@ -71,63 +66,10 @@ export async function insertGlider({ id, ownerId, plan, result, transaction }: N
   );
   await GliderMember.create({ ownerId, gliderId: id, userId: ownerId, role: 'owner' }, { transaction });
   await GliderSave.create(
-    { ownerId, gliderId: id, version: 1, plan, ...figures, savedBy: ownerId, savedAt },
+    { ownerId, gliderId: id, version: 1, plan, mass, percentMac, wingLoading, savedBy: ownerId, savedAt },
     { transaction },
   );
   await linkMaterials({ glider: { id, ownerId }, plan, actorId: ownerId, transaction });
-}
-
-/**
- * Saves a plan made from `version`.
- * @throws AppError `stale_version` with the current glider when somebody saved in between
- */
-export async function saveGlider(
-  actor: UserDto,
-  id: string,
-  version: number,
-  plan: PlanDto,
-): Promise<GliderDto> {
-  await allowOnGlider(actor, id, 'edit');
-  const figures = figuresOf(await estimatePlan(plan));
-  return inTransaction(async (transaction) => {
-    const { glider, role } = await lockGlider(actor, id, 'edit', transaction);
-    if (glider.version !== version) {
-      const editor = await User.findByPk(glider.updatedBy, { transaction, rejectOnEmpty: true });
-      const current = presentGlider(glider, role, editor.name);
-      // The answer to the save that made this state may have been lost: what was asked for is there (RFC 9110, 13.1.1).
-      if (canonicalJson(plan) === canonicalJson(glider.plan)) return current;
-      throw new AppError('stale_version', `${editor.name} has saved this glider in the meantime.`, {
-        members: { current },
-      });
-    }
-    const updatedAt = new Date();
-    await glider.update(
-      {
-        name: plan.name,
-        plan,
-        version: version + 1,
-        ...figures,
-        outline: planOutline(plan),
-        updatedBy: actor.id,
-        updatedAt,
-      },
-      { transaction },
-    );
-    await GliderSave.create(
-      {
-        ownerId: glider.ownerId,
-        gliderId: id,
-        version: version + 1,
-        plan,
-        ...figures,
-        savedBy: actor.id,
-        savedAt: updatedAt,
-      },
-      { transaction },
-    );
-    await linkMaterials({ glider, plan, actorId: actor.id, transaction });
-    return presentGlider(glider, role, actor.name);
-  });
 }
 
 /** Deletes a glider with everything in it, its sheets and its log included. */

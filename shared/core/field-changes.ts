@@ -20,27 +20,21 @@ export interface PlanChange {
 
 export type ChangeUnit = 'mm' | 'g' | 'deg' | 'kg/m3' | 'g/m2' | 'GPa' | 'MPa' | 'one' | 'percent';
 
-const FIELDS: Record<ChangeUnit, readonly string[]> = {
-  mm: [
-    ...['span', 'rootChord', 'tipChord', 'sweep', 'apex', 'thickness', 'length', 'width', 'height', 'wall'],
-    ...['from', 'to', 'stations', 'at', 'y'],
-  ],
-  g: ['mass', 'u'],
-  deg: ['dihedral'],
-  'kg/m3': ['density', 'airDensity'],
-  'g/m2': ['areal', 'spread'],
-  GPa: ['modulus'],
-  MPa: ['strength'],
-  one: [
-    ...['lightening', 'hollow', 'cutout', 'share', 'overlap', 'start', 'end', 'cv', 'moistureAtDensity'],
-    ...['clMax', 'loadFactor'],
-  ],
-  percent: ['percentMac', 'tolerance'],
+const FIELDS: Record<ChangeUnit, string> = {
+  mm: 'span rootChord tipChord sweep apex thickness length width height wall from to stations at y',
+  g: 'mass u',
+  deg: 'dihedral',
+  'kg/m3': 'density airDensity',
+  'g/m2': 'areal spread',
+  GPa: 'modulus',
+  MPa: 'strength',
+  one: 'lightening hollow cutout share overlap start end cv moistureAtDensity clMax loadFactor',
+  percent: 'percentMac tolerance',
 };
 
 const UNIT_OF = new Map(
   (Object.keys(FIELDS) as ChangeUnit[]).flatMap((unit) =>
-    FIELDS[unit].map((field) => [field, unit] as const),
+    FIELDS[unit].split(' ').map((field) => [field, unit] as const),
   ),
 );
 

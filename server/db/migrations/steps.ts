@@ -3,7 +3,8 @@ import { materials } from './20261201-2-materials.ts';
 import { gliders } from './20261201-3-gliders.ts';
 import { sheets } from './20261201-4-sheets.ts';
 import { bench } from './20261201-5-bench.ts';
+import { log } from './20261201-6-log.ts';
 import type { Migration } from './migration.ts';
 
 /** Every step of the database, oldest first. Steps are added at the end and never changed. */
-export const STEPS: readonly Migration[] = [people, materials, gliders, sheets, bench];
+export const STEPS: readonly Migration[] = [people, materials, gliders, sheets, bench, log];

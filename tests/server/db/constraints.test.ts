@@ -144,7 +144,7 @@ describe('a sheet and a save in the database', () => {
       ]) {
         expect((await refusal(run(statement, of))).sqlState).toBe(RESTRICTED);
       }
-      expect((await refusal(run(`TRUNCATE ${table}`))).sqlState).toBe(RESTRICTED);
+      expect((await refusal(run(`TRUNCATE ${table} CASCADE`))).sqlState).toBe(RESTRICTED);
       const [rows] = await run(`SELECT mass_g FROM ${table} WHERE glider_id = ?`, of)();
       expect(rows).toEqual([{ mass_g: glider.mass }]);
     },

@@ -35,7 +35,7 @@ describe('GET /api/openapi.json', () => {
       Object.keys(methods).map((method) => `${method} ${path}`),
     );
     expect(described.toSorted()).toEqual(
-      ENDPOINTS.map(({ method, path }) => `${method} ${path.replace(':id', '{id}')}`).toSorted(),
+      ENDPOINTS.map(({ method, path }) => `${method} ${path.replace(/:(\w+)/g, '{$1}')}`).toSorted(),
     );
     const save = paths['/gliders/{id}']?.['put'];
     expect(Object.keys(save?.responses ?? {})).toEqual([

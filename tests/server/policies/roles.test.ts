@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
 import { gliderRole, type GliderRole } from '#shared/schemas/glider.ts';
+import type { Endpoint } from '#server/http/endpoint.ts';
 import type { Material } from '#server/models/material.ts';
 import {
   POLICY,
@@ -12,8 +13,9 @@ import { ENDPOINTS } from '#server/routes/endpoints.ts';
 import { useApp } from '../support/app.ts';
 import { makePerson, type Person } from '../support/people.ts';
 import { expectProblem } from '../support/problems.ts';
-import { addMember, makeGlider, makeMaterial, MATERIAL, smallPlan } from '../support/rows.ts';
-import { makeSheet } from '../support/sheets.ts';
+import { nameOf, send } from '../support/requests.ts';
+import { addMember, makeMaterial, MATERIAL } from '../support/rows.ts';
+import { makeWorld } from '../support/world.ts';
 
 const app = useApp();
 
@@ -22,6 +24,9 @@ const GLIDER_ROUTES: Record<string, { action: GliderAction; allowed: GliderRole[
   'get /gliders/:id': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'put /gliders/:id': { action: 'edit', allowed: ['owner', 'builder'] },
   'delete /gliders/:id': { action: 'delete', allowed: ['owner'] },
+  'get /gliders/:id/saves/:version': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
+  'post /gliders/:id/saves/:version/restore': { action: 'edit', allowed: ['owner', 'builder'] },
+  'put /gliders/:id/saves/:version/name': { action: 'nameSave', allowed: ['owner', 'builder'] },
   'get /gliders/:id/saves': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'get /gliders/:id/sheets': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'post /gliders/:id/sheets': { action: 'saveSheet', allowed: ['owner', 'builder', 'pilot'] },
@@ -37,15 +42,10 @@ const MATERIAL_ROUTES: Record<string, { action: MaterialAction; allowed: Materia
   'delete /materials/:id': { action: 'delete', allowed: ['admin', 'keeper'] },
 };
 
-const nameOf = ({ method, path }: (typeof ENDPOINTS)[number]) => `${method} ${path}`;
-const endpointOf = (name: string) => ENDPOINTS.find((endpoint) => nameOf(endpoint) === name);
-
-function call(agent: Person['agent'], name: string, id: string, body: object) {
-  const endpoint = endpointOf(name);
+function endpointOf(name: string): Endpoint {
+  const endpoint = ENDPOINTS.find((candidate) => nameOf(candidate) === name);
   if (!endpoint) throw new Error(`There is no ${name}.`);
-  const request = agent[endpoint.method](`/api${endpoint.path.replace(':id', id)}`);
-  if (endpoint.ifMatch) request.set('If-Match', '"1"');
-  return endpoint.schemas.body ? request.send(body) : request;
+  return endpoint;
 }
 
 describe('roles on a glider', () => {
@@ -54,40 +54,33 @@ describe('roles on a glider', () => {
   );
 
   it.each(cases)('%s: %s goes as the table says', async (role, route) => {
-    const owner = await makePerson(app);
-    const glider = await makeGlider({ owner: owner.user });
-    const sheet = await makeSheet(glider, owner.user);
+    const { owner, glider, paramsOf } = await makeWorld(app);
     const person = role === 'owner' ? owner : await makePerson(app);
     if (role !== 'owner') await addMember(glider, person.user, role);
 
-    const id = route.includes('/sheets/:id') ? sheet.id : glider.id;
-    const body = route.startsWith('post') ? { note: '' } : { plan: smallPlan() };
-    const res = await call(person.agent, route, id, body);
+    const endpoint = endpointOf(route);
+    const res = await send(person.agent, endpoint, paramsOf(endpoint));
 
     if (GLIDER_ROUTES[route]?.allowed.includes(role)) expect(res.ok).toBe(true);
     else expectProblem(res, 'forbidden');
   });
 
   it.each(gliderRole.options)('tell a %s beforehand what will be allowed', async (role) => {
-    const owner = await makePerson(app);
-    const glider = await makeGlider({ owner: owner.user });
+    const { owner, glider } = await makeWorld(app);
     const person = role === 'owner' ? owner : await makePerson(app);
     if (role !== 'owner') await addMember(glider, person.user, role);
     const { can } = (await person.agent.get(`/api/gliders/${glider.id}`).expect(200)).body;
-    const may = (route: string) => GLIDER_ROUTES[route]?.allowed.includes(role);
-    expect(can).toMatchObject({
-      edit: may('put /gliders/:id'),
-      saveSheet: may('post /gliders/:id/sheets'),
-      delete: may('delete /gliders/:id'),
-    });
+    const actions = Object.values(GLIDER_ROUTES);
+    for (const { action, allowed } of actions.filter((route) => route.action !== 'read')) {
+      expect([action, can[action]]).toEqual([action, allowed.includes(role)]);
+    }
   });
 
   it('give a site admin no way into somebody else’s glider', async () => {
     const admin = await makePerson(app, { role: 'admin' });
-    const glider = await makeGlider();
-    for (const route of Object.keys(GLIDER_ROUTES).filter((name) => !name.includes('/sheets/:id'))) {
-      const body = route.startsWith('post') ? { note: '' } : { plan: smallPlan() };
-      expectProblem(await call(admin.agent, route, glider.id, body), 'not_found');
+    const { paramsOf } = await makeWorld(app);
+    for (const endpoint of Object.keys(GLIDER_ROUTES).map(endpointOf)) {
+      expectProblem(await send(admin.agent, endpoint, paramsOf(endpoint)), 'not_found');
     }
   });
 });
@@ -106,7 +99,8 @@ describe('standing to a material', () => {
 
   it.each(cases)('%s: %s goes as the table says', async (standing, route) => {
     const { agent, row } = await caseOf(standing);
-    const res = await call(agent, route, row.id, { ...MATERIAL, shared: row.ownerId === null });
+    const body = { ...MATERIAL, shared: row.ownerId === null };
+    const res = await send(agent, endpointOf(route), { id: row.id }, body);
     if (MATERIAL_ROUTES[route]?.allowed.includes(standing)) expect(res.ok).toBe(true);
     else expectProblem(res, standing === 'visitor' ? 'signed_out' : 'forbidden');
   });

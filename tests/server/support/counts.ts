@@ -8,6 +8,7 @@ const TABLES = [
   'glider_members',
   'glider_materials',
   'glider_saves',
+  'glider_save_names',
   'sheets',
   'idempotency_keys',
 ];

@@ -7,6 +7,7 @@ import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { Material } from '#server/models/material.ts';
 import type { User } from '#server/models/user.ts';
+import { headlineOf } from '#server/services/figures.ts';
 import { insertGlider } from '#server/services/gliders.ts';
 import { inTransaction } from '#server/services/transaction.ts';
 import { planOf, wingOf } from '#tests/support/plans.ts';
@@ -57,8 +58,8 @@ export function smallPlan(changes: Partial<PlanDto> = {}): PlanDto {
 export async function makeGlider({ owner, plan = smallPlan() }: { owner?: User; plan?: PlanDto } = {}) {
   const ownerId = (owner ?? (await makeUser())).id;
   const id = randomUUID();
-  const result = await estimatePlan(plan);
-  await inTransaction((transaction) => insertGlider({ id, ownerId, plan, result, transaction }));
+  const headline = headlineOf(plan, await estimatePlan(plan));
+  await inTransaction((transaction) => insertGlider({ id, ownerId, plan, headline, transaction }));
   return Glider.findByPk(id, { rejectOnEmpty: true });
 }
 

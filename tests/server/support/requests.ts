@@ -1,0 +1,52 @@
+import type { Endpoint } from '#server/http/endpoint.ts';
+import type { Person } from './people.ts';
+import { MATERIAL, smallPlan } from './rows.ts';
+
+export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
+
+/** A body that each endpoint takes, by the endpoint's name. */
+const BODIES: Record<string, () => object> = {
+  'post /estimates': () => ({ plan: smallPlan() }),
+  'post /gliders': () => ({ plan: smallPlan() }),
+  'put /gliders/:id': () => ({ plan: smallPlan() }),
+  'put /gliders/:id/saves/:version/name': () => ({ name: 'Before covering' }),
+  'post /gliders/:id/sheets': () => ({ note: '' }),
+  'post /materials': () => MATERIAL,
+  'put /materials/:id': () => MATERIAL,
+  'post /users': () => ({
+    name: 'Ada Quill',
+    email: 'quill@larkmoor.example',
+    password: 'nine lime laminations',
+  }),
+  'post /session': () => ({ email: 'quill@larkmoor.example', password: 'nine lime laminations' }),
+};
+
+export function goodBody(endpoint: Endpoint): object {
+  const body = BODIES[nameOf(endpoint)];
+  if (!body) throw new Error(`tests/server/support/requests.ts has no body for ${nameOf(endpoint)}.`);
+  return body();
+}
+
+/** Values of the path's parameters; what is not given stands for nobody's row. */
+export type Params = Record<string, string>;
+
+export function pathOf(endpoint: Pick<Endpoint, 'path'>, params: Params): string {
+  return `/api${endpoint.path.replace(/:(\w+)/g, (_, name: string) => params[name] ?? '1')}`;
+}
+
+/** A request without its body, with the version that it needs. */
+export function call(agent: Person['agent'], endpoint: Endpoint, params: Params) {
+  const request = agent[endpoint.method](pathOf(endpoint, params));
+  return endpoint.ifMatch ? request.set('If-Match', '"1"') : request;
+}
+
+/** A whole request that is right in all but who asks for what. */
+export function send(
+  agent: Person['agent'],
+  endpoint: Endpoint,
+  params: Params,
+  body: object = endpoint.schemas.body ? goodBody(endpoint) : {},
+) {
+  const request = call(agent, endpoint, params);
+  return endpoint.schemas.body ? request.send(body) : request;
+}

@@ -1,6 +1,7 @@
 import type { Notice } from '#shared/core/notices.ts';
 import type { Plan } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { formatNumber } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
 /** A notice in words: red where something lies outside its limits or cannot be built so, plain where it is a hint. */
 export interface NoticeWords {
@@ -10,11 +11,10 @@ export interface NoticeWords {
   line: string | null;
 }
 
-const mm = (value: number) => formatQuantity(value, 'length', { fine: Math.abs(value) < 1 });
-const at = (station: number) => (station < 0.05 ? 'at the root' : `at ${mm(station)} from the root`);
-
 /** What the calculator has to say of a plan, each code in one or two plain sentences. */
-export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
+export function noticeWords(notice: Notice, plan: Plan, units: Units): NoticeWords {
+  const mm = (value: number) => units.format(value, 'length', { fine: Math.abs(value) < 1 });
+  const at = (station: number) => (station < 0.05 ? 'at the root' : `at ${mm(station)} from the root`);
   const line = lineNamed(plan, notice.path);
   const name = line ?? `“${notice.path}”`;
   const words = (tone: NoticeWords['tone'], text: string): NoticeWords => ({
@@ -57,7 +57,7 @@ export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
     case 'skin_past_trailing_edge':
       return words(
         'red',
-        `${name} would reach ${formatQuantity(notice.end, 'share')} of the chord, past the trailing edge.`,
+        `${name} would reach ${units.format(notice.end, 'share')} of the chord, past the trailing edge.`,
       );
     case 'skin_thicker_than_section':
       return words('red', `${name} is thicker than the section has room for ${at(notice.station)}.`);
@@ -70,7 +70,7 @@ export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
     case 'section_self_crossing':
       return words(
         'red',
-        `The ${notice.end} section of panel ${notice.panel + 1} of ${surfaceName(notice.path)} crosses itself at ${formatQuantity(notice.at, 'share')} of the chord.`,
+        `The ${notice.end} section of panel ${notice.panel + 1} of ${surfaceName(notice.path)} crosses itself at ${units.format(notice.at, 'share')} of the chord.`,
       );
     case 'chord_step':
       return words(
@@ -92,7 +92,7 @@ export function noticeWords(notice: Notice, plan: Plan): NoticeWords {
     case 'reynolds_low':
       return words(
         'plain',
-        `At stall speed the Reynolds number is about ${formatQuantity(notice.reynolds, 'reynolds')}: a lift coefficient of ${formatNumber(notice.clMax, 2)} is then more than light sections usually give.`,
+        `At stall speed the Reynolds number is about ${units.format(notice.reynolds, 'reynolds')}: a lift coefficient of ${formatNumber(notice.clMax, 2)} is then more than light sections usually give.`,
       );
   }
 }

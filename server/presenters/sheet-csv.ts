@@ -1,29 +1,35 @@
 import { printedSheet, type PrintedFigures } from '#shared/core/printed-sheet.ts';
+import { printingOf } from '#shared/format/printing.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { SheetDto } from '#shared/schemas/sheet.ts';
 import { csvTable, type Cell } from './csv.ts';
 
-const HEAD = [
-  'Line',
-  'Name',
-  'Group',
-  'Material',
-  'Pieces',
-  'Mass g',
-  'Uncertainty g',
-  'Arm mm',
-  'Moment g mm',
-  'Share %',
-];
+function headIn(units: Units): string[] {
+  // Spreadsheets of every age read a plain space.
+  const moment = units.label('moment').replace('·', ' ');
+  return [
+    'Line',
+    'Name',
+    'Group',
+    'Material',
+    'Pieces',
+    `Mass ${units.label('mass')}`,
+    `Uncertainty ${units.label('mass')}`,
+    `Arm ${units.label('length')}`,
+    `Moment ${moment}`,
+    'Share %',
+  ];
+}
 
 const text = (value: string): Cell => ({ text: value });
 const number = (value: string): Cell => ({ number: value });
 
 /**
- * A balance sheet as a table, with the figures that are printed on screen and paper: one row a part, and a last row
+ * A balance sheet as a table, with the figures that the reader sees on screen and paper: one row a part, and a last row
  * with what the columns add up to.
  */
-export function sheetCsv({ plan, result }: Pick<SheetDto, 'plan' | 'result'>): string {
-  const { groups, total } = printedSheet(result);
+export function sheetCsv({ plan, result }: Pick<SheetDto, 'plan' | 'result'>, units: Units): string {
+  const { groups, total } = printedSheet(result, printingOf(units));
   const pieces = new Map(result.lines.map((line) => [line.id, line.pieces]));
   const materialName = (key: string) => plan.materials[key]?.name ?? key;
   const rows = groups.flatMap((group) =>
@@ -36,7 +42,11 @@ export function sheetCsv({ plan, result }: Pick<SheetDto, 'plan' | 'result'>): s
       ...figures(row),
     ]),
   );
-  return csvTable([HEAD.map(text), ...rows, [text('Total'), null, null, null, null, ...figures(total)]]);
+  return csvTable([
+    headIn(units).map(text),
+    ...rows,
+    [text('Total'), null, null, null, null, ...figures(total)],
+  ]);
 }
 
 function figures({ mass, u, arm, moment, share }: PrintedFigures): Cell[] {

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
 import { sheetCsv, sheetFileName } from '#server/presenters/sheet-csv.ts';
@@ -54,7 +55,7 @@ export const sheetEndpoints: Endpoint[] = [
     answer: { status: 200, schema: z.string(), download: 'text/csv' },
     handle: async ({ actor, params }) => {
       const found = await getSheet(actor, params.id);
-      return { body: sheetCsv(found), fileName: sheetFileName(found, 'csv') };
+      return { body: sheetCsv(found, USUAL_UNITS), fileName: sheetFileName(found, 'csv') };
     },
   }),
   endpoint({

@@ -6,12 +6,12 @@ import { sheetGroups } from './sheet-groups.ts';
 
 /**
  * Figures as printed: a decimal point, a plain minus, no thousands marks, a fixed count of decimals per column
- * (`digits`). Masses g, arms mm aft of the datum, moments g·mm, shares % of the mass. `arm` is null where nothing
- * has a mass.
+ * (`digits`). Masses, arms aft of the datum and moments in the units of the printing, shares % of the mass. `arm` is
+ * null where nothing has a mass.
  */
 export interface PrintedFigures {
   mass: string;
-  /** standard uncertainty of the mass, g */
+  /** standard uncertainty of the mass */
   u: string;
   arm: string | null;
   moment: string;
@@ -39,10 +39,26 @@ export interface PrintedSheet {
   digits: Record<Column | 'u' | 'arm', number>;
 }
 
+/** The units that a sheet is printed in: g, mm and g·mm in one of each, and the decimals of a model of some weight. */
+export interface Printing {
+  mass: number;
+  arm: number;
+  moment: number;
+  digits: { mass: number; arm: number; moment: number };
+}
+
+/** Grams, millimetres and gram millimetres. */
+export const METRIC_PRINTING: Printing = {
+  mass: 1,
+  arm: 1,
+  moment: 1,
+  digits: { mass: 1, arm: 1, moment: 0 },
+};
+
 type Column = 'mass' | 'moment' | 'share';
 type Printed = Record<Column, Decimal>;
 
-/** Below this mass, g, a sheet prints hundredths of a gram. */
+/** Below this mass, g, a sheet prints masses and moments with one more decimal. */
 const LIGHT = 20;
 
 /**
@@ -51,12 +67,22 @@ const LIGHT = 20;
  * unit of its last digit from the exact one. Uncertainties add in quadrature, so that column is rounded alone, and
  * never down to nothing; arms are exact arms, rounded.
  */
-export function printedSheet(estimate: Pick<Estimate, 'lines'>): PrintedSheet {
-  const { lines } = estimate;
+export function printedSheet(
+  estimate: Pick<Estimate, 'lines'>,
+  printing: Printing = METRIC_PRINTING,
+): PrintedSheet {
+  const lines = estimate.lines.map((line) => inUnits(line, printing));
   const mass = exactSum(lines, 'mass');
   const moment = exactSum(lines, 'moment');
-  const fine = mass.lessThan(LIGHT) ? 2 : 1;
-  const digits = { mass: fine, u: fine, arm: 1, moment: fine - 1, share: 1 };
+  const more = mass.times(printing.mass).lessThan(LIGHT) ? 1 : 0;
+  const fine = printing.digits.mass + more;
+  const digits = {
+    mass: fine,
+    u: fine,
+    arm: printing.digits.arm,
+    moment: printing.digits.moment + more,
+    share: 1,
+  };
   const shareOf = (part: Decimal) => (mass.isZero() ? new Decimal(0) : part.times(100).div(mass));
 
   const groups = sheetGroups(lines).map((group) => ({
@@ -78,8 +104,10 @@ export function printedSheet(estimate: Pick<Estimate, 'lines'>): PrintedSheet {
     moment: plain(printed.moment, digits.moment),
     share: printed.share.toFixed(digits.share),
   });
+  // The unit of moments need not be the product of the other two.
+  const armUnit = new Decimal(printing.moment).div(printing.mass).div(printing.arm);
   const armOf = (of: { mass: Decimal; moment: Decimal }) =>
-    of.mass.isZero() ? null : of.moment.div(of.mass);
+    of.mass.isZero() ? null : of.moment.div(of.mass).times(armUnit);
 
   return {
     groups: groups.map((group, i): PrintedGroup => {
@@ -136,6 +164,18 @@ function at<T>(list: readonly T[], index: number): T {
   const value = list[index];
   if (value === undefined) throw new RangeError(`nothing at ${index}`);
   return value;
+}
+
+/** A line with its figures in the units of the printing. */
+function inUnits(line: Line, { mass, arm, moment }: Printing): Line {
+  const [x, y, z] = line.at;
+  return {
+    ...line,
+    mass: line.mass / mass,
+    u: line.u / mass,
+    moment: line.moment / moment,
+    at: [x / arm, y, z],
+  };
 }
 
 function exactSum(lines: readonly Line[], column: 'mass' | 'moment'): Decimal {

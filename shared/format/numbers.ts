@@ -24,7 +24,7 @@ export interface QuantityOptions extends NumberOptions {
   fine?: boolean | undefined;
 }
 
-type Shown = number | null | undefined;
+export type Shown = number | null | undefined;
 
 /**
  * A number with a fixed count of decimals (negative: rounded to tens, hundreds …), halves away from zero, true

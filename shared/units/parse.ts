@@ -1,18 +1,27 @@
 import { QUANTITIES, type Quantity } from './quantities.ts';
-import { SPELLINGS } from './spellings.ts';
-import { convert, type Unit } from './units.ts';
-
-export type ParseProblem =
-  'missing' | 'not_a_number' | 'two_decimal_marks' | 'divided_by_zero' | 'unknown_unit' | 'wrong_unit';
-
-/** The value in the quantity's base unit, and the unit it was typed in; or what stands in the way. */
-export type ParsedQuantity = { value: number; unit: Unit } | { problem: ParseProblem };
+import { Refused, Scanner, type ParseProblem } from './scan.ts';
+import { inBase, readSum, type Reading } from './sum.ts';
+import type { Unit } from './units.ts';
 
 /**
- * Reads what was typed into a field. One rule: comma or point is the decimal mark, there are no thousands marks,
- * spaces are ignored (but part a whole number from its fraction), an empty field is missing and not 0. `1/16`,
- * `3 1/2`, `3-1/2`, `3½`, a true minus and a unit behind the number are understood; so are feet with inches
- * (`2' 7 1/2"`). Without a unit the field's own unit holds.
+ * The value in the quantity's base unit, and the unit it was typed in (the field's own where several were); or what
+ * stands in the way. `sum` where it had to be reckoned.
+ */
+export type ParsedQuantity = { value: number; unit: Unit; sum?: true } | { problem: ParseProblem };
+
+/** Longer texts are no number that anybody typed. */
+const LONGEST = 200;
+const VULGAR_FRACTION = /[¼-¾⅐-⅞]/g;
+
+/**
+ * Reads what was typed into a field, a number or a small sum. The rules:
+ * - Comma or point is the decimal mark; there are no thousands marks, but a space may part thousands.
+ * - An empty field is missing and not 0.
+ * - A number without a unit is in the field's own unit. Feet take inches behind them: `2' 7 1/2"`.
+ * - A stroke divides, so `1/16` is a fraction and `31/2` is 15.5. A whole number with a space or a hyphen before a
+ *   proper fraction is a mixed one: `3 1/2`, `3-1/2`, `3½`; to subtract a fraction, put spaces round the minus.
+ * - `+ − × * ÷ /` and brackets reckon, products first; only one factor has a unit.
+ * @example parseQuantity('2 + 1/2 in', 'length') // → { value: 14.7, unit: 'in', sum: true }
  */
 export function parseQuantity(
   text: string,
@@ -21,63 +30,21 @@ export function parseQuantity(
 ): ParsedQuantity {
   const typed = text.replace(VULGAR_FRACTION, (mark) => ` ${mark.normalize('NFKD')}`).trim();
   if (typed === '') return { problem: 'missing' };
-  const feetAndInches = FEET_AND_INCHES.exec(typed);
-  if (feetAndInches) return parseFeetAndInches(feetAndInches, quantity);
-  const [, sign = '', digits = '', suffix = ''] = SIGN_NUMBER_UNIT.exec(typed) ?? [];
-  const number = parseNumber(digits.trim());
-  if (typeof number === 'string') return { problem: number };
-  const unit = suffix.trim() === '' ? fieldUnit : unitOfSuffix(suffix, quantity);
-  if (unit === undefined) return { problem: 'unknown_unit' };
-  return inBase(sign === '' || sign === '+' ? number : -number, unit, quantity);
-}
-
-const VULGAR_FRACTION = /[¼-¾⅐-⅞]/g;
-const SIGN_NUMBER_UNIT = /^([+\-−–]?)([\d.,\s/⁄-]*)(.*)$/s;
-const FEET_AND_INCHES = /^([+\-−–]?)\s*(\d+)\s*(?:'|′|ft)\s*([\d.,\s/⁄-]*\d)\s*(?:"|″|''|in)?$/i;
-const DECIMAL = /^(\d+[.,]?\d*|[.,]\d+)$/;
-const MIXED_FRACTION = /^(?:(\d+)[\s-]+)?(\d+)\s*[/⁄]\s*(\d+)$/;
-
-/** A number without sign or unit, or its problem. */
-function parseNumber(digits: string): number | ParseProblem {
-  const [, whole = '0', numerator = '', denominator = ''] = MIXED_FRACTION.exec(digits) ?? [];
-  if (denominator !== '') {
-    if (Number(denominator) === 0) return 'divided_by_zero';
-    return finite(Number(whole) + Number(numerator) / Number(denominator));
+  if (typed.length > LONGEST) return { problem: 'not_a_number' };
+  const reading: Reading = { quantity, fieldUnit, units: new Set(), reckoned: false };
+  try {
+    const scan = new Scanner(typed);
+    const value = inBase(readSum(scan, reading), reading);
+    if (!scan.ended || !Number.isFinite(value)) return { problem: 'not_a_number' };
+    const [unit = fieldUnit, another] = reading.units;
+    return {
+      // A typed −0 is 0.
+      value: value === 0 ? 0 : value,
+      unit: another === undefined ? unit : fieldUnit,
+      ...(reading.reckoned && { sum: true as const }),
+    };
+  } catch (refused) {
+    if (refused instanceof Refused) return { problem: refused.problem };
+    throw refused;
   }
-  const bare = digits.replace(/\s/g, '');
-  if (/^[\d.,]+$/.test(bare) && bare.replace(/\d/g, '').length > 1) return 'two_decimal_marks';
-  return DECIMAL.test(bare) ? finite(Number(bare.replace(',', '.'))) : 'not_a_number';
-}
-
-const finite = (value: number): number | ParseProblem => (Number.isFinite(value) ? value : 'not_a_number');
-
-function parseFeetAndInches(match: RegExpExecArray, quantity: Quantity): ParsedQuantity {
-  const [, sign = '', feet = '', rest = ''] = match;
-  const inches = parseNumber(rest.trim());
-  if (typeof inches === 'string') return { problem: inches };
-  const total = Number(feet) * 12 + inches;
-  return inBase(sign === '' || sign === '+' ? total : -total, 'in', quantity);
-}
-
-/** `"`, `in` or `lb/ft³` as the unit meant; a spelling that serves two units means the one this quantity has. */
-function unitOfSuffix(suffix: string, quantity: Quantity): Unit | undefined {
-  const spelling = suffix
-    .replace(/\s/g, '')
-    .replaceAll('²', '2')
-    .replaceAll('³', '3')
-    .replaceAll('·', '.')
-    .toLowerCase();
-  const candidates = SPELLINGS.get(spelling) ?? [];
-  const offered: readonly Unit[] = QUANTITIES[quantity].units;
-  return candidates.find((unit) => offered.includes(unit)) ?? candidates[0];
-}
-
-function inBase(value: number, unit: Unit, quantity: Quantity): ParsedQuantity {
-  const { base, units } = QUANTITIES[quantity];
-  const offered: readonly Unit[] = units;
-  if (!offered.includes(unit)) return { problem: 'wrong_unit' };
-  const inBaseUnit = convert(value, unit, base);
-  if (!Number.isFinite(inBaseUnit)) return { problem: 'not_a_number' };
-  // A typed −0 is 0.
-  return { value: inBaseUnit === 0 ? 0 : inBaseUnit, unit };
 }

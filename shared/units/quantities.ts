@@ -51,20 +51,16 @@ export const QUANTITIES = {
 
 export type Quantity = keyof typeof QUANTITIES;
 export type UnitOf<Q extends Quantity> = (typeof QUANTITIES)[Q]['units'][number];
-export type UnitSystem = 'metric' | 'inch';
-
-/** The unit on screen under the reader's choice of system. */
-export function unitFor(quantity: Quantity, system: UnitSystem): Unit {
-  const { shown, inch } = QUANTITIES[quantity];
-  return system === 'inch' ? inch : shown;
-}
-
 /** The unit to show beside a field: inches for one typed in mm, mm for one typed in inches; null where none differs. */
 export function otherUnit(quantity: Quantity, unit: Unit): Unit | null {
   const { shown, inch } = QUANTITIES[quantity];
-  const metricTyped = unit !== inch && !INCH_UNITS.has(unit);
-  const other = metricTyped ? inch : shown;
+  const other = isInchUnit(unit) ? shown : inch;
   return other === unit || shown === inch ? null : other;
+}
+
+/** Whether a unit belongs to those who work in inches, ounces and their kin. */
+export function isInchUnit(unit: Unit): boolean {
+  return INCH_UNITS.has(unit);
 }
 
 const INCH_UNITS: ReadonlySet<Unit> = new Set<Unit>([

@@ -10,9 +10,11 @@ import { SampleWorkspaceProvider } from '#client/features/gliders/workspace.tsx'
 import { useSession } from '#client/features/session/queries.ts';
 import { useTitle } from '#client/hooks/use-title.ts';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
+import { useUnits } from '#client/lib/units.ts';
 import { beamOf } from '#shared/core/beam.ts';
 import { wingReference } from '#shared/core/wing-reference.ts';
 import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { convert } from '#shared/units/units.ts';
 import { SheetPaper } from '../sheet-paper.tsx';
 
 /** For the visitor; who is signed in goes straight to the bench. */
@@ -34,6 +36,7 @@ function Glance() {
   const workspace = useWorkspace();
   const plan = useValidPlan(workspace) ?? samplePlan;
   const keeper = useKeeper();
+  const units = useUnits();
   const wing = workspace.result.planform['wing'];
   return (
     <SampleGlance
@@ -48,7 +51,9 @@ function Glance() {
       <p className="mt-3">
         Draw the wing, pick the wood you have: each part gets its mass, the model its balance point and its
         wing loading, while you type. Here is a sample to try, {plan.name}
-        {wing && `, ${formatNumber(wing.span / 1000, 1)}${NARROW_SPACE}m across`}.
+        {wing &&
+          `, ${formatNumber(convert(wing.span, 'mm', units.long), 1)}${NARROW_SPACE}${units.long} across`}
+        .
       </p>
       <p className="mt-5 flex flex-wrap gap-2 sm:gap-3">
         <Link to={paths.sample()} className={buttonClass('primary')}>

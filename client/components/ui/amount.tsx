@@ -1,15 +1,11 @@
 import { useState } from 'react';
 import { cn } from '#client/lib/cn.ts';
-import {
-  formatQuantity,
-  NARROW_SPACE,
-  NO_VALUE,
-  unitLabel,
-  type QuantityOptions,
-} from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
+import { NARROW_SPACE, NO_VALUE } from '#shared/format/numbers.ts';
+import type { UnitsOptions } from '#shared/format/units.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 
-interface AmountProps extends QuantityOptions {
+interface AmountProps extends UnitsOptions {
   /** In the quantity's base unit; an en dash stands for null. */
   value: number | null | undefined;
   quantity: Quantity;
@@ -22,10 +18,11 @@ interface AmountProps extends QuantityOptions {
   className?: string;
 }
 
-/** A figure with its unit smaller and in graphite. */
+/** A figure in the reader's unit, which stands smaller and in graphite. */
 export function Amount({ value, quantity, u, of, flash = false, className, ...options }: AmountProps) {
-  const figure = formatQuantity(value, quantity, { ...options, bare: true });
-  const label = unitLabel(quantity, options.unit);
+  const units = useUnits();
+  const figure = units.format(value, quantity, { ...options, bare: true });
+  const label = units.label(quantity, options);
   const changes = useChanges(figure);
   const missing = figure === NO_VALUE;
   return (
@@ -35,7 +32,7 @@ export function Amount({ value, quantity, u, of, flash = false, className, ...op
       </span>
       {!missing && u !== undefined && u !== null && (
         <span className="text-[0.82em] font-normal text-graphite">
-          {` ±${NARROW_SPACE}${formatQuantity(u, quantity, { ...options, plus: false, bare: true })}`}
+          {` ±${NARROW_SPACE}${units.doubt(u, quantity, { ...options, plus: false, bare: true })}`}
         </span>
       )}
       {!missing && !options.bare && label !== '' && (

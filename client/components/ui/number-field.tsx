@@ -1,10 +1,12 @@
 import { useState, type KeyboardEvent, type Ref } from 'react';
 import { cn } from '#client/lib/cn.ts';
-import { parseQuantity, type ParseProblem } from '#shared/units/parse.ts';
-import { QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
+import { useUnits } from '#client/lib/units.ts';
+import { parseQuantity } from '#shared/units/parse.ts';
+import type { Quantity } from '#shared/units/quantities.ts';
+import type { ParseProblem } from '#shared/units/scan.ts';
 import type { Unit } from '#shared/units/units.ts';
 import { Field, type FieldLook } from './field.tsx';
-import { besideOf, problemText, rangeText, stepped, textOf } from './number-text.ts';
+import { besideOf, NUMBER_HELP, problemText, rangeText, stepped, textOf } from './number-text.ts';
 
 interface NumberFieldProps extends FieldLook {
   quantity: Quantity;
@@ -12,7 +14,7 @@ interface NumberFieldProps extends FieldLook {
   value: number | null | undefined;
   /** The number in the base unit, or null with what stands in the way (`missing` for an empty field). */
   onChange: (value: number | null, problem: ParseProblem | null) => void;
-  /** Unit of a bare number; the quantity's own by default. */
+  /** Unit of a bare number; the reader's choice for the quantity by default. */
   unit?: Unit;
   /** Bounds in the base unit; a value beyond them is still given on, and the field says what is wrong. */
   min?: number;
@@ -43,7 +45,8 @@ interface Typed {
 export function NumberField(props: NumberFieldProps) {
   const { quantity, value, onChange, optional = false, compact = false, step } = props;
   const { label, hint, suffix, inline, hideLabel, keepRoom } = props;
-  const unit = props.unit ?? QUANTITIES[quantity].shown;
+  const units = useUnits();
+  const unit = props.unit ?? units.unit(quantity);
   const [typed, setTyped] = useState<Typed | null>(null);
   const [left, setLeft] = useState(false);
 
@@ -56,6 +59,10 @@ export function NumberField(props: NumberFieldProps) {
   const wrongSize = 'value' in read ? rangeText(read.value, { ...props, unit }) : undefined;
   // An unfinished `1/` is no error while it is being typed.
   const error = props.error ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
+
+  const beside = besideOf(text, quantity, unit);
+  // In a cell the heading names the unit; what another unit or a sum comes to still has to be told.
+  const told = compact && own && beside.startsWith('=') ? beside : undefined;
 
   const take = (next: string) => {
     const parsed = parseQuantity(next, quantity, unit);
@@ -74,8 +81,9 @@ export function NumberField(props: NumberFieldProps) {
 
   return (
     <Field
-      {...{ label, hint, error, inline }}
-      suffix={suffix ?? (compact ? undefined : besideOf(text, quantity, unit))}
+      {...{ label, error, inline }}
+      hint={hint ?? told}
+      suffix={suffix ?? (compact ? undefined : beside)}
       hideLabel={hideLabel ?? compact}
       keepRoom={keepRoom ?? (!compact && !inline)}
     >
@@ -89,6 +97,7 @@ export function NumberField(props: NumberFieldProps) {
           }
           autoComplete="off"
           spellCheck={false}
+          title={NUMBER_HELP}
           value={text}
           disabled={props.disabled}
           readOnly={props.readOnly}

@@ -1,24 +1,28 @@
 import { formatInchFraction } from '#shared/format/inches.ts';
-import { formatQuantity, MINUS, roundTo, unitLabel } from '#shared/format/numbers.ts';
-import { parseQuantity, type ParseProblem } from '#shared/units/parse.ts';
-import { QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
+import { formatQuantity, MINUS, NARROW_SPACE, roundTo, unitLabel } from '#shared/format/numbers.ts';
+import { parseQuantity } from '#shared/units/parse.ts';
+import type { ParseProblem } from '#shared/units/scan.ts';
+import { otherUnit, QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
 import { convert, type Unit } from '#shared/units/units.ts';
 
-/** Decimals that a field shows at most; trailing zeros are left out. */
-const FIELD_DIGITS = 6;
+/** Decimals that a field shows at most, trailing zeros left out: in each unit at least as fine as 0.003 mm or 0.003 g. */
+const FIELD_DIGITS: Partial<Record<Unit, number>> = { in: 4, ft: 5, oz: 4, lb: 5 };
+const USUAL_DIGITS = 6;
 /** An inch fraction within this of the value, mm, is that fraction and no coincidence of rounding. */
 const SAME_MM = 1e-6;
 
 /** Text with which a field shows a value (in the quantity's base unit) that was not typed into it. */
 export function textOf(value: number | null | undefined, quantity: Quantity, unit: Unit): string {
   if (value === null || value === undefined || !Number.isFinite(value)) return '';
-  const fraction = quantity === 'length' && unit === 'mm' ? stockFraction(value) : null;
-  if (fraction !== null) return `${fraction} in`;
-  return plain(convert(value, QUANTITIES[quantity].base, unit));
+  if (quantity === 'length') {
+    const fraction = unit === 'mm' ? stockFraction(value) : unit === 'in' ? exactFraction(value) : null;
+    if (fraction !== null) return unit === 'in' ? fraction : `${fraction} in`;
+  }
+  return plain(convert(value, QUANTITIES[quantity].base, unit), unit);
 }
 
-function plain(value: number): string {
-  return String(roundTo(value, FIELD_DIGITS)).replace('-', MINUS);
+function plain(value: number, unit: Unit): string {
+  return String(roundTo(value, FIELD_DIGITS[unit] ?? USUAL_DIGITS)).replace('-', MINUS);
 }
 
 /** `1/16` for 1.5875 mm: sizes that only make sense in inches. Whole tenths of a mm stay metric. */
@@ -34,19 +38,32 @@ function exactFraction(lengthMm: number): string | null {
   return 'value' in read && Math.abs(read.value - lengthMm) < SAME_MM ? fraction : null;
 }
 
-/** What stands behind the field: the unit, or what the typed text is in the other unit. */
+/**
+ * What stands behind the field: its unit and the same in the other system; where another unit or a sum was typed,
+ * what that comes to in the field's own.
+ */
 export function besideOf(text: string, quantity: Quantity, unit: Unit): string {
   const read = parseQuantity(text, quantity, unit);
   const label = unitLabel(quantity, unit);
   if (!('value' in read)) return label;
-  if (read.unit !== unit) return formatQuantity(read.value, quantity, { unit, fine: true });
-  const fraction =
-    quantity === 'length' && unit === 'mm' && read.value !== 0 ? exactFraction(read.value) : null;
-  return fraction === null ? label : `${label} · ${fraction} in`;
+  if (read.sum || read.unit !== unit) return `= ${inUnit(read.value, quantity, unit)}`;
+  const other = otherUnit(quantity, unit);
+  if (other === null || read.value === 0) return label;
+  return `${label} · ${inUnit(read.value, quantity, other)}`;
 }
+
+function inUnit(value: number, quantity: Quantity, unit: Unit): string {
+  const fraction = quantity === 'length' && unit === 'in' ? exactFraction(value) : null;
+  if (fraction !== null) return `${fraction}${NARROW_SPACE}in`;
+  return formatQuantity(value, quantity, { unit, fine: Math.abs(value) < FINE_BELOW });
+}
+
+/** Small sizes and masses are told with one more decimal, mm or g. */
+const FINE_BELOW = 10;
 
 /** One press of an arrow key, in the unit named. */
 const STEPS: Partial<Record<Unit, number>> = {
+  mm: 0.5,
   in: 1 / 16,
   m: 0.01,
   cm: 0.1,
@@ -57,6 +74,10 @@ const STEPS: Partial<Record<Unit, number>> = {
   deg: 0.5,
   GPa: 0.1,
   'g/cm3': 0.01,
+  'lb/ft3': 0.1,
+  'oz/ft2': 0.1,
+  ft: 1 / 12,
+  lb: 0.01,
 };
 
 /**
@@ -73,16 +94,18 @@ export function stepped(text: string, quantity: Quantity, unit: Unit, steps: num
     const fraction = formatInchFraction(convert(next, 'in', 'mm'));
     if (fraction !== null) return ownUnit ? `${fraction} in` : fraction;
   }
-  return ownUnit ? `${plain(next)} ${unitLabel(quantity, read.unit)}` : plain(next);
+  const number = plain(next, read.unit);
+  return ownUnit ? `${number} ${unitLabel(quantity, read.unit)}` : number;
 }
 
 const PROBLEMS: Record<ParseProblem, string> = {
   missing: 'Type a number.',
-  not_a_number: 'Not a number. Write 12.5, 1/16 or 3 1/2 in.',
-  two_decimal_marks: 'Use one decimal mark and no thousands marks.',
+  not_a_number: 'Not a number. Write 12.5, 1/16, 3 1/2 in or 12 + 3.5.',
+  two_decimal_marks: 'Comma or point is the decimal mark: use one, and no thousands marks.',
   divided_by_zero: 'A fraction cannot be over 0.',
   unknown_unit: 'That unit is not known.',
   wrong_unit: 'That unit measures something else.',
+  several_units: 'Multiply or divide by a number without a unit.',
 };
 
 export function problemText(problem: ParseProblem): string {
@@ -106,3 +129,7 @@ export function rangeText(value: number, { quantity, unit, min, max, above }: Ra
   if (max !== undefined && value > max) return `Must be at most ${shown(max)}.`;
   return undefined;
 }
+
+/** The field's help in one sentence: read aloud with it, and shown where the pointer rests. */
+export const NUMBER_HELP =
+  'Comma or point is the decimal mark. A unit may follow (2,5 mm, 1/16 in, 3\'6", 0.4 oz); so may a sum (12 + 3.5, 3*12.5).';

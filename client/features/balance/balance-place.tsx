@@ -3,6 +3,7 @@ import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { Skeleton } from '#client/components/ui/skeleton.tsx';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { beamOf } from '#shared/core/beam.ts';
 import { noseOf, tipOf } from '#shared/core/extent.ts';
@@ -10,6 +11,7 @@ import type { Plan } from '#shared/core/plan.ts';
 import { printedSheet } from '#shared/core/printed-sheet.ts';
 import { sheetGroupKey } from '#shared/core/sheet-groups.ts';
 import { wingReference } from '#shared/core/wing-reference.ts';
+import { printingOf } from '#shared/format/printing.ts';
 import { BallastSolver } from './ballast-solver.tsx';
 import { BeamView } from './beam-view.tsx';
 import { Facts } from './facts.tsx';
@@ -40,16 +42,17 @@ export function BalancePlace({ workspace }: { workspace: Workspace }) {
 
 function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   const { result, selected, select } = workspace;
+  const units = useUnits();
   const [open, setOpen] = useState<ReadonlySet<string>>(new Set());
   const [lit, setLit] = useState<string | null>(null);
   const [asked, setAsked] = useState<string | null>(null);
 
   // Kept while only the light moves over the sheet.
   const beam = useMemo(() => beamOf(result, wingReference(plan), plan.target), [result, plan]);
-  const sheet = useMemo(() => printedSheet(result), [result]);
+  const sheet = useMemo(() => printedSheet(result, printingOf(units)), [result, units]);
   const nose = noseOf(plan) ?? [0, 0, 0];
   const tip = tipOf(plan);
-  const verdict = verdictOf(plan, result, beam, nose[0]);
+  const verdict = verdictOf(plan, result, beam, nose[0], units);
   const pickedLine = result.lines.find(({ id }) => id === selected);
   const pickedGroup = pickedLine ? sheetGroupKey(pickedLine) : null;
   const shown = pickedGroup === null ? open : new Set([...open, pickedGroup]);
@@ -61,12 +64,17 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
     if (pickedGroup === key && shown.has(key)) select(null);
   };
   const why = (what: string) => {
-    if (what === 'total') return whySum(result.lines);
+    if (what === 'total') return whySum(result.lines, units);
     const [kind, ...rest] = what.split('/');
     const id = rest.join('/');
-    if (kind === 'group') return whySum(result.lines.filter((line) => sheetGroupKey(line) === id));
+    if (kind === 'group') {
+      return whySum(
+        result.lines.filter((line) => sheetGroupKey(line) === id),
+        units,
+      );
+    }
     const line = result.lines.find((one) => one.id === id);
-    return line ? whyLine(plan, line) : null;
+    return line ? whyLine(plan, line, units) : null;
   };
 
   return (

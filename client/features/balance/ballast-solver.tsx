@@ -2,11 +2,12 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { balanceAfter, ballastFor } from '#shared/core/ballast.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Vec3 } from '#shared/core/frame.ts';
-import { formatQuantity, roundTo } from '#shared/format/numbers.ts';
+import { roundTo } from '#shared/format/numbers.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { spareBallast, withBallast, withLess } from './ballast-edit.ts';
 import { placeOf } from './verdict.ts';
@@ -23,12 +24,13 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
   const { plan, result, edit, canEdit } = workspace;
   const [chosen, setChosen] = useState<number | null>(null);
   const say = useToast();
+  const units = useUnits();
   const arm = chosen ?? nose[0];
   const mass = result.totals.mass;
   const from = beam.balance.x;
   const to = beam.pivot;
   const fine = mass < 20;
-  const grams = (value: number) => formatQuantity(value, 'mass', { fine });
+  const grams = (value: number) => units.format(value, 'mass', { fine });
   const found = ballastFor(mass, from, to, arm);
   const needed = 'mass' in found ? roundTo(found.mass, fine ? 2 : 1) : null;
   const spare = from < to ? spareBallast(plan.items, mass, from, to) : null;
@@ -41,7 +43,7 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
       (p) => withBallast(p, arm === nose[0] ? 'Nose ballast' : 'Ballast', needed, [arm, 0, nose[2]]),
       'fit ballast',
     );
-    say(`${grams(needed)} fitted ${placeOf(arm)}. Undo takes it out again.`);
+    say(`${grams(needed)} fitted ${placeOf(arm, units)}. Undo takes it out again.`);
   };
   const take = () => {
     if (!spare || takeOff === null) return;
@@ -70,8 +72,8 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
         <p>Nothing to add: it balances {beam.wanted ? 'on the wanted point' : 'where it does'}.</p>
       ) : (
         <p>
-          <strong className="text-heading font-semibold">{grams(needed)}</strong> {placeOf(arm)} brings it to{' '}
-          {formatQuantity(balanceAfter(mass, from, needed, arm), 'length')}
+          <strong className="text-heading font-semibold">{grams(needed)}</strong> {placeOf(arm, units)} brings
+          it to {units.format(balanceAfter(mass, from, needed, arm), 'length')}
           <span className="text-graphite">; then {grams(mass + needed)} in all.</span>
         </p>
       )}

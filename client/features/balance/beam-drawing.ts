@@ -3,7 +3,8 @@ import type { HungPlace } from '#shared/core/beam-places.ts';
 import { TILT_LIMIT, type Beam, type HungMass } from '#shared/core/beam.ts';
 import { radians } from '#shared/core/frame.ts';
 import { rulerOf, type Ruler } from '#shared/core/ruler.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
+import { convert } from '#shared/units/units.ts';
 
 /** A weight with its place in the drawing, CSS px. */
 export interface DrawnMass {
@@ -25,7 +26,10 @@ export interface BeamDrawing {
   /** the bar falls by so much per px to the right */
   slope: number;
   hung: DrawnMass[];
+  /** marks in the reader's unit of length */
   ruler: Ruler;
+  /** mm in one mark's unit */
+  perMark: number;
   rulerY: number;
   /** the mean aerodynamic chord on the ruler */
   chordX: [number, number] | null;
@@ -42,7 +46,7 @@ const UNDER_RULER = 40;
 const SMALLEST = 5;
 
 /** Lays the beam out in a width. Depths do not depend on the tilt, so that nothing jumps while figures change. */
-export function drawBeam(beam: Beam, width: number): BeamDrawing {
+export function drawBeam(beam: Beam, width: number, units: Units): BeamDrawing {
   const largest = width < 600 ? 17 : 24;
   const heaviest = Math.max(...beam.masses.map(({ mass }) => mass));
   const radiusOf = (mass: number) => Math.max(SMALLEST, largest * Math.sqrt(mass / heaviest));
@@ -60,7 +64,7 @@ export function drawBeam(beam: Beam, width: number): BeamDrawing {
 
   const pivotX = toX(beam.pivot);
   const labels = beam.masses.map((mass) => {
-    const figure = formatQuantity(mass.mass, 'mass');
+    const figure = units.format(mass.mass, 'mass');
     const letters = Math.max(mass.name.length * NAME_LETTER, figure.length * FIGURE_LETTER);
     return {
       mass,
@@ -81,6 +85,7 @@ export function drawBeam(beam: Beam, width: number): BeamDrawing {
     return place ? [{ mass, figure, x, radius, place }] : [];
   });
 
+  const perMark = convert(1, units.unit('length'), 'mm');
   const overhang = 10 / perMm;
   const [from, to] = [least - overhang, most + overhang];
   const steepest = Math.tan(radians(TILT_LIMIT));
@@ -96,9 +101,10 @@ export function drawBeam(beam: Beam, width: number): BeamDrawing {
     barY,
     slope: Math.tan(radians(beam.tilt)),
     hung,
+    perMark,
     ruler: rulerOf(
-      least - (side - 16) / perMm,
-      most + (side - 16) / perMm,
+      (least - (side - 16) / perMm) / perMark,
+      (most + (side - 16) / perMm) / perMark,
       width - 32,
       width < 600 ? 54 : 76,
     ),

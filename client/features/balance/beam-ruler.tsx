@@ -1,3 +1,4 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import { formatNumber } from '#shared/format/numbers.ts';
 import type { BeamDrawing } from './beam-drawing.ts';
@@ -10,9 +11,10 @@ interface BeamRulerProps {
 
 const MOVES = { transition: 'transform 150ms ease-out' };
 
-/** Millimetres aft of the datum under the beam, with the mean aerodynamic chord and the balance point on it. */
+/** Lengths aft of the datum under the beam, with the mean aerodynamic chord and the balance point on it. */
 export function BeamRuler({ beam, drawing, outside }: BeamRulerProps) {
-  const { ruler, rulerY, toX, chordX } = drawing;
+  const { ruler, rulerY, toX, perMark, chordX } = drawing;
+  const units = useUnits();
   const balance = outside ? 'var(--red)' : 'var(--pencil)';
   const digits = ruler.step < 1 ? 1 : 0;
   return (
@@ -29,13 +31,13 @@ export function BeamRuler({ beam, drawing, outside }: BeamRulerProps) {
       )}
       <line x1={0} x2="100%" y1={rulerY} y2={rulerY} stroke="var(--graphite)" />
       {ruler.between.map((mark) => (
-        <path key={mark} d={`M${toX(mark)} ${rulerY}v4`} stroke="var(--graphite)" />
+        <path key={mark} d={`M${toX(mark * perMark)} ${rulerY}v4`} stroke="var(--graphite)" />
       ))}
       {ruler.numbered.map((mark) => (
         <g key={mark}>
-          <path d={`M${toX(mark)} ${rulerY}v7`} stroke="var(--graphite)" />
+          <path d={`M${toX(mark * perMark)} ${rulerY}v7`} stroke="var(--graphite)" />
           <text
-            x={toX(mark)}
+            x={toX(mark * perMark)}
             y={rulerY + 21}
             textAnchor="middle"
             fill="var(--graphite)"
@@ -58,7 +60,7 @@ export function BeamRuler({ beam, drawing, outside }: BeamRulerProps) {
         paintOrder="stroke"
         className="text-label"
       >
-        mm aft of the datum
+        {units.label('length')} aft of the datum
       </text>
       <line
         y1={rulerY - 13}

@@ -1,5 +1,6 @@
 import { useId, useMemo } from 'react';
 import { useWidth } from '#client/hooks/use-width.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Line } from '#shared/core/result.ts';
@@ -27,13 +28,14 @@ interface BeamViewProps {
 export function BeamView({ beam, plan, lines, lit, onLight, picked, onOpen, outside }: BeamViewProps) {
   const [frame, width] = useWidth<HTMLDivElement>();
   const sentence = useId();
-  const drawing = useMemo(() => drawBeam(beam, width), [beam, width]);
+  const units = useUnits();
+  const drawing = useMemo(() => drawBeam(beam, width, units), [beam, width, units]);
   const { pivotX, barY, toX, height, rulerY, slope } = drawing;
 
   return (
     <div ref={frame} className="min-w-0">
       <p id={sentence} className="sr-only">
-        {beamSentence(beam)}
+        {beamSentence(beam, units)}
       </p>
       <svg
         role="group"

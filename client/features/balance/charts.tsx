@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { ChartFrame } from '#client/components/ui/chart-frame.tsx';
 import { Select } from '#client/components/ui/select.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
@@ -27,8 +28,9 @@ export function Charts(props: ChartsProps) {
 }
 
 function MassChart({ plan, result, lit }: ChartsProps) {
+  const units = useUnits();
   const bars = massBars(plan, result);
-  const grams = (value: number) => formatQuantity(value, 'mass');
+  const grams = (value: number) => units.format(value, 'mass');
   const share = (value: number) => formatQuantity(value / result.totals.mass, 'share');
   const [first] = bars;
   return (
@@ -46,16 +48,21 @@ function MassChart({ plan, result, lit }: ChartsProps) {
 }
 
 function MomentChart({ plan, result, beam, lit }: ChartsProps) {
+  const units = useUnits();
   const bars = momentBars(plan, result, beam.pivot);
-  const show = (value: number) => formatQuantity(value, 'moment', { bare: true });
+  const show = (value: number) => units.format(value, 'moment', { bare: true });
   const fore = bars.filter(({ value }) => value < 0).reduce((sum, { value }) => sum - value, 0);
   const aft = bars.filter(({ value }) => value > 0).reduce((sum, { value }) => sum + value, 0);
   const point = beam.wanted ? 'the wanted balance point' : 'the balance point';
   return (
     <ChartFrame
       title="Where the moment comes from"
-      sentence={`About ${point}: ${show(fore)} g·mm pull the nose down, ${show(aft)} the tail.`}
-      columns={[{ label: 'Group' }, { label: 'Moment g·mm', numeric: true }, { label: 'Pulls' }]}
+      sentence={`About ${point}: ${show(fore)} ${units.label('moment')} pull the nose down, ${show(aft)} the tail.`}
+      columns={[
+        { label: 'Group' },
+        { label: `Moment ${units.label('moment')}`, numeric: true },
+        { label: 'Pulls' },
+      ]}
       rows={bars.map(({ name, value }) => [name, show(value), value < 0 ? 'nose down' : 'tail down'])}
     >
       <Bars bars={bars} format={show} lit={lit} about />
@@ -64,12 +71,11 @@ function MomentChart({ plan, result, beam, lit }: ChartsProps) {
 }
 
 function DoubtChart({ plan, result }: ChartsProps) {
+  const units = useUnits();
   const [of, setOf] = useState<'mass' | 'balance'>('mass');
   const { bars, all } = doubtBars(plan, result, of);
   const show = (value: number) =>
-    of === 'mass'
-      ? formatQuantity(value, 'mass', { fine: true })
-      : formatQuantity(value, 'length', { fine: true });
+    of === 'mass' ? units.doubt(value, 'mass', { fine: true }) : units.doubt(value, 'length', { fine: true });
   const whole = of === 'mass' ? result.totals.u : (result.balance.u ?? 0);
   const [first] = all;
   if (!first)

@@ -1,9 +1,11 @@
 import { useState, type ReactNode } from 'react';
 import { Amount } from '#client/components/ui/amount.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Estimate } from '#shared/core/result.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { cn } from '#client/lib/cn.ts';
+import type { Units } from '#shared/format/units.ts';
 import { whyBalance, type Why } from './why.ts';
 import { whyNeutralPoint } from './why-neutral.ts';
 import { WhyPanel } from './why-panel.tsx';
@@ -22,12 +24,13 @@ interface Fact {
 
 /** The balance in figures, each to be asked how it was made. */
 export function Facts({ plan, result, beam }: FactsProps) {
+  const units = useUnits();
   const [asked, setAsked] = useState<string | null>(null);
   return (
     <section aria-label="Balance in figures">
       <h2 className="caption">Balance in figures</h2>
       <dl className="mt-1">
-        {factsOf(plan, result, beam).map(({ label, figure, why }) => (
+        {factsOf(plan, result, beam, units).map(({ label, figure, why }) => (
           <div
             key={label}
             className="grid min-h-row grid-cols-[auto_1fr] items-center gap-x-4 border-b border-rule"
@@ -63,9 +66,9 @@ export function Facts({ plan, result, beam }: FactsProps) {
   );
 }
 
-function factsOf(plan: Plan, { totals, balance }: Estimate, beam: Beam): Fact[] {
-  const balanceWhy = whyBalance({ totals, balance }, beam.chord);
-  const neutralWhy = whyNeutralPoint(plan, balance);
+function factsOf(plan: Plan, { totals, balance }: Estimate, beam: Beam, units: Units): Fact[] {
+  const balanceWhy = whyBalance({ totals, balance }, beam.chord, units);
+  const neutralWhy = whyNeutralPoint(plan, balance, units);
   const mac = beam.chord ? beam.chord.to - beam.chord.from : null;
   const np =
     mac === null || beam.chord === null || balance.neutralPoint === null

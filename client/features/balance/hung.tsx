@@ -1,4 +1,4 @@
-import { formatQuantity } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { DrawnMass } from './beam-drawing.ts';
 
 interface HungProps {
@@ -17,6 +17,7 @@ const MOVES = { transition: 'transform 150ms ease-out' };
 /** One weight on its string. Hover or focus lights its rows in the sheet; a press shows its parts there. */
 export function Hung({ hung, y, fill, lit, picked, onLight, onOpen }: HungProps) {
   const { mass, x, radius, place, figure } = hung;
+  const units = useUnits();
   const anchor = place.side === 'below' ? 'middle' : place.side === 'left' ? 'end' : 'start';
   const textX = place.side === 'below' ? 0 : place.side === 'left' ? -radius - 7 : radius + 7;
   const textY = place.labelY - place.string;
@@ -24,7 +25,7 @@ export function Hung({ hung, y, fill, lit, picked, onLight, onOpen }: HungProps)
     <g
       role="button"
       tabIndex={0}
-      aria-label={`${mass.name} ${figure} at ${formatQuantity(mass.x, 'length')}. Show its parts.`}
+      aria-label={`${mass.name} ${figure} at ${units.format(mass.x, 'length')}. Show its parts.`}
       onPointerEnter={() => onLight(mass.key)}
       onPointerLeave={() => onLight(null)}
       onFocus={() => onLight(mass.key)}

@@ -1,6 +1,7 @@
 import { Fragment, useId, type ReactNode } from 'react';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { cn } from '#client/lib/cn.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { PrintedFigures, PrintedSheet } from '#shared/core/printed-sheet.ts';
 import { formatNumber, NO_VALUE } from '#shared/format/numbers.ts';
@@ -26,6 +27,7 @@ interface SheetTableProps {
 /** Mass, arm and moment by group and part; every figure can be asked how it was made. */
 export function SheetTable(props: SheetTableProps) {
   const { plan, sheet, open, onToggle, lit, selected, onSelect, asked, onAsk, why } = props;
+  const units = useUnits();
   const row = (what: string, name: ReactNode, said: string, figures: PrintedFigures, look: RowLook) => (
     <FigureRow
       {...{ name, said, figures, look }}
@@ -39,12 +41,12 @@ export function SheetTable(props: SheetTableProps) {
       <thead>
         <tr>
           <Th>Group and part</Th>
-          <Th numeric>Mass g</Th>
+          <Th numeric>Mass {units.label('mass')}</Th>
           <Th numeric className="max-sm:hidden">
             ±
           </Th>
-          <Th numeric>Arm mm</Th>
-          <Th numeric>Moment g·mm</Th>
+          <Th numeric>Arm {units.label('length')}</Th>
+          <Th numeric>Moment {units.label('moment')}</Th>
           <Th numeric className="max-sm:hidden">
             Share %
           </Th>
@@ -126,6 +128,7 @@ function FigureRow({ name, said, figures, digits, look, why, onAsk }: FigureRowP
     text === null ? NO_VALUE : formatNumber(Number(text), digits[column]);
   const line = look.last ? 'border-b-0 border-t border-t-strong-rule' : undefined;
   const id = useId();
+  const units = useUnits();
   const under = (text: string) => (
     <span className="block text-label font-normal text-graphite sm:hidden"> {text}</span>
   );
@@ -146,7 +149,7 @@ function FigureRow({ name, said, figures, digits, look, why, onAsk }: FigureRowP
           >
             <span className="sr-only">{said} </span>
             {show(figures.mass, 'mass')}
-            <span className="sr-only"> g, ask why</span>
+            <span className="sr-only"> {units.label('mass')}, ask why</span>
             {under(`± ${show(figures.u, 'u')}`)}
           </button>
         </Td>

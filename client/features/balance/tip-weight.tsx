@@ -2,10 +2,11 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { ballastFor } from '#shared/core/ballast.ts';
 import type { Vec3 } from '#shared/core/frame.ts';
-import { formatQuantity, roundTo } from '#shared/format/numbers.ts';
+import { roundTo } from '#shared/format/numbers.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { withBallast } from './ballast-edit.ts';
 
@@ -26,6 +27,7 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
   const mass = result.totals.mass;
   const [chosen, setChosen] = useState<number | null>(null);
   const say = useToast();
+  const units = useUnits();
   const [x, y] = at;
   if (Math.abs(y) < LEVEL) {
     return (
@@ -40,7 +42,7 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
   const needed = 'mass' in found ? roundTo(found.mass, 2) : null;
   const heavy = y > 0 ? 'starboard' : 'port';
   const light = y > 0 ? 'port' : 'starboard';
-  const grams = (value: number) => formatQuantity(value, 'mass', { fine: true });
+  const grams = (value: number) => units.format(value, 'mass', { fine: true });
   const fit = () => {
     if (needed === null) return;
     edit((p) => withBallast(p, `Tip weight, ${light}`, needed, [x, arm, tip[2]]), 'fit tip weight');
@@ -51,7 +53,7 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
     <section aria-label="Ballast, side to side">
       <h2 className="caption">Side to side</h2>
       <p className="mt-1">
-        The balance point lies {formatQuantity(Math.abs(y), 'length')} to {heavy}.
+        The balance point lies {units.format(Math.abs(y), 'length')} to {heavy}.
       </p>
       <div className="mt-2 max-w-xs">
         <NumberField
@@ -72,7 +74,7 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
           <strong className="text-heading font-semibold">{grams(needed)}</strong> at the {light} wing brings
           it to the middle
           <span className="text-graphite">
-            ; on the balance arm ({formatQuantity(x, 'length')}) it leaves fore and aft alone.
+            ; on the balance arm ({units.format(x, 'length')}) it leaves fore and aft alone.
           </span>
         </p>
       )}

@@ -3,7 +3,8 @@ import type { Beam } from '#shared/core/beam.ts';
 import type { Plan, Target } from '#shared/core/plan.ts';
 import { standingOf, type Standing } from '#shared/core/standing.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { spareBallast } from './ballast-edit.ts';
 
 /** The answer of the page: how it balances, and what to do about it. */
@@ -16,7 +17,6 @@ export interface Verdict {
   advice: string | null;
 }
 
-const mm = (value: number) => formatQuantity(value, 'length');
 const percent = (value: number) => formatNumber(value, 1);
 
 /** How the plan balances, in words. `nose` is the arm at which ballast is thought of, mm. */
@@ -25,6 +25,7 @@ export function verdictOf(
   { totals }: Pick<Estimate, 'totals'>,
   beam: Beam | null,
   nose: number,
+  units: Units,
 ): Verdict {
   if (!beam) {
     return {
@@ -38,7 +39,7 @@ export function verdictOf(
   if (percentMac === null) {
     return {
       kind: 'none',
-      headline: `Balances ${placeOf(x)}`,
+      headline: `Balances ${placeOf(x, units)}`,
       detail: 'Without a wing there is no chord to tell it by.',
       advice: null,
     };
@@ -47,14 +48,14 @@ export function verdictOf(
     return {
       kind: 'none',
       headline: `Balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC`,
-      detail: `That is ${placeOf(x)}. No balance point is asked for yet.`,
+      detail: `That is ${placeOf(x, units)}. No balance point is asked for yet.`,
       advice: null,
     };
   }
   const by = x - beam.wanted.x;
   const kind = standingOf(target, percentMac, uPercentMac);
-  const advice = adviceOf(totals.mass, x, beam.wanted.x, nose, items, target);
-  const offset = offsetOf(by);
+  const advice = adviceOf(totals.mass, x, beam.wanted.x, nose, items, target, units);
+  const offset = offsetOf(by, units);
   const range = rangeOf(target);
   if (kind === 'outside') {
     const detail = `It balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC; ${range} is asked for.`;
@@ -81,9 +82,11 @@ function adviceOf(
   nose: number,
   items: Plan['items'],
   { percentMac }: Target,
+  units: Units,
 ): string | null {
+  const mm = (value: number) => units.format(value, 'length');
   const found = ballastFor(mass, from, to, nose);
-  const grams = (value: number) => formatQuantity(value, 'mass', { fine: mass < 20 });
+  const grams = (value: number) => units.format(value, 'mass', { fine: mass < 20 });
   const then = `it balances at ${percent(percentMac)}${NARROW_SPACE}%\u00a0MAC`;
   if ('mass' in found) {
     return found.mass === 0 ? null : `Put ${grams(found.mass)} at the nose (${mm(nose)}) and ${then}.`;
@@ -96,8 +99,8 @@ function adviceOf(
   return enough ? `Take ${off} and ${then}.` : `Take the ${off} first; no piece of ballast alone is enough.`;
 }
 
-function offsetOf(by: number): string {
-  return `${mm(Math.abs(by))} ${by > 0 ? 'behind' : 'ahead of'}`;
+function offsetOf(by: number, units: Units): string {
+  return `${units.format(Math.abs(by), 'length')} ${by > 0 ? 'behind' : 'ahead of'}`;
 }
 
 function rangeOf({ percentMac, tolerance }: Target): string {
@@ -105,8 +108,8 @@ function rangeOf({ percentMac, tolerance }: Target): string {
 }
 
 /** An arm in words: `33.3 mm aft of the datum`. */
-export function placeOf(x: number): string {
-  return `${mm(Math.abs(x))} ${x < 0 ? 'ahead of' : 'aft of'} the datum`;
+export function placeOf(x: number, units: Units): string {
+  return `${units.format(Math.abs(x), 'length')} ${x < 0 ? 'ahead of' : 'aft of'} the datum`;
 }
 
 function capital(text: string): string {

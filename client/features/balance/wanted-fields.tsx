@@ -1,10 +1,11 @@
 import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Plan, Target } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE, roundTo } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE, roundTo } from '#shared/format/numbers.ts';
 
 interface WantedFieldsProps {
   workspace: Workspace;
@@ -71,6 +72,7 @@ export function WantedFields({ workspace, beam }: WantedFieldsProps) {
 /** Where the balance point may lie for a range of static margins. */
 function MarginRange({ workspace, beam }: WantedFieldsProps) {
   const { edit, canEdit } = workspace;
+  const units = useUnits();
   const [least, setLeast] = useState(0.05);
   const [most, setMost] = useState(0.15);
   const { neutralPoint, chord } = beam;
@@ -110,7 +112,7 @@ function MarginRange({ workspace, beam }: WantedFieldsProps) {
       </div>
       <p>
         These margins ask for {formatNumber(percentOf(fore), 1)}–{formatNumber(percentOf(aft), 1)}
-        {NARROW_SPACE}% MAC, {formatNumber(fore, 1)}–{formatQuantity(aft, 'length')}.
+        {NARROW_SPACE}% MAC, {units.format(fore, 'length', { bare: true })}–{units.format(aft, 'length')}.
       </p>
       {canEdit && (
         <Button variant="plain" className="mt-1 -ml-2 print:hidden" onClick={ask}>

@@ -3,15 +3,20 @@ import { planformOf } from '#shared/core/planform.ts';
 import type { Plan, SurfaceRole } from '#shared/core/plan.ts';
 import type { Balance } from '#shared/core/result.ts';
 import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { Why } from './why.ts';
 
 const TAIL_EFFICIENCY = 0.9;
 const figure = (value: number, digits = 3) => formatNumber(value, digits);
 
 /** How the neutral point comes about; null where there is none. */
-export function whyNeutralPoint(plan: Plan, { neutralPoint, staticMargin, x }: Balance): Why | null {
+export function whyNeutralPoint(
+  plan: Plan,
+  { neutralPoint, staticMargin, x }: Balance,
+  units: Units,
+): Why | null {
   if (neutralPoint === null || x === null || staticMargin === null) return null;
-  const mm = (value: number) => formatQuantity(value, 'length');
+  const mm = (value: number) => units.format(value, 'length');
   const numbers = numbersOf(plan);
   return {
     formula: `Static margin ${formatQuantity(staticMargin, 'fineShare')} = (${mm(neutralPoint)} − ${mm(x)}) ÷ MAC`,

@@ -1,6 +1,7 @@
 import { noticeWords, type NoticeWords } from '#client/components/notice-text.ts';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Notice as CoreNotice } from '#shared/core/notices.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { Fold } from './fold.tsx';
@@ -16,7 +17,8 @@ const AT_ONCE = 3;
 
 /** What the calculator has to say of the plan: what is out of its limits first, each with a way to the part. */
 export function NoticesList({ notices, plan, onPick }: NoticesListProps) {
-  const all = notices.map((notice) => noticeWords(notice, plan));
+  const units = useUnits();
+  const all = notices.map((notice) => noticeWords(notice, plan, units));
   const words = [...all.filter(({ tone }) => tone === 'red'), ...all.filter(({ tone }) => tone !== 'red')];
   if (words.length === 0) return null;
   const rest = words.slice(AT_ONCE);

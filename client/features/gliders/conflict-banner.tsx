@@ -2,10 +2,11 @@ import { useMemo } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { formatMoment } from '#client/lib/moments.ts';
+import { useUnits } from '#client/lib/units.ts';
 import { estimate } from '#shared/core/estimate.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
-import type { Kept } from './autosave.ts';
+import type { Units } from '#shared/format/units.ts';
+import type { Kept } from './desk-state.ts';
 
 interface ConflictBannerProps {
   theirs: Kept;
@@ -25,6 +26,7 @@ export function ConflictBanner({
   onKeepAsNew,
   pending,
 }: ConflictBannerProps) {
+  const units = useUnits();
   const other = useMemo(() => estimate(theirs.plan), [theirs]);
   return (
     <Notice
@@ -43,14 +45,14 @@ export function ConflictBanner({
       }
     >
       {theirs.updatedBy} changed this glider at {formatMoment(theirs.updatedAt)}, while you had edits of your
-      own. Theirs: {figures(other)}. Yours: {figures(mine)}. Until you choose, nothing is overwritten; taking
-      theirs can be undone.
+      own. Theirs: {figures(other, units)}. Yours: {figures(mine, units)}. Until you choose, nothing is
+      overwritten; taking theirs can be undone.
     </Notice>
   );
 }
 
-function figures(result: Estimate): string {
-  const mass = formatQuantity(result.totals.mass, 'mass');
+function figures(result: Estimate, units: Units): string {
+  const mass = units.format(result.totals.mass, 'mass');
   const { percentMac } = result.balance;
-  return percentMac === null ? mass : `${mass}, ${formatQuantity(percentMac, 'percentMac')} MAC`;
+  return percentMac === null ? mass : `${mass}, ${units.format(percentMac, 'percentMac')} MAC`;
 }

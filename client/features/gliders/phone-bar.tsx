@@ -1,5 +1,6 @@
 import { useId, useState } from 'react';
 import { cn } from '#client/lib/cn.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { SaveStatus } from './save-status.tsx';
 import { CellText, type Cell } from './title-cells.tsx';
@@ -53,7 +54,8 @@ export function PhoneBar({ workspace, cells }: { workspace: Workspace; cells: Ce
 }
 
 function VerdictMark({ workspace: { plan, result } }: { workspace: Workspace }) {
-  const verdict = balanceVerdict(plan, result);
+  const units = useUnits();
+  const verdict = balanceVerdict(plan, result, units);
   if (!verdict || verdict.kind === 'inside') return null;
   const out = verdict.kind === 'outside';
   return (

@@ -3,8 +3,10 @@ import { Amount } from '#client/components/ui/amount.tsx';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { Select } from '#client/components/ui/select.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Item, Part, Plan } from '#shared/core/plan.ts';
+import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { PlanPicture } from './plan-picture.tsx';
 import { balanceVerdict } from './verdict.ts';
@@ -25,7 +27,8 @@ export function SampleGlance({ workspace, plan, onStartAgain, beam, children }: 
   const { result, edit, canUndo } = workspace;
   const ballast = workspace.plan.items.find(({ group }) => group === 'ballast');
   const sheeting = workspace.plan.surfaces.flatMap(({ parts }) => parts).find(({ kind }) => kind === 'skin');
-  const verdict = balanceVerdict(plan, result);
+  const units = useUnits();
+  const verdict = balanceVerdict(plan, result, units);
   return (
     <div className="grid items-start gap-x-12 gap-y-6 lg:grid-cols-[minmax(20rem,26rem)_1fr]">
       <div>
@@ -74,7 +77,7 @@ export function SampleGlance({ workspace, plan, onStartAgain, beam, children }: 
               label={`${sheeting.name}, wood`}
               value={sheeting.material}
               options={woodsOf(plan)}
-              suffix={densityText(plan, sheeting.material)}
+              suffix={densityText(plan, sheeting.material, units)}
               onValue={(material) => edit((p) => withMaterial(p, sheeting.id, material), 'sheeting wood')}
             />
           )}
@@ -119,9 +122,9 @@ function woodsOf({ materials }: Plan) {
     .map(([value, { name }]) => ({ value, label: name }));
 }
 
-function densityText({ materials }: Plan, key: string): string | undefined {
+function densityText({ materials }: Plan, key: string, units: Units): string | undefined {
   const density = materials[key]?.density;
-  return density === undefined ? undefined : `${density} kg/m³`;
+  return density === undefined ? undefined : units.format(density, 'density');
 }
 
 function withItem(plan: Plan, item: Item): Plan {

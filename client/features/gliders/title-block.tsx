@@ -1,3 +1,4 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { SaveStatus } from './save-status.tsx';
 import { CellText, cellsOf } from './title-cells.tsx';
@@ -5,7 +6,7 @@ import { PhoneBar } from './phone-bar.tsx';
 
 /** The one constant of every page of a glider: what is always wanted, at the lower right of the sheet. */
 export function TitleBlock({ workspace }: { workspace: Workspace }) {
-  const cells = cellsOf(workspace);
+  const cells = cellsOf(workspace, useUnits());
   return (
     <>
       <section

@@ -1,7 +1,9 @@
 import type { ReactNode } from 'react';
 import { Amount } from '#client/components/ui/amount.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
-import { formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { balanceVerdict } from './verdict.ts';
 
 export interface Cell {
@@ -21,10 +23,10 @@ export function CellText({ label, figure, note }: Cell) {
 }
 
 /** Mass, balance, loading and margin, as the title block tells them. */
-export function cellsOf({ plan, result }: Workspace): Cell[] {
+export function cellsOf({ plan, result }: Workspace, units: Units): Cell[] {
   const { totals, balance, loading } = result;
   const plusMinus = (value: number | null, quantity: 'mass' | 'percentMac') =>
-    value === null ? null : `±${NARROW_SPACE}${formatQuantity(value, quantity, { bare: true })}`;
+    value === null ? null : `±${NARROW_SPACE}${units.doubt(value, quantity, { bare: true })}`;
   const neutralPoint =
     balance.percentMac === null || balance.staticMargin === null
       ? null
@@ -45,7 +47,7 @@ export function cellsOf({ plan, result }: Workspace): Cell[] {
     {
       label: 'Wing loading',
       figure: <Amount value={loading.wing} quantity="loading" flash />,
-      note: loading.wing === null ? null : formatQuantity(loading.wing, 'loading', { unit: 'oz/ft2' }),
+      note: otherLoading(loading.wing, units),
     },
     {
       label: 'Static margin',
@@ -53,9 +55,15 @@ export function cellsOf({ plan, result }: Workspace): Cell[] {
       note:
         neutralPoint === null
           ? 'needs a tailplane'
-          : `neutral point ${formatQuantity(neutralPoint, 'percentMac')}`,
+          : `neutral point ${units.format(neutralPoint, 'percentMac')}`,
     },
   ];
+}
+
+/** The loading as the other half of the trade tells it. */
+function otherLoading(loading: number | null, units: Units): string | null {
+  const unit = units.other('loading');
+  return loading === null || unit === null ? null : units.format(loading, 'loading', { unit });
 }
 
 interface BalanceNoteProps extends Pick<Workspace, 'plan' | 'result'> {
@@ -63,7 +71,7 @@ interface BalanceNoteProps extends Pick<Workspace, 'plan' | 'result'> {
 }
 
 function BalanceNote({ plan, result, plusMinus }: BalanceNoteProps) {
-  const verdict = balanceVerdict(plan, result);
+  const verdict = balanceVerdict(plan, result, useUnits());
   if (verdict === null) return plusMinus;
   if (verdict.kind === 'inside') return [plusMinus, verdict.text].filter(Boolean).join(' · ');
   const out = verdict.kind === 'outside';

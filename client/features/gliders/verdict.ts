@@ -1,7 +1,8 @@
 import { standingOf, type Standing } from '#shared/core/standing.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
 /** How the balance point stands to the wanted one. */
 export interface BalanceVerdict {
@@ -13,13 +14,14 @@ export interface BalanceVerdict {
 export function balanceVerdict(
   { target }: Pick<Plan, 'target'>,
   { balance, notices }: Pick<Estimate, 'balance' | 'notices'>,
+  units: Units,
 ): BalanceVerdict | null {
   const { percentMac, uPercentMac } = balance;
   if (!target || percentMac === null) return null;
   const kind = standingOf(target, percentMac, uPercentMac);
   const outside = notices.find((notice) => notice.code === 'balance_outside_target');
   if (kind === 'outside' && outside) {
-    const by = formatQuantity(Math.abs(outside.byMm), 'length');
+    const by = units.format(Math.abs(outside.byMm), 'length');
     return { kind, text: `${by} ${outside.byMm > 0 ? 'behind' : 'ahead of'} wanted` };
   }
   const [low, high] = [target.percentMac - target.tolerance, target.percentMac + target.tolerance];

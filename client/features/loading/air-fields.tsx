@@ -1,9 +1,11 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { airAt } from '#shared/core/atmosphere.ts';
 import type { Flight, Plan } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE, roundTo } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE, roundTo } from '#shared/format/numbers.ts';
+import { convert } from '#shared/units/units.ts';
 
 /** Pressure altitude, m, and temperature, °C. */
 export interface Weather {
@@ -34,6 +36,7 @@ const withFlight = (plan: Plan, flight: Flight): Plan => ({ ...plan, flight: { .
 export function AirFields(props: AirFieldsProps) {
   const { workspace, plan, weather, onWeather, trimLift, onTrimLift, density } = props;
   const { edit, canEdit } = workspace;
+  const units = useUnits();
   const planned = plan.flight?.airDensity ?? 1.225;
   const rounded = roundTo(density, 3);
   const standard = airAt(weather.altitude).temperature - FREEZING;
@@ -46,7 +49,7 @@ export function AirFields(props: AirFieldsProps) {
         <NumberField
           label="Pressure altitude"
           quantity="length"
-          unit="m"
+          unit={units.long}
           step={50}
           value={weather.altitude * MM_PER_M}
           min={ALTITUDE.min * MM_PER_M}
@@ -92,10 +95,12 @@ export function AirFields(props: AirFieldsProps) {
         />
       </div>
       <p className="text-note text-graphite">
-        Air of {formatQuantity(density, 'airDensity')}; at {formatNumber(weather.altitude, 0)}
-        {NARROW_SPACE}m the standard day has {formatNumber(standard, 1)}
+        Air of {units.format(density, 'airDensity')}; at{' '}
+        {formatNumber(convert(weather.altitude, 'm', units.long), 0)}
+        {NARROW_SPACE}
+        {units.long} the standard day has {formatNumber(standard, 1)}
         {NARROW_SPACE}°C (US Standard Atmosphere 1976).{' '}
-        {rounded !== planned && `The plan reckons with ${formatQuantity(planned, 'airDensity')}.`}
+        {rounded !== planned && `The plan reckons with ${units.format(planned, 'airDensity')}.`}
       </p>
       {canEdit && rounded !== planned && (
         <Button

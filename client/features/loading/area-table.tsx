@@ -1,11 +1,13 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
 import { areaRows } from './areas.ts';
 
 /** Area and loading by each definition. */
 export function AreaTable({ plan, result }: { plan: Plan; result: Estimate }) {
+  const units = useUnits();
+  const other = units.other('loading') ?? 'oz/ft2';
   return (
     <section aria-label="Area and loading">
       <h2 className="caption">Area and loading</h2>
@@ -13,9 +15,9 @@ export function AreaTable({ plan, result }: { plan: Plan; result: Estimate }) {
         <thead>
           <tr>
             <Th>Area</Th>
-            <Th numeric>dm²</Th>
-            <Th numeric>g/dm²</Th>
-            <Th numeric>oz/ft²</Th>
+            <Th numeric>{units.label('area')}</Th>
+            <Th numeric>{units.label('loading')}</Th>
+            <Th numeric>{units.label('loading', { unit: other })}</Th>
           </tr>
         </thead>
         <tbody>
@@ -25,13 +27,11 @@ export function AreaTable({ plan, result }: { plan: Plan; result: Estimate }) {
                 <span className={key === 'projected' ? 'font-semibold' : undefined}>{name}</span>
                 <span className="block text-note text-graphite">{note}</span>
               </RowTh>
-              <Td numeric>{formatQuantity(area, 'area', { bare: true })}</Td>
+              <Td numeric>{units.format(area, 'area', { bare: true })}</Td>
               <Td numeric className="font-semibold">
-                {formatQuantity(loading, 'loading', { bare: true, fine: true })}
+                {units.format(loading, 'loading', { bare: true, fine: true })}
               </Td>
-              <Td numeric>
-                {formatQuantity(loading, 'loading', { unit: 'oz/ft2', bare: true, fine: true })}
-              </Td>
+              <Td numeric>{units.format(loading, 'loading', { unit: other, bare: true, fine: true })}</Td>
             </tr>
           ))}
         </tbody>

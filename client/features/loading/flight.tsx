@@ -1,11 +1,12 @@
 import { lazy, Suspense, useState, type ReactNode } from 'react';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { Skeleton } from '#client/components/ui/skeleton.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { airAt } from '#shared/core/atmosphere.ts';
 import { loadingOf } from '#shared/core/loading.ts';
 import type { Plan } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { formatNumber } from '#shared/format/numbers.ts';
 import { AirFields, type Weather } from './air-fields.tsx';
 import { SpeedTable } from './speed-table.tsx';
 import { speedIn, type Flown } from './speeds.ts';
@@ -33,21 +34,22 @@ export function Flight({ workspace, plan, flown, children }: FlightProps) {
   const stall = speedIn(flown, clMax, air);
   const trim = speedIn(flown, trimLift, air);
   const loading = loadingOf(flown.mass, flown.area);
-  const speed = (value: number | null) => formatQuantity(value, 'speed');
+  const units = useUnits();
+  const speed = (value: number | null) => units.format(value, 'speed');
+  const other = units.other('loading') ?? 'oz/ft2';
 
   return (
     <>
       <header>
         <h1 className="text-figure font-semibold">
-          {formatQuantity(loading, 'loading')} on the wing,{' '}
-          {formatQuantity(loading, 'loading', { unit: 'oz/ft2' })}
+          {units.format(loading, 'loading')} on the wing, {units.format(loading, 'loading', { unit: other })}
         </h1>
         <p className="mt-1 text-graphite">
           <span className="font-semibold text-pencil">
             It stalls at {speed(stall.speed)} and trims at {speed(trim.speed)}
           </span>{' '}
           (lift coefficients {formatNumber(clMax, 2)} and {formatNumber(trimLift, 2)}) in air of{' '}
-          {formatQuantity(air.density, 'airDensity')}.
+          {units.format(air.density, 'airDensity')}.
         </p>
       </header>
       <div className="mt-6 grid grid-cols-1 items-start gap-x-12 gap-y-8 lg:grid-cols-2">

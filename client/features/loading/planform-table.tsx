@@ -1,25 +1,37 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate, Planform } from '#shared/core/result.ts';
 import { sheetGroupName } from '#shared/core/sheet-groups.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
-const mm = (value: number) => formatQuantity(value, 'length', { bare: true });
-const dm2 = (value: number) => formatQuantity(value, 'area', { bare: true });
+interface Figure {
+  label: string;
+  of: (planform: Planform) => string;
+}
 
 /** What is told of each surface. An upright fin has no shadow, so no projected area and span. */
-const FIGURES: readonly { label: string; of: (planform: Planform) => string }[] = [
-  { label: 'Area, projected dm²', of: ({ areaProjected }) => (areaProjected > 0 ? dm2(areaProjected) : '–') },
-  { label: 'Area, developed dm²', of: ({ areaDeveloped }) => dm2(areaDeveloped) },
-  { label: 'Span, projected mm', of: ({ span }) => (span > 0 ? mm(span) : '–') },
-  { label: 'Aspect ratio', of: ({ aspectRatio }) => formatQuantity(aspectRatio, 'ratio') },
-  { label: 'Mean aerodynamic chord mm', of: ({ mac }) => mm(mac) },
-  { label: 'its leading edge, x mm', of: ({ xLeMac }) => mm(xLeMac) },
-  { label: 'and place along the span, y mm', of: ({ yMac }) => mm(yMac) },
-];
+function figuresIn(units: Units): Figure[] {
+  const long = (value: number) => units.format(value, 'length', { bare: true });
+  const wide = (value: number) => units.format(value, 'area', { bare: true });
+  const [length, area] = [units.label('length'), units.label('area')];
+  return [
+    {
+      label: `Area, projected ${area}`,
+      of: ({ areaProjected }) => (areaProjected > 0 ? wide(areaProjected) : '–'),
+    },
+    { label: `Area, developed ${area}`, of: ({ areaDeveloped }) => wide(areaDeveloped) },
+    { label: `Span, projected ${length}`, of: ({ span }) => (span > 0 ? long(span) : '–') },
+    { label: 'Aspect ratio', of: ({ aspectRatio }) => units.format(aspectRatio, 'ratio') },
+    { label: `Mean aerodynamic chord ${length}`, of: ({ mac }) => long(mac) },
+    { label: `its leading edge, x ${length}`, of: ({ xLeMac }) => long(xLeMac) },
+    { label: `and place along the span, y ${length}`, of: ({ yMac }) => long(yMac) },
+  ];
+}
 
 /** Areas, spans and mean chords of all surfaces. */
 export function PlanformTable({ plan, result }: { plan: Plan; result: Estimate }) {
+  const units = useUnits();
   const surfaces = plan.surfaces.flatMap(({ key }) => {
     const planform = result.planform[key];
     return planform ? [{ key, planform }] : [];
@@ -40,7 +52,7 @@ export function PlanformTable({ plan, result }: { plan: Plan; result: Estimate }
           </tr>
         </thead>
         <tbody>
-          {FIGURES.map(({ label, of }) => (
+          {figuresIn(units).map(({ label, of }) => (
             <tr key={label}>
               <RowTh>{label}</RowTh>
               {surfaces.map(({ key, planform }) => (

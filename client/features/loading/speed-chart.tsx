@@ -3,8 +3,10 @@ import { CartesianGrid, Line, LineChart, ReferenceDot, ReferenceLine, XAxis, YAx
 import { ChartFrame } from '#client/components/ui/chart-frame.tsx';
 import { Select } from '#client/components/ui/select.tsx';
 import { useWidth } from '#client/hooks/use-width.ts';
+import { useUnits } from '#client/lib/units.ts';
 import { rulerOf } from '#shared/core/ruler.ts';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { formatNumber } from '#shared/format/numbers.ts';
+import { convert } from '#shared/units/units.ts';
 import { overDensity, overLift, speedIn, type CurvePoint, type Flown } from './speeds.ts';
 
 interface SpeedChartProps {
@@ -27,27 +29,39 @@ export function SpeedChart({ flown, clMax, trimLift, air }: SpeedChartProps) {
     stall: speedIn(flown, clMax, air).speed ?? 0,
     trim: speedIn(flown, trimLift, air).speed ?? 0,
   };
-  const speed = (value: number | null) => formatQuantity(value, 'speed');
-  const bare = (value: number | null) => formatQuantity(value, 'speed', { bare: true });
+  const units = useUnits();
+  const speed = (value: number | null) => units.format(value, 'speed');
+  const bare = (value: number | null) => units.format(value, 'speed', { bare: true });
+  const density = (value: number | undefined, isBare = false) =>
+    units.format(value, 'airDensity', { bare: isBare });
+  const other = units.unit('speed') === 'km/h' ? 'm/s' : 'km/h';
   const [first] = points;
   const last = points.at(-1);
   const sentence =
     over === 'density'
-      ? `Thin air makes it faster: it stalls at ${speed(first?.stall ?? null)} in ${formatNumber(first?.x, 2)} kg/m³ and at ${speed(last?.stall ?? null)} in ${formatNumber(last?.x, 2)}.`
+      ? `Thin air makes it faster: it stalls at ${speed(first?.stall ?? null)} in ${density(first?.x)} and at ${speed(last?.stall ?? null)} in ${density(last?.x)}.`
       : `From ${speed(first?.stall ?? null)} at a lift coefficient of ${formatNumber(first?.x, 2)} down to the stall at ${speed(last?.stall ?? null)}.`;
   const columns =
     over === 'density'
-      ? ['Air density kg/m³', 'Stall m/s', 'Trim m/s']
-      : ['Lift coefficient', 'Speed m/s', 'Speed km/h'];
+      ? [
+          `Air density ${units.label('airDensity')}`,
+          `Stall ${units.label('speed')}`,
+          `Trim ${units.label('speed')}`,
+        ]
+      : [
+          'Lift coefficient',
+          `Speed ${units.label('speed')}`,
+          `Speed ${units.label('speed', { unit: other })}`,
+        ];
   return (
     <ChartFrame
       title={over === 'density' ? 'Speed over air density' : 'Speed over lift coefficient'}
       sentence={sentence}
       columns={columns.map((label) => ({ label, numeric: true }))}
       rows={points.map(({ x, stall, trim }) => [
-        formatNumber(x, 3),
+        over === 'density' ? density(x, true) : formatNumber(x, 3),
         bare(stall),
-        over === 'density' ? bare(trim) : formatQuantity(stall, 'speed', { unit: 'km/h', bare: true }),
+        over === 'density' ? bare(trim) : units.format(stall, 'speed', { unit: other, bare: true }),
       ])}
     >
       <div className="mb-2 w-56">
@@ -82,6 +96,9 @@ export function SpeedChart({ flown, clMax, trimLift, air }: SpeedChartProps) {
   );
 }
 
+/** Decimals that tell marks apart which lie a step apart. */
+const digitsFor = (step: number) => Math.max(0, -Math.floor(Math.log10(step) + 1e-9));
+
 interface CurveProps {
   over: Over;
   points: readonly CurvePoint[];
@@ -90,6 +107,9 @@ interface CurveProps {
 
 function Curve({ over, points, marks }: CurveProps) {
   const [frame, width] = useWidth<HTMLDivElement>(560);
+  const units = useUnits();
+  const speedUnit = convert(1, units.unit('speed'), 'm/s');
+  const xUnit = over === 'density' ? convert(1, units.unit('airDensity'), 'kg/m3') : 1;
   const xs = points.map(({ x }) => x);
   const ys = [
     ...points.flatMap(({ stall, trim }) => (trim === null ? [stall] : [stall, trim])),
@@ -97,8 +117,8 @@ function Curve({ over, points, marks }: CurveProps) {
   ];
   const [left, right] = [Math.min(...xs), Math.max(...xs)];
   const [low, high] = [Math.floor(Math.min(...ys)), Math.ceil(Math.max(...ys))];
-  const xRuler = rulerOf(left, right, width - 120, 70);
-  const yRuler = rulerOf(low, high, HEIGHT - 50, 44);
+  const xRuler = rulerOf(left / xUnit, right / xUnit, width - 120, 70);
+  const yRuler = rulerOf(low / speedUnit, high / speedUnit, HEIGHT - 50, 44);
   const last = points.at(-1);
   const tick = { fill: 'var(--graphite)', fontSize: 12 };
   const dot = { fill: 'var(--sheet)', stroke: 'var(--ink)', strokeWidth: 2, r: 4 };
@@ -110,12 +130,12 @@ function Curve({ over, points, marks }: CurveProps) {
           dataKey="x"
           type="number"
           domain={[left, right]}
-          ticks={xRuler.numbered}
+          ticks={xRuler.numbered.map((mark) => mark * xUnit)}
           tick={tick}
           stroke="var(--graphite)"
-          tickFormatter={(value: number) => formatNumber(value, xRuler.step < 0.1 ? 2 : 1)}
+          tickFormatter={(value: number) => formatNumber(value / xUnit, digitsFor(xRuler.step))}
           label={{
-            value: over === 'density' ? 'air density, kg/m³' : 'lift coefficient',
+            value: over === 'density' ? `air density, ${units.label('airDensity')}` : 'lift coefficient',
             position: 'insideBottom',
             offset: -12,
             fill: 'var(--graphite)',
@@ -125,13 +145,13 @@ function Curve({ over, points, marks }: CurveProps) {
         <YAxis
           type="number"
           domain={[low, high]}
-          ticks={yRuler.numbered}
+          ticks={yRuler.numbered.map((mark) => mark * speedUnit)}
           tick={tick}
           width={44}
           stroke="var(--graphite)"
-          tickFormatter={(value: number) => formatNumber(value, yRuler.step < 1 ? 1 : 0)}
+          tickFormatter={(value: number) => formatNumber(value / speedUnit, digitsFor(yRuler.step))}
           label={{
-            value: 'm/s',
+            value: units.label('speed'),
             position: 'insideTopLeft',
             offset: 0,
             dy: -22,

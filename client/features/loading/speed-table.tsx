@@ -1,13 +1,21 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
+import { formatNumber } from '#shared/format/numbers.ts';
+import type { Unit } from '#shared/units/units.ts';
 import type { SpeedAt } from './speeds.ts';
 
 interface SpeedTableProps {
   rows: readonly (SpeedAt & { name: string; lift: number })[];
 }
 
+/** Units of speed told beside the reader's own. */
+const FLOWN_BY: readonly Unit[] = ['m/s', 'km/h', 'ft/s'];
+
 /** Speeds in the units that people fly by, and the Reynolds number of each. */
 export function SpeedTable({ rows }: SpeedTableProps) {
+  const units = useUnits();
+  const own = units.unit('speed');
+  const others = FLOWN_BY.filter((unit) => unit !== own).slice(0, 2);
   return (
     <section aria-label="Speeds">
       <Table caption="Speeds in this air">
@@ -15,9 +23,11 @@ export function SpeedTable({ rows }: SpeedTableProps) {
           <tr>
             <Th>Speed</Th>
             <Th numeric>at lift coeff.</Th>
-            <Th numeric>m/s</Th>
-            <Th numeric>km/h</Th>
-            <Th numeric>ft/s</Th>
+            {[own, ...others].map((unit) => (
+              <Th key={unit} numeric>
+                {units.label('speed', { unit })}
+              </Th>
+            ))}
             <Th numeric>Reynolds, MAC</Th>
           </tr>
         </thead>
@@ -27,11 +37,14 @@ export function SpeedTable({ rows }: SpeedTableProps) {
               <RowTh className="font-semibold">{name}</RowTh>
               <Td numeric>{formatNumber(lift, 2)}</Td>
               <Td numeric className="font-semibold">
-                {formatQuantity(speed, 'speed', { bare: true })}
+                {units.format(speed, 'speed', { bare: true })}
               </Td>
-              <Td numeric>{formatQuantity(speed, 'speed', { unit: 'km/h', bare: true })}</Td>
-              <Td numeric>{formatQuantity(speed, 'speed', { unit: 'ft/s', bare: true })}</Td>
-              <Td numeric>{formatQuantity(reynolds, 'reynolds')}</Td>
+              {others.map((unit) => (
+                <Td key={unit} numeric>
+                  {units.format(speed, 'speed', { unit, bare: true })}
+                </Td>
+              ))}
+              <Td numeric>{units.format(reynolds, 'reynolds')}</Td>
             </tr>
           ))}
         </tbody>

@@ -4,7 +4,8 @@ import {
   rowSortingFeature,
   tableFeatures,
 } from '@tanstack/react-table';
-import { formatQuantity, NO_VALUE, unitLabel } from '#shared/format/numbers.ts';
+import { NO_VALUE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { MaterialDto } from '#shared/schemas/material.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import { categoryWord } from './words.ts';
@@ -29,14 +30,9 @@ export const FIGURES: readonly FigureColumn[] = [
 ];
 
 /** Text of one figure without its unit, which stands in the heading. */
-export function figureText(row: MaterialDto, { id, quantity }: FigureColumn): string {
+export function figureText(row: MaterialDto, { id, quantity }: FigureColumn, units: Units): string {
   const value = row[id];
-  return value === null ? NO_VALUE : formatQuantity(value, quantity, { bare: true });
-}
-
-/** The unit under a heading. */
-export function figureUnit({ quantity }: FigureColumn): string {
-  return unitLabel(quantity);
+  return value === null ? NO_VALUE : units.format(value, quantity, { bare: true });
 }
 
 const byText = (left: string, right: string) => left.localeCompare(right, 'en', { numeric: true });

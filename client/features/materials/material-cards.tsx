@@ -1,5 +1,5 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { MaterialDto } from '#shared/schemas/material.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
 import { FIGURES } from './columns.tsx';
 import { MaterialMenu, type MaterialActions } from './material-menu.tsx';
 import { MaterialNotes, UsedBy } from './materials-table.tsx';
@@ -10,6 +10,7 @@ export function MaterialCards({
   materials,
   ...actions
 }: MaterialActions & { materials: readonly MaterialDto[] }) {
+  const units = useUnits();
   return (
     <ul className="border-t border-strong-rule">
       {materials.map((row) => (
@@ -28,7 +29,7 @@ export function MaterialCards({
               return value === null ? null : (
                 <div key={id} className="flex gap-1.5">
                   <dt className="text-graphite">{label}</dt>
-                  <dd>{formatQuantity(value, quantity)}</dd>
+                  <dd>{units.format(value, quantity)}</dd>
                 </div>
               );
             })}

@@ -2,8 +2,9 @@ import { useTable, type Header } from '@tanstack/react-table';
 import { useState, type ReactNode } from 'react';
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
 import { cn } from '#client/lib/cn.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { MaterialDto } from '#shared/schemas/material.ts';
-import { columns, features, FIGURES, figureText, figureUnit } from './columns.tsx';
+import { columns, features, FIGURES, figureText } from './columns.tsx';
 import { MaterialMenu, type MaterialActions } from './material-menu.tsx';
 import { Swatch } from './swatch.tsx';
 import { categoryWord } from './words.ts';
@@ -14,6 +15,7 @@ interface MaterialsTableProps extends MaterialActions {
 
 /** Every material with every figure; a press on a name opens where the figures come from. */
 export function MaterialsTable({ materials, ...actions }: MaterialsTableProps) {
+  const units = useUnits();
   const [open, setOpen] = useState<ReadonlySet<string>>(new Set());
   const table = useTable({
     features,
@@ -37,7 +39,12 @@ export function MaterialsTable({ materials, ...actions }: MaterialsTableProps) {
           <SortTh header={headers.get('name')}>Material</SortTh>
           <SortTh header={headers.get('category')}>Kind</SortTh>
           {FIGURES.map((figure) => (
-            <SortTh key={figure.id} header={headers.get(figure.id)} numeric unit={figureUnit(figure)}>
+            <SortTh
+              key={figure.id}
+              header={headers.get(figure.id)}
+              numeric
+              unit={units.label(figure.quantity)}
+            >
               {figure.label}
             </SortTh>
           ))}
@@ -107,6 +114,7 @@ interface MaterialRowProps extends MaterialActions {
 }
 
 function MaterialRow({ row, open, onToggle, ...actions }: MaterialRowProps) {
+  const units = useUnits();
   const detailId = `material-${row.id}`;
   const edge = open ? 'border-b-0' : undefined;
   return (
@@ -134,7 +142,7 @@ function MaterialRow({ row, open, onToggle, ...actions }: MaterialRowProps) {
             numeric
             className={cn('text-body', row[figure.id] === null && 'text-graphite', edge)}
           >
-            {figureText(row, figure)}
+            {figureText(row, figure, units)}
           </Td>
         ))}
         <Td className={cn('max-w-56 min-w-40', edge)}>

@@ -1,7 +1,11 @@
 import { cn } from '#client/lib/cn.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { PrintedSheet } from '#shared/core/printed-sheet.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { formatNumber, NO_VALUE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
+import { unitName } from '#shared/units/names.ts';
+import type { Quantity } from '#shared/units/quantities.ts';
 import { layoutSheet, type SheetRow } from './sheet-layout.ts';
 
 interface BalanceColumnsProps {
@@ -9,18 +13,22 @@ interface BalanceColumnsProps {
   plan: Plan;
 }
 
-const COLUMNS = [
-  { label: 'Mass g', said: 'mass in grams' },
-  { label: '±', said: 'standard uncertainty of the mass in grams' },
-  { label: 'Arm mm', said: 'arm aft of the datum in millimetres' },
-  { label: 'g·mm', said: 'moment in gram millimetres' },
-  { label: '%', said: 'share of the mass' },
-];
+const columnsIn = (units: Units) => {
+  const said = (quantity: Quantity) => unitName(units.unit(quantity));
+  return [
+    { label: `Mass ${units.label('mass')}`, said: `mass in ${said('mass')}` },
+    { label: '±', said: `standard uncertainty of the mass in ${said('mass')}` },
+    { label: `Arm ${units.label('length')}`, said: `arm aft of the datum in ${said('length')}` },
+    { label: units.label('moment'), said: `moment in ${said('moment')}` },
+    { label: '%', said: 'share of the mass' },
+  ];
+};
 /** Letters take this share of a row's height. */
 const LETTERS = 0.72;
 
 /** The balance table of the page, in one column or two. */
 export function BalanceColumns({ sheet, plan }: BalanceColumnsProps) {
+  const heads = columnsIn(useUnits());
   const { columns, rowHeight, partsLeftOut } = layoutSheet(sheet, plan.name);
   const size = { fontSize: `${Math.min(3.3, rowHeight * LETTERS)}mm`, lineHeight: `${rowHeight}mm` };
   return (
@@ -47,7 +55,7 @@ export function BalanceColumns({ sheet, plan }: BalanceColumnsProps) {
                   <th scope="col" className="!pl-0 text-left">
                     Part
                   </th>
-                  {COLUMNS.map(({ label, said }) => (
+                  {heads.map(({ label, said }) => (
                     <th key={label} scope="col" className="text-right whitespace-nowrap">
                       <abbr title={said}>{label}</abbr>
                     </th>

@@ -1,6 +1,8 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
 interface FiguresBlockProps {
   plan: Plan;
@@ -11,11 +13,12 @@ type Pairs = readonly (readonly [label: string, figure: string])[];
 
 /** Balance, loading and planform in figures, three columns of the page. */
 export function FiguresBlock({ plan, result }: FiguresBlockProps) {
+  const units = useUnits();
   return (
     <div className="grid gap-x-[6mm] gap-y-[3mm] text-[2.9mm]/[4.2mm] sm:grid-cols-3 print:grid-cols-3">
-      <Block title="Balance" pairs={balancePairs(plan, result)} />
-      <Block title="Loading and flight" pairs={flightPairs(plan, result)} />
-      <Block title="Planform" pairs={planformPairs(plan, result)} />
+      <Block title="Balance" pairs={balancePairs(plan, result, units)} />
+      <Block title="Loading and flight" pairs={flightPairs(plan, result, units)} />
+      <Block title="Planform" pairs={planformPairs(plan, result, units)} />
     </div>
   );
 }
@@ -36,41 +39,46 @@ function Block({ title, pairs }: { title: string; pairs: Pairs }) {
   );
 }
 
-const mm = (value: number | null) => formatQuantity(value, 'length');
 const withU = (figure: string, u: string) => `${figure} ±${NARROW_SPACE}${u}`;
 
-function balancePairs({ target }: Plan, { balance }: FiguresBlockProps['result']): Pairs {
+function balancePairs({ target }: Plan, { balance }: FiguresBlockProps['result'], units: Units): Pairs {
   const { x, u, percentMac, uPercentMac, neutralPoint, staticMargin } = balance;
   return [
-    ['Balance point', x === null ? '–' : withU(formatNumber(x, 1), mm(u))],
+    [
+      'Balance point',
+      x === null ? '–' : withU(units.format(x, 'length', { bare: true }), units.doubt(u, 'length')),
+    ],
     [
       'of the MAC',
-      percentMac === null
-        ? '–'
-        : withU(formatNumber(percentMac, 1), formatQuantity(uPercentMac, 'percentMac')),
+      percentMac === null ? '–' : withU(formatNumber(percentMac, 1), units.format(uPercentMac, 'percentMac')),
     ],
     [
       'wanted',
       target
-        ? withU(formatNumber(target.percentMac, 1), formatQuantity(target.tolerance, 'percentMac'))
+        ? withU(formatNumber(target.percentMac, 1), units.format(target.tolerance, 'percentMac'))
         : 'not asked for',
     ],
-    ['Neutral point', mm(neutralPoint)],
-    ['Static margin', formatQuantity(staticMargin, 'fineShare')],
+    ['Neutral point', units.format(neutralPoint, 'length')],
+    ['Static margin', units.format(staticMargin, 'fineShare')],
   ];
 }
 
-function flightPairs({ flight }: Plan, { loading, speeds }: FiguresBlockProps['result']): Pairs {
+function flightPairs(
+  { flight }: Plan,
+  { loading, speeds }: FiguresBlockProps['result'],
+  units: Units,
+): Pairs {
   return [
-    ['Wing loading', formatQuantity(loading.wing, 'loading')],
-    ['Class area', formatQuantity(loading.classArea, 'classArea')],
-    ['Class loading', formatQuantity(loading.classLoading, 'loading')],
-    [`Stall, lift coeff. ${formatNumber(flight?.clMax ?? 1, 2)}`, formatQuantity(speeds.stall, 'speed')],
-    ['Reynolds number there', formatQuantity(speeds.reynolds, 'reynolds')],
+    ['Wing loading', units.format(loading.wing, 'loading')],
+    ['Class area', units.format(loading.classArea, 'classArea')],
+    ['Class loading', units.format(loading.classLoading, 'loading')],
+    [`Stall, lift coeff. ${formatNumber(flight?.clMax ?? 1, 2)}`, units.format(speeds.stall, 'speed')],
+    ['Reynolds number there', units.format(speeds.reynolds, 'reynolds')],
   ];
 }
 
-function planformPairs({ surfaces }: Plan, { planform }: FiguresBlockProps['result']): Pairs {
+function planformPairs({ surfaces }: Plan, { planform }: FiguresBlockProps['result'], units: Units): Pairs {
+  const mm = (value: number | null) => units.format(value, 'length');
   const of = (role: 'wing' | 'tailplane') => {
     const key = surfaces.find((surface) => surface.role === role)?.key;
     return key === undefined ? undefined : planform[key];
@@ -78,10 +86,13 @@ function planformPairs({ surfaces }: Plan, { planform }: FiguresBlockProps['resu
   const wing = of('wing');
   const tail = of('tailplane');
   return [
-    ['Wing area, projected', formatQuantity(wing?.areaProjected, 'area')],
+    ['Wing area, projected', units.format(wing?.areaProjected, 'area')],
     ['Span', mm(wing?.span ?? null)],
-    ['Aspect ratio', formatQuantity(wing?.aspectRatio, 'ratio')],
-    ['MAC, leading edge at', wing ? `${formatNumber(wing.mac, 1)}, ${mm(wing.xLeMac)}` : '–'],
-    ['Tailplane area', formatQuantity(tail?.areaProjected, 'area')],
+    ['Aspect ratio', units.format(wing?.aspectRatio, 'ratio')],
+    [
+      'MAC, leading edge at',
+      wing ? `${units.format(wing.mac, 'length', { bare: true })}, ${mm(wing.xLeMac)}` : '–',
+    ],
+    ['Tailplane area', units.format(tail?.areaProjected, 'area')],
   ];
 }

@@ -1,6 +1,6 @@
 import { Link } from 'react-router-dom';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { SheetSummaryDto } from '#shared/schemas/sheet.ts';
 import { sheetMoment } from './sheet-words.ts';
 
@@ -11,6 +11,7 @@ interface SheetListProps {
 
 /** Saved sheets, newest first. */
 export function SheetList({ sheets, sheetHref }: SheetListProps) {
+  const units = useUnits();
   return (
     <Table caption="Saved balance sheets">
       <thead>
@@ -18,9 +19,9 @@ export function SheetList({ sheets, sheetHref }: SheetListProps) {
           <Th>Sheet</Th>
           <Th>Saved</Th>
           <Th>by</Th>
-          <Th numeric>Mass g</Th>
+          <Th numeric>Mass {units.label('mass')}</Th>
           <Th numeric>Balance % MAC</Th>
-          <Th numeric>Loading g/dm²</Th>
+          <Th numeric>Loading {units.label('loading')}</Th>
           <Th>Note</Th>
         </tr>
       </thead>
@@ -39,9 +40,9 @@ export function SheetList({ sheets, sheetHref }: SheetListProps) {
               <time dateTime={sheet.savedAt}>{sheetMoment(sheet.savedAt)}</time>
             </Td>
             <Td>{sheet.savedBy}</Td>
-            <Td numeric>{formatQuantity(sheet.mass, 'mass', { bare: true })}</Td>
-            <Td numeric>{formatQuantity(sheet.percentMac, 'percentMac', { bare: true })}</Td>
-            <Td numeric>{formatQuantity(sheet.wingLoading, 'loading', { bare: true })}</Td>
+            <Td numeric>{units.format(sheet.mass, 'mass', { bare: true })}</Td>
+            <Td numeric>{units.format(sheet.percentMac, 'percentMac', { bare: true })}</Td>
+            <Td numeric>{units.format(sheet.wingLoading, 'loading', { bare: true })}</Td>
             <Td className="min-w-48 py-1.5">
               <span className="line-clamp-2">{sheet.note}</span>
             </Td>

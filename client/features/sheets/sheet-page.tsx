@@ -1,7 +1,9 @@
 import { noticeWords } from '#client/components/notice-text.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Notice } from '#shared/core/notices.ts';
 import { printedSheet } from '#shared/core/printed-sheet.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { printingOf } from '#shared/format/printing.ts';
 import type { SheetDto } from '#shared/schemas/sheet.ts';
 import { BalanceColumns } from './balance-columns.tsx';
 import { FiguresBlock } from './figures-block.tsx';
@@ -15,6 +17,7 @@ const MOST_NOTICES = 4;
 /** The balance sheet as one page of A4 or Letter, the title block at its lower right. */
 export function SheetPage({ sheet }: { sheet: SheetDto }) {
   const { plan, result } = sheet;
+  const units = useUnits();
   const { totals, balance, loading } = result;
   return (
     <article
@@ -26,18 +29,18 @@ export function SheetPage({ sheet }: { sheet: SheetDto }) {
         <div className="min-w-0 flex-1 basis-[60mm]">
           <h1 className="text-[6mm]/[7.2mm] font-semibold">{sheet.gliderName}</h1>
           <p className="mt-[1mm] text-[4.4mm]/[5.6mm] font-semibold">
-            {formatQuantity(totals.mass, 'mass')} ±{NARROW_SPACE}
-            {formatQuantity(totals.u, 'mass')}
+            {units.format(totals.mass, 'mass')} ±{NARROW_SPACE}
+            {units.doubt(totals.u, 'mass')}
             {balance.percentMac !== null &&
               `, balances at ${formatNumber(balance.percentMac, 1)}${NARROW_SPACE}% MAC`}
-            {loading.wing !== null && `, ${formatQuantity(loading.wing, 'loading')}`}
+            {loading.wing !== null && `, ${units.format(loading.wing, 'loading')}`}
           </p>
           {sheet.note && <p className="mt-[1.5mm] line-clamp-3 max-w-[110mm]">{sheet.note}</p>}
         </div>
         <PlanPicture plan={plan} balance={balance.x} className="h-[32mm] max-w-[62mm] shrink-0" />
       </header>
       <section aria-label="Balance sheet">
-        <BalanceColumns sheet={printedSheet(result)} plan={plan} />
+        <BalanceColumns sheet={printedSheet(result, printingOf(units))} plan={plan} />
       </section>
       <FiguresBlock plan={plan} result={result} />
       <div className="mt-auto grid items-end gap-[4mm] sm:grid-cols-[1fr_auto] print:grid-cols-[1fr_auto]">
@@ -49,6 +52,7 @@ export function SheetPage({ sheet }: { sheet: SheetDto }) {
 }
 
 function Cautions({ sheet: { plan, result } }: { sheet: SheetDto }) {
+  const units = useUnits();
   // The schema leaves a notice's data open; the core made these.
   const notices = result.notices as Notice[];
   const told = notices.slice(0, MOST_NOTICES);
@@ -58,7 +62,7 @@ function Cautions({ sheet: { plan, result } }: { sheet: SheetDto }) {
       <h2 className="font-semibold">Cautions</h2>
       <ul className="list-disc pl-[4mm]">
         {told.map((notice) => (
-          <li key={`${notice.code} ${notice.path}`}>{noticeWords(notice, plan).text}</li>
+          <li key={`${notice.code} ${notice.path}`}>{noticeWords(notice, plan, units).text}</li>
         ))}
         {more > 0 && <li>{more} more on the drawing.</li>}
         <li>

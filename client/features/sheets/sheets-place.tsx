@@ -1,6 +1,7 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { QueryView } from '#client/components/query-view.tsx';
 import { Button } from '#client/components/ui/button.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { sheetQueries } from './queries.ts';
 import { SaveSheet } from './save-sheet.tsx';
@@ -27,13 +28,14 @@ interface SheetsProps extends SheetsPlaceProps {
 }
 
 function Sheets({ workspace, gliderId, maySave, sheetHref }: SheetsProps) {
+  const units = useUnits();
   const query = useInfiniteQuery(sheetQueries.list(gliderId));
   const { hasNextPage, isFetchingNextPage, fetchNextPage } = query;
   return (
     <div className="px-4 pt-5 pb-8 sm:px-7">
       <QueryView query={query}>
         {(sheets) => {
-          const { headline, detail } = sheetsHeadline(sheets[0], workspace.result);
+          const { headline, detail } = sheetsHeadline(sheets[0], workspace.result, units);
           return (
             <>
               <header>

@@ -1,17 +1,16 @@
 import type { TrialResult, TrialRun } from '#shared/core/wood-trial.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
 export interface TrialHeadline {
   headline: string;
   detail: string;
 }
 
-const grams = (value: number) => formatQuantity(value, 'mass');
 /** Less than this, g, is no difference. */
 const NOTHING = 0.05;
 
 /** What the trials come to, best first: `Light ribs save 3.1 g; after re-trim 4.0 g`. */
-export function trialHeadline({ results }: Pick<TrialRun, 'results'>): TrialHeadline {
+export function trialHeadline({ results }: Pick<TrialRun, 'results'>, units: Units): TrialHeadline {
   const [drawn, ...trials] = results;
   if (!drawn) return { headline: 'Nothing to compare', detail: '' };
   if (drawn.refused?.refused === 'no_mass') {
@@ -21,7 +20,10 @@ export function trialHeadline({ results }: Pick<TrialRun, 'results'>): TrialHead
     .map((trial) => ({ trial, ...savings(drawn, trial) }))
     .sort((a, b) => (b.trimmed ?? b.bare) - (a.trimmed ?? a.bare));
   if (!best) return { headline: 'As drawn', detail: 'Add a trial to compare it with.' };
-  return { headline: sentence(best.trial.name, best.bare, best.trimmed), detail: detailOf(drawn, trials) };
+  return {
+    headline: sentence(best.trial.name, best.bare, best.trimmed, units),
+    detail: detailOf(drawn, trials),
+  };
 }
 
 function savings(drawn: TrialResult, trial: TrialResult): { bare: number; trimmed: number | null } {
@@ -29,7 +31,8 @@ function savings(drawn: TrialResult, trial: TrialResult): { bare: number; trimme
   return { bare: drawn.bare - trial.bare, trimmed };
 }
 
-function sentence(name: string, bare: number, trimmed: number | null): string {
+function sentence(name: string, bare: number, trimmed: number | null, units: Units): string {
+  const grams = (value: number) => units.format(value, 'mass');
   const rest =
     trimmed === null ? 'but it cannot be trimmed there' : `after re-trim ${grams(Math.abs(trimmed))}`;
   const turned = trimmed !== null && bare * trimmed < 0 ? (trimmed > 0 ? ' saved' : ' more') : '';

@@ -2,15 +2,16 @@ import { Bar, BarChart, LabelList, XAxis, YAxis } from 'recharts';
 import { ChartFrame } from '#client/components/ui/chart-frame.tsx';
 import { hatchFill } from '#client/components/ui/hatch.tsx';
 import { useWidth } from '#client/hooks/use-width.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { TrialResult } from '#shared/core/wood-trial.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
 
 const ROW = 40;
 const LETTER = 6.6;
-const grams = (value: number | null) => formatQuantity(value, 'mass');
 
 /** All-up mass of each trial and the ballast in it. */
 export function TrialChart({ results }: { results: readonly TrialResult[] }) {
+  const units = useUnits();
+  const grams = (value: number | null) => units.format(value, 'mass');
   const [frame, width] = useWidth<HTMLDivElement>(640);
   const data = results.map(({ name, bare, ballast, allUp }) => ({
     name,

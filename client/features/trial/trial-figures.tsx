@@ -1,6 +1,7 @@
 import { RowTh, Td, Tr } from '#client/components/ui/table.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { TrialRefusal, TrialResult } from '#shared/core/wood-trial.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 
 type Figure = 'wingMass' | 'bare' | 'percentMac' | 'ballast' | 'allUp' | 'wingLoading';
@@ -23,6 +24,7 @@ const ROWS: readonly {
 /** What each trial comes to, and how far it is from the plan as drawn. */
 export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
   const [drawn] = results;
+  const units = useUnits();
   return (
     <tbody className="[&>tr:first-child>*]:border-t [&>tr:first-child>*]:border-t-strong-rule">
       {ROWS.map(({ figure, label, quantity, strong = false, fine = false }) => (
@@ -36,14 +38,14 @@ export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
                 {value === null && figure === 'ballast' ? (
                   <span className="text-note font-normal whitespace-normal text-red">
                     <span aria-hidden="true">▲ </span>
-                    {refusalText(result.refused)}
+                    {refusalText(result.refused, units)}
                   </span>
                 ) : (
-                  formatQuantity(value, quantity, { fine })
+                  units.format(value, quantity, { fine })
                 )}
                 {index > 0 && value !== null && base !== null && (
                   <span className="text-note font-normal text-graphite max-sm:block sm:ml-2 sm:inline-block sm:min-w-12">
-                    {formatQuantity(value - base, quantity, { bare: true, plus: true, fine })}
+                    {units.format(value - base, quantity, { bare: true, plus: true, fine })}
                   </span>
                 )}
               </Td>
@@ -55,14 +57,14 @@ export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
   );
 }
 
-function refusalText(refused: TrialRefusal | null): string {
+function refusalText(refused: TrialRefusal | null, units: Units): string {
   switch (refused?.refused) {
     case 'at_wanted_point':
       return 'none: the arm lies on the balance point';
     case 'wrong_side':
       return refused.takeOff === null
         ? 'none: nose-heavy without any'
-        : `none: ${formatQuantity(refused.takeOff, 'mass')} too heavy there already`;
+        : `none: ${units.format(refused.takeOff, 'mass')} too heavy there already`;
     default:
       return '–';
   }

@@ -7,12 +7,14 @@ import { Skeleton } from '#client/components/ui/skeleton.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
 import { useMaterialTable } from '#client/hooks/use-material-table.ts';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { noseOf } from '#shared/core/extent.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { withWood } from '#shared/core/wood-groups.ts';
 import { isBallast, runTrials, type Trial } from '#shared/core/wood-trial.ts';
-import { formatNumber, formatQuantity, NARROW_SPACE } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { trialHeadline } from './headline.ts';
 import { useTrials } from './trial-store.ts';
@@ -45,6 +47,7 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   const [kept, keep] = useTrials(glider?.id ?? 'sample');
   const [chosenArm, setChosenArm] = useState<number | null>(null);
   const say = useToast();
+  const units = useUnits();
 
   const woods = woodsOf(plan, table);
   const groups = drawnGroups(plan, result);
@@ -58,7 +61,7 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
     () => runTrials(plan, [{ name: 'As drawn', materials: {} }, ...asked], { arm }),
     [plan, asked, arm],
   );
-  const { headline, detail } = trialHeadline(run);
+  const { headline, detail } = trialHeadline(run, units);
 
   if (groups.length === 0) {
     return (
@@ -85,7 +88,7 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
         <h1 className="text-figure font-semibold">{headline}</h1>
         <p className="mt-1 max-w-4xl text-graphite">
           {detail && <span className="mr-1.5 font-semibold text-pencil">{detail}</span>}
-          {termsOf(plan, run.takenOff, run.wanted, arm)}
+          {termsOf(plan, run.takenOff, run.wanted, arm, units)}
         </p>
       </header>
       <div className="mt-4 max-w-xs">
@@ -139,13 +142,19 @@ function usualArm(plan: Plan): number {
   return arms.length > 0 ? Math.min(...arms) : (noseOf(plan)?.[0] ?? 0);
 }
 
-function termsOf({ target }: Plan, takenOff: number, wanted: number | null, arm: number): string {
+function termsOf(
+  { target }: Plan,
+  takenOff: number,
+  wanted: number | null,
+  arm: number,
+  units: Units,
+): string {
   const point = target
     ? `the wanted ${formatNumber(target.percentMac, 1)}${NARROW_SPACE}% MAC`
-    : `the plan’s own balance point${wanted === null ? '' : `, ${formatQuantity(wanted, 'length')}`}`;
+    : `the plan’s own balance point${wanted === null ? '' : `, ${units.format(wanted, 'length')}`}`;
   const off =
     takenOff > 0
-      ? ` The plan’s own ballast, ${formatQuantity(takenOff, 'mass')}, is taken off first, also what a class minimum may ask for.`
+      ? ` The plan’s own ballast, ${units.format(takenOff, 'mass')}, is taken off first, also what a class minimum may ask for.`
       : '';
-  return `Every column is trimmed by ballast at ${formatQuantity(arm, 'length')} to ${point}.${off}`;
+  return `Every column is trimmed by ballast at ${units.format(arm, 'length')} to ${point}.${off}`;
 }

@@ -3,11 +3,12 @@ import { Button } from '#client/components/ui/button.tsx';
 import { Select } from '#client/components/ui/select.tsx';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { TextField } from '#client/components/ui/text-field.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { sheetGroupName } from '#shared/core/sheet-groups.ts';
 import type { TrialWood } from '#shared/core/wood-groups.ts';
 import type { Trial, TrialResult } from '#shared/core/wood-trial.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { TrialFigures } from './trial-figures.tsx';
 import type { DrawnGroup } from './woods.ts';
@@ -28,6 +29,7 @@ interface TrialTableProps {
 /** Woods by group and what they come to, one trial beside the other. */
 export function TrialTable(props: TrialTableProps) {
   const { plan, groups, woods, trials, results, onChange, onRemove, onUse, canEdit } = props;
+  const units = useUnits();
   const columns = (cell: (trial: Trial, index: number) => ReactNode) =>
     trials.map((trial, index) => (
       <Td key={index} className="min-w-38 sm:min-w-56">
@@ -60,7 +62,7 @@ export function TrialTable(props: TrialTableProps) {
             <RowTh className="sticky left-0 z-1 bg-sheet max-sm:py-1 max-sm:text-note">
               {sheetGroupName(group.key)}
               <span className="text-note text-graphite max-sm:block sm:ml-2">
-                {formatQuantity(group.mass, 'mass')}
+                {units.format(group.mass, 'mass')}
               </span>
             </RowTh>
             <Td className="text-note sm:min-w-40">
@@ -72,7 +74,10 @@ export function TrialTable(props: TrialTableProps) {
                 hideLabel
                 keepRoom={false}
                 value={trial.materials[group.key]?.key ?? ''}
-                options={[{ value: '', label: 'as drawn' }, ...optionsOf(woods, trial.materials[group.key])]}
+                options={[
+                  { value: '', label: 'as drawn' },
+                  ...optionsOf(woods, trial.materials[group.key], units),
+                ]}
                 onValue={(key) => onChange(index, withChoice(trial, group.key, woods, key))}
               />
             ))}
@@ -106,11 +111,11 @@ export function TrialTable(props: TrialTableProps) {
   );
 }
 
-function optionsOf(woods: readonly TrialWood[], chosen: TrialWood | undefined) {
+function optionsOf(woods: readonly TrialWood[], chosen: TrialWood | undefined, units: Units) {
   const known = chosen === undefined || woods.some(({ key }) => key === chosen.key);
   return (known ? woods : [...woods, chosen]).map(({ key, material }) => ({
     value: key,
-    label: `${material.name}, ${formatQuantity(material.density, 'density')}`,
+    label: `${material.name}, ${units.format(material.density, 'density')}`,
   }));
 }
 

@@ -5,6 +5,7 @@ import { beamOf } from '#shared/core/beam.ts';
 import { estimate } from '#shared/core/estimate.ts';
 import type { Item, Plan } from '#shared/core/plan.ts';
 import { wingReference } from '#shared/core/wing-reference.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 
 /** A wing of 100 mm chord without wood, so that items alone decide: 100 % MAC is 100 mm. */
 function plan(items: Partial<Item>[], target?: Plan['target']): Plan {
@@ -31,7 +32,7 @@ function plan(items: Partial<Item>[], target?: Plan['target']): Plan {
 
 function verdict(of: Plan, nose = -100) {
   const result = estimate(of);
-  return verdictOf(of, result, beamOf(result, wingReference(of), of.target), nose);
+  return verdictOf(of, result, beamOf(result, wingReference(of), of.target), nose, USUAL_UNITS);
 }
 
 describe('verdictOf', () => {

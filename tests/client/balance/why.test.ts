@@ -4,11 +4,12 @@ import ploverJson from '#data/demo/gliders/plover.json' with { type: 'json' };
 import whimbrelJson from '#data/demo/gliders/whimbrel.json' with { type: 'json' };
 import { whyLine, whySum } from '#client/features/balance/why.ts';
 import { estimate } from '#shared/core/estimate.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 
 const asked = [dunlinJson, ploverJson, whimbrelJson].flatMap((json) => {
   const plan = planSchema.parse(json);
-  return estimate(plan).lines.map((line) => ({ plan, line, why: whyLine(plan, line) }));
+  return estimate(plan).lines.map((line) => ({ plan, line, why: whyLine(plan, line, USUAL_UNITS) }));
 });
 const number = (text: string | undefined) => Number(text?.replaceAll('\u202f', ''));
 const FORMULA =
@@ -42,6 +43,6 @@ describe('whySum', () => {
   it('divides moment by mass', () => {
     const lines = asked.slice(0, 3).map(({ line }) => line);
     const arm = lines.reduce((s, l) => s + l.moment, 0) / lines.reduce((s, l) => s + l.mass, 0);
-    expect(whySum(lines).steps[0]).toContain(`= ${arm.toFixed(1)}\u202fmm`);
+    expect(whySum(lines, USUAL_UNITS).steps[0]).toContain(`= ${arm.toFixed(1)}\u202fmm`);
   });
 });

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { noticeWords } from '#client/components/notice-text.ts';
 import type { Notice } from '#shared/core/notices.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { demoPlan } from '#tests/support/plans.ts';
 
 const plan = demoPlan('dunlin');
@@ -32,7 +33,7 @@ const ALL: Notice[] = [
 
 describe('notices in words', () => {
   it.each(ALL)('$code is a whole sentence without a code, a path or an unfilled place', (notice) => {
-    const { text } = noticeWords(notice, plan);
+    const { text } = noticeWords(notice, plan, USUAL_UNITS);
     expect(text).toMatch(/^[A-Z“].*\.$/);
     expect(text).not.toMatch(/_|undefined|NaN|wing\//);
   });
@@ -41,6 +42,7 @@ describe('notices in words', () => {
     const { text, line, tone } = noticeWords(
       { code: 'strip_outside_section', path, station: 585, overBy: 0.4 },
       plan,
+      USUAL_UNITS,
     );
     expect(text).toBe(
       'Spar, top (wing) is 0.40\u202fmm too high for the section at 585.0\u202fmm from the root.',
@@ -52,21 +54,28 @@ describe('notices in words', () => {
     const { text } = noticeWords(
       { code: 'strips_overlap', path, other: 'stringer-top-aft', station: 0, overBy: 1.5 },
       plan,
+      USUAL_UNITS,
     );
     expect(text).toBe('Spar, top (wing) and Stringer, top aft share 1.5\u202fmm of room at the root.');
   });
 
   it('says on which side of the wanted point the balance lies', () => {
     const side = (byMm: number) =>
-      noticeWords({ code: 'balance_outside_target', path: 'plan', byMm, byPercentMac: byMm }, plan);
+      noticeWords(
+        { code: 'balance_outside_target', path: 'plan', byMm, byPercentMac: byMm },
+        plan,
+        USUAL_UNITS,
+      );
     expect(side(-3).text).toContain('ahead of the wanted one');
     expect(side(3).text).toContain('behind the wanted one');
     expect(side(3).line).toBeNull();
   });
 
   it('picks a solid by its line and tells a part that is gone by its path', () => {
-    expect(noticeWords({ code: 'outline_without_area', path: 'solid/pod' }, plan).line).toBe('solid/pod');
-    const gone = noticeWords({ code: 'part_measures_nothing', path: 'wing/gone' }, plan);
+    expect(noticeWords({ code: 'outline_without_area', path: 'solid/pod' }, plan, USUAL_UNITS).line).toBe(
+      'solid/pod',
+    );
+    const gone = noticeWords({ code: 'part_measures_nothing', path: 'wing/gone' }, plan, USUAL_UNITS);
     expect(gone).toMatchObject({ line: null });
     expect(gone.text).toContain('“wing/gone”');
   });

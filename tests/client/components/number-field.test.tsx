@@ -1,7 +1,9 @@
 // @vitest-environment happy-dom
 import { describe, expect, it, vi } from 'vitest';
 import { NumberField } from '#client/components/ui/number-field.tsx';
-import type { ParseProblem } from '#shared/units/parse.ts';
+import { UnitsContext } from '#client/lib/units.ts';
+import { unitsOf } from '#shared/format/units.ts';
+import type { ParseProblem } from '#shared/units/scan.ts';
 import { leave, mount, onlyInput, press, type } from '#tests/client/lib/mount.tsx';
 
 type Change = (value: number | null, problem: ParseProblem | null) => void;
@@ -28,6 +30,32 @@ describe('number field', () => {
     expect(input.value).toBe('1/16 in');
   });
 
+  it('takes a sum, keeps it as typed and says what it comes to', async () => {
+    const onChange = vi.fn<Change>();
+    const { element, input, set } = await field(3, onChange);
+    await type(input, '12+3.5');
+    await set(15.5);
+    expect(onChange).toHaveBeenLastCalledWith(15.5, null);
+    expect(input.value).toBe('12+3.5');
+    expect(element.textContent).toContain('= 15.5\u202fmm');
+  });
+
+  it('works in the reader’s inches, with the mm beside them', async () => {
+    const onChange = vi.fn<Change>();
+    const node = (now: number) => (
+      <UnitsContext value={unitsOf({ length: 'in' })}>
+        <NumberField label="Width" quantity="length" value={now} onChange={onChange} />
+      </UnitsContext>
+    );
+    const { element, show } = await mount(node(6.35));
+    const input = onlyInput(element);
+    expect(input.value).toBe('1/4');
+    await type(input, '3/16');
+    expect(onChange).toHaveBeenLastCalledWith(expect.closeTo(4.7625, 9), null);
+    await show(node(4.7625));
+    expect(element.textContent).toContain('in · 4.76\u202fmm');
+  });
+
   it('does not re-format 2,50 under the cursor', async () => {
     const { input, set } = await field(3);
     await type(input, '2,50');
@@ -50,7 +78,7 @@ describe('number field', () => {
     await leave(input);
     expect(input.getAttribute('aria-invalid')).toBe('true');
     const told = input.getAttribute('aria-describedby') ?? '';
-    expect(element.querySelector(`#${CSS.escape(told)}`)?.textContent).toContain('one decimal mark');
+    expect(element.querySelector(`#${CSS.escape(told)}`)?.textContent).toContain('Comma or point');
   });
 
   it('hands a negative width on and says at once that it is refused', async () => {
@@ -74,9 +102,9 @@ describe('number field', () => {
     const onChange = vi.fn<Change>();
     const { input, set } = await field(20, onChange);
     await press(input, 'ArrowUp');
-    expect(onChange).toHaveBeenLastCalledWith(21, null);
-    await set(21);
+    expect(onChange).toHaveBeenLastCalledWith(20.5, null);
+    await set(20.5);
     await press(input, 'ArrowDown', { shiftKey: true });
-    expect(onChange).toHaveBeenLastCalledWith(11, null);
+    expect(onChange).toHaveBeenLastCalledWith(15.5, null);
   });
 });

@@ -15,6 +15,13 @@ describe('text of a field that was not typed into', () => {
     expect(textOf(1.59, 'length', 'mm')).toBe('1.59');
   });
 
+  it('shows stock in inches by its fraction down to 1/64 in, and what is none in decimals', () => {
+    // 31/64 in = 12.303125 mm; 372.5 mm = 14.66535 in (25.4 mm, NIST SP 811)
+    expect(textOf(12.303125, 'length', 'in')).toBe('31/64');
+    expect(textOf(88.9, 'length', 'in')).toBe('3 1/2');
+    expect(textOf(372.5, 'length', 'in')).toBe('14.6654');
+  });
+
   it('shows a share in per cent without noise of binary fractions', () => {
     expect(textOf(0.07, 'share', 'percent')).toBe('7');
   });
@@ -30,11 +37,27 @@ describe('text of a field that was not typed into', () => {
 
 describe('what stands behind a field', () => {
   it('says what inches are in mm', () => {
-    expect(besideOf('1/16 in', 'length', 'mm')).toBe('1.59\u202fmm');
+    expect(besideOf('1/16 in', 'length', 'mm')).toBe('= 1.59\u202fmm');
+  });
+
+  it('says what a sum comes to', () => {
+    expect(besideOf('12+3.5', 'length', 'mm')).toBe('= 15.5\u202fmm');
+  });
+
+  it('tells the same in the other system', () => {
+    // 0.4 oz = 11.34 g, 112 kg/m³ = 6.99 lb/ft³ (ounce and pound as in NIST SP 811)
+    expect(besideOf('2,5', 'length', 'mm')).toBe('mm · 0.0984\u202fin');
+    expect(besideOf('0.4', 'mass', 'oz')).toBe('oz · 11.3\u202fg');
+    expect(besideOf('112', 'density', 'kg/m3')).toBe('kg/m³ · 7.0\u202flb/ft³');
+    expect(besideOf('2', 'length', 'in')).toBe('in · 50.8\u202fmm');
+  });
+
+  it('tells no second unit where both systems share one', () => {
+    expect([besideOf('4', 'angle', 'deg'), besideOf('40', 'percentMac', 'percent')]).toEqual(['°', '%']);
   });
 
   it('names the fraction that a metric size happens to be', () => {
-    expect(besideOf('12.7', 'length', 'mm')).toBe('mm · 1/2 in');
+    expect(besideOf('12.7', 'length', 'mm')).toBe('mm · 1/2\u202fin');
   });
 
   it('is the bare unit while the text is no number', () => {
@@ -43,8 +66,14 @@ describe('what stands behind a field', () => {
 });
 
 describe('arrow keys', () => {
-  it('step by a whole mm', () => {
-    expect(stepped('380', 'length', 'mm', 1)).toBe('381');
+  it('step by half a mm', () => {
+    expect(stepped('380', 'length', 'mm', 1)).toBe('380.5');
+  });
+
+  it('step by sixteenths in a field of inches, from decimals to the next decimal', () => {
+    expect(stepped('15 1/2', 'length', 'in', 1)).toBe('15 9/16');
+    expect(stepped('31/2', 'length', 'in', -1)).toBe('15 7/16');
+    expect(stepped('14.6654', 'length', 'in', 1)).toBe('14.7279');
   });
 
   it('step by sixteenths in a field typed in inches', () => {

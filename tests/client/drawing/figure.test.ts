@@ -12,6 +12,7 @@ import {
 import { halfLayers, modelLayers } from '#client/features/drawing/figure/drawings.ts';
 import { planSentence, planTitle } from '#client/features/drawing/figure/plan-words.ts';
 import { estimate } from '#shared/core/estimate.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { demoPlan } from '#tests/support/plans.ts';
 
 const margins = { top: 10, right: 30, bottom: 20, left: 40 };
@@ -125,11 +126,13 @@ describe('the drawing in words', () => {
   const result = estimate(plan);
 
   it('says what is seen, how large, and where it balances', () => {
-    const sentence = planSentence(plan, result, 'half', plan.surfaces[0]!);
+    const sentence = planSentence(plan, result, 'half', plan.surfaces[0]!, USUAL_UNITS);
     expect(sentence).toMatch(/^Wing, one half laid flat: 2 panels of 370 and 215 mm/);
     expect(sentence).toContain('ribs at 13 stations');
     expect(sentence).toContain('aft of the datum');
-    expect(planSentence(plan, result, 'side', null)).toContain('from the side: wing, tailplane, fin');
+    expect(planSentence(plan, result, 'side', null, USUAL_UNITS)).toContain(
+      'from the side: wing, tailplane, fin',
+    );
   });
 
   it('names the half only where there are two', () => {

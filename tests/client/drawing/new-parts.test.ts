@@ -8,6 +8,7 @@ import { startPlan } from '#client/features/gliders/start-plan.ts';
 import delivered from '#data/materials.json';
 import { estimate } from '#shared/core/estimate.ts';
 import type { Part, Plan, Surface } from '#shared/core/plan.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { DEMO_NAMES, demoPlan } from '#tests/support/plans.ts';
 
@@ -47,7 +48,7 @@ describe('a new part', () => {
     const { lines, notices } = estimate(plan);
     expect(lines).toHaveLength(order.length);
     for (const line of lines) expect(line.mass, line.name).toBeGreaterThan(0);
-    const words = notices.map((notice) => noticeWords(notice, plan));
+    const words = notices.map((notice) => noticeWords(notice, plan, USUAL_UNITS));
     expect(words.filter(({ tone }) => tone === 'red')).toEqual([]);
   });
 

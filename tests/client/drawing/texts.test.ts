@@ -8,6 +8,7 @@ import {
 } from '#client/features/drawing/forms/section-text.ts';
 import { parseStations, stationsText } from '#client/features/drawing/forms/station-text.ts';
 import { partNote, partSize } from '#client/features/drawing/lists/size-text.ts';
+import { unitsOf, USUAL_UNITS } from '#shared/format/units.ts';
 import { demoPlan } from '#tests/support/plans.ts';
 
 const problem = (read: object) => ('problem' in read ? String(read.problem) : '');
@@ -15,35 +16,37 @@ const problem = (read: object) => ('problem' in read ? String(read.problem) : ''
 describe('stations as text', () => {
   it('are read back as they were written', () => {
     const stations = [0, 42.5, 585];
-    expect(stationsText(stations)).toBe('0; 42.5; 585');
-    expect(parseStations(stationsText(stations))).toEqual({ value: stations });
+    expect(stationsText(stations, USUAL_UNITS)).toBe('0; 42.5; 585');
+    expect(parseStations(stationsText(stations, USUAL_UNITS), USUAL_UNITS)).toEqual({ value: stations });
   });
 
   it('may be inches and fractions between semicolons (25.4 mm, NIST SP 811)', () => {
-    expect(parseStations('0; 1 1/2 in; 100')).toEqual({ value: [0, expect.closeTo(38.1, 9), 100] });
-    expect(parseStations('0 50  100')).toEqual({ value: [0, 50, 100] });
+    expect(parseStations('0; 1 1/2 in; 100', USUAL_UNITS)).toEqual({
+      value: [0, expect.closeTo(38.1, 9), 100],
+    });
+    expect(parseStations('0 50  100', USUAL_UNITS)).toEqual({ value: [0, 50, 100] });
   });
 
   it('are refused with the piece that is no length', () => {
-    expect(problem(parseStations('0; fifty'))).toContain('“fifty”');
-    expect(problem(parseStations('  '))).toContain('at least one');
+    expect(problem(parseStations('0; fifty', USUAL_UNITS))).toContain('“fifty”');
+    expect(problem(parseStations('  ', USUAL_UNITS))).toContain('at least one');
   });
 });
 
 describe('a section as text', () => {
   it('is four digits, a plate, or the name of own points', () => {
-    expect(sectionText({ naca: '4409' })).toBe('4409');
-    expect(sectionText({ flat: 3 })).toBe('plate 3 mm');
-    expect(sectionText({ name: 'Mine', points: [] })).toBe('Mine');
-    expect(parseSection('NACA 2412', { flat: 3 })).toEqual({ value: { naca: '2412' } });
-    expect(parseSection('plate 3', { naca: '4409' })).toEqual({ value: { flat: 3 } });
-    expect(parseSection('1/8 in', { naca: '4409' })).toEqual({ value: { flat: 3.175 } });
-    expect(parseSection('2', { flat: 3 })).toEqual({ value: { flat: 2 } });
+    expect(sectionText({ naca: '4409' }, USUAL_UNITS)).toBe('4409');
+    expect(sectionText({ flat: 3 }, USUAL_UNITS)).toBe('plate 3 mm');
+    expect(sectionText({ name: 'Mine', points: [] }, USUAL_UNITS)).toBe('Mine');
+    expect(parseSection('NACA 2412', { flat: 3 }, USUAL_UNITS)).toEqual({ value: { naca: '2412' } });
+    expect(parseSection('plate 3', { naca: '4409' }, USUAL_UNITS)).toEqual({ value: { flat: 3 } });
+    expect(parseSection('1/8 in', { naca: '4409' }, USUAL_UNITS)).toEqual({ value: { flat: 3.175 } });
+    expect(parseSection('2', { flat: 3 }, USUAL_UNITS)).toEqual({ value: { flat: 2 } });
   });
 
   it('does not take half-typed digits for a thick plate', () => {
-    expect(problem(parseSection('44', { naca: '4409' }))).toContain('four digits');
-    expect(problem(parseSection('4400', { naca: '4409' }))).toContain('thickness');
+    expect(problem(parseSection('44', { naca: '4409' }, USUAL_UNITS))).toContain('four digits');
+    expect(problem(parseSection('4400', { naca: '4409' }, USUAL_UNITS))).toContain('thickness');
   });
 
   it('keeps own points when only their name is typed over', () => {
@@ -51,7 +54,9 @@ describe('a section as text', () => {
       [1, 0],
       [0, 0],
     ];
-    expect(parseSection('Thin', { name: 'Mine', points })).toEqual({ value: { name: 'Thin', points } });
+    expect(parseSection('Thin', { name: 'Mine', points }, USUAL_UNITS)).toEqual({
+      value: { name: 'Thin', points },
+    });
   });
 });
 
@@ -87,12 +92,12 @@ describe('a plate’s outline as text', () => {
       [100, -20],
       [100, 20],
     ];
-    expect(parseOutline(outlineText(outline))).toEqual({ value: outline });
+    expect(parseOutline(outlineText(outline, USUAL_UNITS), USUAL_UNITS)).toEqual({ value: outline });
   });
 
   it('is refused with the corner that is none, or with too few', () => {
-    expect(problem(parseOutline('0 0; 10; 5 5'))).toContain('“10”');
-    expect(problem(parseOutline('0 0; 10 0'))).toContain('at least 3');
+    expect(problem(parseOutline('0 0; 10; 5 5', USUAL_UNITS))).toContain('“10”');
+    expect(problem(parseOutline('0 0; 10 0', USUAL_UNITS))).toContain('at least 3');
   });
 });
 
@@ -100,8 +105,36 @@ describe('sizes in the list', () => {
   it('are short, tapers as from–to', () => {
     const parts = demoPlan('dunlin').surfaces[0]!.parts;
     const of = (id: string) => parts.find((part) => part.id === id)!;
-    expect(partSize({ ...of('spar-top'), width: [5, 3], height: [2, 2] } as never)).toBe('5–3 × 2');
-    expect(partSize(of('tip'))).toMatch(/^\d+ long$/);
+    const size = (part: object, units = USUAL_UNITS) => partSize(part as never, units);
+    expect(size({ ...of('spar-top'), width: [5, 3], height: [2, 2] })).toBe('5–3 × 2');
+    expect(size(of('tip'))).toMatch(/^\d+ long$/);
     expect(partNote(of('ribs-inner'))).toBe('9 a side');
+    // 1/4 in = 6.35 mm and 3/32 in = 2.38125 mm (25.4 mm, NIST SP 811).
+    const inches = unitsOf({ length: 'in' });
+    const spruce = { ...of('spar-top'), width: [6.35, 6.35], height: [2.38125, 2.38125] };
+    expect(size(spruce, inches)).toBe('1/4 × 3/32');
+  });
+});
+
+describe('in inches', () => {
+  const inches = unitsOf({ length: 'in' });
+
+  it('stations and corners are written and read in inches (25.4 mm, NIST SP 811)', () => {
+    expect(stationsText([0, 38.1, 590.55], inches)).toBe('0; 1 1/2; 23 1/4');
+    expect(parseStations('0; 1 1/2; 100 mm', inches)).toEqual({
+      value: [0, expect.closeTo(38.1, 9), 100],
+    });
+    const outline: [number, number][] = [
+      [-25.4, 6.35],
+      [12.7, -6.35],
+      [12.7, 6.35],
+    ];
+    expect(outlineText(outline, inches)).toBe('\u22121 0.25; 0.5 \u22120.25; 0.5 0.25');
+    expect(parseOutline(outlineText(outline, inches), inches)).toEqual({ value: outline });
+  });
+
+  it('a plate is named as its sheet is sold', () => {
+    expect(sectionText({ flat: 3.175 }, inches)).toBe('plate 1/8 in');
+    expect(parseSection('plate 1/16', { naca: '4409' }, inches)).toEqual({ value: { flat: 1.5875 } });
   });
 });

@@ -7,6 +7,7 @@ import whimbrelJson from '#data/demo/gliders/whimbrel.json' with { type: 'json' 
 import materialsJson from '#data/materials.json' with { type: 'json' };
 import { estimate } from '#shared/core/estimate.ts';
 import { runTrials, type TrialResult } from '#shared/core/wood-trial.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 
 const plan = planSchema.parse(whimbrelJson);
@@ -71,7 +72,7 @@ describe('trialHeadline', () => {
     refused: allUp === null ? { refused: 'wrong_side', takeOff: 1 } : null,
   });
   const headline = (...results: TrialResult[]) =>
-    trialHeadline({ results }).headline.replaceAll('\u202f', ' ');
+    trialHeadline({ results }, USUAL_UNITS).headline.replaceAll('\u202f', ' ');
 
   it('tells the best trial by what is left after the re-trim', () => {
     expect(

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { estimate } from '#shared/core/estimate.ts';
 import { csvTable } from '#server/presenters/csv.ts';
 import { sheetCsv, sheetFileName } from '#server/presenters/sheet-csv.ts';
+import { USUAL_UNITS } from '#shared/format/units.ts';
 import { demoPlan, DEMO_NAMES } from '#tests/support/plans.ts';
 import { smallPlan } from '../support/rows.ts';
 
@@ -21,7 +22,7 @@ describe('the balance sheet as CSV', () => {
     const result = estimate(plan);
     // Commas in names would only make this test's reading of the file harder.
     const lines = result.lines.map((line) => ({ ...line, name: line.id, group: 'all', material: null }));
-    const [head = [], ...rows] = rowsOf(sheetCsv({ plan, result: { ...result, lines } }));
+    const [head = [], ...rows] = rowsOf(sheetCsv({ plan, result: { ...result, lines } }, USUAL_UNITS));
     const [total = [], parts] = [rows.at(-1), rows.slice(0, -1)];
     expect(parts).toHaveLength(result.lines.length);
     for (const column of ['Mass g', 'Moment g mm', 'Share %'].map((title) => head.indexOf(title))) {
@@ -33,7 +34,7 @@ describe('the balance sheet as CSV', () => {
   it('writes a line with the name of its material and figures as printed', () => {
     const plan = smallPlan();
     const result = estimate(plan);
-    const rows = rowsOf(sheetCsv({ plan, result }));
+    const rows = rowsOf(sheetCsv({ plan, result }, USUAL_UNITS));
     const nose = rows.find(([id]) => id === 'item/nose');
     // 20 g at −120 mm: −2400 g·mm.
     expect(nose?.slice(0, 9)).toEqual([
@@ -53,7 +54,7 @@ describe('the balance sheet as CSV', () => {
 
   it('has a total of nothing for a plan of nothing', () => {
     const plan = smallPlan({ surfaces: [], items: [] });
-    const rows = rowsOf(sheetCsv({ plan, result: estimate(plan) }));
+    const rows = rowsOf(sheetCsv({ plan, result: estimate(plan) }, USUAL_UNITS));
     expect(rows.slice(1)).toEqual([['Total', '', '', '', '', '0.00', '0.00', '', '0.0', '0.0']]);
   });
 });

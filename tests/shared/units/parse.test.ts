@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { parseQuantity, type ParseProblem } from '#shared/units/parse.ts';
+import { parseQuantity } from '#shared/units/parse.ts';
+import type { ParseProblem } from '#shared/units/scan.ts';
 import { QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
 import { UNITS, type Unit } from '#shared/units/units.ts';
 
@@ -76,6 +77,52 @@ describe('what builders write', () => {
   });
 });
 
+describe('small sums', () => {
+  // Reckoned by hand; 1 in = 25.4 mm exactly (NIST SP 811).
+  const sums: [string, number, Unit][] = [
+    ['12+3.5', 15.5, 'mm'],
+    ['12 − 3,5', 8.5, 'mm'],
+    ['3*12.5', 37.5, 'mm'],
+    ['3 × 12,5 mm', 37.5, 'mm'],
+    ['3x4', 12, 'mm'],
+    ['25 ÷ 2', 12.5, 'mm'],
+    ['100/8/2', 6.25, 'mm'],
+    ['1/2/4', 0.125, 'mm'],
+    ['2 + 3*4', 14, 'mm'],
+    ['(2 + 3)*4', 20, 'mm'],
+    ['-(2 + 3)', -5, 'mm'],
+    ['12 - -3', 15, 'mm'],
+    ['12-31/2', -3.5, 'mm'],
+    ['3 - 1/2', 2.5, 'mm'],
+    ['1 000 + 1', 1001, 'mm'],
+    ['1/2 in + 1/16 in', 14.2875, 'in'],
+    ['2*1/16 in', 3.175, 'in'],
+    ['(1/2 + 1/4) in', 19.05, 'in'],
+    ['2 + 1/2 in', 14.7, 'in'],
+    ['3\'6" + 1/2"', 1079.5, 'in'],
+    ['2ft3in - 10 mm', 675.8, 'mm'],
+    ['1 m - 2 cm', 980, 'mm'],
+  ];
+  test.each(sums)('“%s” is %d mm, told in %s', (text, mm, unit) => {
+    expect(parseQuantity(text, 'length')).toEqual({ value: expect.closeTo(mm, 9), unit, sum: true });
+  });
+
+  test('a stroke divides, whatever the field’s unit: 31/2 is 15.5', () => {
+    expect(parseQuantity('31/2', 'length')).toEqual({ value: 15.5, unit: 'mm' });
+    expect(parseQuantity('31/2', 'length', 'in')).toEqual({ value: expect.closeTo(393.7, 9), unit: 'in' });
+    expect(parseQuantity('3 1/2', 'length', 'in')).toEqual({ value: expect.closeTo(88.9, 9), unit: 'in' });
+  });
+
+  test('a number without a unit is in the field’s own unit, also beside one with a unit', () => {
+    expect(parseQuantity('1 + 10 mm', 'length', 'in')).toMatchObject({ value: expect.closeTo(35.4, 9) });
+  });
+
+  test('masses and shares add up as lengths do', () => {
+    expect(parseQuantity('0.4 oz + 2', 'mass')).toMatchObject({ value: expect.closeTo(13.33980925, 9) });
+    expect(parseQuantity('50 % + 12', 'share')).toMatchObject({ value: expect.closeTo(0.62, 12) });
+  });
+});
+
 describe('what cannot be taken', () => {
   const refused: [string, Quantity, ParseProblem][] = [
     ['', 'length', 'missing'],
@@ -87,7 +134,13 @@ describe('what cannot be taken', () => {
     ['.', 'length', 'not_a_number'],
     ['--3', 'length', 'not_a_number'],
     ['1/', 'length', 'not_a_number'],
-    ['1/2/3', 'length', 'not_a_number'],
+    ['1 2', 'length', 'not_a_number'],
+    ['12 31/2', 'length', 'not_a_number'],
+    ['12 +', 'length', 'not_a_number'],
+    ['(12 + 3', 'length', 'not_a_number'],
+    ['12) + 3', 'length', 'not_a_number'],
+    ['(2 in) in', 'length', 'not_a_number'],
+    ["2.5' 3", 'length', 'not_a_number'],
     ['NaN', 'length', 'not_a_number'],
     ['Infinity', 'length', 'not_a_number'],
     ['9'.repeat(400), 'length', 'not_a_number'],
@@ -95,12 +148,16 @@ describe('what cannot be taken', () => {
     ['1.234.567', 'length', 'two_decimal_marks'],
     ['1/0', 'length', 'divided_by_zero'],
     ['3 1/0 in', 'length', 'divided_by_zero'],
+    ['5 / (2 - 2)', 'length', 'divided_by_zero'],
     ['3 furlongs', 'length', 'unknown_unit'],
     ['1e5', 'length', 'unknown_unit'],
     ['3 g', 'length', 'wrong_unit'],
     ['3 mm', 'mass', 'wrong_unit'],
     ['2\' 7"', 'mass', 'wrong_unit'],
     ['3 %', 'density', 'wrong_unit'],
+    ['3 mm + 2 g', 'length', 'wrong_unit'],
+    ['3 mm * 2 mm', 'length', 'several_units'],
+    ['3 / 2.5 mm', 'length', 'several_units'],
   ];
   test.each(refused)('“%s” in a %s field: %s', (text, quantity, problem) => {
     expect(parseQuantity(text, quantity)).toEqual({ problem });
@@ -124,7 +181,7 @@ describe('what cannot be taken', () => {
 test('whatever is typed, the answer is a finite value or a problem', () => {
   const quantity = fc.constantFrom(...(Object.keys(QUANTITIES) as Quantity[]));
   const keys = fc.string({
-    unit: fc.constantFrom(...'0123456789.,/ -−½"\'mgicnoz%'.split('')),
+    unit: fc.constantFrom(...'0123456789.,/ -−½"\'mgicnoz%+*()x'.split('')),
     maxLength: 12,
   });
   fc.assert(

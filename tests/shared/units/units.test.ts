@@ -2,7 +2,7 @@ import convertUnits from 'convert-units';
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { unitName } from '#shared/units/names.ts';
-import { otherUnit, QUANTITIES, unitFor, type Quantity } from '#shared/units/quantities.ts';
+import { otherUnit, QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
 import { convert, UNITS, type Unit } from '#shared/units/units.ts';
 
 /** Two roundings of a double at most lie between a factor and its definition. */
@@ -130,11 +130,6 @@ describe('quantities', () => {
     expect(otherUnit('loading', 'g/dm2')).toBe('oz/ft2');
     expect(otherUnit('angle', 'deg')).toBeNull();
     expect(otherUnit('percentMac', 'percent')).toBeNull();
-  });
-
-  test('the reader’s system decides the unit', () => {
-    expect(unitFor('density', 'metric')).toBe('kg/m3');
-    expect(unitFor('density', 'inch')).toBe('lb/ft3');
   });
 
   test('every unit but the plain number has a name in words of its own', () => {

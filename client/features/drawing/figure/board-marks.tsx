@@ -1,9 +1,9 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Surface } from '#shared/core/plan.ts';
 import { stationAt, surfaceLine } from '#shared/core/stations.ts';
 import { macMark, ribNumbers } from '#shared/drawing/marks.ts';
 import { tipLength } from '#shared/drawing/outline.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
-import { formatNumber } from '#shared/format/numbers.ts';
 import { SheetText } from './sheet-text.tsx';
 import { toPx, type Sheet } from './sheet.ts';
 
@@ -73,6 +73,7 @@ interface MacLineProps {
 const MAC_WORDS = 80;
 
 function MacLine({ mac, px, brief, cutX }: MacLineProps) {
+  const units = useUnits();
   const [x, y0] = px(mac.x, mac.s);
   const [, y1] = px(mac.x + mac.length, mac.s);
   const leftward = cutX !== null && cutX > x && cutX < x + MAC_WORDS;
@@ -90,7 +91,7 @@ function MacLine({ mac, px, brief, cutX }: MacLineProps) {
         y={y0 - (brief ? 4 : 6)}
         textAnchor={leftward ? 'end' : 'start'}
       >
-        MAC {formatNumber(mac.length, 1)}
+        MAC {units.format(mac.length, 'length', { bare: true })}
       </SheetText>
     </>
   );
@@ -98,13 +99,14 @@ function MacLine({ mac, px, brief, cutX }: MacLineProps) {
 
 /** One dimension line for the panels, root to tip, and the tip block. */
 function Spans({ surface, tip, px, y }: { surface: Surface; tip: number; px: Px; y: number }) {
+  const units = useUnits();
   const lengths = [...surface.panels.map((panel) => panel.span), ...(tip > 0 ? [tip] : [])];
   let from = 0;
   return lengths.map((length, i) => {
     const [a] = px(0, from);
     from += length;
     const [b] = px(0, from);
-    const text = formatNumber(length, Number.isInteger(length) ? 0 : 1);
+    const text = units.size(length, { bare: true });
     return (
       <g key={i}>
         <path

@@ -1,4 +1,5 @@
 import { useId, useMemo } from 'react';
+import { useUnits } from '#client/lib/units.ts';
 import { lineAt, targetsOf } from '#shared/drawing/hit.ts';
 import { balanceMarks } from '#shared/drawing/marks.ts';
 import type { Point, Shape } from '#shared/drawing/shape.ts';
@@ -32,6 +33,7 @@ export function PlanDrawing(props: PlanDrawingProps) {
   const { panX, panY } = zoom;
   const fitted = zoom.factor === 1;
   const id = useId();
+  const units = useUnits();
   const targets = useMemo(() => targetsOf(shapes), [shapes]);
   const toDrawing = (at: Point) => fromPx(sheet, [at[0] - panX, at[1] - panY]);
   const find = (at: Point) => lineAt(targets, toDrawing(at), REACH / sheet.scale);
@@ -59,7 +61,7 @@ export function PlanDrawing(props: PlanDrawingProps) {
       {...drag}
       className={fitted ? 'block touch-pan-y' : 'block cursor-grab touch-none'}
     >
-      <title id={id}>{planSentence(plan, result, view, surface)}</title>
+      <title id={id}>{planSentence(plan, result, view, surface, units)}</title>
       <g transform={`translate(${panX} ${panY})`}>
         {layers.map((layer) => (
           <ShapeLayer key={layer.key} shapes={layer.shapes} sheet={sheet} />

@@ -2,7 +2,7 @@ import type { Plan, Surface } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
 import { ribNumbers } from '#shared/drawing/marks.ts';
-import { formatNumber, formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { PlanViewName } from './drawings.ts';
 
 /** A surface's key as a heading: `wing` is `Wing`. */
@@ -24,25 +24,25 @@ export function planTitle(
   return `${surfaceTitle(surface)}${half}, laid flat`;
 }
 
-const mm = (value: number) => formatQuantity(value, 'length');
-
 /** The plan in a sentence, for who does not see it. */
 export function planSentence(
   plan: Plan,
   { planform, balance }: Estimate,
   view: PlanViewName,
   surface: Surface | null,
+  units: Units,
 ): string {
+  const mm = (value: number) => units.format(value, 'length');
   const where =
     balance.x === null
       ? ''
-      : ` The balance point lies ${mm(balance.x)} aft of the datum, ± ${mm(balance.u ?? 0)}.`;
+      : ` The balance point lies ${mm(balance.x)} aft of the datum, ± ${units.doubt(balance.u ?? 0, 'length')}.`;
   const form = surface && planform[surface.key];
   if (view === 'half' && surface && form) {
     const [root, tip] = [surface.panels[0]?.rootChord ?? 0, surface.panels.at(-1)?.tipChord ?? 0];
     const ribs = ribNumbers(surface).length;
     return (
-      `${surfaceTitle(surface)}, one half laid flat: ${panels(surface)}, chord ${mm(root)} at the root and ` +
+      `${surfaceTitle(surface)}, one half laid flat: ${panels(surface, units)}, chord ${mm(root)} at the root and ` +
       `${mm(tip)} at the tip, ${ribs === 0 ? 'no ribs' : `ribs at ${ribs} stations`}, ` +
       `mean aerodynamic chord ${mm(form.mac)}.${where}`
     );
@@ -53,7 +53,8 @@ export function planSentence(
   return `${plan.name} ${seen}: ${names === '' ? 'no surfaces' : names}, ${rest}.${where}`;
 }
 
-function panels({ panels: list }: Surface): string {
-  const spans = list.map(({ span }) => formatNumber(span, 0)).join(' and ');
-  return list.length === 1 ? `one panel of ${spans} mm` : `${list.length} panels of ${spans} mm`;
+function panels({ panels: list }: Surface, units: Units): string {
+  const spans = list.map(({ span }) => units.size(span, { bare: true })).join(' and ');
+  const unit = units.label('length');
+  return list.length === 1 ? `one panel of ${spans} ${unit}` : `${list.length} panels of ${spans} ${unit}`;
 }

@@ -1,8 +1,8 @@
 import { useId, useMemo } from 'react';
+import { useUnits } from '#client/lib/units.ts';
 import { lineAt, targetsOf } from '#shared/drawing/hit.ts';
 import type { SectionView } from '#shared/drawing/section-view.ts';
 import type { Point } from '#shared/drawing/shape.ts';
-import { formatNumber } from '#shared/format/numbers.ts';
 import type { Hover } from '../hover.ts';
 import { LitLayer, ShapeLayer } from './shape-layer.tsx';
 import { SheetText } from './sheet-text.tsx';
@@ -30,6 +30,7 @@ export function SectionDrawing(props: SectionDrawingProps) {
   const { sheet, width, height } = props.paper;
   const { shapes } = section;
   const id = useId();
+  const units = useUnits();
   const targets = useMemo(() => targetsOf(shapes), [shapes]);
   const find = (at: Point) => lineAt(targets, fromPx(sheet, at), REACH / sheet.scale);
   const drag = useDrag({
@@ -59,7 +60,7 @@ export function SectionDrawing(props: SectionDrawingProps) {
           stroke="var(--graphite)"
         />
         <SheetText x={(x0 + x1) / 2} y={height - 6} textAnchor="middle">
-          {`${formatNumber(section.chord, 1)} · ${thick}`}
+          {`${units.format(section.chord, 'length', { bare: true })} · ${thick}`}
         </SheetText>
       </g>
     </svg>

@@ -1,5 +1,6 @@
 import { memo, useId, useMemo } from 'react';
 import { useWidth } from '#client/hooks/use-width.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Plan, Surface } from '#shared/core/plan.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
 import { ribNumbers } from '#shared/drawing/marks.ts';
@@ -36,6 +37,7 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
   const { surface, materials, side, station, picked, hover, onPick, maxHeight, brief } = props;
   const [ref, width] = useWidth<HTMLDivElement>(brief ? 340 : 900);
   const id = useId();
+  const units = useUnits();
   const section = useMemo(
     () => sectionView(surface, station, materials, side),
     [surface, station, materials, side],
@@ -56,7 +58,7 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
     [bounds, width, margins, maxHeight],
   );
   const numbers = useMemo(() => ribNumbers(surface), [surface]);
-  const { title, thick, sentence } = sectionWords(surface, section, numbers);
+  const { title, thick, sentence } = sectionWords(surface, section, numbers, units);
   return (
     <figure aria-labelledby={id} className="min-w-0">
       <figcaption className="flex flex-wrap items-center gap-x-3">

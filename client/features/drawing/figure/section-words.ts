@@ -1,6 +1,6 @@
 import type { Surface } from '#shared/core/plan.ts';
 import type { SectionView } from '#shared/drawing/section-view.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { surfaceTitle } from './plan-words.ts';
 
 interface SectionWords {
@@ -10,13 +10,18 @@ interface SectionWords {
 }
 
 /** Where a section is taken and how thick it is; `ribs` are the stations of the surface's ribs, root to tip. */
-export function sectionWords(surface: Surface, section: SectionView, ribs: readonly number[]): SectionWords {
+export function sectionWords(
+  surface: Surface,
+  section: SectionView,
+  ribs: readonly number[],
+  units: Units,
+): SectionWords {
   const rib = ribs.findIndex((s) => Math.abs(s - section.s) < 1e-6);
-  const where = `${formatQuantity(section.s, 'length')} from the root`;
+  const where = `${units.format(section.s, 'length')} from the root`;
   const even = section.thicknessAt <= 0 || section.thicknessAt >= 1;
-  const at = even ? '' : ` at ${formatQuantity(section.thicknessAt, 'share')}`;
-  const thick = `${formatQuantity(section.thickness, 'length')} thick${at}`;
-  const chord = `chord ${formatQuantity(section.chord, 'length')}`;
+  const at = even ? '' : ` at ${units.format(section.thicknessAt, 'share')}`;
+  const thick = `${units.format(section.thickness, 'length')} thick${at}`;
+  const chord = `chord ${units.format(section.chord, 'length')}`;
   const between = section.rib === null ? ', between ribs' : '';
   return {
     title: rib >= 0 ? `Section at rib ${rib + 1} · ${where}` : `Section · ${where}`,

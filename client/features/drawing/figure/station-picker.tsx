@@ -1,4 +1,4 @@
-import { formatQuantity } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
 
 interface StationPickerProps {
   station: number;
@@ -16,6 +16,7 @@ const SNAP = 2;
 
 /** Chooses the station: a slider that falls onto ribs, and steps from rib to rib. */
 export function StationPicker({ station, ribs, length, onStation, label }: StationPickerProps) {
+  const units = useUnits();
   const before = ribs.findLast((s) => s < station - 1e-6);
   const after = ribs.find((s) => s > station + 1e-6);
   const slide = (value: number) => {
@@ -29,7 +30,7 @@ export function StationPicker({ station, ribs, length, onStation, label }: Stati
       <input
         type="range"
         aria-label={label}
-        aria-valuetext={`${formatQuantity(station, 'length')} from the root`}
+        aria-valuetext={`${units.format(station, 'length')} from the root`}
         min={0}
         max={Math.max(1, Math.round(length))}
         step={1}

@@ -1,7 +1,8 @@
 import { Select, type OptionGroup } from '#client/components/ui/select.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { MaterialCategory, Plan, PlanMaterial } from '#shared/core/plan.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
+import type { Units } from '#shared/format/units.ts';
 import { choices, type Fits } from '../edits/materials.ts';
 
 interface MaterialFieldProps {
@@ -25,10 +26,10 @@ const CATEGORIES: Record<MaterialCategory, string> = {
 };
 
 /** By what a material is weighed, in words. */
-export function figureOf({ density, areal, spread }: PlanMaterial): string {
-  if (density !== undefined) return formatQuantity(density, 'density');
-  if (areal !== undefined) return formatQuantity(areal, 'areal');
-  return spread === undefined ? '' : formatQuantity(spread, 'spread');
+export function figureOf({ density, areal, spread }: PlanMaterial, units: Units): string {
+  if (density !== undefined) return units.format(density, 'density');
+  if (areal !== undefined) return units.format(areal, 'areal');
+  return spread === undefined ? '' : units.format(spread, 'spread');
 }
 
 /** What a part is made of: the plan's own materials and, besides, those of the materials table. */
@@ -41,6 +42,7 @@ export function MaterialField({
   readOnly,
   onValue,
 }: MaterialFieldProps) {
+  const units = useUnits();
   const offered = choices({ materials }, table, fits);
   const current = materials[value];
   const all =
@@ -52,7 +54,7 @@ export function MaterialField({
     label: CATEGORIES[category],
     options: all
       .filter(({ material }) => material.category === category)
-      .map(({ key, material }) => ({ value: key, label: `${material.name}, ${figureOf(material)}` })),
+      .map(({ key, material }) => ({ value: key, label: `${material.name}, ${figureOf(material, units)}` })),
   }));
   const missing = current ? [] : [{ value, label: 'Choose a material', disabled: true }];
   return (

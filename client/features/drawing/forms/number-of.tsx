@@ -1,5 +1,5 @@
 import { NumberField } from '#client/components/ui/number-field.tsx';
-import { unitLabel } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import type { Form, KeysOf } from './form.ts';
 
@@ -24,6 +24,7 @@ export function NumberOf<T>({
   optional = false,
   step,
 }: NumberOfProps<T>) {
+  const units = useUnits();
   // The key is known to hold a number or nothing; an object with one computed key widens to strings.
   const change = (value: number | undefined) => form.set({ [field]: value } as Partial<T>, field);
   return (
@@ -36,7 +37,7 @@ export function NumberOf<T>({
       readOnly={form.readOnly}
       optional={optional}
       // Plain numbers keep the room of a unit, so that fields end in one line.
-      {...(unitLabel(quantity) === '' && { suffix: '\u00a0' })}
+      {...(units.label(quantity) === '' && { suffix: '\u00a0' })}
       {...(hint !== undefined && { hint })}
       {...(step !== undefined && { step })}
       onChange={(value, problem) => {

@@ -1,3 +1,4 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Part, Plan, PlanMaterial, Side } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import { fitsPart } from '../edits/materials.ts';
@@ -59,9 +60,10 @@ function GroupField({ form }: { form: Form<Part> }) {
 
 /** Where the figure of the material comes from, one press away. */
 export function SourceNote({ material }: { material: PlanMaterial | undefined }) {
+  const units = useUnits();
   if (!material?.source) return null;
   return (
-    <Fold quiet summary={`${material.name}, ${figureOf(material)}: where from`}>
+    <Fold quiet summary={`${material.name}, ${figureOf(material, units)}: where from`}>
       <p className="pb-1 text-note text-graphite">{material.source}</p>
     </Fold>
   );

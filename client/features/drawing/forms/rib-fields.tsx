@@ -1,4 +1,5 @@
 import { Select } from '#client/components/ui/select.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import { ribStations } from '#shared/core/half.ts';
 import type { Ribs } from '#shared/core/plan.ts';
 import type { Form } from './form.ts';
@@ -10,6 +11,7 @@ import { parseStations, stationsText } from './station-text.ts';
 /** Ribs stand in equal steps or at stations of their own; each can be turned into the other. */
 export function RibFields({ form }: { form: Form<Ribs> }) {
   const { value, set, issue, readOnly } = form;
+  const units = useUnits();
   const listed = value.stations !== undefined;
   const asList = () =>
     set({ stations: ribStations(value), from: undefined, to: undefined, count: undefined }, 'spacing');
@@ -35,10 +37,10 @@ export function RibFields({ form }: { form: Form<Ribs> }) {
       />
       {listed ? (
         <ParsedField
-          label="Stations, mm"
+          label={`Stations, ${units.label('length')}`}
           value={value.stations ?? []}
-          format={stationsText}
-          parse={parseStations}
+          format={(stations) => stationsText(stations, units)}
+          parse={(text) => parseStations(text, units)}
           onValue={(stations) => set({ stations }, 'stations')}
           error={issue('stations') ?? firstOf(value.stations ?? [], (i) => issue(`stations/${i}`))}
           readOnly={readOnly}

@@ -1,19 +1,19 @@
 import type { PointsSpec, SectionSpec } from '#shared/core/plan.ts';
-import { formatNumber } from '#shared/format/numbers.ts';
+import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { parseQuantity } from '#shared/units/parse.ts';
 import type { Parsed } from './parsed-field.tsx';
-import { stationsText } from './station-text.ts';
 
 /** A section as it is written: `4409`, `plate 3 mm`, or the name of own points. */
-export function sectionText(spec: SectionSpec): string {
+export function sectionText(spec: SectionSpec, units: Units): string {
   if ('naca' in spec) return spec.naca;
-  if ('flat' in spec) return `plate ${stationsText([spec.flat])} mm`;
+  if ('flat' in spec) return `plate ${units.size(spec.flat)}`.replaceAll(NARROW_SPACE, ' ');
   return spec.name;
 }
 
 /** Reads a section; own points keep their points and are renamed by what is typed. */
-export function parseSection(text: string, before: SectionSpec): Parsed<SectionSpec> {
+export function parseSection(text: string, before: SectionSpec, units: Units): Parsed<SectionSpec> {
   const typed = text.trim();
   const digits = /^(?:naca\s*)?(\d{4})$/i.exec(typed)?.[1];
   if (digits !== undefined) {
@@ -25,7 +25,7 @@ export function parseSection(text: string, before: SectionSpec): Parsed<SectionS
   // A bare number may be the beginning of four digits; a plate says so, has a unit, or was one before.
   const [, word, size = ''] = /^(plate|flat)?\s*(.*)$/i.exec(typed) ?? [];
   const isPlate = word !== undefined || 'flat' in before || /[a-z"″]/i.test(size);
-  const read = parseQuantity(size, 'length');
+  const read = parseQuantity(size, 'length', units.unit('length'));
   if (isPlate && 'value' in read && read.value > 0) return { value: { flat: read.value } };
   return { problem: 'Write four digits such as 4409, or a plate such as 3 mm.' };
 }

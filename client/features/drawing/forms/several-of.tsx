@@ -1,6 +1,8 @@
 import { useId, type ReactNode } from 'react';
 import { NumberField } from '#client/components/ui/number-field.tsx';
-import { formatQuantity, roundTo, unitLabel } from '#shared/format/numbers.ts';
+import { useUnits } from '#client/lib/units.ts';
+import { roundTo } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import type { Form, KeysOf } from './form.ts';
 
@@ -22,6 +24,7 @@ interface NumbersRowProps {
 /** Several numbers that belong together on one line under one label: a range, a taper, a place in space. */
 export function NumbersRow({ label, quantity, cells, between, readOnly }: NumbersRowProps) {
   const id = useId();
+  const units = useUnits();
   return (
     <div
       role="group"
@@ -48,7 +51,9 @@ export function NumbersRow({ label, quantity, cells, between, readOnly }: Number
             </div>
           </div>
         ))}
-        <span className="min-w-[2.5em] shrink-0 text-note text-graphite">{besideAll(cells, quantity)}</span>
+        <span className="min-w-[2.5em] shrink-0 text-note text-graphite">
+          {besideAll(cells, quantity, units)}
+        </span>
       </div>
     </div>
   );
@@ -62,12 +67,16 @@ interface RowOfProps<T, K> {
 }
 
 /** The unit; where all are one size that is sold by its fraction of an inch, that size in mm. */
-function besideAll(cells: readonly Cell[], quantity: Quantity): string {
+function besideAll(cells: readonly Cell[], quantity: Quantity, units: Units): string {
   const value = cells[0]?.value;
-  const isFraction = quantity === 'length' && value !== undefined && roundTo(value, 1) !== value;
+  const isFraction =
+    quantity === 'length' &&
+    units.unit('length') === 'mm' &&
+    value !== undefined &&
+    roundTo(value, 1) !== value;
   return isFraction && cells.every((cell) => cell.value === value)
-    ? formatQuantity(value, 'length', { fine: true })
-    : unitLabel(quantity);
+    ? units.format(value, 'length', { fine: true })
+    : units.label(quantity);
 }
 
 /** A value at the beginning of a range and one at its end. The second follows the first while they are the same. */

@@ -1,3 +1,4 @@
+import { useUnits } from '#client/lib/units.ts';
 import type { Bar, Plan, Plate, Solid } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import { fitsSolid } from '../edits/materials.ts';
@@ -74,6 +75,7 @@ function BarFields({ form }: { form: Form<Bar> }) {
 
 function PlateFields({ form }: { form: Form<Plate> }) {
   const { value, set, issue, readOnly } = form;
+  const units = useUnits();
   const bad = value.outline.map((_, i) => issue(`outline/${i}/0`) ?? issue(`outline/${i}/1`));
   return (
     <>
@@ -81,8 +83,8 @@ function PlateFields({ form }: { form: Form<Plate> }) {
         label="Outline x, z"
         hint="Corners in order, parted by semicolons."
         value={value.outline}
-        format={outlineText}
-        parse={parseOutline}
+        format={(outline) => outlineText(outline, units)}
+        parse={(text) => parseOutline(text, units)}
         onValue={(outline) => set({ outline }, 'outline')}
         error={issue('outline') ?? bad.find((text) => text !== undefined)}
         readOnly={readOnly}

@@ -1,4 +1,5 @@
 import { Button } from '#client/components/ui/button.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Item } from '#shared/core/plan.ts';
 import { newItem } from '../edits/new-rows.ts';
 import { changeItems } from '../edits/plan-edits.ts';
@@ -11,6 +12,7 @@ import { itemPlace } from './size-text.ts';
 /** Whatever has a mass and an arm: gear, fittings, ballast. */
 export function ItemsPane({ desk }: { desk: Desk }) {
   const { items } = desk.plan;
+  const units = useUnits();
   const add = () => {
     const bare = newItem();
     const item: Item = {
@@ -35,10 +37,10 @@ export function ItemsPane({ desk }: { desk: Desk }) {
     <RowsPane
       desk={desk}
       title="Gear, fittings, ballast"
-      sizeHead="mm aft"
+      sizeHead={`${units.label('length')} aft`}
       rows={items}
       lineOf={({ id }) => `item/${id}`}
-      sizeOf={itemPlace}
+      sizeOf={(row) => itemPlace(row, units)}
       pathOf={(i) => `items/${i}`}
       change={changeItems}
       empty="Nothing yet. Whatever has a mass and a place goes here: gear, wire, ballast."

@@ -2,6 +2,7 @@ import { useRef } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { Table, Th, Tr } from '#client/components/ui/table.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Surface } from '#shared/core/plan.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 import { changePanel, changeSurface, nextPanel, type PanelNumber } from '../edits/plan-edits.ts';
@@ -24,6 +25,7 @@ interface PanelsTableProps {
 /** Panels from root to tip, each number in its cell. */
 export function PanelsTable({ desk, surface, index }: PanelsTableProps) {
   const { panels } = surface;
+  const units = useUnits();
   const set = (i: number, field: PanelNumber, value: number) =>
     desk.edit(
       changeSurface(index, (s) => ({ ...s, panels: changePanel(s.panels, i, { [field]: value }) })),
@@ -49,7 +51,7 @@ export function PanelsTable({ desk, surface, index }: PanelsTableProps) {
   return (
     <>
       <div className="flex items-center justify-between">
-        <h2 className="caption px-2">Panels, root to tip · mm</h2>
+        <h2 className="caption px-2">Panels, root to tip · {units.label('length')}</h2>
         {desk.canEdit && (
           <Button ref={addButton} variant="plain" className="text-note" onClick={add}>
             Add a panel

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { useUnits } from '#client/lib/units.ts';
 import type { Panel, SectionSpec, Surface } from '#shared/core/plan.ts';
 import { changePanel, changeSurface } from '../edits/plan-edits.ts';
 import { ParsedField } from '../forms/parsed-field.tsx';
@@ -18,6 +19,7 @@ const END_WORDS: Record<End, string> = { rootSection: 'root', tipSection: 'tip' 
 /** Root and tip section of each panel: four digits, a plate, or own points. */
 export function SectionsTable({ desk, surface, index }: SectionsTableProps) {
   const [own, setOwn] = useState<{ panel: number; end: End } | null>(null);
+  const units = useUnits();
   const set = (i: number, end: End, spec: SectionSpec) =>
     desk.edit(
       changeSurface(index, (s) => ({ ...s, panels: changePanel(s.panels, i, { [end]: spec }) })),
@@ -38,8 +40,8 @@ export function SectionsTable({ desk, surface, index }: SectionsTableProps) {
                   inline={false}
                   label={`Panel ${i + 1}, ${END_WORDS[end]} section`}
                   value={panel[end]}
-                  format={sectionText}
-                  parse={(text) => parseSection(text, panel[end])}
+                  format={(spec) => sectionText(spec, units)}
+                  parse={(text) => parseSection(text, panel[end], units)}
                   onValue={(spec) => set(i, end, spec)}
                   error={issueOf(desk, index, i, end, panel)}
                   readOnly={!desk.canEdit}

@@ -1,13 +1,18 @@
 import { ribStations } from '#shared/core/half.ts';
 import type { Item, Pair, Part, Solid } from '#shared/core/plan.ts';
-import { formatNumber, formatQuantity, MINUS } from '#shared/format/numbers.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
+import type { Units } from '#shared/format/units.ts';
 
-/** Sizes as short as a list allows, mm without the unit: `5 × 2`, `5–3 × 2–1.5`, `1`. */
-const size = (value: number) => formatNumber(value, 2).replace(/\.?0+$/, '');
-const taper = ([a, b]: Pair) => (a === b ? size(a) : `${size(a)}–${size(b)}`);
+/** Sizes as short as a list allows, without the unit: `5 × 2`, `5–3 × 2–1.5`, `3/16`. */
+const sizesIn = (units: Units) => {
+  const size = (value: number) => units.size(value, { bare: true });
+  const taper = ([a, b]: Pair) => (a === b ? size(a) : `${size(a)}–${size(b)}`);
+  return { size, taper };
+};
 const share = (value: number) => formatQuantity(value, 'share');
 
-export function partSize(part: Part): string {
+export function partSize(part: Part, units: Units): string {
+  const { size, taper } = sizesIn(units);
   switch (part.kind) {
     case 'ribs':
       return size(part.thickness);
@@ -38,7 +43,8 @@ export function partNote(part: Part): string {
   return [`${ribStations(part).length} a side`, side].filter(Boolean).join(', ');
 }
 
-export function solidSize(solid: Solid): string {
+export function solidSize(solid: Solid, units: Units): string {
+  const { size, taper } = sizesIn(units);
   if (solid.shape === 'plate') {
     return solid.count > 1 ? `${solid.count} × ${size(solid.thickness)}` : size(solid.thickness);
   }
@@ -47,6 +53,6 @@ export function solidSize(solid: Solid): string {
 }
 
 /** Where an item sits along the model. */
-export function itemPlace(item: Item): string {
-  return `at ${formatNumber(item.at[0], 0).replace('-', MINUS)}`;
+export function itemPlace(item: Item, units: Units): string {
+  return `at ${units.format(item.at[0], 'length', { bare: true })}`;
 }

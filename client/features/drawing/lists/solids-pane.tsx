@@ -1,5 +1,6 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Solid } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import { fitsSolid, inTable, preferred } from '../edits/materials.ts';
@@ -19,6 +20,7 @@ interface SolidsPaneProps {
 /** Sticks, tubes and plates outside the surfaces. */
 export function SolidsPane({ desk, table }: SolidsPaneProps) {
   const { solids } = desk.plan;
+  const units = useUnits();
   const add = ({ choice, wishes }: (typeof SOLID_CHOICES)[number]) => {
     const bare = newSolid(choice);
     const material = preferred(desk.plan, table, fitsSolid(bare), wishes);
@@ -46,10 +48,10 @@ export function SolidsPane({ desk, table }: SolidsPaneProps) {
     <RowsPane
       desk={desk}
       title="Sticks, tubes and plates"
-      sizeHead="mm"
+      sizeHead={units.label('length')}
       rows={solids}
       lineOf={({ id }) => `solid/${id}`}
-      sizeOf={solidSize}
+      sizeOf={(row) => solidSize(row, units)}
       pathOf={(i) => `solids/${i}`}
       change={changeSolids}
       empty="Nothing yet. Fuselage sides, booms, blocks and joiners go here."

@@ -1,5 +1,6 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
+import { useUnits } from '#client/lib/units.ts';
 import type { Part, Surface } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import { fitsPart, inTable, preferred } from '../edits/materials.ts';
@@ -24,6 +25,7 @@ interface SurfacePaneProps {
 
 /** One surface on the left of its drawing: panels, sections, parts. */
 export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfacePaneProps) {
+  const units = useUnits();
   const change = (parts: (parts: Part[]) => Part[]) => changeParts(index, parts);
   const add = (choice: PartChoice) => {
     const bare = newPart(choice, surface);
@@ -57,11 +59,11 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
       <RowsPane
         desk={desk}
         title="Parts"
-        sizeHead="mm"
+        sizeHead={units.label('length')}
         rows={surface.parts}
         lineOf={(part) => `${surface.key}/${part.id}`}
         noteOf={partNote}
-        sizeOf={partSize}
+        sizeOf={(row) => partSize(row, units)}
         pathOf={(i) => `surfaces/${index}/parts/${i}`}
         change={change}
         empty="No parts yet. Begin with ribs and spars, or with a sheet for a plate tail."

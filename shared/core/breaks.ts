@@ -69,16 +69,21 @@ export function breaksUnderSkins(half: Half, strip: Strip, from: number, to: num
  */
 export function breaksOverWeb(half: Half, web: Web, from: number, to: number): number[] {
   const x = (station: Station) => pairAt(web.at, web.from, web.to, station.s);
-  const skins = half.skinEdges.flatMap((edge) =>
-    signChanges(half.line, from, to, 1, (station) => x(station) - edge),
-  );
-  const strips = half.strips.flatMap((strip) => {
-    const side = (sign: 1 | -1) =>
-      signChanges(half.line, Math.max(from, strip.from), Math.min(to, strip.to), 4, (station) => {
+  // A web square to the root stays on its side of every edge.
+  const edges = web.at[0] === web.at[1] ? [] : half.skinEdges;
+  const skins = edges.flatMap((edge) => signChanges(half.line, from, to, 1, (station) => x(station) - edge));
+  const strips: number[] = [];
+  for (const strip of half.strips) {
+    const [low, high] = [Math.max(from, strip.from), Math.min(to, strip.to)];
+    strips.push(strip.from, strip.to);
+    if (low >= high) continue;
+    for (const sign of [1, -1]) {
+      const side = (station: Station) => {
         const place = stripAt(strip, station);
         return place.centre - x(station) * station.chord + (sign * place.width) / 2;
-      });
-    return [strip.from, strip.to, ...side(1), ...side(-1)];
-  });
+      };
+      strips.push(...signChanges(half.line, low, high, 4, side));
+    }
+  }
   return [...half.skinEnds, ...skins, ...strips];
 }

@@ -1,22 +1,15 @@
 import { liftsOf } from './flight-points.ts';
-import { itemLine, solidLine, surfaceLines, type LineWithLump } from './lines.ts';
+import { laySurface, newMemory, type EstimateMemory, type LaidSurface } from './laid-surface.ts';
+import { itemLine, solidLine, type LineWithLump } from './lines.ts';
 import { loadingOf, speedAt, squareDecimetres } from './loading.ts';
 import { centroid, NOTHING, sumLumps, type Lump } from './lump.ts';
-import type { Notice } from './notices.ts';
+import { noticeBoard, type Notice } from './notices.ts';
 import { balanceUncertainty, massUncertainty, percentOfMac } from './balance.ts';
 import { reynoldsNumber } from './atmosphere.ts';
-import { classAreaOf, planformOf } from './planform.ts';
-import type { Plan, Surface } from './plan.ts';
-import type { Balance, Estimate, Inertia, Line, Planform, Totals } from './result.ts';
-import { selfCrossingAt } from './section.ts';
+import { classAreaOf } from './planform.ts';
+import type { Plan } from './plan.ts';
+import type { Balance, Estimate, Inertia, Line, Totals } from './result.ts';
 import { sparOf } from './spar.ts';
-import { surfaceLine, type SurfaceLine } from './stations.ts';
-
-interface Laid {
-  surface: Surface;
-  line: SurfaceLine;
-  planform: Planform;
-}
 
 /** Lowest Reynolds number at which a light section still gives the lift that is usually asked of it. */
 const LOW_REYNOLDS = 20_000;
@@ -25,25 +18,20 @@ const LOW_REYNOLDS = 20_000;
  * The whole answer from one plan: planforms, a line for each part, item and solid, totals, balance, loading and
  * speeds. Pure and synchronous: the same code answers in the browser while typing and on the server. The plan must
  * satisfy `planSchema`. What does not fit is told in `notices`, in the order found, each once.
+ *
+ * Who estimates again and again while a plan is edited hands the same `memory` in each time: surfaces that are the
+ * very objects of the time before are not measured again. The answer is the same without.
  * @throws RangeError when a part or solid names a material that the plan does not hold
  * @example estimate(EXAMPLE_PLAN).totals.mass // → 19.256
  */
-export function estimate(plan: Plan): Estimate {
-  const notices: Notice[] = [];
-  const told = new Set<string>();
-  const tell = (notice: Notice) => {
-    const key = `${notice.code} ${notice.path}`;
-    if (told.has(key)) return;
-    told.add(key);
-    notices.push(notice);
-  };
-  const laid = plan.surfaces.map((surface): Laid => {
-    const line = surfaceLine(surface);
-    checkSurface(surface, line, tell);
-    return { surface, line, planform: planformOf(surface, line) };
-  });
+export function estimate(plan: Plan, memory: EstimateMemory = newMemory()): Estimate {
+  const { notices, tell } = noticeBoard();
+  const laid = plan.surfaces.map((surface) => laySurface(plan, surface, memory));
+  memory.surfaces = laid;
+  for (const { shapeNotices } of laid) shapeNotices.forEach(tell);
+  for (const { partNotices } of laid) partNotices.forEach(tell);
   const lines = [
-    ...laid.flatMap(({ surface, line }) => surfaceLines(plan, surface, line, tell)),
+    ...laid.flatMap((surface) => surface.lines),
     ...plan.solids.map((solid) => solidLine(plan, solid, tell)),
     ...plan.items.map(itemLine),
   ];
@@ -78,19 +66,7 @@ export function estimate(plan: Plan): Estimate {
   };
 }
 
-function checkSurface(surface: Surface, line: SurfaceLine, tell: (notice: Notice) => void): void {
-  line.panels.forEach((panel, i) => {
-    for (const end of ['root', 'tip'] as const) {
-      const at = selfCrossingAt(panel[end](panel.chord[end === 'root' ? 0 : 1]));
-      if (at !== null) tell({ code: 'section_self_crossing', path: surface.key, panel: i, end, at });
-    }
-    const inner = line.panels[i - 1];
-    const step = inner ? panel.chord[0] - inner.chord[1] : 0;
-    if (Math.abs(step) > 1e-6) tell({ code: 'chord_step', path: surface.key, panel: i, by: step });
-  });
-}
-
-function totalsOf(lines: readonly LineWithLump[], laid: readonly Laid[]): Totals {
+function totalsOf(lines: readonly LineWithLump[], laid: readonly LaidSurface[]): Totals {
   const sum = sumLumps(lines.map(({ lump }) => lump));
   const wings = new Set(
     laid.filter(({ surface }) => surface.role === 'wing').map(({ surface }) => surface.key),
@@ -119,7 +95,7 @@ function inertiaOf(sum: Lump): Inertia | null {
   return { xx: (y ?? 0) + (z ?? 0), yy: (x ?? 0) + (z ?? 0), zz: (x ?? 0) + (y ?? 0) };
 }
 
-function classAreaOfAll(laid: readonly Laid[]): number {
+function classAreaOfAll(laid: readonly LaidSurface[]): number {
   return laid
     .filter(({ surface }) => surface.role !== 'fin')
     .reduce((sum, { surface, line }) => sum + classAreaOf(surface, line), 0);

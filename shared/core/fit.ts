@@ -18,19 +18,22 @@ export function developedAt(
   extent: [number, number] = [0, 1],
 ): Sums {
   const { section, chord } = station;
-  const faces = facesOf(part);
+  const [low, high] = extent;
+  const [one, other] = facesOf(part);
   const sum: Sums = { amount: 0, x: 0, z: 0 };
-  const roundNose = faces.length === 2 && faces.every((f) => f.from <= 0) && extent[0] <= 0;
-  const arcs = roundNose
-    ? [wrapArc(section, Math.min(faces[0]?.to ?? 0, extent[1]), Math.min(faces[1]?.to ?? 0, extent[1]))]
-    : faces.flatMap(({ face, from, to }) => {
-        const [a, b] = [Math.max(from, extent[0]), Math.min(to, extent[1])];
-        return b > a ? [arcBetween(section, face, a, b)] : [];
-      });
-  for (const arc of arcs) {
+  const add = (arc: Sums) => {
     sum.amount += arc.amount * chord;
     sum.x += arc.x * chord * chord;
     sum.z += arc.z * chord * chord;
+  };
+  if (one && other && one.from <= 0 && other.from <= 0 && low <= 0) {
+    add(wrapArc(section, Math.min(one.to, high), Math.min(other.to, high)));
+    return sum;
+  }
+  for (const range of [one, other]) {
+    if (!range) continue;
+    const [a, b] = [Math.max(range.from, low), Math.min(range.to, high)];
+    if (b > a) add(arcBetween(section, range.face, a, b));
   }
   return sum;
 }

@@ -95,6 +95,26 @@ export function halfOf(
   };
 }
 
+/**
+ * The half with only those strips, skins and cap strips that may be met from `from` to `to`, mm: of many cut into
+ * bays a part has few about it, and they are asked for at every sample.
+ * @example stretchOf(EXAMPLE_HALF, 0, 100).strips.length // → 1
+ */
+export function stretchOf(half: Half, from: number, to: number): Half {
+  const isNear = (part: { from: number; to: number }) =>
+    Math.min(part.from, part.to) <= to + SLACK && Math.max(part.from, part.to) >= from - SLACK;
+  return {
+    ...half,
+    strips: half.strips.filter(isNear),
+    skins: half.skins.filter(isNear),
+    caps: half.caps.filter(isNear),
+    over: {
+      upper: half.over.upper.filter(({ skin }) => isNear(skin)),
+      lower: half.over.lower.filter(({ skin }) => isNear(skin)),
+    },
+  };
+}
+
 /** Place and size of a strip where a station cuts it, mm. */
 export interface StripAt {
   /** mm behind the leading edge: front, centre line, back */

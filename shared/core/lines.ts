@@ -99,8 +99,9 @@ export function surfaceLines(plan: Plan, surface: Surface, line: SurfaceLine, te
   const lineOf = (part: Part, measure: Measure, grams: Lump, cv: number) => {
     if (grams.amount <= 0) tell({ code: 'part_measures_nothing', path: `${surface.key}/${part.id}` });
     const group = part.group ?? surface.key;
-    const head = { id: `${surface.key}/${part.id}`, name: part.name, group, surface: surface.key };
-    return makeLine({ ...head, material: part.material }, measure, grams, cv, root);
+    const { name, material } = part;
+    const head = { id: `${surface.key}/${part.id}`, name, group, surface: surface.key, material };
+    return makeLine(head, measure, grams, cv, root);
   };
   for (const part of surface.parts) {
     if (part.kind === 'glue') continue;
@@ -169,15 +170,20 @@ function makeLine(
 ): LineWithLump {
   const { pieces, length, area, volume } = measure;
   const at = centroid(grams) ?? otherwiseAt;
+  const { id, name, group, surface, material } = head;
   const line: Line = {
-    ...head,
+    id,
+    name,
+    group,
+    surface,
+    material,
     pieces,
     length,
     area,
     volume,
     mass: grams.amount,
     u: grams.amount * cv,
-    at: [...at],
+    at: [at[0], at[1], at[2]],
     moment: grams.first[0],
   };
   return { line, lump: grams };

@@ -20,12 +20,16 @@ export const emptyLump = (): Lump => ({ amount: 0, first: [0, 0, 0], second: [0,
  * @example (lump = emptyLump(), addAmount(lump, 2, [10, 0, 0]), lump) // → { amount: 2, first: [20, 0, 0], second: [200, 0, 0] }
  */
 export function addAmount(lump: Lump, amount: number, at: Vec3, spreadX = 0): void {
+  const { first, second } = lump;
+  const [x, y, z] = at;
   lump.amount += amount;
-  for (const axis of [0, 1, 2] as const) {
-    lump.first[axis] += amount * at[axis];
-    lump.second[axis] += amount * at[axis] * at[axis];
-  }
-  lump.second[0] += amount * spreadX;
+  first[0] += amount * x;
+  first[1] += amount * y;
+  first[2] += amount * z;
+  second[0] += amount * x * x;
+  second[1] += amount * y * y;
+  second[2] += amount * z * z;
+  second[0] += amount * spreadX;
 }
 
 /**

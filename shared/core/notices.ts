@@ -27,3 +27,19 @@ export type Notice =
   | { code: 'reynolds_low'; path: 'plan'; reynolds: number; clMax: number };
 
 export type NoticeCode = Notice['code'];
+
+/**
+ * Gathers notices in the order in which they are told, each code once for a path.
+ * @example (board = noticeBoard(), board.tell({ code: 'no_wing', path: 'plan' }), board.notices.length) // → 1
+ */
+export function noticeBoard(): { notices: Notice[]; tell: (notice: Notice) => void } {
+  const notices: Notice[] = [];
+  const told = new Set<string>();
+  const tell = (notice: Notice) => {
+    const key = `${notice.code} ${notice.path}`;
+    if (told.has(key)) return;
+    told.add(key);
+    notices.push(notice);
+  };
+  return { notices, tell };
+}

@@ -1,10 +1,10 @@
+import { runningArc, runningArea, type FaceName, type Running } from './section-running.ts';
 import type { Section } from './section.ts';
 
 /**
  * An area or an arc of a section of unit chord between two x/c, with first moments: all are shares of the chord, its
- * square or its cube. Running integrals are made once per section by the
- * trapezoid rule at two step widths and extrapolated (Richardson), so that 200 nodes give eight digits on a
- * smooth section and exactness on a polygon.
+ * square or its cube. Running integrals are made once per section and extrapolated from two step widths, so that
+ * 200 nodes give eight digits on a smooth section and exactness on a polygon.
  */
 export interface Sums {
   /** of the section's area, or of the arc's length */
@@ -12,55 +12,6 @@ export interface Sums {
   /** first moments about nose and chord line */
   x: number;
   z: number;
-}
-
-export type FaceName = 'upper' | 'lower';
-
-interface Running {
-  amount: Float64Array;
-  x: Float64Array;
-  z: Float64Array;
-}
-
-/** Running integral of what one interval of nodes (i, j) contributes. */
-function runningOf(section: Section, piece: (i: number, j: number) => Sums): Running {
-  const n = section.x.length;
-  const run: Running = { amount: new Float64Array(n), x: new Float64Array(n), z: new Float64Array(n) };
-  const keep = (into: Float64Array, i: number, first: number, second: number, whole: number) => {
-    const correction = (first + second - whole) / 3;
-    const before = into[i - 2] ?? 0;
-    into[i - 1] = before + first + correction / 2;
-    into[i] = before + first + second + correction;
-  };
-  for (let i = 2; i < n; i += 2) {
-    const first = piece(i - 2, i - 1);
-    const second = piece(i - 1, i);
-    const whole = piece(i - 2, i);
-    keep(run.amount, i, first.amount, second.amount, whole.amount);
-    keep(run.x, i, first.x, second.x, whole.x);
-    keep(run.z, i, first.z, second.z, whole.z);
-  }
-  return run;
-}
-
-function areaPiece(s: Section, i: number, j: number): Sums {
-  const dx = (s.x[j] ?? 0) - (s.x[i] ?? 0);
-  const [x0, x1] = [s.x[i] ?? 0, s.x[j] ?? 0];
-  const [u0, u1, l0, l1] = [s.upper[i] ?? 0, s.upper[j] ?? 0, s.lower[i] ?? 0, s.lower[j] ?? 0];
-  const t0 = Math.max(0, u0 - l0);
-  const t1 = Math.max(0, u1 - l1);
-  return {
-    amount: (dx * (t0 + t1)) / 2,
-    x: (dx * (t0 * (2 * x0 + x1) + t1 * (x0 + 2 * x1))) / 6,
-    z: (dx * (u0 * u0 + u0 * u1 + u1 * u1 - l0 * l0 - l0 * l1 - l1 * l1)) / 6,
-  };
-}
-
-function arcPiece(s: Section, face: FaceName, i: number, j: number): Sums {
-  const z = s[face];
-  const [x0, x1, z0, z1] = [s.x[i] ?? 0, s.x[j] ?? 0, z[i] ?? 0, z[j] ?? 0];
-  const amount = Math.sqrt((x1 - x0) ** 2 + (z1 - z0) ** 2);
-  return { amount, x: (amount * (x0 + x1)) / 2, z: (amount * (z0 + z1)) / 2 };
 }
 
 interface RunningSet {
@@ -120,7 +71,7 @@ const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x
  * @example areaBetween(readSection({ flat: 3 }, 100), 0.2, 0.7).amount.toFixed(6) // → '0.015000'
  */
 export function areaBetween(section: Section, from: number, to: number): Sums {
-  const run = (setOf(section).area ??= runningOf(section, (i, j) => areaPiece(section, i, j)));
+  const run = (setOf(section).area ??= runningArea(section));
   const { x, upper, lower } = section;
   const thickness = (i: number) => Math.max(0, (upper[i] ?? 0) - (lower[i] ?? 0));
   const middle = (i: number) => ((upper[i] ?? 0) + (lower[i] ?? 0)) / 2;
@@ -168,7 +119,7 @@ export function spreadBetween(section: Section, from: number, to: number): numbe
  */
 export function arcBetween(section: Section, face: FaceName, from: number, to: number): Sums {
   const set = setOf(section);
-  const run = (set[face] ??= runningOf(section, (i, j) => arcPiece(section, face, i, j)));
+  const run = (set[face] ??= runningArc(section, face));
   const { x, [face]: z } = section;
   const fore = (i: number, f: number): Fore => ({
     share: f,

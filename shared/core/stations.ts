@@ -48,6 +48,23 @@ export interface Station {
   readonly section: Section;
 }
 
+/** A station that looks its section up only when that is asked for. */
+class PanelStation implements Station {
+  constructor(
+    readonly s: number,
+    readonly panel: PanelLine,
+    private readonly share: number,
+    readonly chord: number,
+    readonly chordSlope: number,
+    readonly leadingEdge: number,
+    readonly leadingEdgeSlope: number,
+  ) {}
+
+  get section(): Section {
+    return this.panel.sectionAt(this.share);
+  }
+}
+
 function blender(panel: Panel): Pick<PanelLine, 'root' | 'tip' | 'sectionAt'> {
   const { root, tip } = readPair(panel.rootSection, panel.tipSection);
   const made = new Map<number, Section>();
@@ -123,17 +140,15 @@ export function stationAt(line: SurfaceLine, s: number, panel: PanelLine = panel
   const [c0, c1] = panel.chord;
   const [x0, x1] = panel.leadingEdge;
   const chord = c0 + share * (c1 - c0);
-  const station: Station = {
+  const station = new PanelStation(
     s,
     panel,
+    share,
     chord,
-    chordSlope: (c1 - c0) / span,
-    leadingEdge: x0 + share * (x1 - x0),
-    leadingEdgeSlope: (x1 - x0) / span,
-    get section() {
-      return panel.sectionAt(share);
-    },
-  };
+    (c1 - c0) / span,
+    x0 + share * (x1 - x0),
+    (x1 - x0) / span,
+  );
   panel.known.set(s, station);
   return station;
 }

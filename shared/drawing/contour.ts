@@ -1,5 +1,6 @@
 import type { Section } from '#shared/core/section.ts';
-import { ordinateAt, type FaceName } from '#shared/core/section-integrals.ts';
+import { ordinateAt } from '#shared/core/section-integrals.ts';
+import type { FaceName } from '#shared/core/section-running.ts';
 import type { Station } from '#shared/core/stations.ts';
 import type { Point } from './shape.ts';
 

@@ -1,6 +1,6 @@
 import { breaksUnderSkins } from '../breaks.ts';
 import { developedAt, skinOver, stripZ } from '../fit.ts';
-import { covers, ribExtent, stripAt, type Half } from '../half.ts';
+import { covers, ribExtent, stretchOf, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Strip } from '../plan.ts';
 import { areaBetween } from '../section-integrals.ts';
@@ -18,8 +18,9 @@ export function measureJoints(half: Half): Measure {
   const lump = emptyLump();
   for (const { part, stations } of half.ribs) {
     for (const station of stations) {
-      for (const strip of half.strips) ribOnStrip(half, strip, station, part.thickness, lump);
-      ribOnSkins(half, station, part.thickness, lump);
+      const near = stretchOf(half, station.s, station.s);
+      for (const strip of near.strips) ribOnStrip(near, strip, station, part.thickness, lump);
+      ribOnSkins(near, station, part.thickness, lump);
     }
   }
   for (const strip of half.strips) stripUnderSkins(half, strip, lump);
@@ -77,13 +78,14 @@ function stripUnderSkins(half: Half, strip: Strip, joints: Joints): void {
   const faces = FACES[strip.seat];
   if (faces.length === 0 || half.skins.length === 0) return;
   const [from, to] = [Math.min(strip.from, strip.to), Math.max(strip.from, strip.to)];
-  for (const { station, ds } of samplesOver(half.line, from, to, breaksUnderSkins(half, strip, from, to))) {
+  const near = stretchOf(half, from, to);
+  for (const { station, ds } of samplesOver(half.line, from, to, breaksUnderSkins(near, strip, from, to))) {
     if (station.chord <= 0) continue;
     const place = stripAt(strip, station);
     const x = place.centre / station.chord;
-    const touching = faces.filter((face) => skinOver(half, station, face, x) > 0).length;
+    const touching = faces.filter((face) => skinOver(near, station, face, x) > 0).length;
     if (touching === 0) continue;
     const area = touching * place.width * Math.hypot(1, stripSkew(strip, station)) * ds;
-    addAmount(joints, area, pointOf(station, place.centre, stripZ(half, strip, station, place)));
+    addAmount(joints, area, pointOf(station, place.centre, stripZ(near, strip, station, place)));
   }
 }

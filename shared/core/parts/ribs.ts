@@ -1,5 +1,5 @@
 import { developedAt, heightsAt, skinOver, stripZ } from '../fit.ts';
-import { covers, ribExtent, ribStations, stripAt, type Half } from '../half.ts';
+import { covers, ribExtent, ribStations, stretchOf, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Ribs } from '../plan.ts';
 import { areaBetween, ordinateAt, spreadBetween, type Sums } from '../section-integrals.ts';
@@ -67,9 +67,10 @@ export function measureRibs(half: Half, part: Ribs, basis: Basis): Measure {
       continue;
     }
     const station = stationAt(half.line, s);
-    const net = ribArea(half, station);
-    const [from, to] = ribExtent(half, station);
-    if (net.amount <= 0 || notchedThrough(half, station)) {
+    const near = stretchOf(half, s, s);
+    const net = ribArea(near, station);
+    const [from, to] = ribExtent(near, station);
+    if (net.amount <= 0 || notchedThrough(near, station)) {
       half.notice({ code: 'rib_notched_through', path, station: s });
     }
     pieces += 1;

@@ -1,6 +1,6 @@
 import { breaksUnderSkins, signChanges } from '../breaks.ts';
 import { heightsAt, stripZ } from '../fit.ts';
-import { covers, stripAt, type Half, type StripAt } from '../half.ts';
+import { covers, stretchOf, stripAt, type Half, type StripAt } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Strip } from '../plan.ts';
 import { pairAt, pairSlope, pointOf, samplesOver, stationAt, type Station } from '../stations.ts';
@@ -58,6 +58,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();
   const total = { length: 0, area: 0, volume: 0 };
+  const near = stretchOf(half, from, to);
   const breaks = [...breaksUnderSkins(half, part, from, to)];
   if (basis === 'area') {
     const broadSide = (station: Station) => stripAt(part, station).width - stripAt(part, station).height;
@@ -72,7 +73,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
     total.length += along;
     total.area += face * along;
     total.volume += area * along;
-    const at = pointOf(station, place.centre + shift * place.width, stripZ(half, part, station, place));
+    const at = pointOf(station, place.centre + shift * place.width, stripZ(near, part, station, place));
     addAmount(lump, (basis === 'volume' ? area : face) * along, at, place.width ** 2 / 12);
   }
   checkStrip(half, part, from, to);

@@ -1,6 +1,6 @@
 import { breaksOverWeb, signChanges } from '../breaks.ts';
 import { skinOver } from '../fit.ts';
-import { covers, stripAt, type Half } from '../half.ts';
+import { covers, stretchOf, stripAt, type Half } from '../half.ts';
 import { addAmount, emptyLump } from '../lump.ts';
 import type { Web } from '../plan.ts';
 import { ordinateAt } from '../section-integrals.ts';
@@ -39,8 +39,10 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
   const [from, to] = clippedRange(half, part);
   const lump = emptyLump();
   let area = 0;
+  const near = stretchOf(half, from, to);
+  const room = (station: Station) => webRoom(near, part, station);
   const add = (station: Station, width: number) => {
-    const { height, middle } = webRoom(half, part, station);
+    const { height, middle } = room(station);
     if (height <= 0) {
       half.notice({ code: 'web_without_height', path, station: station.s });
       return;
@@ -50,9 +52,9 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
     area += height * width;
     addAmount(lump, height * width * (basis === 'volume' ? part.thickness : 1), at);
   };
-  const breaks = breaksOverWeb(half, part, from, to);
+  const breaks = breaksOverWeb(near, part, from, to);
   // Where the room closes the web ends, on the way between two breaks.
-  breaks.push(...signChanges(half.line, from, to, 8, (station) => webRoom(half, part, station).height));
+  breaks.push(...signChanges(half.line, from, to, 8, (station) => room(station).height));
   for (const { station, ds } of samplesOver(half.line, from, to, breaks)) add(station, ds);
   for (const { part: ribs, stations } of half.ribs) {
     for (const station of stations) if (covers({ from, to }, station.s)) add(station, -ribs.thickness);

@@ -1,7 +1,15 @@
 import { z } from 'zod';
 import { estimate, estimateInput } from '#shared/schemas/estimate.ts';
 import { gliderSave, gliderSaveList, gliderState, saveNameInput } from '#shared/schemas/glider-save.ts';
-import { glider, gliderInput, gliderList } from '#shared/schemas/glider.ts';
+import {
+  archiveInput,
+  copiesInput,
+  glider,
+  gliderCopies,
+  gliderInput,
+  gliderList,
+  gliderSummary,
+} from '#shared/schemas/glider.ts';
 import { material, materialInput, materialList, materialUses } from '#shared/schemas/material.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';
@@ -17,7 +25,11 @@ const NAMES: Record<string, z.ZodType> = {
   Estimate: estimate,
   GliderInput: gliderInput,
   Glider: glider,
+  GliderSummary: gliderSummary,
   GliderList: gliderList,
+  GliderCopies: gliderCopies,
+  CopiesInput: copiesInput,
+  ArchiveInput: archiveInput,
   GliderSave: gliderSave,
   GliderSaveList: gliderSaveList,
   GliderState: gliderState,

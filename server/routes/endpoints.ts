@@ -1,6 +1,7 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
 import { estimateEndpoints } from './estimates.ts';
 import { gliderEndpoints } from './gliders.ts';
+import { gliderBenchEndpoints } from './glider-bench.ts';
 import { gliderSaveEndpoints } from './glider-saves.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
@@ -12,6 +13,7 @@ import { userEndpoints } from './users.ts';
 export const ENDPOINTS: readonly Endpoint[] = [
   ...estimateEndpoints,
   ...gliderEndpoints,
+  ...gliderBenchEndpoints,
   ...gliderSaveEndpoints,
   ...sheetEndpoints,
   ...materialEndpoints,

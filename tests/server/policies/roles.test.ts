@@ -24,6 +24,7 @@ const GLIDER_ROUTES: Record<string, { action: GliderAction; allowed: GliderRole[
   'get /gliders/:id': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'put /gliders/:id': { action: 'edit', allowed: ['owner', 'builder'] },
   'delete /gliders/:id': { action: 'delete', allowed: ['owner'] },
+  'put /gliders/:id/archived': { action: 'archive', allowed: ['owner'] },
   'get /gliders/:id/saves/:version': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'post /gliders/:id/saves/:version/restore': { action: 'edit', allowed: ['owner', 'builder'] },
   'put /gliders/:id/saves/:version/name': { action: 'nameSave', allowed: ['owner', 'builder'] },

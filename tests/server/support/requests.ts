@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import type { Person } from './people.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
@@ -9,6 +10,8 @@ const BODIES: Record<string, () => object> = {
   'post /estimates': () => ({ plan: smallPlan() }),
   'post /gliders': () => ({ plan: smallPlan() }),
   'put /gliders/:id': () => ({ plan: smallPlan() }),
+  'post /gliders/copies': () => ({ ids: [randomUUID()] }),
+  'put /gliders/:id/archived': () => ({ archived: true }),
   'put /gliders/:id/saves/:version/name': () => ({ name: 'Before covering' }),
   'post /gliders/:id/sheets': () => ({ note: '' }),
   'post /materials': () => MATERIAL,

@@ -10,7 +10,7 @@ export interface World {
   owner: Person;
   glider: Awaited<ReturnType<typeof makeGlider>>;
   /** parameters of a path that lead to the owner's rows */
-  paramsOf(endpoint: Pick<Endpoint, 'path'>): Params;
+  paramsOf: (endpoint: Pick<Endpoint, 'path'>) => Params;
 }
 
 export async function makeWorld(app: TestApp): Promise<World> {

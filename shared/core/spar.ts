@@ -45,26 +45,47 @@ export function worstFlange(
   flanges: readonly Flange[],
   moment: number,
 ): { stress: number; margin: number } | null {
+  const worst = worstOf(flanges, moment);
+  return worst && { stress: worst.stress, margin: worst.margin };
+}
+
+/**
+ * The same with the flange itself, so that it can be named.
+ * @example worstOf([{ area: 60, z: 0, height: 6, modulus: 1000, strength: 25 }], 600)?.flange.height // → 6
+ */
+export function worstOf<F extends Flange>(
+  flanges: readonly F[],
+  moment: number,
+): { stress: number; margin: number; flange: F } | null {
   const section = bendingStiffness(flanges);
   if (!section || moment <= 0) return null;
-  return flanges.reduce<{ stress: number; margin: number } | null>((worst, f) => {
-    const arm = Math.abs(f.z - section.axis) + f.height / 2;
-    const stress = (moment * f.modulus * arm) / section.stiffness;
+  return flanges.reduce<{ stress: number; margin: number; flange: F } | null>((worst, flange) => {
+    const arm = Math.abs(flange.z - section.axis) + flange.height / 2;
+    const stress = (moment * flange.modulus * arm) / section.stiffness;
     if (stress <= 0) return worst;
-    const margin = f.strength / stress;
-    return worst && worst.margin <= margin ? worst : { stress, margin };
+    const margin = flange.strength / stress;
+    return worst && worst.margin <= margin ? worst : { stress, margin, flange };
   }, null);
 }
 
 /** Places along the half span that are looked at, root and tip included. */
 const STATIONS = 21;
 
-function carries(strip: Strip, material: PlanMaterial | undefined): boolean {
+/**
+ * True of a strip that is reckoned to carry bending: seated `top` or `bottom`, of a material whose modulus and
+ * strength the plan knows.
+ * @example carries(EXAMPLE_SPAR, EXAMPLE_PLAN.materials['balsa']) // → true
+ */
+export function carries(strip: Strip, material: PlanMaterial | undefined): boolean {
   const isSpar = strip.seat === 'top' || strip.seat === 'bottom';
   return isSpar && material?.modulus !== undefined && material.strength !== undefined;
 }
 
-function flangesAt(plan: Plan, half: Half, station: Station): Flange[] {
+/**
+ * The strips that carry bending where a station cuts them, each with its part's id.
+ * @example flangesAt(EXAMPLE_PLAN, EXAMPLE_HALF, EXAMPLE_STATION)[0].part // → 'spar'
+ */
+export function flangesAt(plan: Plan, half: Half, station: Station): (Flange & { part: string })[] {
   return half.strips.flatMap((strip) => {
     const material = plan.materials[strip.material];
     if (!carries(strip, material) || !covers(strip, station.s)) return [];
@@ -73,12 +94,12 @@ function flangesAt(plan: Plan, half: Half, station: Station): Flange[] {
     if (area <= 0) return [];
     const z = stripZ(half, strip, station, place);
     const [modulus, strength] = [(material?.modulus ?? 0) * 1000, material?.strength ?? 0];
-    return [{ area, z, height: place.height, modulus, strength }];
+    return [{ part: strip.id, area, z, height: place.height, modulus, strength }];
   });
 }
 
-/** Distance of a station from the root along the projected span, mm. */
-function projected(line: SurfaceLine, s: number): number {
+/** Distance of a station from the root along the projected span, mm. @example projected(EXAMPLE_LINE, 120) // → 120 */
+export function projected(line: SurfaceLine, s: number): number {
   return line.panels.reduce((sum, p) => sum + Math.max(0, Math.min(s, p.end) - p.start) * Math.abs(p.cos), 0);
 }
 

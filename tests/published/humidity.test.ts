@@ -9,8 +9,16 @@ import { expectNear, SAME_SUM } from './tolerance.ts';
 const air = (percent: number) => ({ temperature: 20, humidity: percent / 100 });
 
 const stick: Solid = {
-  ...{ id: 'stick', name: 'Stick', group: 'fuselage', material: 'balsa', shape: 'bar', profile: 'rectangle' },
-  ...{ from: [0, 0, 0], to: [1000, 0, 0], width: [10, 10], height: [10, 10] },
+  id: 'stick',
+  name: 'Stick',
+  group: 'fuselage',
+  material: 'balsa',
+  shape: 'bar',
+  profile: 'rectangle',
+  from: [0, 0, 0],
+  to: [1000, 0, 0],
+  width: [10, 10],
+  height: [10, 10],
 };
 const wooden = (changes: Partial<Plan> = {}) => planOf([], { solids: [stick], ...changes });
 const found = (plan: Plan, here: number, workshop: number) =>

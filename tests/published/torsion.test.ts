@@ -17,12 +17,26 @@ test.each(reference.tubes.rows)(`$tube (${reference.tubes.source})`, ({ area, wa
 describe('a closed nose', () => {
   const parts: Part[] = [
     {
-      ...{ id: 'nose', name: 'Nose sheeting', kind: 'skin', material: 'balsa', from: 0, to: 500 },
-      ...{ seat: 'wrap', start: 0.3, end: 0.3, thickness: 1 },
+      id: 'nose',
+      name: 'Nose sheeting',
+      kind: 'skin',
+      material: 'balsa',
+      from: 0,
+      to: 500,
+      seat: 'wrap',
+      start: 0.3,
+      end: 0.3,
+      thickness: 1,
     },
     {
-      ...{ id: 'web', name: 'Web', kind: 'web', material: 'balsa', from: 0, to: 500 },
-      ...{ at: [0.3, 0.3], thickness: 1 },
+      id: 'web',
+      name: 'Web',
+      kind: 'web',
+      material: 'balsa',
+      from: 0,
+      to: 500,
+      at: [0.3, 0.3],
+      thickness: 1,
     },
   ];
   const materials = {
@@ -61,8 +75,16 @@ describe('a closed nose', () => {
   it('of two skins, top and bottom, is as stiff as of one round the nose', () => {
     const [, web] = parts;
     const face = (seat: 'top' | 'bottom'): Part => ({
-      ...{ id: seat, name: seat, kind: 'skin', material: 'balsa', from: 0, to: 500 },
-      ...{ seat, start: 0, end: 0.3, thickness: 1 },
+      id: seat,
+      name: seat,
+      kind: 'skin',
+      material: 'balsa',
+      from: 0,
+      to: 500,
+      seat,
+      start: 0,
+      end: 0.3,
+      thickness: 1,
     });
     const two = closedNoseOf(plan, box(web ? [face('top'), face('bottom'), web] : []));
     expectNear(two?.stiffness, closedNoseOf(plan, box(parts))?.stiffness ?? Number.NaN, SAME_SUM);

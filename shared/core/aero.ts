@@ -8,8 +8,8 @@ export function liftSlope(aspectRatio: number): number {
 }
 
 /**
- * Downwash slope dε/dα = 2a/(π·AR) far behind an elliptically loaded wing of that aspect ratio (R. C. Nelson, Flight
- * Stability and Automatic Control, ch. 2); `slope` a per radian. A pure number.
+ * Downwash slope dε/dα = 2a/(π·AR) far behind an elliptically loaded wing of that aspect ratio (R. C. Nelson,
+ * Flight Stability and Automatic Control, ch. 2); `slope` a per radian. A pure number.
  * @example downwashSlope(10).toFixed(5) // → '0.32792'
  */
 export function downwashSlope(aspectRatio: number, slope = liftSlope(aspectRatio)): number {

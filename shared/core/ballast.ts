@@ -10,8 +10,8 @@ export type Ballast = { mass: number } | BallastRefusal;
 
 /**
  * Ballast at arm `at` that brings `mass` from balance point `from` to `to`: m = M·(x₀ − x₁)/(x₁ − b)
- * (FAA-H-8083-1B, ch. 7). g and mm; fore and aft or sideways alike. A negative answer is refused with the mass that would
- * have to come off there.
+ * (FAA-H-8083-1B, ch. 7). g and mm; fore and aft or sideways alike. A negative answer is refused with the mass that
+ * would have to come off there.
  * @example ballastFor(120, 82, 75, -60) // → { mass: 6.222222222222222 }
  * @example ballastFor(120, 82, 75, 200) // → { refused: 'wrong_side', takeOff: 6.72 }
  */

@@ -93,8 +93,8 @@ function placeAt(of: HungLabel, row: number, side: LabelSide): Placed {
 }
 
 /**
- * What a place costs by itself, in rows: its depth, its side, a label that leaves the drawing (0 to `width`) or lies
- * over an upright line (`posts`, each an x).
+ * What a place costs by itself, in rows: its depth, its side, a label that leaves the drawing (0 to `width`) or
+ * lies over an upright line (`posts`, each an x).
  * @example ownCost(candidates({ key: 'a', x: 100, radius: 10, width: 40, height: 12 })[4], 200, []) // → 1.4
  */
 export function ownCost(mine: Placed, width: number, posts: readonly number[]): number {

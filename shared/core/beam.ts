@@ -90,8 +90,8 @@ function smallDistance(reference: WingReference | null, target: Target | undefin
 }
 
 /**
- * How far the bar leans, degrees, when the balance point lies `by` mm aft of the pivot: half the limit at `small` mm
- * (above 0), always more for more, never beyond the limit.
+ * How far the bar leans, degrees, when the balance point lies `by` mm aft of the pivot: half the limit at `small`
+ * mm (above 0), always more for more, never beyond the limit.
  * @example tiltOf(2, 2) // → 1.75
  */
 export function tiltOf(by: number, small: number): number {

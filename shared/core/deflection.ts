@@ -25,9 +25,9 @@ export function endRise(places: readonly { curvature: number; lever: number; ds:
 }
 
 /**
- * How the wing's spar bends at load factor 1 under the mass beside the wing, `carriedG` in g, shared as in `sparOf`:
- * curvature M/EI of the strips that carry, clamped at the root, shear and sheeting left out. Null where there is no
- * load, or where no strip carries somewhere between the root and the outermost that does.
+ * How the wing's spar bends at load factor 1 under the mass beside the wing, `carriedG` in g, shared as in
+ * `sparOf`: curvature M/EI of the strips that carry, clamped at the root, shear and sheeting left out. Null where
+ * there is no load, or where no strip carries somewhere between the root and the outermost that does.
  * @example bendOf(EXAMPLE_PLAN, EXAMPLE_WING, 10)?.reach // → 500
  */
 export function bendOf(plan: Plan, wing: Surface, carriedG: number): SparBend | null {

@@ -1,6 +1,6 @@
 /**
- * The faces that a skin, cap strip or covering lies on, each with its x/c limits in order. Without limits it lies on
- * the whole chord.
+ * The faces that a skin, cap strip or covering lies on, each with its x/c limits in order. Without limits it lies
+ * on the whole chord.
  * @example facesOf({ seat: 'wrap', start: 0.3, end: 0.1 }) // → [{ face: 'upper', from: 0, to: 0.3 }, { face: 'lower', from: 0, to: 0.1 }]
  */
 export function facesOf(part: {

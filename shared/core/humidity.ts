@@ -38,8 +38,8 @@ export function takesUpWater(material: Pick<PlanMaterial, 'category'> | undefine
 /**
  * The model as drawn with its wood at rest with an air: mass and balance as a bound, for all wood is taken as bare.
  * Each wood's mass goes from the moisture at which its density holds (`moistureAtDensity`) to that of the air, as
- * (1 + x₂)/(1 + x₁). Wood whose moisture the plan does not know was weighed in `workshop` air. Null where the moisture
- * equation says nothing of one of the airs.
+ * (1 + x₂)/(1 + x₁). Wood whose moisture the plan does not know was weighed in `workshop` air. Null where the
+ * moisture equation says nothing of one of the airs.
  * @example inAir(EXAMPLE_PLAN, EXAMPLE_ESTIMATE, { temperature: 20, humidity: 0.5 }, { temperature: 20, humidity: 0.5 })?.mass // → 19.256
  */
 export function inAir(

@@ -86,8 +86,8 @@ function measureOn(
 }
 
 /**
- * Lines of all parts of a surface, in their order, both halves of a mirrored one in one line. Glue is measured last,
- * for its share is of the mass of the wood. `tell` hears of every part that does not fit or comes to nothing.
+ * Lines of all parts of a surface, in their order, both halves of a mirrored one in one line. Glue is measured
+ * last, for its share is of the mass of the wood. `tell` hears of every part that does not fit or comes to nothing.
  * @throws RangeError when the plan has no material under a part's key
  * @example surfaceLines(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, () => undefined).map(({ line }) => line.mass) // → [2.256, 1, 5]
  */
@@ -145,7 +145,8 @@ export function solidLine(plan: Plan, solid: Solid, tell: Tell): LineWithLump {
 }
 
 /**
- * Line of whatever has a mass and an arm: a point, with the uncertainty that the item gives (0 where it gives none).
+ * Line of whatever has a mass and an arm: a point, with the uncertainty that the item gives (0 where it gives
+ * none).
  * @example itemLine(EXAMPLE_PLAN.items[0]).line.moment // → -200
  */
 export function itemLine(item: Item): LineWithLump {

@@ -1,9 +1,9 @@
 import type { Spar, SparStation } from './result.ts';
 
 /**
- * Most lift that a wing can give at a speed, over its weight: n = (V/V_s)², both speeds in the same unit and the same
- * air, V_s the stall speed at n = 1 (the stall line of the flight envelope).
- * What a line, a throw or a gust asks for cannot be more: the wing stalls first. Null without a stall speed.
+ * Most lift that a wing can give at a speed, over its weight: n = (V/V_s)², both speeds in the same unit and the
+ * same air, V_s the stall speed at n = 1 (the stall line of the flight envelope). What a line, a throw or a gust
+ * asks for cannot be more: the wing stalls first. Null without a stall speed.
  * @example loadFactorAt(12, 4) // → 9
  */
 export function loadFactorAt(speed: number, stall: number | null): number | null {
@@ -11,8 +11,8 @@ export function loadFactorAt(speed: number, stall: number | null): number | null
 }
 
 /**
- * Speed at which a wing can just reach a load factor, in the unit of the stall speed: V = V_s·√n. Null without a stall
- * speed.
+ * Speed at which a wing can just reach a load factor, in the unit of the stall speed: V = V_s·√n. Null without a
+ * stall speed.
  * @example speedAtLoadFactor(9, 4) // → 12
  */
 export function speedAtLoadFactor(n: number, stall: number | null): number | null {
@@ -44,8 +44,8 @@ export function worstStation({ stations, worst }: Spar): SparStation | null {
 }
 
 /**
- * Load factor at which the least margin is 1, where the spar as reckoned just reaches its strength: the load factor of
- * the stations times their least margin. Null where no strip carries.
+ * Load factor at which the least margin is 1, where the spar as reckoned just reaches its strength: the load factor
+ * of the stations times their least margin. Null where no strip carries.
  * @example loadFactorAtStrength({ stations: [{ s: 0, moment: 9, stress: 2, margin: 6 }], worst: 0 }, 2) // → 12
  */
 export function loadFactorAtStrength(spar: Spar, loadFactor: number): number | null {

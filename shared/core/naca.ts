@@ -46,9 +46,10 @@ function contourPoint(digits: FourDigits, u: number, face: 1 | -1): { x: number;
 }
 
 /**
- * Ordinate z/c of one face (1 the upper, −1 the lower) on the vertical through x/c, 0 to 1. On a cambered section that vertical meets the contour
- * over another camber station, found by the secant rule in √x, which stays smooth at the nose. The hair's
- * breadth of nose in front of x = 0 (0.03 % of the chord on a 4412) has no ordinate: `nacaNoseArc` measures it.
+ * Ordinate z/c of one face (1 the upper, −1 the lower) on the vertical through x/c, 0 to 1. On a cambered section
+ * that vertical meets the contour over another camber station, found by the secant rule in √x, which stays smooth
+ * at the nose. The hair's breadth of nose in front of x = 0 (0.03 % of the chord on a 4412) has no ordinate:
+ * `nacaNoseArc` measures it.
  * @example nacaOrdinate('0012', 0.3, 1).toFixed(5) // → '0.06002'
  */
 export function nacaOrdinate(code: string, x: number, face: 1 | -1): number {

@@ -49,8 +49,8 @@ export function linearProduct(run: number, f0: number, f1: number, g0: number, g
 }
 
 /**
- * Chord integrals of one half, exact for each panel and for tip blocks (half ellipses on the last chord). A block on
- * one side only of a mirrored surface counts by half, so that twice the half is the whole.
+ * Chord integrals of one half, exact for each panel and for tip blocks (half ellipses on the last chord). A block
+ * on one side only of a mirrored surface counts by half, so that twice the half is the whole.
  * @example chordIntegrals(EXAMPLE_WING) // → { area: 50_000, projected: 50_000, square: 5_000_000, leadingEdge: 0, y: 12_500_000 }
  */
 export function chordIntegrals(surface: Surface, line: SurfaceLine = surfaceLine(surface)): ChordIntegrals {

@@ -12,8 +12,8 @@ export interface PolygonIntegrals {
 }
 
 /**
- * Area, centroid and second moments of a polygon given by its corners in order, in the powers of their unit; it closes
- * by itself. All noughts, and no centroid, where it holds no area; one that crosses itself is not for this.
+ * Area, centroid and second moments of a polygon given by its corners in order, in the powers of their unit; it
+ * closes by itself. All noughts, and no centroid, where it holds no area; one that crosses itself is not for this.
  * @example polygonIntegrals([[0, 0], [6, 0], [0, 3]]).area // → 9
  * @example polygonIntegrals([[0, 0], [6, 0], [0, 3]]).centroid // → [2, 1]
  */

@@ -16,8 +16,8 @@ const nothing = (n: number): Running => ({
 });
 
 /**
- * Grows a running integral by two intervals up to node i, by the trapezoid rule for each of them (`first`, `second`)
- * and for both in one (`whole`), extrapolated from the two (Richardson).
+ * Grows a running integral by two intervals up to node i, by the trapezoid rule for each of them (`first`,
+ * `second`) and for both in one (`whole`), extrapolated from the two (Richardson).
  */
 function grow(into: Float64Array, i: number, first: number, second: number, whole: number): void {
   const correction = (first + second - whole) / 3;

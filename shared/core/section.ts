@@ -79,8 +79,8 @@ function interpolate(face: readonly [number, number][], x: number): number {
 }
 
 /**
- * Reads a section on a grid of x/c, by default its own. A plate of constant thickness depends on the chord (mm) that
- * it is read at; other sections do not.
+ * Reads a section on a grid of x/c, by default its own. A plate of constant thickness depends on the chord (mm)
+ * that it is read at; other sections do not.
  * @example readSection({ flat: 3 }, 100).upper[0] // → 0.015
  * @example readSection({ naca: '0012' }, 100).noseOnTop // → 0
  */

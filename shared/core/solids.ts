@@ -50,9 +50,9 @@ function measurePlate(plate: Plate, basis: Basis, notice: (notice: Notice) => vo
 }
 
 /**
- * What a solid measures, mm, mm², mm³, in body axes: a bar by its cross-section along its own length, a plate by its
- * outline. `basis` says by what its material is sold; `notice` is told of a wall too thick for its tube and of an
- * outline without area.
+ * What a solid measures, mm, mm², mm³, in body axes: a bar by its cross-section along its own length, a plate by
+ * its outline. `basis` says by what its material is sold; `notice` is told of a wall too thick for its tube and of
+ * an outline without area.
  * @example measureSolid(EXAMPLE_PLAN.solids[0], 'volume', () => undefined).volume // → 10_000
  */
 export function measureSolid(solid: Solid, basis: Basis, notice: (notice: Notice) => void): Measure {

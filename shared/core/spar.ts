@@ -106,9 +106,9 @@ export function projected(line: SurfaceLine, s: number): number {
 /**
  * Bending along the half span of a wing: load by Schrenk for `carriedG`, the model's mass less the wing's own, g,
  * times the plan's load factor (1 where none is asked for). Top and bottom strips carry as far as the plan knows
- * modulus and strength of their material; without any, or without a load, there are no stations. `moment` in N·mm, `stress` in MPa, `margin` = strength over stress;
- * `worst` is the station, mm from the root, with the least margin. Strengths are averages by density: an estimate,
- * and no licence to launch hard.
+ * modulus and strength of their material; without any, or without a load, there are no stations. `moment` in N·mm,
+ * `stress` in MPa, `margin` = strength over stress; `worst` is the station, mm from the root, with the least
+ * margin. Strengths are averages by density: an estimate, and no licence to launch hard.
  * @example sparOf(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, 10).worst // → 0
  */
 export function sparOf(plan: Plan, wing: Surface, line: SurfaceLine, carriedG: number): Spar {

@@ -203,8 +203,8 @@ export interface Sample {
 
 /**
  * Samples for integrals over [from, to], mm, split at panel breaks and at the further `breaks`, so that each piece
- * is smooth: ∫f ds = Σ f(station)·ds, exact for a polynomial up to the ninth degree in each piece. The range is clipped
- * to the surface; breaks may come in any order, those outside are passed over.
+ * is smooth: ∫f ds = Σ f(station)·ds, exact for a polynomial up to the ninth degree in each piece. The range is
+ * clipped to the surface; breaks may come in any order, those outside are passed over.
  * @example samplesOver(EXAMPLE_LINE, 0, 500, [200]).reduce((sum, { ds }) => sum + ds, 0) // → 500
  */
 export function samplesOver(

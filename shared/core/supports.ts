@@ -42,8 +42,9 @@ export interface WheelLayout {
 }
 
 /**
- * Balance point aft of the datum, in the unit of the lengths given, by the four wheel-layout forms (FAA-H-8083-30B ch. 6, figs 6-29 to 6-32; the printed sign of the
- * second form is the text's slip, its own working is used). A check on `balanceOnSupports`.
+ * Balance point aft of the datum, in the unit of the lengths given, by the four wheel-layout forms (FAA-H-8083-30B
+ * ch. 6, figs 6-29 to 6-32; the printed sign of the second form is the text's slip, its own working is used). A
+ * check on `balanceOnSupports`.
  * @example balanceOfLayout({ third: 'nose', datum: 'forward of mains', datumToMains: 128, wheelbase: 78, onThird: 340, total: 2006 }).toFixed(4) // → '114.7797'
  */
 export function balanceOfLayout(layout: WheelLayout): number {

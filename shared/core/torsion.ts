@@ -15,8 +15,9 @@ export interface TubeWall {
 }
 
 /**
- * Torsional stiffness GJ of a thin-walled closed tube, N·mm²: Bredt's second formula, GJ = 4A²/Σ(s/(G·t)) (R. Bredt,
- * VDI-Zeitschrift 40, 1896). `area` is the one that the walls enclose, mm². Null for a tube that is not closed.
+ * Torsional stiffness GJ of a thin-walled closed tube, N·mm²: Bredt's second formula, GJ = 4A²/Σ(s/(G·t)) (R.
+ * Bredt, VDI-Zeitschrift 40, 1896). `area` is the one that the walls enclose, mm². Null for a tube that is not
+ * closed.
  * @example bredtStiffness(100, [{ length: 40, thickness: 1, shear: 200 }]) // → 200_000
  */
 export function bredtStiffness(area: number, walls: readonly TubeWall[]): number | null {
@@ -88,9 +89,9 @@ function stiffnessAt(plan: Plan, half: Half, station: Station): number | null {
 }
 
 /**
- * Torsional stiffness of the nose that sheeting and a web close, from the root to the first place where they do not:
- * an extra beside bending, for a rough comparison. Ribs, covering and the rest of the section are left out. Null where
- * no closed nose begins at the root, or a wall's material has no modulus.
+ * Torsional stiffness of the nose that sheeting and a web close, from the root to the first place where they do
+ * not: an extra beside bending, for a rough comparison. Ribs, covering and the rest of the section are left out.
+ * Null where no closed nose begins at the root, or a wall's material has no modulus.
  * @example closedNoseOf(EXAMPLE_PLAN, EXAMPLE_WING) // → null
  */
 export function closedNoseOf(plan: Plan, wing: Surface): ClosedNose | null {

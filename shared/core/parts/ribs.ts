@@ -52,8 +52,8 @@ function notchedThrough(half: Half, station: Station): boolean {
 }
 
 /**
- * Ribs of one half. Volume = net area × share left by lightening × thickness, at each station. A rib past the tip is
- * told and left out, one that is notched through is told and counts as a piece.
+ * Ribs of one half. Volume = net area × share left by lightening × thickness, at each station. A rib past the tip
+ * is told and left out, one that is notched through is told and counts as a piece.
  * @example measureRibs(EXAMPLE_HALF, EXAMPLE_RIBS, 'volume').volume // → 11_280
  */
 export function measureRibs(half: Half, part: Ribs, basis: Basis): Measure {

@@ -11,8 +11,8 @@ import type { Basis, Measure } from './measure.ts';
 const spreadOf = (start: number, end: number, chord: number) => ((end - start) * chord) ** 2 / 12;
 
 /**
- * Sheeting: developed length × chord, integrated over s, × thickness. A skin that runs past the trailing edge, or that
- * the section has no room for, is told.
+ * Sheeting: developed length × chord, integrated over s, × thickness. A skin that runs past the trailing edge, or
+ * that the section has no room for, is told.
  * @example measureSkin(EXAMPLE_HALF, EXAMPLE_SKIN, 'volume').volume // → 25_000
  */
 export function measureSkin(half: Half, part: Skin, basis: Basis): Measure {

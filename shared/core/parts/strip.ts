@@ -50,8 +50,9 @@ export function stripSkew(strip: Strip, station: Station): number {
 }
 
 /**
- * A spar, stringer or edge: its cross-section integrated along its own length, plan-view skew included. A strip that
- * leaves chord or section, or shares room with another, is told. Of a material known by area the broader side counts.
+ * A spar, stringer or edge: its cross-section integrated along its own length, plan-view skew included. A strip
+ * that leaves chord or section, or shares room with another, is told. Of a material known by area the broader side
+ * counts.
  * @example measureStrip(EXAMPLE_HALF, EXAMPLE_SPAR, 'volume').volume // → 5000
  */
 export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {

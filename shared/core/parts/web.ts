@@ -30,8 +30,8 @@ export function webRoom(half: Half, web: Web, station: Station): { height: numbe
 }
 
 /**
- * A shear web, grain upright, in the bays between ribs: height integrated over s, less rib thickness × height at each
- * rib. Where there is no height for it, that is told.
+ * A shear web, grain upright, in the bays between ribs: height integrated over s, less rib thickness × height at
+ * each rib. Where there is no height for it, that is told.
  * @example measureWeb(EXAMPLE_HALF, EXAMPLE_WEB, 'volume').area // → 3416
  */
 export function measureWeb(half: Half, part: Web, basis: Basis): Measure {

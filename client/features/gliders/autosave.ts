@@ -1,45 +1,11 @@
 import { same } from '#client/lib/same.ts';
-import type { SaveState } from '#client/lib/workspace.ts';
+import type { MergeChoice } from '#shared/core/merge-fields.ts';
 import type { Plan } from '#shared/core/plan.ts';
-import type { GliderDto } from '#shared/schemas/glider.ts';
+import { decided, laid, met, rebased, sameOnceChecked, settled } from './desk-merge.ts';
+import type { Desk, Draft, Kept } from './desk-state.ts';
 import { changed, redone, startHistory, undone, type History } from './history.ts';
-import { checkPlan, type PlanCheck } from './plan-check.ts';
-
-/** What of a glider the server holds, as far as is known here. */
-export type Kept = Pick<GliderDto, 'version' | 'plan' | 'updatedAt' | 'updatedBy'>;
-
-/** Edits that were not acknowledged when the page was left. */
-export interface Draft {
-  version: number;
-  plan: Plan;
-  /** On its way when the page was left: it may have arrived. */
-  sent: Plan | null;
-  /** ISO time of the last edit */
-  at: string;
-}
-
-/** `waiting`: will be tried again by itself; `refused`: not before something changes. */
-type Phase = 'idle' | 'sending' | 'waiting' | 'refused' | 'conflict';
-
-/** The plan on the desk, and how it stands to the one that the server holds. */
-export interface Desk {
-  history: History<Plan>;
-  check: PlanCheck;
-  /** Last plan that was valid; what the estimate is made from. */
-  valid: Plan;
-  base: Kept;
-  phase: Phase;
-  /** Sent without an answer yet. */
-  sent: Plan | null;
-  theirs: Kept | null;
-  problem: string | null;
-  /** No connection, as opposed to a server in trouble. */
-  offline: boolean;
-  /** The session has ended; signing in again cures it. */
-  signedOut: boolean;
-  /** Unsent edits were put back on opening: when they were made, and the plan they were made over. */
-  restored: { at: string; over: Plan } | null;
-}
+import type { Trail } from './history-shelf.ts';
+import { checkPlan } from './plan-check.ts';
 
 export type DeskEvent =
   | { type: 'edited'; recipe: (plan: Plan) => Plan; what: string; at: number }
@@ -50,50 +16,49 @@ export type DeskEvent =
   | { type: 'failed'; passing: boolean; offline: boolean; signedOut: boolean; problem: string }
   | { type: 'outdated'; current: Kept }
   | { type: 'refreshed'; kept: Kept }
-  | { type: 'keptMine' }
+  | { type: 'decided'; choices: ReadonlyMap<string, MergeChoice>; at: number }
   | { type: 'tookTheirs'; at: number }
+  | { type: 'broughtBack'; kept: Kept; at: number }
+  | { type: 'newsRead' }
   | { type: 'retried' };
 
-export function startDesk(kept: Kept, draft: Draft | null): Desk {
+const BLANK: Plan = { version: 1, name: '', materials: {}, surfaces: [], items: [], solids: [] };
+
+/** Lays a glider on the desk, with the edits that were not sent and the steps that can be taken back. */
+export function startDesk(kept: Kept, draft: Draft | null, trail: Trail | null = null): Desk {
   const clean: Desk = {
-    ...onDesk(startHistory(kept.plan), kept.plan),
+    history: historyOf(kept.plan, trail, []),
+    check: checkPlan(kept.plan),
+    valid: kept.plan,
     base: kept,
     phase: 'idle',
     sent: null,
     theirs: null,
+    conflicts: [],
+    news: null,
     problem: null,
     offline: false,
     signedOut: false,
     restored: null,
   };
   if (draft === null || same(draft.plan, kept.plan)) return clean;
-  const restored = {
-    ...clean,
-    ...onDesk(startHistory(draft.plan, [kept.plan]), kept.plan),
-    restored: { at: draft.at, over: kept.plan },
-  };
   const arrived = draft.sent !== null && sameOnceChecked(draft.sent, kept.plan);
-  if (draft.version >= kept.version || arrived) return restored;
-  return { ...restored, base: { ...kept, version: draft.version }, phase: 'conflict', theirs: kept };
+  const current = draft.version >= kept.version || arrived;
+  // Without what the edits were made on, whatever differs is asked for.
+  const over = current ? kept.plan : (draft.base ?? BLANK);
+  const step = { before: over, after: draft.plan };
+  const restored: Desk = {
+    ...laid(clean, historyOf(draft.plan, trail, [step])),
+    base: current ? kept : { ...kept, version: draft.version, plan: over },
+    restored: { at: draft.at, over, plan: draft.plan },
+  };
+  return current ? restored : met(restored, kept);
 }
 
-/** Whether there is something that the server does not hold. */
-export function isDirty({ history, base }: Desk): boolean {
-  return history.present !== base.plan && !same(history.present, base.plan);
-}
-
-export function saveStateOf(desk: Desk): SaveState {
-  if (desk.phase === 'conflict') return 'conflict';
-  if (desk.phase === 'sending') return 'saving';
-  if (!isDirty(desk)) return 'saved';
-  if (!desk.check.ok) return 'invalid';
-  if (desk.phase === 'waiting' && desk.offline) return 'offline';
-  return 'unsaved';
-}
-
-/** Whether the present plan may be sent now. */
-export function isSendable(desk: Desk): boolean {
-  return desk.phase === 'idle' && desk.check.ok && isDirty(desk);
+/** The steps of this window, where there are any, under what now lies on the desk. */
+function historyOf(present: Plan, trail: Trail | null, otherwise: Trail['past']): History<Plan> {
+  if (trail === null) return startHistory(present, otherwise);
+  return startHistory(same(trail.present, present) ? trail.present : present, trail.past, trail.future);
 }
 
 export function reduce(desk: Desk, event: DeskEvent): Desk {
@@ -101,9 +66,9 @@ export function reduce(desk: Desk, event: DeskEvent): Desk {
     case 'edited':
       return moved(desk, changed(desk.history, event.recipe(desk.history.present), event.what, event.at));
     case 'undone':
-      return moved(desk, undone(desk.history));
+      return moved(desk, undone(desk.history, rebased));
     case 'redone':
-      return moved(desk, redone(desk.history));
+      return moved(desk, redone(desk.history, rebased));
     case 'sent':
       return { ...desk, phase: 'sending', sent: desk.history.present };
     case 'acknowledged':
@@ -111,67 +76,41 @@ export function reduce(desk: Desk, event: DeskEvent): Desk {
     case 'failed': {
       const { passing, offline, signedOut, problem } = event;
       // What went into a broken line may have arrived, so it stays in `sent`.
-      return {
-        ...desk,
-        phase: passing ? 'waiting' : 'refused',
-        sent: passing ? desk.sent : null,
-        offline,
-        signedOut,
-        problem,
-      };
+      const sent = passing ? desk.sent : null;
+      return { ...desk, phase: passing ? 'waiting' : 'refused', sent, offline, signedOut, problem };
     }
     case 'outdated':
-      // Our own save whose answer was lost is no conflict.
-      if (desk.sent !== null && sameOnceChecked(desk.sent, event.current.plan)) {
-        return settled(desk, { ...event.current, plan: desk.sent });
-      }
-      return { ...desk, phase: 'conflict', theirs: event.current, sent: null, problem: null };
-    case 'refreshed':
-      if (event.kept.version <= desk.base.version || desk.phase === 'sending' || isDirty(desk)) return desk;
-      return settled(moved(desk, changed(desk.history, event.kept.plan, 'refreshed', 0)), event.kept);
-    case 'keptMine':
-      return desk.theirs === null ? desk : settled(desk, desk.theirs);
+      return met(desk, event.current);
+    case 'refreshed': {
+      const newest = desk.theirs ?? desk.base;
+      // A save on its way brings its own answer.
+      if (event.kept.version <= newest.version || desk.phase === 'sending') return desk;
+      return met(desk, event.kept);
+    }
+    case 'decided':
+      return decided(desk, event.choices, event.at);
     case 'tookTheirs': {
       const { theirs } = desk;
       if (theirs === null) return desk;
-      return settled(moved(desk, changed(desk.history, theirs.plan, 'take theirs', event.at)), theirs);
+      return settled(laid(desk, changed(desk.history, theirs.plan, 'take theirs', event.at)), theirs);
     }
+    case 'broughtBack': {
+      // What was typed while the answer was on its way stays on top of it.
+      const plan = rebased(desk.base.plan, event.kept.plan, desk.history.present);
+      return settled(laid(desk, changed(desk.history, plan, 'bring back', event.at)), event.kept);
+    }
+    case 'newsRead':
+      return desk.news === null ? desk : { ...desk, news: null };
     case 'retried':
       return desk.phase === 'waiting' || desk.phase === 'refused' ? { ...desk, phase: 'idle' } : desk;
   }
 }
 
-function onDesk(history: History<Plan>, lastValid: Plan): Pick<Desk, 'history' | 'check' | 'valid'> {
-  const check = checkPlan(history.present);
-  return { history, check, valid: check.ok ? history.present : lastValid };
-}
-
+/** Another plan by this person's hand. */
 function moved(desk: Desk, history: History<Plan>): Desk {
   if (history === desk.history) return desk;
-  const phase = desk.phase === 'refused' ? 'idle' : desk.phase;
-  return {
-    ...desk,
-    ...onDesk(history, desk.valid),
-    phase,
-    problem: phase === desk.phase ? desk.problem : null,
-  };
-}
-
-function settled(desk: Desk, base: Kept): Desk {
-  return {
-    ...desk,
-    base,
-    phase: 'idle',
-    sent: null,
-    theirs: null,
-    problem: null,
-    offline: false,
-    signedOut: false,
-  };
-}
-
-/** The server keeps names trimmed; that makes no other plan of it. */
-function sameOnceChecked(sent: Plan, kept: Plan): boolean {
-  const check = checkPlan(sent);
-  return same(check.ok ? check.plan : sent, kept);
+  const next = laid(desk, history);
+  // An edit may answer the question, or be the first to raise it.
+  if (desk.theirs !== null) return met(next, desk.theirs);
+  return desk.phase === 'refused' ? { ...next, phase: 'idle', problem: null } : next;
 }

@@ -1,8 +1,10 @@
 import { ApiError, isPassing, NetworkError } from '#client/lib/api.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { glider as gliderSchema } from '#shared/schemas/glider.ts';
-import { isDirty, isSendable, reduce, startDesk, type Desk, type DeskEvent, type Kept } from './autosave.ts';
+import { reduce, startDesk, type DeskEvent } from './autosave.ts';
+import { isDirty, isSendable, type Desk, type Kept } from './desk-state.ts';
 import type { DraftShelf } from './drafts.ts';
+import type { TrailShelf } from './history-shelf.ts';
 
 /** Quiet time after an edit before it is sent, ms. */
 const QUIET = 600;
@@ -14,6 +16,7 @@ const RETRIES = [2_000, 5_000, 15_000, 30_000];
 interface Ports {
   kept: Kept;
   shelf: DraftShelf;
+  trail: TrailShelf;
   /** Saves the plan over that version. */
   send: (plan: Plan, version: number) => Promise<Kept>;
   onSaved?: (kept: Kept) => void;
@@ -27,10 +30,11 @@ export class Autosaver {
   private timer: ReturnType<typeof setTimeout> | undefined;
   private draftTimer: ReturnType<typeof setTimeout> | undefined;
   private tries = 0;
+  private onItsWay: Promise<void> = Promise.resolve();
 
   constructor(ports: Ports) {
     this.ports = ports;
-    this.desk = startDesk(ports.kept, ports.shelf.take());
+    this.desk = startDesk(ports.kept, ports.shelf.take(), ports.trail.take());
     if (!isDirty(this.desk)) ports.shelf.clear();
   }
 
@@ -53,7 +57,7 @@ export class Autosaver {
       document.removeEventListener('visibilitychange', this.keepDraft);
       clearTimeout(this.timer);
       this.keepDraft();
-      if (isSendable(this.desk)) void this.send();
+      this.flush();
     };
   };
 
@@ -70,7 +74,26 @@ export class Autosaver {
   /** Tries at once, after a cure or when the line is back. */
   readonly retry = (): void => {
     this.dispatch({ type: 'retried' });
-    if (isSendable(this.desk)) void this.send();
+    this.flush();
+  };
+
+  /**
+   * Lays an older state on the desk as a new save, once what waits has been sent.
+   * @throws Error when that, or this, could not be saved; nothing is then brought back
+   */
+  readonly bringBack = async (restore: (version: number) => Promise<Kept>): Promise<void> => {
+    this.flush();
+    await this.onItsWay;
+    if (isDirty(this.desk)) throw new Error('Some edits are not saved yet. Bring it back once they are.');
+    this.dispatch({ type: 'sent' });
+    try {
+      const kept = await restore(this.desk.base.version);
+      this.dispatch({ type: 'broughtBack', kept, at: Date.now() });
+      this.ports.onSaved?.(kept);
+    } catch (error) {
+      this.dispatch(eventOf(error));
+      throw error;
+    }
   };
 
   /** Gives the edits up here, because they live on elsewhere. */
@@ -82,18 +105,24 @@ export class Autosaver {
   private readonly keepDraft = (): void => {
     clearTimeout(this.draftTimer);
     const { base, history, sent } = this.desk;
+    this.ports.trail.put(history);
     if (!isDirty(this.desk)) return this.ports.shelf.clear();
     this.ports.shelf.put({
       version: base.version,
       plan: history.present,
+      base: base.plan,
       sent,
       at: new Date().toISOString(),
     });
   };
 
+  private flush(): void {
+    if (isSendable(this.desk)) this.onItsWay = this.send();
+  }
+
   private plan(): void {
     clearTimeout(this.timer);
-    if (isSendable(this.desk)) this.timer = setTimeout(() => void this.send(), QUIET);
+    if (isSendable(this.desk)) this.timer = setTimeout(() => this.flush(), QUIET);
     else if (this.desk.phase === 'waiting') {
       const wait = RETRIES[Math.min(this.tries, RETRIES.length) - 1] ?? RETRIES[0];
       this.timer = setTimeout(this.retry, wait);

@@ -1,5 +1,5 @@
 import type { Plan } from '#shared/core/plan.ts';
-import type { Draft } from './autosave.ts';
+import type { Draft } from './desk-state.ts';
 
 const PREFIX = 'featherbeam.draft';
 /** Two windows of one glider keep apart what each has not sent yet. */
@@ -38,7 +38,12 @@ export function draftShelf(
       });
       return draft;
     },
-    put: (draft) => quietly(() => storage.setItem(own, JSON.stringify(draft))),
+    put: (draft) =>
+      firstThatFits(
+        // Without what they were made from, edits are still edits: they are then asked for line by line.
+        [draft, { ...draft, sent: null, base: null }],
+        (fit) => storage.setItem(own, JSON.stringify(fit)),
+      ),
     clear: () => quietly(() => storage.removeItem(own)),
   };
 }
@@ -53,8 +58,13 @@ export function readSample(storage: Storage = localStorage): Plan | null {
 export function keepSample(plan: Plan | null, storage: Storage = localStorage): void {
   quietly(() => {
     if (plan === null) storage.removeItem(SAMPLE);
-    else storage.setItem(SAMPLE, JSON.stringify({ version: 0, plan, sent: null, at: '' } satisfies Draft));
+    else storage.setItem(SAMPLE, JSON.stringify(draftOf(plan)));
   });
+}
+
+/** Edits of a plan that no server knows. */
+export function draftOf(plan: Plan): Draft {
+  return { version: 0, plan, base: null, sent: null, at: '' };
 }
 
 function keysUnder(storage: Storage, prefix: string): string[] {
@@ -77,15 +87,22 @@ function read(storage: Storage, key: string): Draft | null {
   }
 }
 
-/** Written by this page, so the shape of the plan's lists is enough; its values may well be unfinished. */
 function isDraft(value: unknown): value is Draft {
   if (typeof value !== 'object' || value === null) return false;
-  const { version, plan, at } = value as Partial<Draft>;
+  const { version, plan, at, base } = value as Partial<Draft>;
   return (
     typeof version === 'number' &&
     typeof at === 'string' &&
-    typeof plan === 'object' &&
-    plan !== null &&
+    isPlanShaped(plan) &&
+    (base === null || base === undefined || isPlanShaped(base))
+  );
+}
+
+/** Written by this page, so the shape of the plan's lists is enough; its values may well be unfinished. */
+export function isPlanShaped(value: unknown): value is Plan {
+  if (typeof value !== 'object' || value === null) return false;
+  const plan = value as Partial<Plan>;
+  return (
     (['surfaces', 'items', 'solids'] as const).every((list) => Array.isArray(plan[list])) &&
     typeof plan.materials === 'object'
   );
@@ -93,9 +110,15 @@ function isDraft(value: unknown): value is Draft {
 
 /** Storage may be full or refused; the server's copy and the open page still hold the work. */
 function quietly(action: () => void): void {
-  try {
-    action();
-  } catch {
-    return;
+  firstThatFits([null], action);
+}
+
+function firstThatFits<T>(choices: readonly T[], action: (choice: T) => void): void {
+  for (const choice of choices) {
+    try {
+      return action(choice);
+    } catch {
+      continue;
+    }
   }
 }

@@ -1,28 +1,11 @@
-import { useEffect } from 'react';
 import { cn } from '#client/lib/cn.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 
 const BUTTON =
   'grid size-row place-items-center rounded-md text-ink enabled:hover:bg-ink-wash disabled:text-graphite disabled:opacity-50';
 
-/** Undo and redo by keyboard, where no field has its own. */
-export function useUndoKeys({ undo, redo }: Pick<Workspace, 'undo' | 'redo'>): void {
-  useEffect(() => {
-    const onKeyDown = (event: KeyboardEvent) => {
-      if (!(event.ctrlKey || event.metaKey) || event.altKey || isField(event.target)) return;
-      const key = event.key.toLowerCase();
-      if (key !== 'z' && key !== 'y') return;
-      event.preventDefault();
-      if (key === 'y' || event.shiftKey) redo();
-      else undo();
-    };
-    addEventListener('keydown', onKeyDown);
-    return () => removeEventListener('keydown', onKeyDown);
-  }, [undo, redo]);
-}
-
 interface UndoButtonsProps {
-  workspace: Workspace;
+  workspace: Pick<Workspace, 'undo' | 'redo' | 'canUndo' | 'canRedo' | 'canEdit'>;
   className?: string;
 }
 
@@ -34,7 +17,8 @@ export function UndoButtons({ workspace, className }: UndoButtonsProps) {
       <button
         type="button"
         aria-label="Undo"
-        title="Undo"
+        title="Undo (Ctrl+Z)"
+        aria-keyshortcuts="Control+Z"
         disabled={!canUndo}
         onClick={undo}
         className={BUTTON}
@@ -44,7 +28,8 @@ export function UndoButtons({ workspace, className }: UndoButtonsProps) {
       <button
         type="button"
         aria-label="Redo"
-        title="Redo"
+        title="Redo (Ctrl+Shift+Z)"
+        aria-keyshortcuts="Control+Shift+Z"
         disabled={!canRedo}
         onClick={redo}
         className={BUTTON}
@@ -66,12 +51,5 @@ function Arrow({ mirrored = false }: { mirrored?: boolean }) {
     >
       <path d="M6 1 1.5 5 6 9M2 5h9a4.5 4 0 0 1 0 8H7" fill="none" stroke="currentColor" strokeWidth="1.6" />
     </svg>
-  );
-}
-
-/** A field being typed in undoes its own text. */
-function isField(target: EventTarget | null): boolean {
-  return (
-    target instanceof HTMLElement && (target.matches('input, textarea, select') || target.isContentEditable)
   );
 }

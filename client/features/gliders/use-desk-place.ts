@@ -1,7 +1,9 @@
 import { useMemo, useState } from 'react';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { estimate } from '#shared/core/estimate.ts';
-import type { Desk, DeskEvent } from './autosave.ts';
+import { newMemory } from '#shared/core/laid-surface.ts';
+import type { DeskEvent } from './autosave.ts';
+import type { Desk } from './desk-state.ts';
 
 interface DeskHolder {
   dispatch: (event: DeskEvent) => void;
@@ -13,7 +15,8 @@ type DeskPlace = Omit<Workspace, 'canEdit' | 'kind' | 'saveState' | 'savedAt' | 
 export function useDeskPlace(holder: DeskHolder, desk: Desk): DeskPlace {
   const [selected, select] = useState<string | null>(null);
   const { history, check, valid } = desk;
-  const result = useMemo(() => estimate(valid), [valid]);
+  const [memory] = useState(newMemory);
+  const result = useMemo(() => estimate(valid, memory), [valid, memory]);
   return useMemo(
     () => ({
       plan: history.present,

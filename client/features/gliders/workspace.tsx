@@ -1,12 +1,15 @@
-import { useQueryClient } from '@tanstack/react-query';
+import { useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { useEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { GliderDto } from '#shared/schemas/glider.ts';
-import { saveStateOf } from './autosave.ts';
 import { Autosaver } from './autosaver.ts';
+import { DeskWatch } from './desk-watch.ts';
+import { saveStateOf } from './desk-state.ts';
 import { draftShelf } from './drafts.ts';
+import { trailShelf } from './history-shelf.ts';
 import { putGlider } from './mutations.ts';
+import { gliderQueries, latestVersion } from './queries.ts';
 import { firstIssue } from './plan-check.ts';
 import { SampleDesk } from './sample-desk.ts';
 import { useDeskPlace } from './use-desk-place.ts';
@@ -21,16 +24,9 @@ interface WorkspaceProviderProps {
 /** Lays a stored glider on the desk. Give it a `key` per glider. */
 export function WorkspaceProvider({ glider, userId, children }: WorkspaceProviderProps) {
   const client = useQueryClient();
-  const [saver] = useState(
-    () =>
-      new Autosaver({
-        kept: glider,
-        shelf: draftShelf(glider.id, userId),
-        send: (plan, version) => putGlider(glider.id, plan, version),
-        onSaved: () => void client.invalidateQueries({ queryKey: ['gliders', 'list'] }),
-      }),
-  );
+  const [{ saver, watch }] = useState(() => standBehind(glider, userId, client));
   useEffect(() => saver.start(), [saver]);
+  useEffect(() => watch.start(), [watch]);
   useEffect(() => saver.dispatch({ type: 'refreshed', kept: glider }), [saver, glider]);
 
   const desk = useSyncExternalStore(saver.subscribe, saver.getDesk);
@@ -58,9 +54,32 @@ export function WorkspaceProvider({ glider, userId, children }: WorkspaceProvide
   );
 }
 
+/** What saves the glider, and what notices that somebody else did. */
+function standBehind(glider: GliderDto, userId: string, client: QueryClient) {
+  const { id } = glider;
+  const saver: Autosaver = new Autosaver({
+    kept: glider,
+    shelf: draftShelf(id, userId),
+    trail: trailShelf(`${userId}.${id}`),
+    send: (plan, version) => putGlider(id, plan, version),
+    onSaved: () => {
+      watch.announce();
+      void client.invalidateQueries({ queryKey: ['gliders', 'list'] });
+    },
+  });
+  const watch: DeskWatch = new DeskWatch({
+    known: () => saver.getDesk().theirs?.version ?? saver.getDesk().base.version,
+    latest: () => latestVersion(id),
+    refresh: () => client.fetchQuery({ ...gliderQueries.detail(id), staleTime: 0 }),
+    channel: `featherbeam.glider.${id}`,
+  });
+  return { saver, watch };
+}
+
 /** Lays the sample on the desk: the same, but nothing leaves this browser. */
 export function SampleWorkspaceProvider({ original, children }: { original: Plan; children: ReactNode }) {
   const [sample] = useState(() => new SampleDesk(original));
+  useEffect(() => sample.start(), [sample]);
   const desk = useSyncExternalStore(sample.subscribe, sample.getDesk);
   const place = useDeskPlace(sample, desk);
   const workspace = useMemo(

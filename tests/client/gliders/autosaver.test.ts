@@ -1,7 +1,8 @@
 // @vitest-environment happy-dom
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { saveStateOf, type Draft, type Kept } from '#client/features/gliders/autosave.ts';
 import { Autosaver } from '#client/features/gliders/autosaver.ts';
+import { saveStateOf, type Draft, type Kept } from '#client/features/gliders/desk-state.ts';
+import type { Trail } from '#client/features/gliders/history-shelf.ts';
 import { ApiError, NetworkError } from '#client/lib/api.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { keptAt, naming, planNamed } from './plans.ts';
@@ -10,8 +11,9 @@ type Send = (plan: Plan, version: number) => Promise<Kept>;
 
 function desk(send: Send, draft: Draft | null = null) {
   const shelf = { take: () => draft, put: vi.fn<(draft: Draft) => void>(), clear: vi.fn<() => void>() };
-  const saver = new Autosaver({ kept: keptAt(3, planNamed('Plover')), shelf, send });
-  return { saver, shelf, stop: saver.start() };
+  const trail = { take: () => null, put: vi.fn<(trail: Trail) => void>() };
+  const saver = new Autosaver({ kept: keptAt(3, planNamed('Plover')), shelf, trail, send });
+  return { saver, shelf, trail, stop: saver.start() };
 }
 const edit = (saver: Autosaver, name: string) =>
   saver.dispatch({ type: 'edited', recipe: naming(name), what: name, at: Date.now() });
@@ -97,5 +99,43 @@ describe('autosaver', () => {
     edit(saver, 'a');
     stop();
     expect(send).toHaveBeenCalledTimes(1);
+  });
+
+  it('keeps the steps that can be taken back, also once all is saved', async () => {
+    const { saver, trail } = desk(saves);
+    edit(saver, 'a');
+    await vi.advanceTimersByTimeAsync(1000);
+    expect(saveStateOf(saver.getDesk())).toBe('saved');
+    expect(trail.put.mock.lastCall?.[0].past).toHaveLength(1);
+  });
+
+  it('saves what waits before an older state is brought back over it', async () => {
+    const send = vi.fn<Send>(saves);
+    const { saver } = desk(send);
+    edit(saver, 'a');
+    const restore = vi.fn<(version: number) => Promise<Kept>>((version) =>
+      Promise.resolve(keptAt(version + 1, planNamed('old'))),
+    );
+    await saver.bringBack(restore);
+    expect(send).toHaveBeenCalledExactlyOnceWith(planNamed('a'), 3);
+    expect(restore).toHaveBeenCalledExactlyOnceWith(4);
+    expect(saver.getDesk()).toMatchObject({ base: { version: 5 }, history: { present: { name: 'old' } } });
+    await vi.advanceTimersByTimeAsync(5000);
+    expect(send).toHaveBeenCalledTimes(1);
+  });
+
+  it('brings nothing back over edits that cannot be saved', async () => {
+    const { saver } = desk(saves);
+    edit(saver, '');
+    const restore = vi.fn<(version: number) => Promise<Kept>>();
+    await expect(saver.bringBack(restore)).rejects.toThrow('not saved yet');
+    expect(restore).not.toHaveBeenCalled();
+  });
+
+  it('keeps what lies on the desk when bringing back does not work', async () => {
+    const { saver } = desk(saves);
+    await expect(saver.bringBack(() => Promise.reject(new NetworkError(null)))).rejects.toThrow('reached');
+    expect(saver.getDesk()).toMatchObject({ base: { version: 3 }, history: { present: { name: 'Plover' } } });
+    expect(saveStateOf(saver.getDesk())).toBe('saved');
   });
 });

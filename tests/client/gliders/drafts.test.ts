@@ -3,7 +3,13 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import { draftShelf } from '#client/features/gliders/drafts.ts';
 import { planNamed } from './plans.ts';
 
-const draft = (name: string, at: string) => ({ version: 3, plan: planNamed(name), sent: null, at });
+const draft = (name: string, at: string) => ({
+  version: 3,
+  plan: planNamed(name),
+  base: planNamed('base'),
+  sent: null,
+  at,
+});
 const shelf = (page: string, user = 'ines', glider = 'g1') => draftShelf(glider, user, localStorage, page);
 
 beforeEach(() => localStorage.clear());
@@ -31,5 +37,16 @@ describe('drafts', () => {
   it('that cannot be read are passed over', () => {
     localStorage.setItem('featherbeam.draft.ines.g1.p1', '{"version":3,"plan":');
     expect(shelf('p2').take()).toBeNull();
+  });
+
+  it('are kept without what they were made on where there is no room for both', () => {
+    const small: Pick<Storage, 'setItem'> = {
+      setItem: (key: string, text: string) => {
+        if (text.includes('"name":"base"')) throw new DOMException('full', 'QuotaExceededError');
+        localStorage.setItem(key, text);
+      },
+    };
+    draftShelf('g1', 'ines', small as Storage, 'p1').put(draft('a', '1'));
+    expect(shelf('p2').take()).toMatchObject({ plan: { name: 'a' }, base: null });
   });
 });

@@ -1,4 +1,4 @@
-import type { Kept } from '#client/features/gliders/autosave.ts';
+import type { Kept } from '#client/features/gliders/desk-state.ts';
 import { startPlan } from '#client/features/gliders/start-plan.ts';
 import type { Plan } from '#shared/core/plan.ts';
 

@@ -3,7 +3,8 @@ import { NavLink, Outlet, useLocation } from 'react-router-dom';
 import type { Place } from '#client/app/paths.ts';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { TitleBlock } from '#client/features/gliders/title-block.tsx';
-import { UndoButtons, useUndoKeys } from '#client/features/gliders/undo-buttons.tsx';
+import { UndoButtons } from '#client/features/gliders/undo-buttons.tsx';
+import { useUndo, useUndoKeys } from '#client/features/gliders/use-undo.ts';
 import { useWorkspace } from '#client/features/gliders/workspace-context.ts';
 import { cn } from '#client/lib/cn.ts';
 
@@ -28,7 +29,8 @@ interface GliderFrameProps {
 export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps) {
   const workspace = useWorkspace();
   const { pathname } = useLocation();
-  useUndoKeys(workspace);
+  const { undo, redo, said } = useUndo(workspace);
+  useUndoKeys(workspace.plan, undo, redo);
   return (
     <div className="flex flex-1 flex-col print:block">
       {notices}
@@ -46,7 +48,10 @@ export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps
         </nav>
         <div className="ml-auto flex items-center gap-x-3 max-sm:ml-0 max-sm:w-full">
           {aside}
-          <UndoButtons workspace={workspace} className="max-sm:hidden" />
+          <UndoButtons workspace={{ ...workspace, undo, redo }} className="max-sm:hidden" />
+          <span role="status" className="sr-only">
+            {said}
+          </span>
         </div>
       </div>
       <div className="flex flex-1 flex-col border border-strong-rule bg-sheet print:block print:border-0">
@@ -55,7 +60,7 @@ export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps
             <Outlet />
           </SectionBoundary>
         </div>
-        <TitleBlock workspace={workspace} />
+        <TitleBlock workspace={{ ...workspace, undo, redo }} />
       </div>
     </div>
   );

@@ -35,14 +35,14 @@ function StoredGlider({ id }: { id: string }) {
     <QueryView query={query} otherwise={otherwise}>
       {(glider) => (
         <WorkspaceProvider glider={glider} userId={user.id}>
-          <Desk id={id} />
+          <Desk id={id} userName={user.name} />
         </WorkspaceProvider>
       )}
     </QueryView>
   );
 }
 
-function Desk({ id }: { id: string }) {
+function Desk({ id, userName }: { id: string; userName: string }) {
   const workspace = useWorkspace();
   const keeper = useKeeper();
   const navigate = useNavigate();
@@ -62,6 +62,7 @@ function Desk({ id }: { id: string }) {
             <DeskNotices
               workspace={workspace}
               saver={keeper.saver}
+              userName={userName}
               onOpen={(gliderId) => void navigate(paths.glider(gliderId))}
               onSignIn={() => client.setQueryData(sessionQuery.queryKey, { user: null })}
             />

@@ -1,4 +1,4 @@
-/** An object or an array. */
+/** True of an object or an array: of what has keys to look into. @example isBranch([]) // → true */
 export const isBranch = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null;
 

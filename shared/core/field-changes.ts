@@ -1,3 +1,4 @@
+/** A value as it can be told in one line. */
 export type ChangeValue = number | string | boolean | number[] | null;
 
 /** One difference between two plans, as data; the client words it. */
@@ -7,8 +8,8 @@ export interface PlanChange {
   /** name of the part, item, material …, as in the later plan */
   name: string;
   /**
-   * the field; null where the whole thing was added (`from` is null) or removed (`to` is null), the other value then
-   * being its kind; `order` where things of a list changed places
+   * the field; null where the whole thing was added (`from` is null) or removed (`to` is null), the other value
+   * then being its kind; `order` where things of a list changed places
    */
   field: string | null;
   /** null where the field was not there; a section or an outline by its name or number of points */
@@ -18,6 +19,7 @@ export interface PlanChange {
   unit: ChangeUnit | null;
 }
 
+/** Unit of a changed value, by its key in `shared/units`. */
 export type ChangeUnit = 'mm' | 'g' | 'deg' | 'kg/m3' | 'g/m2' | 'GPa' | 'MPa' | 'one' | 'percent';
 
 const FIELDS: Record<ChangeUnit, string> = {
@@ -42,7 +44,12 @@ const UNIT_OF = new Map(
 const unitOf = (field: string, value: ChangeValue): ChangeUnit | null =>
   field === 'at' && Array.isArray(value) && value.length === 2 ? 'one' : (UNIT_OF.get(field) ?? null);
 
-/** The differing fields of two things that are one and the same at two times; what is undefined is not there. */
+/**
+ * The differing fields of two things that are one and the same at two times; what is undefined is not there.
+ * `where` is the thing's place and name, as every change carries them. Empty for things that say the same
+ * (`isAlike`).
+ * @example fieldChanges({ path: 'items/nose', name: 'Nose' }, { mass: 8 }, { mass: 10 }) // → [{ path: 'items/nose', name: 'Nose', field: 'mass', from: 8, to: 10, unit: 'g' }]
+ */
 export function fieldChanges(
   where: { path: string; name: string },
   before: object,

@@ -19,8 +19,10 @@ export interface PlanConflict {
 
 /** `before`: as it was before either side changed it. */
 export type MergeChoice = 'mine' | 'theirs' | 'both' | 'before';
+/** Decides a conflict. It is asked once for each, in the order of the document. */
 export type Settle = (conflict: PlanConflict) => MergeChoice;
 
+/** Place of a thing in the plan by keys, and its name, as a change tells them. */
 export interface Where {
   path: string;
   name: string;
@@ -43,9 +45,17 @@ export function agreed<T>({ base, mine, theirs }: Three<T>): { value: T } | null
   return isAlike(mine, base) ? { value: theirs } : null;
 }
 
+/**
+ * The value that a choice stands for. `both` is mine here: who can keep both has done so before.
+ * @example chosen({ base: 1, mine: 2, theirs: 3 }, 'theirs') // → 3
+ */
 export const chosen = <T>({ base, mine, theirs }: Three<T>, choice: MergeChoice): T =>
   choice === 'theirs' ? theirs : choice === 'before' ? base : mine;
 
+/**
+ * Id of a conflict about a field of the thing at `path`, or about the whole of it (`field` null).
+ * @example conflictId('items/nose', 'mass') // → 'items/nose#mass'
+ */
 export const conflictId = (path: string, field: string | null) => `${path}#${field ?? ''}`;
 
 /**
@@ -56,7 +66,11 @@ const TOGETHER = ['stations from to count', 'seat at letIn', 'profile wall', 'me
   (fields) => fields.split(' '),
 );
 
-/** One and the same thing, field by field. Without a base, both sides have added it. */
+/**
+ * One and the same thing of both sides, joined field by field; without a base, both sides have added it. `settle`
+ * is asked for each field, or bundle of fields that say something together, that both changed and not alike.
+ * @example mergeFields({ path: 'items/nose', name: 'Nose' }, { base: { mass: 1, u: 0 }, mine: { mass: 2, u: 0 }, theirs: { mass: 1, u: 1 } }, () => 'mine') // → { mass: 2, u: 1 }
+ */
 export function mergeFields<T extends object>(
   where: Where,
   { base, mine, theirs }: { base: T | undefined; mine: T; theirs: T },

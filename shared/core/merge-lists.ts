@@ -30,7 +30,12 @@ export interface ListKind<T> {
 /** Longest key that a number is hung on. */
 const KEY_ROOM = 56;
 
-/** A list of things with keys: what one side added, changed, moved or removed, joined with the other's. */
+/**
+ * A list of things with keys: what one side added, changed, moved or removed, joined with the other's. `settle` is
+ * asked for what both did to one thing and cannot be joined, and for the order where both changed it; where a side
+ * has two things under one key, for the list as a whole.
+ * @example mergeList({ base: ['a'], mine: ['a', 'b'], theirs: ['c', 'a'] }, { path: 'items', keyOf: String, nameOf: String, kindOf: () => 'item', merge: (_, { mine }) => mine }, () => 'mine') // → ['c', 'a', 'b']
+ */
 export function mergeList<T>(three: Three<readonly T[]>, kind: ListKind<T>, settle: Settle): T[] {
   const whole = agreed(three);
   if (whole) return [...whole.value];
@@ -120,6 +125,11 @@ const fieldsOf = (thing: unknown): object =>
     Object.entries(thing ?? {}).filter(([field]) => field !== 'parts' && field !== 'panels'),
   );
 
+/**
+ * A conflict about something that is one value for either side, which its changes tell in a word (`mine`,
+ * `theirs`).
+ * @example wholeConflict({ path: 'surfaces/wing', name: 'wing' }, ['2 panels'], ['3 panels'], 'panels').id // → 'surfaces/wing#panels'
+ */
 export function wholeConflict(where: Where, mine: string[], theirs: string[], field: string | null = null) {
   const changes = (words: string[]): PlanChange[] =>
     words.map((word) => ({ ...where, field, from: null, to: word, unit: null }));

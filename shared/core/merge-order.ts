@@ -4,9 +4,11 @@ import { conflictId, type Settle, type Three } from './merge-fields.ts';
 type Keys = readonly string[];
 
 /**
- * The order of what is left of a list. Things that are on both sides stand as the side has them that moved any; what
- * one side added stands behind what it stood behind there. Things added by both at one place stand by their keys, so
- * that it does not matter who merges.
+ * The order of what is left of a list, by keys: of those that are `kept`. Things that are on both sides stand as
+ * the side has them that moved any; what one side added stands behind what it stood behind there. Things added by
+ * both at one place stand by their keys, so that it does not matter who merges. Where both moved some, and not
+ * alike, `settle` is asked for the order of the list at `path`.
+ * @example mergedOrder('items', { base: ['a'], mine: ['a', 'b'], theirs: ['c', 'a'] }, new Set(['a', 'b', 'c']), () => 'mine') // → ['c', 'a', 'b']
  */
 export function mergedOrder(
   path: string,

@@ -11,7 +11,9 @@ interface Numbered {
 
 /**
  * Panels have no key, only a place. Where one side alone added or removed some, and it can be told which, they are
- * joined panel by panel; else the whole row of panels is one value.
+ * joined panel by panel; else the whole row of panels is one value, for which `settle` is asked. `surface` is the
+ * key of the surface that they are of.
+ * @example mergePanels('wing', { base: EXAMPLE_WING.panels, mine: [...EXAMPLE_WING.panels, ...EXAMPLE_WING.panels], theirs: EXAMPLE_WING.panels }, () => 'mine').length // → 2
  */
 export function mergePanels(surface: string, three: Three<Panels>, settle: Settle): Panel[] {
   const whole = agreed(three);
@@ -49,8 +51,8 @@ export function mergePanels(surface: string, three: Three<Panels>, settle: Settl
 }
 
 /**
- * For each panel of a side the number of the one of the base that it is, or was before it was changed; `new-1` and so
- * on for the others. Null where changed panels and new ones cannot be told apart.
+ * For each panel of a side the number of the one of the base that it is, or was before it was changed; `new-1` and
+ * so on for the others. Null where changed panels and new ones cannot be told apart.
  */
 function alignedKeys(base: Panels, side: Panels): string[] | null {
   const pairs = [...commonPairs(base, side), [base.length, side.length] as const];

@@ -13,6 +13,7 @@ interface Thing {
  * What differs between two plans, in the order of the document: materials, surfaces with panels and parts, items,
  * solids, aims. Things are told apart by their keys, so that a part moved in its list is still that part. Empty for
  * plans that are alike, and for these only.
+ * @example planChanges(EXAMPLE_PLAN, { ...EXAMPLE_PLAN, name: 'Board' }) // → [{ path: '', name: 'Board', field: 'name', from: 'Plank', to: 'Board', unit: null }]
  */
 export function planChanges(before: Plan, after: Plan): PlanChange[] {
   return [

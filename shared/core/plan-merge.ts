@@ -13,6 +13,7 @@ import { mergeList, type ListKind } from './merge-lists.ts';
 import { mergePanels } from './merge-panels.ts';
 import type { Item, Part, Plan, PlanMaterial, Solid, Surface } from './plan.ts';
 
+/** Two plans in one, and what had to be chosen. */
 export interface PlanMerge {
   plan: Plan;
   /** in the order of the document; empty where the two sides changed different things, or the same alike */
@@ -21,10 +22,13 @@ export interface PlanMerge {
 
 /**
  * Joins two plans that were both made from `base`, thing by thing and field by field: what only one side changed is
- * taken over, what both changed alike is taken once. Where both changed the same field differently, one removed what
- * the other changed, both added a thing under one key, or both put a list in another order, there is a conflict, which
- * `settle` decides; mine stands unless it does. Materials that a part still names are kept. The joined plan may break
- * a rule that each side keeps (a port part on a wing that is no longer mirrored): check it like any other.
+ * taken over, what both changed alike is taken once. Where both changed the same field differently, one removed
+ * what the other changed, both added a thing under one key, or both put a list in another order, there is a
+ * conflict, which `settle` decides; mine stands unless it does. Materials that a part still names are kept. The
+ * joined plan may break a rule that each side keeps (a port part on a wing that is no longer mirrored): check it
+ * like any other.
+ * @example mergePlans(EXAMPLE_PLAN, { ...EXAMPLE_PLAN, name: 'Board' }, { ...EXAMPLE_PLAN, items: [] }).plan.name // → 'Board'
+ * @example mergePlans(EXAMPLE_PLAN, { ...EXAMPLE_PLAN, name: 'Board' }, { ...EXAMPLE_PLAN, name: 'Raft' }).conflicts.length // → 1
  */
 export function mergePlans(base: Plan, mine: Plan, theirs: Plan, settle: Settle = () => 'mine'): PlanMerge {
   const conflicts: PlanConflict[] = [];

@@ -6,8 +6,8 @@ import { sheetGroups } from './sheet-groups.ts';
 
 /**
  * Figures as printed: a decimal point, a plain minus, no thousands marks, a fixed count of decimals per column
- * (`digits`). Masses, arms aft of the datum and moments in the units of the printing, shares % of the mass. `arm` is
- * null where nothing has a mass.
+ * (`digits`). Masses, arms aft of the datum and moments in the units of the printing, shares % of the mass. `arm`
+ * is null where nothing has a mass.
  */
 export interface PrintedFigures {
   mass: string;
@@ -18,6 +18,7 @@ export interface PrintedFigures {
   share: string;
 }
 
+/** One line of the estimate. */
 export interface PrintedRow extends PrintedFigures {
   /** id of the estimate's line */
   id: string;
@@ -26,12 +27,14 @@ export interface PrintedRow extends PrintedFigures {
   material: string | null;
 }
 
+/** One group (`sheetGroups`) with its rows. */
 export interface PrintedGroup extends PrintedFigures {
   key: string;
   name: string;
   rows: PrintedRow[];
 }
 
+/** The whole sheet. */
 export interface PrintedSheet {
   groups: PrintedGroup[];
   total: PrintedFigures;
@@ -65,7 +68,8 @@ const LIGHT = 20;
  * The balance sheet by group and part, as printed on screen, on paper and in CSV. Printed masses, moments and
  * shares add up to the last digit: parts to their group, groups to the total; no printed figure lies as much as one
  * unit of its last digit from the exact one. Uncertainties add in quadrature, so that column is rounded alone, and
- * never down to nothing; arms are exact arms, rounded.
+ * never down to nothing; arms are exact arms, rounded. `printing` says in which units and with how many decimals.
+ * @example printedSheet(EXAMPLE_ESTIMATE).total // → { mass: '19.26', u: '0.58', arm: '13.8', moment: '266.4', share: '100.0' }
  */
 export function printedSheet(
   estimate: Pick<Estimate, 'lines'>,

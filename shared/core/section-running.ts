@@ -26,7 +26,11 @@ function grow(into: Float64Array, i: number, first: number, second: number, whol
   into[i] = before + first + second + correction;
 }
 
-/** ∫ thickness dx, with ∫ x and ∫ z over it. */
+/**
+ * Area of a section of unit chord up to each of its nodes, ∫ thickness dx, with ∫ x and ∫ z over it. Where the
+ * faces have crossed there is no area.
+ * @example runningArea(readSection({ flat: 3 }, 100)).amount.at(-1).toFixed(6) // → '0.030000'
+ */
 export function runningArea({ x, upper, lower }: Section): Running {
   const run = nothing(x.length);
   for (let i = 2; i < x.length; i += 2) {
@@ -48,7 +52,10 @@ const alongX = (dx: number, t0: number, t1: number, x0: number, x1: number) =>
 const upright = (dx: number, u0: number, u1: number, l0: number, l1: number) =>
   (dx * (u0 * u0 + u0 * u1 + u1 * u1 - l0 * l0 - l0 * l1 - l1 * l1)) / 6;
 
-/** Length of a face, with ∫ x and ∫ z along it. */
+/**
+ * Length of a face of a section of unit chord up to each of its nodes, with ∫ x and ∫ z along it.
+ * @example runningArc(readSection({ flat: 3 }, 100), 'upper').amount.at(-1) // → 1
+ */
 export function runningArc(section: Section, face: FaceName): Running {
   const { x, [face]: z } = section;
   const run = nothing(x.length);

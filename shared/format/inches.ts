@@ -8,6 +8,7 @@ const TOLERANCE_IN = 2e-4;
 /**
  * A length in mm as builders name stock, `1/16`, `3 1/2`, `31`; null where it is no fraction down to 1/64 in.
  * The unit is left to the caller: `1/16 in`, `31"`.
+ * @example formatInchFraction(88.9) // → '3 1/2'
  */
 export function formatInchFraction(lengthMm: number): string | null {
   const inches = convert(Math.abs(lengthMm), 'mm', 'in');

@@ -9,12 +9,14 @@ export const NARROW_SPACE = '\u202f';
 /** What stands where there is no value. */
 export const NO_VALUE = '\u2013';
 
+/** How a number is written. */
 export interface NumberOptions {
   decimalMark?: '.' | ',' | undefined;
   /** write the plus of a positive difference */
   plus?: boolean | undefined;
 }
 
+/** How a quantity is written. */
 export interface QuantityOptions extends NumberOptions {
   /** unit to show; the quantity's own metric one by default */
   unit?: Unit | undefined;
@@ -24,11 +26,13 @@ export interface QuantityOptions extends NumberOptions {
   fine?: boolean | undefined;
 }
 
+/** What may have to be shown; null and undefined for what is not there. */
 export type Shown = number | null | undefined;
 
 /**
  * A number with a fixed count of decimals (negative: rounded to tens, hundreds …), halves away from zero, true
- * minus, narrow spaces between thousands, never −0; an en dash for what is not there.
+ * minus, narrow spaces between thousands, never −0; an en dash for what is not there, NaN and Infinity.
+ * @example formatNumber(-1234.56, 1) // → '\u22121\u202f234.6'
  */
 export function formatNumber(value: Shown, digits: number, options: NumberOptions = {}): string {
   if (value === null || value === undefined || !Number.isFinite(value)) return NO_VALUE;
@@ -41,8 +45,10 @@ export function formatNumber(value: Shown, digits: number, options: NumberOption
 }
 
 /**
- * A value in the quantity's base unit as text with its unit, in the decimals of the one precision table.
+ * A value in the quantity's base unit as text with its unit, in the decimals of the one precision table; an en dash
+ * for what is not there.
  * @throws RangeError when the unit does not belong to the quantity
+ * @example formatQuantity(220.04, 'mass') // → '220.0\u202fg'
  */
 export function formatQuantity(value: Shown, quantity: Quantity, options: QuantityOptions = {}): string {
   const unit = options.unit ?? QUANTITIES[quantity].shown;
@@ -54,20 +60,29 @@ export function formatQuantity(value: Shown, quantity: Quantity, options: Quanti
   return label === '°' ? `${number}${label}` : `${number}${NARROW_SPACE}${label}`;
 }
 
-/** Decimals of a quantity in a unit. @throws RangeError when the unit does not belong to the quantity */
+/**
+ * Decimals that a quantity is shown with in a unit.
+ * @throws RangeError when the unit does not belong to the quantity
+ * @example digitsOf('mass', 'oz') // → 2
+ */
 export function digitsOf(quantity: Quantity, unit: Unit): number {
   const digits = (DIGITS[quantity] as Partial<Record<Unit, number>>)[unit];
   if (digits === undefined) throw new RangeError(`${quantity} is not measured in ${unit}.`);
   return digits;
 }
 
-/** Sign of the unit for a table head or behind a field: `g`, `kg/m³`, `°`; empty for plain numbers. */
+/**
+ * Sign of the unit for a table head or behind a field: `g`, `kg/m³`, `°`; empty for plain numbers.
+ * @example unitLabel('density') // → 'kg/m³'
+ */
 export function unitLabel(quantity: Quantity, unit: Unit = QUANTITIES[quantity].shown): string {
   return UNITS[unit].label;
 }
 
 /**
  * Rounded in decimal, halves away from zero: 1.005 with two digits is 1.01, although the nearest double lies below.
+ * A negative count of digits rounds to tens, hundreds …
+ * @example roundTo(1.005, 2) // → 1.01
  */
 export function roundTo(value: number, digits: number): number {
   const [mantissa = '0', exponent = '0'] = String(Math.abs(value)).split('e');

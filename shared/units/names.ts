@@ -1,6 +1,6 @@
 import type { Unit } from './units.ts';
 
-/** Units in words, plural, for screen readers and the titles of abbreviations. */
+/** For screen readers and the titles of abbreviations. */
 const NAMES: Record<Unit, string> = {
   mm: 'millimetres',
   cm: 'centimetres',
@@ -47,6 +47,10 @@ const NAMES: Record<Unit, string> = {
   percent: 'per cent',
 };
 
+/**
+ * The unit in words, plural; empty for plain numbers.
+ * @example unitName('oz/ft2') // → 'ounces per square foot'
+ */
 export function unitName(unit: Unit): string {
   return NAMES[unit];
 }

@@ -1,6 +1,6 @@
 import type { Unit } from './units.ts';
 
-/** What is measured: the unit that the plan and the core keep it in, the one shown, and those offered. */
+/** The units of what is measured. */
 interface QuantityDefinition {
   /** unit of the plan, the core and the database */
   base: Unit;
@@ -16,6 +16,7 @@ const AREAL_UNITS = ['g/m2', 'g/dm2', 'oz/ft2', 'oz/yd2'] as const;
 const PRESSURE_UNITS = ['MPa', 'GPa', 'psi', 'ksi'] as const;
 const SHARE_UNITS = ['percent', 'one'] as const;
 
+/** What is measured: the unit that the plan and the core keep it in, the one shown, and those offered. */
 export const QUANTITIES = {
   length: { base: 'mm', shown: 'mm', inch: 'in', units: ['mm', 'cm', 'm', 'in', 'ft'] },
   area: { base: 'mm2', shown: 'dm2', inch: 'in2', units: ['mm2', 'cm2', 'dm2', 'm2', 'in2', 'ft2'] },
@@ -50,15 +51,23 @@ export const QUANTITIES = {
 } as const satisfies Record<string, QuantityDefinition>;
 
 export type Quantity = keyof typeof QUANTITIES;
+/** The units that a quantity may be typed and shown in. */
 export type UnitOf<Q extends Quantity> = (typeof QUANTITIES)[Q]['units'][number];
-/** The unit to show beside a field: inches for one typed in mm, mm for one typed in inches; null where none differs. */
+
+/**
+ * The unit to show beside a field: inches for one typed in mm, mm for one typed in inches; null where none differs.
+ * @example otherUnit('length', 'mm') // → 'in'
+ */
 export function otherUnit(quantity: Quantity, unit: Unit): Unit | null {
   const { shown, inch } = QUANTITIES[quantity];
   const other = isInchUnit(unit) ? shown : inch;
   return other === unit || shown === inch ? null : other;
 }
 
-/** Whether a unit belongs to those who work in inches, ounces and their kin. */
+/**
+ * Whether a unit belongs to those who work in inches, ounces and their kin.
+ * @example isInchUnit('oz') // → true
+ */
 export function isInchUnit(unit: Unit): boolean {
   return INCH_UNITS.has(unit);
 }

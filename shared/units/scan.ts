@@ -1,3 +1,4 @@
+/** Why a text is no quantity. */
 export type ParseProblem =
   | 'missing'
   | 'not_a_number'
@@ -29,6 +30,7 @@ export class Scanner {
     if (found) this.at += found[0].length;
     return found;
   }
+  /** What a sticky pattern finds here; null where it does not fit. */
   see(pattern: RegExp): RegExpExecArray | null {
     pattern.lastIndex = this.at;
     return pattern.exec(this.text);
@@ -47,13 +49,15 @@ const RUN = /[\d.,]+(?:\s+[\d.,]+)*/y;
 const THOUSANDS = /^\d{1,3}(\s\d{3})+([.,]\d*)?$/;
 const DECIMAL = /^(\d+[.,]?\d*|[.,]\d+)$/;
 
+/** Whether a number begins here, spaces aside. @example isNumberStart(new Scanner(' 12 mm')) // → true */
 export function isNumberStart(scan: Scanner): boolean {
   return scan.see(/\s*[\d.,]/y) !== null;
 }
 
 /**
- * A number without sign: `12,5`, `1 000`, and where a fraction may stand `1/16`, `3 1/2`, `3-1/2`.
- * @throws Refused
+ * A number without sign: `12,5`, `1 000`, and where a fraction may stand `1/16`, `3 1/2`, `3-1/2`. Steps over it.
+ * @throws Refused where no number stands, one has two decimal marks, or a fraction divides by 0
+ * @example readNumber(new Scanner('3 1/2'), true) // → 3.5
  */
 export function readNumber(scan: Scanner, mayBeFraction: boolean): number {
   if (mayBeFraction) {

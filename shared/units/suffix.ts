@@ -8,9 +8,10 @@ const RUN =
   /\s*(''|["″'′°%]|(?!x(?![a-z]))[a-z]+[\d²³]*(?:\s*[/·.]\s*[a-z]+[\d²³]*|\s+(?!x(?![a-z]))[a-z]+[\d²³]*)*)/iy;
 
 /**
- * The unit that stands here, or null where none does. A spelling that serves two units means the one that the
- * quantity has; of `2ft3in` the feet are taken first.
+ * The unit that stands here, or null where none does; steps over it. A spelling that serves two units means the one
+ * that the quantity has; of `2ft3in` the feet are taken first.
  * @throws Refused for a unit that is not known or measures something else
+ * @example readUnit(new Scanner(' sq in'), 'area') // → 'in2'
  */
 export function readUnit(scan: Scanner, quantity: Quantity): Unit | null {
   const found = scan.see(RUN);

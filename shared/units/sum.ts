@@ -20,7 +20,12 @@ export interface Reading {
   reckoned: boolean;
 }
 
-/** sum = product (`+` | `−` product)* */
+/**
+ * The sum that stands here: sum = product (`+` | `−` product)*. Bare numbers beside one with a unit are in the
+ * field's own. What is found on the way is noted in `reading`.
+ * @throws Refused for what is no sum, or whose units do not fit
+ * @example readSum(new Scanner('1 + 2'), { quantity: 'length', fieldUnit: 'mm', units: new Set(), reckoned: false }) // → { value: 3, bare: true }
+ */
 export function readSum(scan: Scanner, reading: Reading): Value {
   let left = readProduct(scan, reading);
   for (;;) {
@@ -87,6 +92,10 @@ function readInches(scan: Scanner, feet: number, quantity: Quantity): number | n
   return fromUnit(inches, unit, quantity);
 }
 
+/**
+ * What was read, in the quantity's base unit; a bare number is in the field's own.
+ * @example inBase({ value: 2, bare: true }, { quantity: 'length', fieldUnit: 'cm', units: new Set(), reckoned: false }) // → 20
+ */
 export function inBase({ value, bare }: Value, { quantity, fieldUnit }: Reading): number {
   return bare ? fromUnit(value, fieldUnit, quantity) : value;
 }

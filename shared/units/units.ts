@@ -1,7 +1,7 @@
 /**
  * Units and their exact factors. Each factor says how many of the dimension's first unit (mm, g, mm², …) one unit
- * holds; all of them follow from definitions that are exact: inch = 25.4 mm, foot = 12 in, yard = 3 ft,
- * pound = 0.45359237 kg, ounce = pound / 16, mile = 5280 ft (NIST SP 811, 2008 edition, appendix B), standard gravity
+ * holds; all of them follow from definitions that are exact: inch = 25.4 mm, foot = 12 in, yard = 3 ft, pound =
+ * 0.45359237 kg, ounce = pound / 16, mile = 5280 ft (NIST SP 811, 2008 edition, appendix B), standard gravity
  * 9.80665 m/s² for the pound-force in psi.
  */
 const INCH_MM = 25.4;
@@ -16,6 +16,7 @@ const GRAVITY = 9.80665;
 /** pound-force per square inch in N/mm² */
 const PSI_MPA = ((POUND_G / 1000) * GRAVITY) / INCH_MM ** 2;
 
+/** What units measure; only those of one dimension convert into each other. */
 export type Dimension =
   | 'length'
   | 'area'
@@ -37,6 +38,7 @@ interface UnitDefinition {
   label: string;
 }
 
+/** Every unit by its key: what it measures, its factor to the dimension's first unit, and its sign. */
 export const UNITS = {
   mm: { dimension: 'length', factor: 1, label: 'mm' },
   cm: { dimension: 'length', factor: 10, label: 'cm' },
@@ -83,6 +85,7 @@ export const UNITS = {
   percent: { dimension: 'ratio', factor: 0.01, label: '%' },
 } as const satisfies Record<string, UnitDefinition>;
 
+/** Key of a unit, in plain letters: `kg/m3`. */
 export type Unit = keyof typeof UNITS;
 /** The units that a value in `U` can be converted to. */
 export type CompatibleUnit<U extends Unit> = {
@@ -90,8 +93,9 @@ export type CompatibleUnit<U extends Unit> = {
 }[Unit];
 
 /**
- * The value in another unit of the same dimension.
+ * The value in another unit of the same dimension, by their exact factors.
  * @throws RangeError when the two units measure different things
+ * @example convert(1, 'in', 'mm') // → 25.4
  */
 export function convert<U extends Unit>(value: number, from: U, to: CompatibleUnit<U>): number {
   const source: UnitDefinition = UNITS[from];

@@ -1,6 +1,7 @@
 import tailwind from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
+import { bundleSizes } from './server/house/bundle-sizes.mjs';
 
 const apiPort = process.env['API_PORT'] ?? '4311';
 
@@ -11,7 +12,7 @@ const nodeTests = (name: string, include: string[], extra: object = {}) => ({
 });
 
 export default defineConfig({
-  plugins: [react(), tailwind()],
+  plugins: [react(), tailwind(), bundleSizes()],
   build: {
     outDir: 'node_modules/.cache/featherbeam/client',
     emptyOutDir: true,

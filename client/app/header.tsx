@@ -1,13 +1,10 @@
-import { Link, NavLink, useLocation, useNavigate } from 'react-router-dom';
+import { Link, NavLink, useLocation } from 'react-router-dom';
 import { Mark } from '#client/components/mark.tsx';
-import { Menu, MenuChoice, MenuItem, MenuLine } from '#client/components/ui/menu.tsx';
-import { useToast } from '#client/components/ui/toast.tsx';
-import { useSignOut } from '#client/features/session/mutations.ts';
 import { useUser } from '#client/features/session/queries.ts';
-import { useTheme, type Theme } from '#client/hooks/use-theme.ts';
 import { cn } from '#client/lib/cn.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import { CrumbTrail } from './crumbs.tsx';
+import { DeskMenuWhenWanted } from './desk-button.tsx';
 import { paths } from './paths.ts';
 
 const ITEM = 'inline-flex min-h-row items-center rounded-md px-2 text-graphite no-underline hover:text-ink';
@@ -35,7 +32,7 @@ export function Header() {
             Sign in
           </Link>
         )}
-        <DeskMenu user={user} />
+        <DeskMenuWhenWanted user={user} />
       </div>
     </header>
   );
@@ -58,53 +55,5 @@ function MainLinks({ user }: { user: UserDto | null | undefined }) {
         Materials
       </NavLink>
     </>
-  );
-}
-
-const THEMES: readonly { value: Theme; label: string }[] = [
-  { value: 'system', label: 'As the system' },
-  { value: 'light', label: 'Light' },
-  { value: 'dark', label: 'Dark' },
-];
-
-/** Theme for everybody; the account for who is signed in; on the phone the main links too. */
-function DeskMenu({ user }: { user: UserDto | null | undefined }) {
-  const [theme, setTheme] = useTheme();
-  const signOut = useSignOut();
-  const navigate = useNavigate();
-  const say = useToast();
-  const leave = () =>
-    signOut.mutate(undefined, {
-      onSuccess: () => void navigate(paths.home),
-      onError: (error) => say(error.message),
-    });
-
-  return (
-    <Menu
-      trigger={
-        <button type="button" className={cn(ITEM, 'max-w-40 gap-1.5 border border-rule bg-sheet')}>
-          <span className="truncate">{user ? user.name : 'Menu'}</span>
-          <svg viewBox="0 0 10 6" width="10" height="6" aria-hidden="true">
-            <path d="M1 1 5 5 9 1" fill="none" stroke="currentColor" strokeWidth="1.4" />
-          </svg>
-        </button>
-      }
-    >
-      <div className="sm:hidden">
-        {user && <MenuItem onSelect={() => void navigate(paths.bench)}>Bench</MenuItem>}
-        {!user && <MenuItem onSelect={() => void navigate(paths.sample())}>Sample glider</MenuItem>}
-        <MenuItem onSelect={() => void navigate(paths.materials)}>Materials</MenuItem>
-        {!user && <MenuItem onSelect={() => void navigate(paths.signIn())}>Sign in</MenuItem>}
-        <MenuLine />
-      </div>
-      <MenuChoice label="Theme" value={theme} options={THEMES} onValue={setTheme} />
-      {user && (
-        <>
-          <MenuLine />
-          <p className="px-3 py-1 text-note text-graphite">{user.email}</p>
-          <MenuItem onSelect={leave}>Sign out</MenuItem>
-        </>
-      )}
-    </Menu>
   );
 }

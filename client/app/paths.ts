@@ -11,6 +11,7 @@ export const paths = {
   signUp: (next?: string) => (next === undefined ? '/sign-up' : `/sign-up?next=${encodeURIComponent(next)}`),
   bench: '/bench',
   materials: '/materials',
+  account: '/account',
   glider: (id: string, place: Place = 'drawing') => `/gliders/${id}/${place}`,
   sample: (place: (typeof SAMPLE_PLACES)[number] = 'drawing') => `/sample/${place}`,
   sheet: (id: string) => `/sheets/${id}`,

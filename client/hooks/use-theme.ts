@@ -1,6 +1,5 @@
 import { useSyncExternalStore } from 'react';
-
-export type Theme = 'system' | 'light' | 'dark';
+import type { Theme } from '#shared/schemas/preferences.ts';
 
 /** The script in index.html reads the same key before the first paint. */
 const KEY = 'featherbeam.theme';
@@ -12,7 +11,8 @@ function isTheme(value: unknown): value is Theme {
   return value === 'system' || value === 'light' || value === 'dark';
 }
 
-function stored(): Theme {
+/** The choice of this browser. */
+export function storedTheme(): Theme {
   try {
     const value = localStorage.getItem(KEY);
     return isTheme(value) ? value : (chosen ?? 'system');
@@ -35,7 +35,7 @@ function apply(theme: Theme): void {
 function subscribe(listener: () => void): () => void {
   const media = matchMedia('(prefers-color-scheme: dark)');
   const onChange = () => {
-    apply(stored());
+    apply(storedTheme());
     listener();
   };
   listeners.add(listener);
@@ -50,7 +50,7 @@ function subscribe(listener: () => void): () => void {
 
 /** The reader's choice of theme and how to change it. */
 export function useTheme(): [Theme, (theme: Theme) => void] {
-  const theme = useSyncExternalStore(subscribe, stored);
+  const theme = useSyncExternalStore(subscribe, storedTheme);
   return [theme, setTheme];
 }
 

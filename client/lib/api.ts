@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { problem as problemSchema, type FieldProblem, type Problem } from '#shared/schemas/problem.ts';
+import type { FieldProblem, Problem } from '#shared/schemas/problem.ts';
 
 /** The server answered with problem details (RFC 9457). */
 export class ApiError extends Error {
@@ -37,7 +37,7 @@ export class UnexpectedAnswer extends Error {
 }
 
 interface RequestOptions {
-  method?: 'GET' | 'POST' | 'PUT' | 'DELETE';
+  method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
   body?: unknown;
   headers?: Record<string, string>;
   signal?: AbortSignal | undefined;
@@ -49,8 +49,17 @@ export async function request<T extends z.ZodType>(
   schema: T,
   options: RequestOptions = {},
 ): Promise<z.output<T>> {
-  const response = await send(path, options);
-  const parsed = schema.safeParse(await json(response));
+  return checked(await requestJson(path, options), schema);
+}
+
+/** Asks the API for an answer that is checked elsewhere. */
+export async function requestJson(path: string, options: RequestOptions = {}): Promise<unknown> {
+  return json(await send(path, options));
+}
+
+/** An answer that is what was agreed. @throws UnexpectedAnswer */
+export function checked<T extends z.ZodType>(answer: unknown, schema: T): z.output<T> {
+  const parsed = schema.safeParse(answer);
   if (!parsed.success) throw new UnexpectedAnswer(parsed.error);
   return parsed.data;
 }
@@ -86,7 +95,10 @@ async function send(
 }
 
 async function failure(response: Response): Promise<Error> {
-  const parsed = problemSchema.safeParse(await json(response).catch(() => null));
+  const answer = await json(response).catch(() => null);
+  // Fetched with the first refusal: a page that is not refused anything does without schemas.
+  const { problem } = await import('#shared/schemas/problem.ts');
+  const parsed = problem.safeParse(answer);
   if (parsed.success) return new ApiError(parsed.data);
   // A proxy without a server behind it answers so, and not in our words.
   if (response.status >= 502 && response.status <= 504) return new NetworkError(response.status);

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
-import { existsSync, readFileSync } from 'node:fs';
-import { join, resolve } from 'node:path';
-import express, { Router, type Response } from 'express';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
+import { extname, join, resolve } from 'node:path';
+import express, { Router, type RequestHandler, type Response } from 'express';
 
 /** The built client: its page, and the hashes of the scripts that stand in it. */
 export interface Client {
@@ -27,6 +27,7 @@ export function inlineScriptHashes(page: string): string[] {
 /** Serves the client: hashed files for ever, its page for every address that is not the API's or a file's. */
 export function clientFiles(client: Client): Router {
   const router = Router();
+  router.use('/assets', packedFiles(join(client.folder, 'assets')));
   router.use(
     '/assets',
     express.static(join(client.folder, 'assets'), { immutable: true, maxAge: '365d', fallthrough: false }),
@@ -34,6 +35,21 @@ export function clientFiles(client: Client): Router {
   router.use(express.static(client.folder, { index: false, maxAge: 0 }));
   router.get(/^\/(?!api(?:\/|$))/, (_req, res) => sendPage(res, client.page));
   return router;
+}
+
+/** Sends the packed twin that the build laid beside a file to whoever takes it. */
+function packedFiles(folder: string): RequestHandler {
+  const twins = new Set(existsSync(folder) ? readdirSync(folder).filter((name) => name.endsWith('.gz')) : []);
+  return (req, res, next) => {
+    const name = `${req.path.slice(1)}.gz`;
+    if (!twins.has(name)) return next();
+    res.vary('Accept-Encoding');
+    if (!req.acceptsEncodings('gzip')) return next();
+    res.set('Content-Encoding', 'gzip').type(extname(req.path));
+    return res.sendFile(name, { root: folder, immutable: true, maxAge: '365d' }, (error) => {
+      if (error) next(error);
+    });
+  };
 }
 
 function sendPage(res: Response, page: string | null): void {

@@ -6,13 +6,15 @@ interface MenuProps {
   /** A button; it opens the menu. */
   trigger: ReactNode;
   align?: 'start' | 'end';
+  /** Open from the first. */
+  defaultOpen?: boolean;
   children: ReactNode;
 }
 
 /** A list of commands that opens from a button. */
-export function Menu({ trigger, align = 'end', children }: MenuProps) {
+export function Menu({ trigger, align = 'end', defaultOpen = false, children }: MenuProps) {
   return (
-    <DropdownMenu.Root modal={false}>
+    <DropdownMenu.Root modal={false} defaultOpen={defaultOpen}>
       <DropdownMenu.Trigger asChild>{trigger}</DropdownMenu.Trigger>
       {/* Inside the page's main part, so that no landmark is left when it opens. */}
       <DropdownMenu.Portal container={document.getElementById('main')}>

@@ -2,6 +2,7 @@ import { lazy, Suspense, useMemo, useState } from 'react';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { Skeleton } from '#client/components/ui/skeleton.tsx';
+import { WhenNear } from '#client/components/when-near.tsx';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
@@ -127,9 +128,11 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
       {beam && (
         <div className="mt-10 print:hidden">
           <SectionBoundary>
-            <Suspense fallback={<Skeleton lines={5} />}>
-              <Charts plan={plan} result={result} beam={beam} lit={lit} />
-            </Suspense>
+            <WhenNear before={<Skeleton lines={5} />}>
+              <Suspense fallback={<Skeleton lines={5} />}>
+                <Charts plan={plan} result={result} beam={beam} lit={lit} />
+              </Suspense>
+            </WhenNear>
           </SectionBoundary>
         </div>
       )}

@@ -1,13 +1,11 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { z } from 'zod';
-import { command, request } from '#client/lib/api.ts';
-import { user, type SessionDto, type SignIn, type SignUp } from '#shared/schemas/session.ts';
-import { sessionQuery } from './queries.ts';
-
-const signedIn = z.strictObject({ user });
+import { command, requestJson } from '#client/lib/api.ts';
+import type { SessionDto, SignIn, SignUp } from '#shared/schemas/session.ts';
+import { withDeviceChoices } from './device-choices.ts';
+import { sessionOf, sessionQuery } from './queries.ts';
 
 /** What was fetched for one person must not be shown to the next. */
-function useEnter() {
+export function useEnter() {
   const client = useQueryClient();
   return (session: SessionDto) => {
     client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== sessionQuery.queryKey[0] });
@@ -18,15 +16,17 @@ function useEnter() {
 export function useSignIn() {
   const enter = useEnter();
   return useMutation({
-    mutationFn: (body: SignIn) => request('/session', signedIn, { method: 'POST', body }),
+    mutationFn: async (body: SignIn) => sessionOf(await requestJson('/session', { method: 'POST', body })),
     onSuccess: enter,
   });
 }
 
+/** Units and theme that were chosen as a visitor become the new account's. */
 export function useSignUp() {
   const enter = useEnter();
   return useMutation({
-    mutationFn: (body: SignUp) => request('/users', signedIn, { method: 'POST', body }),
+    mutationFn: async (body: SignUp) =>
+      withDeviceChoices(await sessionOf(await requestJson('/users', { method: 'POST', body }))),
     onSuccess: enter,
   });
 }

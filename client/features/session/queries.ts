@@ -1,13 +1,24 @@
 import { queryOptions, useQuery } from '@tanstack/react-query';
-import { request } from '#client/lib/api.ts';
-import { session } from '#shared/schemas/session.ts';
+import { checked, requestJson } from '#client/lib/api.ts';
+import type { SessionDto } from '#shared/schemas/session.ts';
 
 /** The one source of who is signed in. */
 export const sessionQuery = queryOptions({
   queryKey: ['session'],
-  queryFn: ({ signal }) => request('/session', session, { signal }),
+  queryFn: async ({ signal }) => sessionOf(await requestJson('/session', { signal })),
   staleTime: 5 * 60_000,
 });
+
+/** A visitor's answer is told at sight, so that the first page of a visitor does without schemas. */
+export async function sessionOf(answer: unknown): Promise<SessionDto> {
+  if (isVisitor(answer)) return { user: null };
+  const { session } = await import('#shared/schemas/session.ts');
+  return checked(answer, session);
+}
+
+function isVisitor(answer: unknown): boolean {
+  return typeof answer === 'object' && answer !== null && 'user' in answer && answer.user === null;
+}
 
 export function useSession() {
   return useQuery(sessionQuery);

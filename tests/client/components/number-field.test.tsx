@@ -1,8 +1,7 @@
 // @vitest-environment happy-dom
 import { describe, expect, it, vi } from 'vitest';
 import { NumberField } from '#client/components/ui/number-field.tsx';
-import { UnitsContext } from '#client/lib/units.ts';
-import { unitsOf } from '#shared/format/units.ts';
+import { ChosenUnitsContext } from '#client/lib/chosen-units.ts';
 import type { ParseProblem } from '#shared/units/scan.ts';
 import { leave, mount, onlyInput, press, type } from '#tests/client/lib/mount.tsx';
 
@@ -43,9 +42,9 @@ describe('number field', () => {
   it('works in the reader’s inches, with the mm beside them', async () => {
     const onChange = vi.fn<Change>();
     const node = (now: number) => (
-      <UnitsContext value={unitsOf({ length: 'in' })}>
+      <ChosenUnitsContext value={{ length: 'in' }}>
         <NumberField label="Width" quantity="length" value={now} onChange={onChange} />
-      </UnitsContext>
+      </ChosenUnitsContext>
     );
     const { element, show } = await mount(node(6.35));
     const input = onlyInput(element);

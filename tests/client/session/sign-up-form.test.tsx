@@ -13,11 +13,16 @@ async function form() {
     </QueryClientProvider>,
   );
   const input = (name: string) => onlyInput(element, `input[name=${name}]`);
-  const submit = () =>
-    act(async () => {
+  const submit = async () => {
+    await act(async () => {
       only(element, 'form').dispatchEvent(new Event('submit', { bubbles: true, cancelable: true }));
-      await new Promise((resolve) => setTimeout(resolve, 20));
     });
+    // The schema comes with the first submission; the button is locked until all is through.
+    await vi.waitFor(async () => {
+      await act(() => new Promise((resolve) => setTimeout(resolve, 5)));
+      expect(only(element, 'button').hasAttribute('disabled')).toBe(false);
+    });
+  };
   const errorOf = (name: string) => {
     const ids = input(name).getAttribute('aria-describedby')?.split(' ') ?? [];
     return ids.map((id) => document.getElementById(id)?.textContent ?? '').join(' ');

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { gzipSync } from 'node:zlib';
 import { afterAll, describe, expect, it } from 'vitest';
 import { inlineScriptHashes } from '#server/middleware/client-files.ts';
 import { useApp } from '../support/app.ts';
@@ -15,6 +16,8 @@ mkdirSync(join(folder, 'assets'));
 writeFileSync(join(folder, 'index.html'), PAGE);
 writeFileSync(join(folder, 'icon.svg'), '<svg xmlns="http://www.w3.org/2000/svg"/>');
 writeFileSync(join(folder, 'assets', 'app-1a2b.js'), 'export {}');
+writeFileSync(join(folder, 'assets', 'packed-3c4d.js'), 'export const long = 1;');
+writeFileSync(join(folder, 'assets', 'packed-3c4d.js.gz'), gzipSync('export const long = 1;'));
 
 afterAll(() => rmSync(folder, { recursive: true }));
 
@@ -34,6 +37,27 @@ describe('a built client', () => {
     expect(asset.headers['cache-control']).toBe('public, max-age=31536000, immutable');
     const icon = await app.visitor().get('/icon.svg').expect(200);
     expect(icon.headers['cache-control']).toBe('public, max-age=0');
+  });
+
+  it('sends the packed twin of a file to a browser that takes it, and the file itself to one that does not', async () => {
+    const packed = await app
+      .visitor()
+      .get('/assets/packed-3c4d.js')
+      .set('Accept-Encoding', 'gzip')
+      .expect(200);
+    expect(packed.headers).toMatchObject({
+      'content-encoding': 'gzip',
+      'content-type': expect.stringContaining('javascript'),
+      'cache-control': 'public, max-age=31536000, immutable',
+      vary: expect.stringContaining('Accept-Encoding'),
+    });
+    const plain = await app
+      .visitor()
+      .get('/assets/packed-3c4d.js')
+      .set('Accept-Encoding', 'identity')
+      .expect(200);
+    expect(plain.headers['content-encoding']).toBeUndefined();
+    for (const { text } of [packed, plain]) expect(text).toBe('export const long = 1;');
   });
 
   it('says 404 for a hashed file that is gone, not the page', async () => {

@@ -8,41 +8,61 @@ const wood = { material: 'balsa', from: 0, to: 500 } as const;
 /** Six ribs of 2 mm, 100 mm apart. */
 export const EXAMPLE_RIBS: Ribs = {
   ...wood,
-  ...{ id: 'ribs', name: 'Ribs', kind: 'ribs', count: 6, thickness: 2, lightening: 0 },
+  id: 'ribs',
+  name: 'Ribs',
+  kind: 'ribs',
+  count: 6,
+  thickness: 2,
+  lightening: 0,
 };
 
 /** A spar of 5 × 2 mm, let into the ribs under the top skin. */
 export const EXAMPLE_SPAR: Strip = {
   ...wood,
-  ...{ id: 'spar', name: 'Spar', kind: 'strip', seat: 'top', profile: 'rectangle', letIn: true },
-  ...{ at: [0.25, 0.25], width: [5, 5], height: [2, 2] },
+  id: 'spar',
+  name: 'Spar',
+  kind: 'strip',
+  seat: 'top',
+  profile: 'rectangle',
+  letIn: true,
+  at: [0.25, 0.25],
+  width: [5, 5],
+  height: [2, 2],
 };
 
 /** Sheeting of 1 mm over the fore half of the top. */
 export const EXAMPLE_SKIN: Skin = {
   ...wood,
-  ...{ id: 'skin', name: 'Sheeting', kind: 'skin', seat: 'top', start: 0, end: 0.5, thickness: 1 },
+  id: 'skin',
+  name: 'Sheeting',
+  kind: 'skin',
+  seat: 'top',
+  start: 0,
+  end: 0.5,
+  thickness: 1,
 };
 
 /** A web of 1 mm under the spar. It is not in the wing. */
 export const EXAMPLE_WEB: Web = {
   ...wood,
-  ...{ id: 'web', name: 'Web', kind: 'web', at: [0.25, 0.25], thickness: 1 },
+  id: 'web',
+  name: 'Web',
+  kind: 'web',
+  at: [0.25, 0.25],
+  thickness: 1,
 };
 
 /** Cap strips of 4 × 1 mm on the aft half of the top. They are not on the wing. */
 export const EXAMPLE_CAPS: CapStrips = {
   ...wood,
-  ...{
-    id: 'caps',
-    name: 'Cap strips',
-    kind: 'capStrips',
-    seat: 'top',
-    start: 0.5,
-    end: 1,
-    width: 4,
-    thickness: 1,
-  },
+  id: 'caps',
+  name: 'Cap strips',
+  kind: 'capStrips',
+  seat: 'top',
+  start: 0.5,
+  end: 1,
+  width: 4,
+  thickness: 1,
 };
 
 /**
@@ -56,8 +76,13 @@ export const EXAMPLE_WING: Surface = {
   mirrored: true,
   panels: [
     {
-      ...{ span: 500, rootChord: 100, tipChord: 100, sweep: 0, dihedral: 0 },
-      ...{ rootSection: { flat: 10 }, tipSection: { flat: 10 } },
+      span: 500,
+      rootChord: 100,
+      tipChord: 100,
+      sweep: 0,
+      dihedral: 0,
+      rootSection: { flat: 10 },
+      tipSection: { flat: 10 },
     },
   ],
   parts: [EXAMPLE_RIBS, EXAMPLE_SPAR, EXAMPLE_SKIN],
@@ -81,15 +106,16 @@ export const EXAMPLE_PLAN: Plan = {
   items: [{ id: 'nose', name: 'Nose weight', group: 'ballast', mass: 10, u: 0.1, at: [-20, 0, 0] }],
   solids: [
     {
-      ...{
-        id: 'boom',
-        name: 'Boom',
-        group: 'fuselage',
-        material: 'balsa',
-        shape: 'bar',
-        profile: 'rectangle',
-      },
-      ...{ from: [0, 0, 0], to: [400, 0, 0], width: [5, 5], height: [5, 5] },
+      id: 'boom',
+      name: 'Boom',
+      group: 'fuselage',
+      material: 'balsa',
+      shape: 'bar',
+      profile: 'rectangle',
+      from: [0, 0, 0],
+      to: [400, 0, 0],
+      width: [5, 5],
+      height: [5, 5],
     },
   ],
   target: { percentMac: 40, tolerance: 2 },

@@ -52,6 +52,10 @@ export interface Units {
 const FOLLOWS: Partial<Record<Quantity, Quantity>> = { classArea: 'area' };
 const SMALL: Partial<Record<Unit, Unit>> = { dm2: 'cm2', m2: 'cm2', ft2: 'in2' };
 
+/**
+ * How a reader sees quantities who chose these units. A choice that the quantity does not offer counts as none.
+ * @example unitsOf({ mass: 'oz' }).format(28.349523125, 'mass') // → '1.00\u202foz'
+ */
 export function unitsOf(chosen: ChosenUnits): Units {
   const unit = (quantity: Quantity): Unit => {
     const choice = chosen[quantity] ?? chosen[FOLLOWS[quantity] ?? quantity];

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
@@ -5,9 +6,17 @@ import { wingReference } from '#shared/core/wing-reference.ts';
 import { AreaTable } from './area-table.tsx';
 import { Flight } from './flight.tsx';
 import { PlanformTable } from './planform-table.tsx';
+import { SparSection } from './spar/spar-section.tsx';
 
-/** How heavily the wing is loaded, and how fast that makes it. */
-export function LoadingPlace({ workspace }: { workspace: Workspace }) {
+interface LoadingPlaceProps {
+  workspace: Workspace;
+  drawingHref: string;
+  /** stands under the rest, once there is a mass */
+  children?: ReactNode;
+}
+
+/** How heavily the wing is loaded, how fast that makes it, and what its spar stands. */
+export function LoadingPlace({ workspace, drawingHref, children }: LoadingPlaceProps) {
   const plan = useValidPlan(workspace);
   const { result } = workspace;
   if (!plan) {
@@ -21,7 +30,8 @@ export function LoadingPlace({ workspace }: { workspace: Workspace }) {
     );
   }
   const reference = wingReference(plan);
-  if (!reference || result.totals.mass <= 0) {
+  const wing = plan.surfaces.find(({ role }) => role === 'wing');
+  if (!reference || !wing || result.totals.mass <= 0) {
     return (
       <div className="px-4 pt-5 pb-8 sm:px-7">
         <h1 className="text-figure font-semibold">No wing loading yet</h1>
@@ -43,6 +53,8 @@ export function LoadingPlace({ workspace }: { workspace: Workspace }) {
         <AreaTable plan={plan} result={result} />
         <PlanformTable plan={plan} result={result} />
       </Flight>
+      <SparSection {...{ workspace, plan, wing, drawingHref }} />
+      {children}
     </div>
   );
 }

@@ -16,6 +16,7 @@ export function downwashSlope(aspectRatio: number, slope = liftSlope(aspectRatio
   return (2 * slope) / (Math.PI * aspectRatio);
 }
 
+/** What the neutral point of wing and tail hangs on. */
 export interface WingAndTail {
   /** mm², projected */
   wingArea: number;
@@ -24,7 +25,7 @@ export interface WingAndTail {
   tailAspectRatio: number;
   /** tail's quarter-chord point, in wing MACs behind the leading edge of the wing's MAC */
   tailPlace: number;
-  /** share of the free stream's dynamic pressure at the tail */
+  /** share of the free stream's dynamic pressure at the tail; 0.9 if not given */
   tailEfficiency?: number;
 }
 

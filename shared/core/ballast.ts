@@ -2,10 +2,11 @@
 export type BallastRefusal =
   | {
       refused: 'wrong_side';
-      /** g that would have to come off at that arm instead, null where none would do */ takeOff:
-        number | null;
+      /** g that would have to come off at that arm instead, null where none would do */
+      takeOff: number | null;
     }
   | { refused: 'at_wanted_point' };
+/** The ballast that does it, g, or why none can. */
 export type Ballast = { mass: number } | BallastRefusal;
 
 /**

@@ -9,8 +9,10 @@ export interface HungLabel {
   height: number;
 }
 
+/** Where a label stands, seen from its weight. */
 export type LabelSide = 'right' | 'left' | 'below';
 
+/** Where a weight and its label hang. */
 export interface HungPlace {
   key: string;
   /** from the bar to the top of the weight */

@@ -26,6 +26,7 @@ export type Notice =
   | { code: 'balance_aft_of_neutral_point'; path: 'plan'; byMm: number }
   | { code: 'reynolds_low'; path: 'plan'; reynolds: number; clMax: number };
 
+/** What a notice tells; stable, for whoever words it. */
 export type NoticeCode = Notice['code'];
 
 /**

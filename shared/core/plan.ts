@@ -1,4 +1,24 @@
 import type { Vec3 } from './frame.ts';
+import type { Pair, Part } from './plan-parts.ts';
+
+export type {
+  CapStrips,
+  Covering,
+  Face,
+  Glue,
+  Pair,
+  Part,
+  PartKind,
+  Ribs,
+  Sheet,
+  Side,
+  Skin,
+  Strip,
+  StripProfile,
+  StripSeat,
+  TipBlock,
+  Web,
+} from './plan-parts.ts';
 
 /**
  * The plan: the document that the estimate is made from. Units and axes: `frame.ts`. The same document is the
@@ -17,8 +37,10 @@ export interface Plan {
   flight?: Flight | undefined;
 }
 
+/** What a material is; only `wood` counts for wood trials, for glue by share and for humidity. */
 export type MaterialCategory = 'wood' | 'composite' | 'metal' | 'sheet' | 'covering' | 'finish' | 'adhesive';
 
+/** A material as it was when the plan was made; at least one of `density`, `areal` and `spread`. */
 export interface PlanMaterial {
   name: string;
   category: MaterialCategory;
@@ -39,22 +61,28 @@ export interface PlanMaterial {
   source?: string | undefined;
 }
 
+/** What a surface does: wings and tailplanes carry, fins stand. */
 export type SurfaceRole = 'wing' | 'tailplane' | 'fin';
 
+/** A wing, a tailplane or a fin with the parts that it is built of. */
 export interface Surface {
+  /** first half of its lines' ids; the group of its parts that name none */
   key: string;
   role: SurfaceRole;
   /** root leading edge of the starboard half */
   apex: Vec3;
+  /** whether there is a port half too */
   mirrored: boolean;
   /** root to tip */
   panels: Panel[];
   parts: Part[];
 }
 
+/** A piece of a surface with straight edges; its section goes over from one end's to the other's. */
 export interface Panel {
   /** along the panel as laid on the board, mm */
   span: number;
+  /** mm */
   rootChord: number;
   tipChord: number;
   /** how far aft the tip's leading edge lies of the root's, mm */
@@ -65,6 +93,7 @@ export interface Panel {
   tipSection: SectionSpec;
 }
 
+/** How a section is given. */
 export type SectionSpec = NacaSpec | FlatSpec | PointsSpec;
 /** A four-digit section, NACA Report 460. */
 export interface NacaSpec {
@@ -80,149 +109,46 @@ export interface PointsSpec {
   points: [number, number][];
 }
 
-/** A value at `from` and one at `to`, linear in s between them. */
-export type Pair = [atFrom: number, atTo: number];
-export type Side = 'both' | 'port' | 'starboard';
-export type Face = 'top' | 'bottom' | 'both';
-export type StripSeat = 'top' | 'bottom' | 'middle' | 'nose' | 'tail';
-export type StripProfile = 'rectangle' | 'triangle' | 'round' | 'tube';
-
-interface PartBase {
-  id: string;
-  name: string;
-  material: string;
-  group?: string | undefined;
-  side?: Side | undefined;
-}
-
-export interface Ribs extends PartBase {
-  kind: 'ribs';
-  /** either the stations themselves … */
-  stations?: number[] | undefined;
-  /** … or equal steps, both ends included */
-  from?: number | undefined;
-  to?: number | undefined;
-  count?: number | undefined;
-  thickness: number;
-  /** share removed, 0–0.9 */
-  lightening: number;
-}
-
-export interface Strip extends PartBase {
-  kind: 'strip';
-  from: number;
-  to: number;
-  /** x/c of its centre line; not needed for `nose` and `tail` */
-  at?: Pair | undefined;
-  seat: StripSeat;
-  /** along x, mm */
-  width: Pair;
-  /** along z, mm */
-  height: Pair;
-  profile: StripProfile;
-  /** wall of a tube, mm */
-  wall?: number | undefined;
-  /** lies in a notch of the ribs; not needed for `nose` and `tail`, where the rib ends */
-  letIn?: boolean | undefined;
-}
-
-export interface Skin extends PartBase {
-  kind: 'skin';
-  from: number;
-  to: number;
-  start: number;
-  end: number;
-  /** `wrap`: from `start` on top, forward round the nose, to `end` on the bottom */
-  seat: 'top' | 'bottom' | 'wrap';
-  thickness: number;
-}
-
-export interface CapStrips extends PartBase {
-  kind: 'capStrips';
-  from: number;
-  to: number;
-  start: number;
-  end: number;
-  seat: Face;
-  width: number;
-  thickness: number;
-}
-
-export interface Web extends PartBase {
-  kind: 'web';
-  from: number;
-  to: number;
-  at: Pair;
-  thickness: number;
-}
-
-export interface TipBlock extends PartBase {
-  kind: 'tipBlock';
-  length: number;
-  /** share hollowed out, 0–0.9 */
-  hollow: number;
-}
-
-export interface Sheet extends PartBase {
-  kind: 'sheet';
-  thickness: number;
-  /** share cut out, 0–0.9 */
-  cutout: number;
-}
-
-export interface Covering extends PartBase {
-  kind: 'covering' | 'finish';
-  from: number;
-  to: number;
-  seat: Face;
-  /** share added for overlaps and seams */
-  overlap: number;
-}
-
-export interface Glue extends PartBase {
-  kind: 'glue';
-  method: 'share' | 'joints';
-  /** of the surface's wood mass, for `share` */
-  share?: number | undefined;
-  /** for `joints` */
-  layers?: number | undefined;
-}
-
-export type Part = Ribs | Strip | Skin | CapStrips | Web | TipBlock | Sheet | Covering | Glue;
-export type PartKind = Part['kind'];
-
 /** Whatever has a mass and an arm. */
 export interface Item {
   id: string;
   name: string;
   group: string;
+  /** g */
   mass: number;
   /** standard uncertainty, g */
   u?: number | undefined;
   at: Vec3;
 }
 
+/** Axes and units of the points: `frame.ts`. */
 interface SolidBase {
   id: string;
   name: string;
   group: string;
+  /** key into the plan's materials */
   material: string;
 }
 
+/** A stick, block or tube, straight from one point to another. */
 export interface Bar extends SolidBase {
   shape: 'bar';
   from: Vec3;
   to: Vec3;
+  /** across, at `from` and at `to`, mm */
   width: Pair;
   height: Pair;
   profile: 'rectangle' | 'round' | 'tube';
+  /** of a tube, mm */
   wall?: number | undefined;
 }
 
+/** A flat piece, or several alike, upright along the model. */
 export interface Plate extends SolidBase {
   shape: 'plate';
   /** closed outline in x, z */
   outline: [x: number, z: number][];
+  /** mm */
   thickness: number;
   count: number;
   /** plane of the plate, or of the middle of several */
@@ -231,17 +157,21 @@ export interface Plate extends SolidBase {
   cutout: number;
 }
 
+/** What is built outside the surfaces. */
 export type Solid = Bar | Plate;
 
-/** Wanted balance, ± in % of mean aerodynamic chord. */
+/** Wanted balance and how far off it may lie, both in % of mean aerodynamic chord. */
 export interface Target {
   percentMac: number;
   tolerance: number;
 }
 
+/** What flight is reckoned with. */
 export interface Flight {
+  /** greatest lift coefficient; 1 if not given */
   clMax?: number | undefined;
-  /** kg/m³ */
+  /** kg/m³; 1.225 if not given */
   airDensity?: number | undefined;
+  /** times the weight, for the spar; 1 if not given */
   loadFactor?: number | undefined;
 }

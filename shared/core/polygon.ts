@@ -1,6 +1,7 @@
 /** Integrals over a plane polygon: P. Bourke, "Calculating the area and centroid of a polygon" (1988). */
 export type Point = readonly [x: number, z: number];
 
+/** What an outline encloses, in the powers of its unit. */
 export interface PolygonIntegrals {
   /** never negative, whichever way round the points run */
   area: number;

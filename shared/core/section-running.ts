@@ -1,5 +1,6 @@
 import type { Section } from './section.ts';
 
+/** The face of a section that looks up, or down. */
 export type FaceName = 'upper' | 'lower';
 
 /** An area or a length with its first moments up to each node of a section of unit chord, from the nose on. */

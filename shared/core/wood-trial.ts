@@ -12,6 +12,7 @@ export interface Trial {
   materials: Readonly<Record<string, TrialWood>>;
 }
 
+/** Why a trial cannot be trimmed. */
 export type TrialRefusal = BallastRefusal | { refused: 'no_mass' };
 
 /** What a trial comes to, without ballast and re-trimmed. Masses g. */
@@ -34,6 +35,7 @@ export interface TrialResult {
   refused: TrialRefusal | null;
 }
 
+/** Trials side by side, all trimmed to one point. */
 export interface TrialRun {
   /** where every trial is trimmed to, mm aft of the datum; null where the plan has no mass */
   wanted: number | null;

@@ -50,6 +50,7 @@ export const QUANTITIES = {
   count: { base: 'one', shown: 'one', inch: 'one', units: ['one'] },
 } as const satisfies Record<string, QuantityDefinition>;
 
+/** Key of what is measured. */
 export type Quantity = keyof typeof QUANTITIES;
 /** The units that a quantity may be typed and shown in. */
 export type UnitOf<Q extends Quantity> = (typeof QUANTITIES)[Q]['units'][number];

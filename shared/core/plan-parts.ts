@@ -10,8 +10,8 @@ export type StripSeat = 'top' | 'bottom' | 'middle' | 'nose' | 'tail';
 export type StripProfile = 'rectangle' | 'triangle' | 'round' | 'tube';
 
 /**
- * What all parts have. In every part `from` and `to` are stations, mm, both ends included; `start` and `end` are x/c;
- * lengths, widths and thicknesses are mm.
+ * What all parts have. In every part `from` and `to` are stations, mm, both ends included; `start` and `end` are
+ * x/c; lengths, widths and thicknesses are mm.
  */
 interface PartBase {
   id: string;

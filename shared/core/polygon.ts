@@ -1,4 +1,4 @@
-/** Integrals over a plane polygon: P. Bourke, "Calculating the area and centroid of a polygon" (1988). */
+/** A corner. */
 export type Point = readonly [x: number, z: number];
 
 /** What an outline encloses, in the powers of its unit. */
@@ -13,8 +13,9 @@ export interface PolygonIntegrals {
 }
 
 /**
- * Area, centroid and second moments of a polygon given by its corners in order, in the powers of their unit; it
- * closes by itself. All noughts, and no centroid, where it holds no area; one that crosses itself is not for this.
+ * Area, centroid and second moments of a polygon (P. Bourke, "Calculating the area and centroid of a polygon",
+ * 1988) given by its corners in order, in the powers of their unit; it closes by itself. All noughts, and no
+ * centroid, where it holds no area; one that crosses itself is not for this.
  * @example polygonIntegrals([[0, 0], [6, 0], [0, 3]]).area // → 9
  * @example polygonIntegrals([[0, 0], [6, 0], [0, 3]]).centroid // → [2, 1]
  */

@@ -8,6 +8,7 @@ import { errorHandler } from './middleware/error-handler.ts';
 import { createLimits } from './middleware/rate-limits.ts';
 import { requestLog } from './middleware/request-log.ts';
 import { securityHeaders } from './middleware/security-headers.ts';
+import { bindSurroundings, type Surroundings } from './surroundings.ts';
 import { apiRouter } from './routes/router.ts';
 
 export interface AppSettings {
@@ -19,11 +20,20 @@ export interface AppSettings {
   rateLimitScale: number;
   /** reverse proxies in front whose word on the caller's address is taken */
   proxies: number;
+  surroundings: Surroundings;
 }
 
 /** The whole web application, neither connected nor listening yet. */
-export function createApp({ sequelize, logger, clientDir, rateLimitScale, proxies }: AppSettings): Express {
+export function createApp({
+  sequelize,
+  logger,
+  clientDir,
+  rateLimitScale,
+  proxies,
+  surroundings,
+}: AppSettings): Express {
   initModels(sequelize);
+  bindSurroundings(surroundings);
   const client = readClient(clientDir);
   const app = express();
   app.disable('x-powered-by');

@@ -21,6 +21,13 @@ const schema = z.object({
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('warn'),
   /** The built client. */
   FEATHERBEAM_CLIENT_DIR: z.string().default('node_modules/.cache/featherbeam/client'),
+  /** The folder of stored files; `files` in the home of this clone where it is not given. */
+  FEATHERBEAM_FILES: z.string().optional(),
+  /** Where people reach the service; every mailed link begins so. */
+  FEATHERBEAM_ADDRESS: z
+    .string()
+    .regex(/^https?:\/\/[^/\s]+$/, 'must be like https://gliders.example, without a path')
+    .optional(),
   /** Multiplies every rate limit. */
   FEATHERBEAM_RATE_LIMIT_SCALE: number(0.001, 1_000_000).default(1),
   /** How many reverse proxies stand in front; their X-Forwarded-For is believed so far and no further. */

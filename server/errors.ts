@@ -4,6 +4,7 @@ import type { FieldProblem } from '#shared/schemas/problem.ts';
 export const PROBLEMS = {
   invalid_input: { status: 400, title: 'The input is wrong' },
   malformed_json: { status: 400, title: 'The body is not JSON' },
+  malformed_form: { status: 400, title: 'The form cannot be read' },
   signed_out: { status: 401, title: 'Not signed in' },
   wrong_credentials: { status: 401, title: 'Wrong address or password' },
   forbidden: { status: 403, title: 'Not allowed' },

@@ -1,5 +1,6 @@
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { join } from 'node:path';
 import { createApp } from './app.ts';
 import { connect, DatabaseUnusable } from './db/connect.ts';
 import { DatabaseNewer, migrateUp } from './db/migrate.ts';
@@ -8,8 +9,10 @@ import { SeedError } from './db/seed-files.ts';
 import { seedMaterials } from './db/seed-materials.ts';
 import { openSequelize } from './db/sequelize.ts';
 import { EnvError, readEnv } from './env.ts';
+import { home } from './house/paths.mjs';
 import { createLogger } from './middleware/request-log.ts';
 import { tidyHourly } from './services/housekeeping.ts';
+import { folderStore } from './storage/folder-store.ts';
 
 /** How long a request under way may take to finish when the server is told to stop. */
 const STOP_PATIENCE_MS = 4_000;
@@ -36,19 +39,26 @@ async function main(): Promise<void> {
   const sequelize = openSequelize(env.DATABASE_URL);
   await connect(sequelize);
   await migrateUp(sequelize);
+  let port = env.PORT;
   const app = createApp({
     sequelize,
     logger,
     clientDir: env.FEATHERBEAM_CLIENT_DIR,
     rateLimitScale: env.FEATHERBEAM_RATE_LIMIT_SCALE,
     proxies: env.FEATHERBEAM_PROXIES,
+    surroundings: {
+      files: folderStore(env.FEATHERBEAM_FILES ?? join(home, 'files')),
+      address: () => env.FEATHERBEAM_ADDRESS ?? `http://${env.HOST}:${port}`,
+      mailsAreShown: false,
+    },
   });
   await seedMaterials();
   await seedDemo();
 
   const server = createServer(app);
   const stopTidying = tidyHourly((error) => logger.error({ err: error }, 'tidying failed'));
-  const { port } = await listen(server, env.PORT, env.HOST);
+  // The system has chosen where it was left the choice.
+  port = (await listen(server, env.PORT, env.HOST)).port;
 
   let stopping = false;
   const stop = async () => {

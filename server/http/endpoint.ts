@@ -7,6 +7,7 @@ import { parseInputs } from './input.ts';
 import type { LimitName } from '#server/middleware/rate-limits.ts';
 import { sendReply, type AnswerKind, type Reply } from './reply.ts';
 import { actorOf, signedInActorOf } from './actor.ts';
+import { readUpload, type Upload } from './upload.ts';
 
 /**
  * Who may call: `public` never looks at the session, `anyone` is told who asks, `signed-in` answers 401 to
@@ -29,12 +30,14 @@ export interface Call<A extends Access, P, Q, B> {
   /** version named by `If-Match`; 428 has been answered where an endpoint needs it and it was missing */
   ifMatch: number;
   idempotencyKey: string | undefined;
+  /** what an endpoint with an upload was sent */
+  file: Buffer;
   req: Request;
 }
 
 /** What the documentation says of an endpoint; the same declaration serves the requests. */
 export interface Description {
-  method: 'get' | 'post' | 'put' | 'delete';
+  method: 'get' | 'post' | 'put' | 'patch' | 'delete';
   /** under `/api`, parameters as `:name` */
   path: string;
   tag: string;
@@ -43,6 +46,8 @@ export interface Description {
   limits?: readonly LimitName[];
   ifMatch?: true;
   idempotent?: true;
+  /** the body is a form with this file, and not JSON */
+  upload?: Upload;
   answer: AnswerKind<z.ZodType>;
   /** refusals beyond those that go without saying */
   problems?: readonly ProblemCode[];
@@ -60,6 +65,8 @@ export interface Endpoint extends Description {
 }
 
 type Nothing = z.ZodUndefined;
+
+const NO_FILE = Buffer.alloc(0);
 
 /**
  * Declares an endpoint: one list of these makes both the routes and their documentation, so that neither can
@@ -85,6 +92,7 @@ export function endpoint<
     schemas,
     serve: async (req: Request, res: Response) => {
       const actor = await actorFor(description.access, req, res);
+      const file = description.upload ? await readUpload(req, res, description.upload) : NO_FILE;
       const inputs = parseInputs<P, Q, B>(schemas, req);
       const reply = await handle({
         // The condition on `access` that picks the actor's type is the one that picked its value.
@@ -92,9 +100,10 @@ export function endpoint<
         ...inputs,
         ifMatch: description.ifMatch ? readIfMatch(req) : Number.NaN,
         idempotencyKey: description.idempotent ? readIdempotencyKey(req) : undefined,
+        file,
         req,
       });
-      sendReply(res, description.answer, reply);
+      await sendReply(res, description.answer, reply);
     },
   };
 }

@@ -1,6 +1,7 @@
 import type { Response } from 'express';
 import type { Problem } from '#shared/schemas/problem.ts';
 import { PROBLEMS, type AppError } from '#server/errors.ts';
+import { sendText } from './packed.ts';
 
 /** Problem details of RFC 9457; `type` leads to the code's line in the API's page. */
 export function presentProblem(error: AppError): Problem {
@@ -16,8 +17,8 @@ export function presentProblem(error: AppError): Problem {
   };
 }
 
-export function sendProblem(res: Response, error: AppError): void {
+export async function sendProblem(res: Response, error: AppError): Promise<void> {
   const body = presentProblem(error);
   res.status(body.status).set(error.extras.headers ?? {});
-  res.type('application/problem+json').send(JSON.stringify(body));
+  await sendText(res, 'application/problem+json', JSON.stringify(body));
 }

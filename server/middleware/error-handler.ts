@@ -5,24 +5,28 @@ import { AppError, nothingHere, PROBLEMS, unavailable } from '#server/errors.ts'
 import { sendProblem } from '#server/http/problem.ts';
 
 /** Turns whatever was thrown into problem details. Only what nobody expected is logged as an error. */
-export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, next) => {
+export const errorHandler: ErrorRequestHandler = async (error: unknown, req, res, next) => {
   if (res.headersSent) {
     next(error);
     return;
   }
   const answer = asAppError(error);
   if (PROBLEMS[answer.code].status >= 500) req.log.error({ err: error }, answer.message);
-  sendProblem(res, answer);
+  await sendProblem(res, answer);
 };
 
 function asAppError(error: unknown): AppError {
   if (error instanceof AppError) return error;
   const refusal = bodyError(error) ?? addressError(error);
   if (refusal) return refusal;
+  if (isFullDisk(error)) return unavailable('The disk for stored files is full.');
   if (failureOf(error).sqlState === '53100') return unavailable('The disk of the database is full.');
   if (isUnavailable(error)) return unavailable('The database does not answer just now. Try again.');
   return new AppError('internal', 'Something went wrong here. It has been noted.');
 }
+
+const isFullDisk = (error: unknown) =>
+  error instanceof Error && 'code' in error && (error.code === 'ENOSPC' || error.code === 'EDQUOT');
 
 /** What reading a body throws, told by its `type`. */
 function bodyError(error: unknown): AppError | undefined {

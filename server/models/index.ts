@@ -1,6 +1,7 @@
 import type { Sequelize } from 'sequelize';
 import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
 import { GliderMember, initGliderMember } from './glider-member.ts';
+import { GliderPhoto, initGliderPhoto } from './glider-photo.ts';
 import { initGliderSaveName } from './glider-save-name.ts';
 import { GliderSave, initGliderSave } from './glider-save.ts';
 import { Glider, initGlider } from './glider.ts';
@@ -21,6 +22,7 @@ export function initModels(sequelize: Sequelize): void {
   initGliderMaterial(sequelize);
   initGliderSave(sequelize);
   initGliderSaveName(sequelize);
+  initGliderPhoto(sequelize);
   initSheet(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
@@ -31,4 +33,5 @@ export function initModels(sequelize: Sequelize): void {
   GliderMember.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   GliderMaterial.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
   GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
+  GliderPhoto.belongsTo(User, { as: 'adder', foreignKey: 'addedBy' });
 }

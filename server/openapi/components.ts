@@ -11,6 +11,7 @@ import {
   gliderSummary,
 } from '#shared/schemas/glider.ts';
 import { material, materialInput, materialList, materialUses } from '#shared/schemas/material.ts';
+import { photo, photoForm, photoInput, photoList } from '#shared/schemas/photo.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';
 import { session, signIn, user } from '#shared/schemas/session.ts';
@@ -37,6 +38,10 @@ const NAMES: Record<string, z.ZodType> = {
   SheetInput: sheetInput,
   Sheet: sheet,
   SheetList: sheetList,
+  Photo: photo,
+  PhotoForm: photoForm,
+  PhotoInput: photoInput,
+  PhotoList: photoList,
   MaterialInput: materialInput,
   Material: material,
   MaterialList: materialList,

@@ -3,6 +3,7 @@ import { problem } from '#shared/schemas/problem.ts';
 import { lucia } from '#server/auth/lucia.ts';
 import { PROBLEMS, type ProblemCode } from '#server/errors.ts';
 import type { Endpoint } from '#server/http/endpoint.ts';
+import type { Upload } from '#server/http/upload.ts';
 import { componentSchemas, inlineSchema, reference, type JsonSchema } from './components.ts';
 import { problemsOf } from './problems-of.ts';
 
@@ -67,11 +68,17 @@ function operationOf(endpoint: Endpoint): Operation {
     summary: endpoint.summary,
     ...(endpoint.access === 'signed-in' && { security: [{ session: [] }] }),
     parameters: parametersOf(endpoint),
-    ...(body && {
-      requestBody: { required: true, content: { 'application/json': { schema: reference(body) } } },
-    }),
+    ...(body && { requestBody: { required: true, content: bodyOf(body, endpoint.upload) } }),
     responses: { [endpoint.answer.status]: answerOf(endpoint), ...refusalsOf(endpoint) },
   };
+}
+
+function bodyOf(body: z.ZodType, upload: Upload | undefined): Record<string, { schema: JsonSchema }> {
+  if (!upload) return { 'application/json': { schema: reference(body) } };
+  const { properties, ...form } = inlineSchema(z.toJSONSchema(body, { io: 'input' }));
+  const file: JsonSchema = { type: 'string', contentMediaType: 'application/octet-stream' };
+  const schema = { ...form, properties: { ...properties, [upload.field]: file }, required: [upload.field] };
+  return { 'multipart/form-data': { schema } };
 }
 
 function parametersOf({ schemas, ifMatch, idempotent }: Endpoint): Parameter[] {
@@ -100,6 +107,10 @@ function fieldsOf(schema: z.ZodType | undefined, place: 'path' | 'query'): Param
 }
 
 function answerOf({ answer }: Endpoint): Answer {
+  if ('file' in answer) {
+    const schema: JsonSchema = { type: 'string', contentMediaType: answer.file };
+    return { description: 'A file', content: { [answer.file]: { schema } } };
+  }
   if (!answer.schema) return { description: 'Done' };
   if ('download' in answer && answer.download === 'text/csv') {
     return { description: 'A file', content: { 'text/csv': { schema: { type: 'string' } } } };

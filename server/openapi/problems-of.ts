@@ -8,7 +8,8 @@ export function problemsOf(endpoint: Endpoint): ProblemCode[] {
     ...(schemas.params || schemas.query || schemas.body || endpoint.idempotent
       ? (['invalid_input'] as const)
       : []),
-    ...(schemas.body ? (['malformed_json', 'too_large', 'unsupported_type'] as const) : []),
+    ...(schemas.body ? ([endpoint.upload ? 'malformed_form' : 'malformed_json'] as const) : []),
+    ...(schemas.body ? (['too_large', 'unsupported_type'] as const) : []),
     ...(access === 'signed-in' ? (['signed_out'] as const) : []),
     ...(method !== 'get' ? (['forbidden'] as const) : []),
     ...(path.includes(':') ? (['not_found'] as const) : []),

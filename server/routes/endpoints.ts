@@ -5,6 +5,7 @@ import { gliderBenchEndpoints } from './glider-bench.ts';
 import { gliderSaveEndpoints } from './glider-saves.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
+import { photoEndpoints } from './photos.ts';
 import { sessionEndpoints } from './session.ts';
 import { sheetEndpoints } from './sheets.ts';
 import { userEndpoints } from './users.ts';
@@ -16,6 +17,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...gliderBenchEndpoints,
   ...gliderSaveEndpoints,
   ...sheetEndpoints,
+  ...photoEndpoints,
   ...materialEndpoints,
   ...userEndpoints,
   ...sessionEndpoints,

@@ -1,6 +1,7 @@
 import { Router, type RequestHandler } from 'express';
 import { nothingHere } from '#server/errors.ts';
 import { jsonBody } from '#server/middleware/json-body.ts';
+import type { Endpoint } from '#server/http/endpoint.ts';
 import type { LimitName } from '#server/middleware/rate-limits.ts';
 import { sameOrigin } from '#server/middleware/same-origin.ts';
 import { descriptionRoutes } from './description.ts';
@@ -13,11 +14,14 @@ export function apiRouter(limits: Record<LimitName, RequestHandler>): Router {
     res.set('Cache-Control', 'no-store');
     next();
   });
-  router.use(sameOrigin, jsonBody);
-  for (const endpoint of ENDPOINTS) {
+  const serve = (endpoint: Endpoint) => {
     const limiters = (endpoint.limits ?? []).map((name) => limits[name]);
     router[endpoint.method](endpoint.path, ...limiters, endpoint.serve);
-  }
+  };
+  router.use(sameOrigin);
+  for (const endpoint of ENDPOINTS.filter(({ upload }) => upload)) serve(endpoint);
+  router.use(jsonBody);
+  for (const endpoint of ENDPOINTS.filter(({ upload }) => !upload)) serve(endpoint);
   router.use(descriptionRoutes(ENDPOINTS));
   router.use((_req, _res, next) => next(nothingHere()));
   return router;

@@ -14,6 +14,7 @@ import { headlineOf, type Headline } from './figures.ts';
 import { gliderRoleOf, lockGlider } from './glider-access.ts';
 import { linkMaterials } from './glider-materials.ts';
 import { makeOnce } from './idempotency.ts';
+import { removeUnusedFiles } from './stored-files.ts';
 import { inTransaction } from './transaction.ts';
 
 export async function getGlider(actor: UserDto, id: string): Promise<GliderDto> {
@@ -72,10 +73,11 @@ export async function insertGlider({ id, ownerId, plan, headline, transaction }:
   await linkMaterials({ glider: { id, ownerId }, plan, actorId: ownerId, transaction });
 }
 
-/** Deletes a glider with everything in it, its sheets and its log included. */
-export function deleteGlider(actor: UserDto, id: string): Promise<void> {
-  return inTransaction(async (transaction) => {
+/** Deletes a glider with everything in it, its sheets, its log and its photos included. */
+export async function deleteGlider(actor: UserDto, id: string): Promise<void> {
+  await inTransaction(async (transaction) => {
     const { glider } = await lockGlider(actor, id, 'delete', transaction);
     await glider.destroy({ transaction });
   });
+  await removeUnusedFiles().catch(() => undefined);
 }

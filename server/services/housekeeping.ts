@@ -1,18 +1,20 @@
 import { Op } from 'sequelize';
 import { lucia } from '#server/auth/lucia.ts';
 import { IdempotencyKey } from '#server/models/idempotency-key.ts';
+import { removeUnusedFiles } from './stored-files.ts';
 import { database } from './transaction.ts';
 
 const HOUR_MS = 3_600_000;
 /** A client that was away keeps trying to send what it made; a month is as long as its session lives. */
 const KEY_LIFE_MS = 30 * 24 * HOUR_MS;
 
-/** Deletes what has had its time: sessions, counters, idempotency keys. */
+/** Deletes what has had its time: sessions, counters, idempotency keys, files. */
 export async function tidy(now = new Date()): Promise<void> {
   await lucia.deleteExpiredSessions();
   await IdempotencyKey.destroy({
     where: { createdAt: { [Op.lt]: new Date(now.getTime() - KEY_LIFE_MS) } },
   });
+  await removeUnusedFiles();
   await database().query('DELETE FROM rate_counters WHERE resets_at < now()');
 }
 

@@ -17,7 +17,7 @@ const named = (endpoints: readonly Endpoint[]) =>
 
 const needSession = ENDPOINTS.filter(({ access }) => access === 'signed-in');
 const withId = ENDPOINTS.filter(({ path }) => path.includes(':id'));
-const withBody = ENDPOINTS.filter(({ schemas }) => schemas.body);
+const withBody = ENDPOINTS.filter(({ schemas, upload }) => schemas.body && !upload);
 
 /** Parameters that lead to nobody's row. */
 const nowhere = () => ({ id: randomUUID(), version: '1' });

@@ -1,10 +1,14 @@
+import { mkdtempSync, rmSync } from 'node:fs';
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { pino } from 'pino';
 import type { Sequelize } from 'sequelize';
 import request from 'supertest';
 import { afterAll, afterEach, beforeAll, beforeEach, expect, vi } from 'vitest';
 import { createApp, type AppSettings } from '#server/app.ts';
+import { folderStore } from '#server/storage/folder-store.ts';
 import { openSequelize } from '#server/db/sequelize.ts';
 import { workerDatabase } from './database.ts';
 
@@ -13,9 +17,14 @@ export interface TestApp {
   /** address of the running server */
   url: string;
   sequelize: Sequelize;
+  /** folder of stored files */
+  files: string;
   /** somebody without a cookie */
   visitor(): ReturnType<typeof request.agent>;
 }
+
+/** Where mailed links lead. */
+export const ADDRESS = 'https://featherbeam.example';
 
 const GENEROUS = 100_000;
 
@@ -24,6 +33,7 @@ const GENEROUS = 100_000;
  * mistake fails the test.
  */
 export function useApp(changes: Partial<AppSettings> = {}, database = workerDatabase): TestApp {
+  const files = mkdtempSync(join(tmpdir(), 'featherbeam-files-'));
   const state: { server?: Server; sequelize?: Sequelize; url?: string } = {};
   const running = <T>(value: T | undefined): T => {
     if (value === undefined) throw new Error('The application runs only during tests.');
@@ -38,6 +48,7 @@ export function useApp(changes: Partial<AppSettings> = {}, database = workerData
       clientDir: '/nowhere',
       rateLimitScale: GENEROUS,
       proxies: 0,
+      surroundings: { files: folderStore(files), address: () => ADDRESS, mailsAreShown: true },
       ...changes,
     });
     const server = createServer(app);
@@ -60,6 +71,7 @@ export function useApp(changes: Partial<AppSettings> = {}, database = workerData
   afterAll(async () => {
     await new Promise((resolve) => running(state.server).close(resolve));
     await running(state.sequelize).close();
+    rmSync(files, { recursive: true });
   });
 
   return {
@@ -69,6 +81,7 @@ export function useApp(changes: Partial<AppSettings> = {}, database = workerData
     get sequelize() {
       return running(state.sequelize);
     },
+    files,
     visitor: () => request.agent(running(state.url)),
   };
 }

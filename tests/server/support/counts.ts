@@ -10,6 +10,8 @@ const TABLES = [
   'glider_saves',
   'glider_save_names',
   'sheets',
+  'glider_photos',
+  'unused_files',
   'idempotency_keys',
 ];
 

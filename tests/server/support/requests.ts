@@ -6,7 +6,7 @@ import { MATERIAL, smallPlan } from './rows.ts';
 export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
 
 /** A body that each endpoint takes, by the endpoint's name. */
-const BODIES: Record<string, () => object> = {
+const BODIES: Record<string, () => Record<string, unknown>> = {
   'post /estimates': () => ({ plan: smallPlan() }),
   'post /gliders': () => ({ plan: smallPlan() }),
   'put /gliders/:id': () => ({ plan: smallPlan() }),
@@ -14,8 +14,10 @@ const BODIES: Record<string, () => object> = {
   'put /gliders/:id/archived': () => ({ archived: true }),
   'put /gliders/:id/saves/:version/name': () => ({ name: 'Before covering' }),
   'post /gliders/:id/sheets': () => ({ note: '' }),
-  'post /materials': () => MATERIAL,
-  'put /materials/:id': () => MATERIAL,
+  'put /photos/:id': () => ({ caption: 'Nose block glued' }),
+  'post /materials': () => ({ ...MATERIAL }),
+  'put /materials/:id': () => ({ ...MATERIAL }),
+  'post /gliders/:id/photos': () => ({ caption: 'Nose block glued' }),
   'post /users': () => ({
     name: 'Ada Quill',
     email: 'quill@larkmoor.example',
@@ -24,7 +26,7 @@ const BODIES: Record<string, () => object> = {
   'post /session': () => ({ email: 'quill@larkmoor.example', password: 'nine lime laminations' }),
 };
 
-export function goodBody(endpoint: Endpoint): object {
+export function goodBody(endpoint: Endpoint): Record<string, unknown> {
   const body = BODIES[nameOf(endpoint)];
   if (!body) throw new Error(`tests/server/support/requests.ts has no body for ${nameOf(endpoint)}.`);
   return body();
@@ -43,13 +45,23 @@ export function call(agent: Person['agent'], endpoint: Endpoint, params: Params)
   return endpoint.ifMatch ? request.set('If-Match', '"1"') : request;
 }
 
+/** One pixel, as PNG. */
+const tinyPicture = Buffer.from(
+  'iVBORw0KGgoAAAANSUhEUgAAAAEAAAABCAIAAACQd1PeAAAADElEQVR4nGNgYGAAAAAEAAH2FzhVAAAAAElFTkSuQmCC',
+  'base64',
+);
+
 /** A whole request that is right in all but who asks for what. */
 export function send(
   agent: Person['agent'],
   endpoint: Endpoint,
   params: Params,
-  body: object = endpoint.schemas.body ? goodBody(endpoint) : {},
+  body: Record<string, unknown> = endpoint.schemas.body ? goodBody(endpoint) : {},
 ) {
   const request = call(agent, endpoint, params);
+  if (endpoint.upload)
+    return request
+      .field(body as Record<string, string>)
+      .attach(endpoint.upload.field, tinyPicture, 'photo.png');
   return endpoint.schemas.body ? request.send(body) : request;
 }

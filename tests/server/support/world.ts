@@ -1,5 +1,6 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
 import type { TestApp } from './app.ts';
+import { makePhoto } from './photos.ts';
 import { makePerson, type Person } from './people.ts';
 import type { Params } from './requests.ts';
 import { makeGlider, makeMaterial } from './rows.ts';
@@ -18,7 +19,13 @@ export async function makeWorld(app: TestApp): Promise<World> {
   const glider = await makeGlider({ owner: owner.user });
   const sheet = await makeSheet(glider, owner.user);
   const material = await makeMaterial({ owner: owner.user });
-  const ids: Record<string, string> = { gliders: glider.id, sheets: sheet.id, materials: material.id };
+  const photo = await makePhoto(glider, owner.user);
+  const ids: Record<string, string> = {
+    gliders: glider.id,
+    sheets: sheet.id,
+    materials: material.id,
+    photos: photo.id,
+  };
   return {
     owner,
     glider,

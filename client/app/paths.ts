@@ -1,7 +1,7 @@
 /** Places of a glider, in the order of their tabs. */
-export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'sheets'] as const;
+export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'sheets', 'log'] as const;
 export type Place = (typeof PLACES)[number];
-/** The sample is not stored, so it has no sheets. */
+/** The sample is not stored, so it has no sheets and no log. */
 export const SAMPLE_PLACES = ['drawing', 'balance', 'loading', 'trial'] as const satisfies readonly Place[];
 
 /** Every address of the client, for links; the routes are in `router.tsx`. */
@@ -12,6 +12,7 @@ export const paths = {
   bench: '/bench',
   materials: '/materials',
   account: '/account',
+  sharing: (id: string) => `/gliders/${id}/sharing`,
   glider: (id: string, place: Place = 'drawing') => `/gliders/${id}/${place}`,
   sample: (place: (typeof SAMPLE_PLACES)[number] = 'drawing') => `/sample/${place}`,
   sheet: (id: string) => `/sheets/${id}`,

@@ -1,4 +1,4 @@
-import { isInchUnit, otherUnit, QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
+import { isInchUnit, otherUnit, QUANTITIES, type Quantity, type UnitOf } from '#shared/units/quantities.ts';
 import { convert, UNITS, type Unit } from '#shared/units/units.ts';
 import { formatInchFraction } from './inches.ts';
 import {
@@ -14,7 +14,7 @@ import {
 import { FINE_EXTRA_DIGITS } from './precision.ts';
 
 /** The unit of each quantity that a reader chose; one that is not named is shown as usual. */
-export type ChosenUnits = { readonly [Q in Quantity]?: Unit | undefined };
+export type ChosenUnits = { readonly [Q in Quantity]?: UnitOf<Q> | undefined };
 
 export interface UnitsOptions extends QuantityOptions {
   /** the size of stock: in inches a fraction down to 1/64 where it is one */
@@ -28,6 +28,8 @@ export interface SizeOptions {
   bare?: boolean | undefined;
   /** no fractions of an inch */
   decimal?: boolean | undefined;
+  /** as many decimals as it takes to be read back as the same size */
+  exact?: boolean | undefined;
 }
 
 /** How one reader sees quantities: every figure on screen, in print and in a file for that reader goes through it. */
@@ -94,11 +96,15 @@ export function unitsOf(chosen: ChosenUnits): Units {
 }
 
 /** Decimals of a size at most, by what can be measured at the bench. */
-const SIZE_DIGITS: Partial<Record<Unit, number>> = { mm: 2, cm: 3, m: 5, in: 4, ft: 5 };
+const SIZE_DIGITS: Partial<Record<Unit, number>> = { mm: 2, cm: 2, m: 3, in: 3, ft: 3 };
+const EXACT_DIGITS: Partial<Record<Unit, number>> = { mm: 2, cm: 3, m: 5, in: 4, ft: 5 };
 
-function shortest(lengthMm: Shown, unit: Unit, { bare }: SizeOptions): string {
+function shortest(lengthMm: Shown, unit: Unit, { bare, exact }: SizeOptions): string {
   if (lengthMm === null || lengthMm === undefined) return NO_VALUE;
-  const text = formatNumber(convert(lengthMm, 'mm', unit as 'mm'), SIZE_DIGITS[unit] ?? 2);
+  const text = formatNumber(
+    convert(lengthMm, 'mm', unit as 'mm'),
+    (exact === true ? EXACT_DIGITS : SIZE_DIGITS)[unit] ?? 2,
+  );
   const short = text.includes('.') ? text.replace(/\.?0+$/, '') : text;
   return bare === true || short === NO_VALUE ? short : `${short}${NARROW_SPACE}${UNITS[unit].label}`;
 }

@@ -11,7 +11,11 @@ export function BenchPage() {
   return (
     <RequireSession signInHref={paths.signIn}>
       <SheetPaper>
-        <Bench hrefOf={(id) => paths.glider(id)} onOpen={(id) => void navigate(paths.glider(id))} />
+        <Bench
+          hrefOf={(id) => paths.glider(id)}
+          sharingHrefOf={paths.sharing}
+          onOpen={(id) => void navigate(paths.glider(id))}
+        />
       </SheetPaper>
     </RequireSession>
   );

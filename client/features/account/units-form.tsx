@@ -52,7 +52,7 @@ export function UnitsForm({ units, onUnits }: UnitsFormProps) {
             <tr>
               <Th>Quantity</Th>
               <Th>Unit</Th>
-              <Th numeric>Looks so</Th>
+              <Th numeric>For example</Th>
             </tr>
           </thead>
           <tbody>

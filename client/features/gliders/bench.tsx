@@ -1,57 +1,83 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
-import { useEffect, useMemo, useState } from 'react';
+import { useState, type ReactNode } from 'react';
+import { useSearchParams } from 'react-router-dom';
 import { QueryView } from '#client/components/query-view.tsx';
 import { Button } from '#client/components/ui/button.tsx';
-import { Select } from '#client/components/ui/select.tsx';
-import { TextField } from '#client/components/ui/text-field.tsx';
 import { useSettled } from '#client/hooks/use-settled.ts';
 import type { GliderSummaryDto } from '#shared/schemas/glider.ts';
-import { BENCH_ORDERS, inOrder, type BenchOrder } from './bench-order.ts';
+import { benchQuery } from './bench-queries.ts';
+import { BenchSelection } from './bench-selection.tsx';
 import { BenchTable } from './bench-table.tsx';
+import { BenchTools } from './bench-tools.tsx';
+import { paramsOf, viewOf, type BenchView } from './bench-view.ts';
 import { NewGliderMenu, useNewGlider } from './new-glider.tsx';
-import { gliderQueries } from './queries.ts';
 
-interface BenchProps {
+export interface BenchLinks {
   hrefOf: (id: string) => string;
+  sharingHrefOf: (id: string) => string;
+}
+
+interface BenchProps extends BenchLinks {
   onOpen: (id: string) => void;
 }
 
+const NONE: ReadonlySet<string> = new Set();
+
 /** The reader's gliders and those shared with them. */
-export function Bench({ hrefOf, onOpen }: BenchProps) {
-  const [search, setSearch] = useState('');
-  const [order, setOrder] = useState<BenchOrder>('changed');
-  const sought = useSettled(search.trim(), 250);
-  const query = useInfiniteQuery({ ...gliderQueries.list(sought), placeholderData: (before) => before });
+export function Bench({ onOpen, ...links }: BenchProps) {
+  const [params, setParams] = useSearchParams();
+  const view = viewOf(params);
+  const search = useSettled(view.search.trim(), 250);
+  const query = useInfiniteQuery({
+    ...benchQuery({ ...view, search }),
+    placeholderData: (before) => before,
+  });
+  // Null while nothing is to be selected.
+  const [selected, setSelected] = useState<ReadonlySet<string> | null>(null);
+  const look = (next: BenchView) => {
+    if (next.archived !== view.archived) setSelected(selected && NONE);
+    setParams(paramsOf(next), { replace: true });
+  };
+  const usual = view.archived === 'no' && view.search === '' && search === '';
+  const nothingYet = usual && query.data?.length === 0;
   const { hasNextPage, isFetchingNextPage, fetchNextPage } = query;
-
-  const nothingYet = search === '' && sought === '' && query.data?.length === 0;
-
-  // Newest first is the server's order; any other is only true of the whole list.
-  const needsAll = order !== 'changed' && hasNextPage && !isFetchingNextPage;
-  useEffect(() => {
-    if (needsAll) void fetchNextPage();
-  }, [needsAll, fetchNextPage]);
 
   return (
     <>
       <div className="flex flex-wrap items-end gap-x-4 gap-y-3">
-        <h1 className="text-figure font-semibold">Bench</h1>
+        <h1 className="text-figure font-semibold">
+          {view.archived === 'only' ? 'Bench, archived' : 'Bench'}
+        </h1>
         <div className="ml-auto flex flex-wrap items-end gap-3 max-sm:w-full">
           {!nothingYet && (
-            <BenchTools search={search} onSearch={setSearch} order={order} onOrder={setOrder} />
+            <BenchTools
+              view={view}
+              onView={look}
+              selecting={selected !== null}
+              onSelecting={(on) => setSelected(on ? NONE : null)}
+            />
           )}
           <NewGliderMenu onOpen={onOpen} />
         </div>
       </div>
-      <div className="mt-6">
+      <div className="mt-6" aria-busy={query.isPlaceholderData}>
         <QueryView
           query={query}
           isEmpty={(gliders) => gliders.length === 0}
-          empty={sought === '' ? <EmptyBench onOpen={onOpen} /> : <NothingFound search={sought} />}
+          empty={nothingYet ? <EmptyBench onOpen={onOpen} /> : <NothingFound view={view} />}
         >
-          {(gliders) => <Ordered gliders={gliders} order={order} hrefOf={hrefOf} />}
+          {(gliders) => (
+            <Gliders
+              gliders={gliders}
+              view={view}
+              onView={look}
+              selected={selected}
+              onSelected={setSelected}
+              {...links}
+            />
+          )}
         </QueryView>
-        {hasNextPage && order === 'changed' && (
+        {hasNextPage && (
           <Button className="mt-4" onClick={() => void fetchNextPage()} pending={isFetchingNextPage}>
             Show more
           </Button>
@@ -61,48 +87,28 @@ export function Bench({ hrefOf, onOpen }: BenchProps) {
   );
 }
 
-interface BenchToolsProps {
-  search: string;
-  onSearch: (search: string) => void;
-  order: BenchOrder;
-  onOrder: (order: BenchOrder) => void;
+interface GlidersProps extends BenchLinks {
+  gliders: readonly GliderSummaryDto[];
+  view: BenchView;
+  onView: (view: BenchView) => void;
+  selected: ReadonlySet<string> | null;
+  onSelected: (selected: ReadonlySet<string> | null) => void;
 }
 
-function BenchTools({ search, onSearch, order, onOrder }: BenchToolsProps) {
+function Gliders({ gliders, selected, onSelected, ...rest }: GlidersProps) {
+  const chosen = selected === null ? [] : gliders.filter(({ id }) => selected.has(id));
   return (
     <>
-      <div className="w-52 max-sm:w-full">
-        <TextField
-          label="Search by name"
-          type="search"
-          keepRoom={false}
-          value={search}
-          maxLength={120}
-          onChange={(event) => onSearch(event.target.value)}
+      {selected !== null && (
+        <BenchSelection
+          chosen={chosen}
+          archived={rest.view.archived === 'only'}
+          onDone={() => onSelected(NONE)}
         />
-      </div>
-      <div className="w-36 max-sm:flex-1">
-        <Select
-          label="Order"
-          keepRoom={false}
-          value={order}
-          options={BENCH_ORDERS}
-          onValue={(value) => onOrder(BENCH_ORDERS.find((o) => o.value === value)?.value ?? 'changed')}
-        />
-      </div>
+      )}
+      <BenchTable gliders={gliders} selected={selected} onSelected={onSelected} {...rest} />
     </>
   );
-}
-
-interface OrderedProps {
-  gliders: readonly GliderSummaryDto[];
-  order: BenchOrder;
-  hrefOf: (id: string) => string;
-}
-
-function Ordered({ gliders, order, hrefOf }: OrderedProps) {
-  const ordered = useMemo(() => inOrder(gliders, order), [gliders, order]);
-  return <BenchTable gliders={ordered} hrefOf={hrefOf} />;
 }
 
 function EmptyBench({ onOpen }: { onOpen: (id: string) => void }) {
@@ -126,6 +132,12 @@ function EmptyBench({ onOpen }: { onOpen: (id: string) => void }) {
   );
 }
 
-function NothingFound({ search }: { search: string }) {
-  return <p className="py-4">No glider’s name holds “{search}”.</p>;
+function NothingFound({ view: { search, archived } }: { view: BenchView }): ReactNode {
+  const where = archived === 'only' ? ' among those put away' : '';
+  if (search.trim() === '') return <p className="py-4">Nothing is put away.</p>;
+  return (
+    <p className="py-4">
+      No glider’s name holds “{search.trim()}”{where}.
+    </p>
+  );
 }

@@ -14,13 +14,15 @@ interface DeleteDialogProps {
 export function DeleteDialog({ glider, open, onOpenChange }: DeleteDialogProps) {
   const mutation = useDeleteGlider();
   const say = useToast();
+  // The row is gone with the glider, so what is said does not hang on it; a refusal is told here.
   const confirm = () =>
-    mutation.mutate(glider.id, {
-      onSuccess: () => {
+    void mutation.mutateAsync(glider.id).then(
+      () => {
         onOpenChange(false);
         say(`${glider.name} was deleted.`);
       },
-    });
+      () => undefined,
+    );
   return (
     <Dialog
       open={open}

@@ -4,58 +4,50 @@ import { Dialog, DialogActions } from '#client/components/ui/dialog.tsx';
 import { Field } from '#client/components/ui/field.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { ApiError } from '#client/lib/api.ts';
+import type { Plan } from '#shared/core/plan.ts';
 import type { GliderDto } from '#shared/schemas/glider.ts';
-import { useCreateGlider } from './mutations.ts';
-import { readPlanFile, type ReadPlan } from './plan-file.ts';
-import { useWish } from './use-wish.ts';
+import { useImport } from './import-plans.ts';
+import { readPlanFile, type ReadPlans } from './plan-file.ts';
 
 interface ImportDialogProps {
   open: boolean;
   onOpenChange: (open: boolean) => void;
-  onImported: (glider: GliderDto) => void;
+  onImported: (gliders: readonly GliderDto[]) => void;
 }
 
 /** Problems listed at most; a file of another kind may have thousands. */
 const LISTED = 12;
 
-/** Brings a plan in from a JSON file; shows everything that is wrong with it and imports nothing until it is right. */
+/** Brings plans in from a JSON file; shows everything that is wrong with it and imports nothing until it is right. */
 export function ImportDialog({ open, onOpenChange, onImported }: ImportDialogProps) {
-  const [read, setRead] = useState<ReadPlan | null>(null);
-  const create = useCreateGlider();
-  const wish = useWish();
+  const [read, setRead] = useState<ReadPlans | null>(null);
+  const { bring, error, pending, done, reset } = useImport();
   const change = (next: boolean) => {
     if (!next) {
       setRead(null);
-      create.reset();
+      reset();
     }
     onOpenChange(next);
   };
   const choose = async (file: File | undefined) => {
-    create.reset();
-    wish.granted();
+    reset();
     setRead(file ? await readPlanFile(file) : null);
   };
-  const plan = read && 'plan' in read ? read.plan : null;
-  const problems = read && 'problems' in read ? read.problems : refusals(create.error);
-  const bring = () => {
-    if (!plan) return;
-    create.mutate(
-      { plan, wish: wish.current() },
-      {
-        onSuccess: (glider) => {
-          change(false);
-          onImported(glider);
-        },
-      },
-    );
-  };
+  const plans = read && 'plans' in read ? read.plans : [];
+  const problems = read && 'problems' in read ? read.problems : refusals(error);
+  const take = () =>
+    void bring(plans).then((gliders) => {
+      if (gliders === null) return;
+      change(false);
+      onImported(gliders);
+    });
 
   return (
     <Dialog
       open={open}
       onOpenChange={change}
-      title="Import a plan"
-      description="A plan downloaded from Featherbeam, or one written to the same form, as JSON."
+      title="Import plans"
+      description="A plan, or several, downloaded from Featherbeam or written to the same form, as JSON."
     >
       <Field label="Plan file">
         {(control) => (
@@ -69,23 +61,21 @@ export function ImportDialog({ open, onOpenChange, onImported }: ImportDialogPro
         )}
       </Field>
       {problems.length > 0 && <Problems problems={problems} />}
-      {plan && problems.length === 0 && (
-        <p className="text-note text-graphite">
-          {plan.name}: {count(plan.surfaces.length, 'surface')},{' '}
-          {count(
-            plan.surfaces.reduce((sum, { parts }) => sum + parts.length, 0),
-            'part',
-          )}
-          , {count(plan.items.length, 'item')}.
+      {plans.length > 0 && problems.length === 0 && (
+        <p className="text-note text-graphite">{contentsOf(plans)}</p>
+      )}
+      {pending && plans.length > 1 && (
+        <p role="status" className="mt-2 text-note">
+          {done} of {plans.length} are in.
         </p>
       )}
       <DialogActions>
         <Button onClick={() => change(false)}>Cancel</Button>
         <Button
           variant="primary"
-          disabled={!plan}
-          onClick={bring}
-          pending={create.isPending}
+          disabled={plans.length === 0}
+          onClick={take}
+          pending={pending}
           pendingText="Importing …"
         >
           Import
@@ -93,6 +83,16 @@ export function ImportDialog({ open, onOpenChange, onImported }: ImportDialogPro
       </DialogActions>
     </Dialog>
   );
+}
+
+function contentsOf(plans: readonly Plan[]): string {
+  const [plan] = plans;
+  if (plans.length > 1 || !plan) {
+    const names = plans.slice(0, 5).map(({ name }) => name);
+    return `${plans.length} plans: ${names.join(', ')}${plans.length > names.length ? ' …' : ''}`;
+  }
+  const parts = plan.surfaces.reduce((sum, surface) => sum + surface.parts.length, 0);
+  return `${plan.name}: ${count(plan.surfaces.length, 'surface')}, ${count(parts, 'part')}, ${count(plan.items.length, 'item')}.`;
 }
 
 function Problems({ problems }: { problems: readonly string[] }) {

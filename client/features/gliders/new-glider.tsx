@@ -38,6 +38,7 @@ export function useNewGlider(onOpen: (gliderId: string) => void) {
 export function NewGliderMenu({ onOpen }: { onOpen: (gliderId: string) => void }) {
   const { pending, blank, fromSample } = useNewGlider(onOpen);
   const [importing, setImporting] = useState(false);
+  const say = useToast();
   return (
     <>
       <Menu
@@ -52,9 +53,17 @@ export function NewGliderMenu({ onOpen }: { onOpen: (gliderId: string) => void }
       >
         <MenuItem onSelect={blank}>Blank sheet</MenuItem>
         <MenuItem onSelect={fromSample}>Copy of the sample</MenuItem>
-        <MenuItem onSelect={() => setImporting(true)}>Import a plan …</MenuItem>
+        <MenuItem onSelect={() => setImporting(true)}>Import plans …</MenuItem>
       </Menu>
-      <ImportDialog open={importing} onOpenChange={setImporting} onImported={({ id }) => onOpen(id)} />
+      <ImportDialog
+        open={importing}
+        onOpenChange={setImporting}
+        onImported={(gliders) => {
+          const [only] = gliders;
+          if (gliders.length === 1 && only) onOpen(only.id);
+          else say(`${gliders.length} gliders lie on the bench.`);
+        }}
+      />
     </>
   );
 }

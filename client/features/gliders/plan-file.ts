@@ -1,12 +1,17 @@
 import type { Plan } from '#shared/core/plan.ts';
-import { LIMITS } from '#shared/schemas/limits.ts';
 import { checkPlan, issueLines } from './plan-check.ts';
 
 /** What a file of the reader's turned out to hold. */
-export type ReadPlan = { plan: Plan } | { problems: string[] };
+export type ReadPlans = { plans: Plan[] } | { problems: string[] };
 
-/** Reads a plan from JSON text: the plan alone, or a document that carries it as `plan`, such as a saved sheet. */
-export function readPlan(text: string): ReadPlan {
+/** Bytes of a file with several plans; each is sent on its own. */
+const LARGEST = 40_000_000;
+
+/**
+ * Reads plans from JSON text: a plan alone, a document that carries it as `plan`, such as a saved sheet, or several
+ * as `plans`, as the bench exports them. All of them are good, or none is given on.
+ */
+export function readPlans(text: string): ReadPlans {
   let document: unknown;
   try {
     document = JSON.parse(text.replace(/^\uFEFF/, ''));
@@ -20,20 +25,32 @@ export function readPlan(text: string): ReadPlan {
       problems: ['This JSON holds no plan: a plan is an object with a name, materials and surfaces.'],
     };
   }
-  const plan: unknown = 'plan' in document && !('surfaces' in document) ? document.plan : document;
-  const check = checkPlan(plan);
-  return check.ok ? { plan: check.plan } : { problems: issueLines(plan, check.issues) };
+  const found = plansIn(document);
+  const checks = found.map((plan) => ({ plan, check: checkPlan(plan) }));
+  const plans = checks.flatMap(({ check }) => (check.ok ? [check.plan] : []));
+  if (plans.length === found.length) {
+    return plans.length === 0 ? { problems: ['The file holds no plan.'] } : { plans };
+  }
+  const problems = checks.flatMap(({ plan, check }, i) => {
+    const place = found.length > 1 ? `Plan ${i + 1}: ` : '';
+    return check.ok ? [] : issueLines(plan, check.issues).map((line) => `${place}${line}`);
+  });
+  return { problems };
+}
+
+function plansIn(document: object): unknown[] {
+  if ('surfaces' in document) return [document];
+  if ('plans' in document && Array.isArray(document.plans)) return document.plans as unknown[];
+  return ['plan' in document ? document.plan : document];
 }
 
 /** Reads a chosen file; one that is far too big is refused unread. */
-export async function readPlanFile(file: File): Promise<ReadPlan> {
-  if (file.size > LIMITS.bodyBytes.max) {
-    return {
-      problems: [`The file is too big: a plan takes at most ${LIMITS.bodyBytes.max / 1_000_000} MB.`],
-    };
+export async function readPlanFile(file: File): Promise<ReadPlans> {
+  if (file.size > LARGEST) {
+    return { problems: [`The file is too big: it may take ${LARGEST / 1_000_000} MB.`] };
   }
   try {
-    return readPlan(await file.text());
+    return readPlans(await file.text());
   } catch {
     return { problems: ['The file cannot be read.'] };
   }
@@ -41,10 +58,14 @@ export async function readPlanFile(file: File): Promise<ReadPlan> {
 
 /** Hands a plan to the reader as a JSON file. */
 export function downloadPlan(plan: Plan): void {
-  const blob = new Blob([JSON.stringify(plan, null, 2)], { type: 'application/json' });
+  downloadJson(plan, plan.name);
+}
+
+export function downloadJson(content: unknown, name: string): void {
+  const blob = new Blob([JSON.stringify(content, null, 2)], { type: 'application/json' });
   const link = document.createElement('a');
   link.href = URL.createObjectURL(blob);
-  link.download = `${fileName(plan.name)}.json`;
+  link.download = `${fileName(name)}.json`;
   link.click();
   setTimeout(() => URL.revokeObjectURL(link.href), 10_000);
 }
@@ -57,13 +78,4 @@ export function fileName(name: string): string {
     .replace(/[^\w-]+/g, '-')
     .replace(/^-+|-+$/g, '');
   return plain === '' ? 'plan' : plain;
-}
-
-/** `Dunlin copy`, `Dunlin copy 2`: a name that is not taken yet. */
-export function copyName(name: string, taken: readonly string[]): string {
-  const stem = `${name.replace(/ copy( \d+)?$/, '')} copy`.slice(0, LIMITS.name.max - 5);
-  for (let n = 1; ; n++) {
-    const wanted = n === 1 ? stem : `${stem} ${n}`;
-    if (!taken.includes(wanted)) return wanted;
-  }
 }

@@ -1,26 +1,11 @@
-import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
+import { queryOptions } from '@tanstack/react-query';
 import { request } from '#client/lib/api.ts';
 import { gliderSaveList } from '#shared/schemas/glider-save.ts';
-import { glider, gliderList } from '#shared/schemas/glider.ts';
-
-const PAGE_SIZE = 50;
+import { glider } from '#shared/schemas/glider.ts';
 
 /** Everything fetched about gliders, under one key each. */
 export const gliderQueries = {
   all: ['gliders'] as const,
-  list: (search: string) =>
-    infiniteQueryOptions({
-      queryKey: ['gliders', 'list', search],
-      queryFn: ({ pageParam, signal }) => {
-        const query = new URLSearchParams({ limit: String(PAGE_SIZE) });
-        if (search !== '') query.set('search', search);
-        if (pageParam !== null) query.set('cursor', pageParam);
-        return request(`/gliders?${query.toString()}`, gliderList, { signal });
-      },
-      initialPageParam: null as string | null,
-      getNextPageParam: ({ nextCursor }) => nextCursor,
-      select: ({ pages }) => pages.flatMap(({ gliders }) => gliders),
-    }),
   detail: (id: string) =>
     queryOptions({
       queryKey: ['gliders', 'detail', id],

@@ -10,7 +10,7 @@ type Corner = [x: number, z: number];
 export function outlineText(outline: readonly Corner[], units: Units): string {
   // A space parts x from z, so it must not part a fraction or thousands.
   const one = (value: number) =>
-    units.size(value, { bare: true, decimal: true }).replaceAll(NARROW_SPACE, '');
+    units.size(value, { bare: true, decimal: true, exact: true }).replaceAll(NARROW_SPACE, '');
   return outline.map(([x, z]) => `${one(x)} ${one(z)}`).join('; ');
 }
 

@@ -8,7 +8,7 @@ import type { Parsed } from './parsed-field.tsx';
 /** A section as it is written: `4409`, `plate 3 mm`, or the name of own points. */
 export function sectionText(spec: SectionSpec, units: Units): string {
   if ('naca' in spec) return spec.naca;
-  if ('flat' in spec) return `plate ${units.size(spec.flat)}`.replaceAll(NARROW_SPACE, ' ');
+  if ('flat' in spec) return `plate ${units.size(spec.flat, { exact: true })}`.replaceAll(NARROW_SPACE, ' ');
   return spec.name;
 }
 

@@ -5,7 +5,9 @@ import type { Parsed } from './parsed-field.tsx';
 
 /** Stations as a list to read and to edit: `0; 42.5; 85`. */
 export function stationsText(stations: readonly number[], units: Units): string {
-  return stations.map((s) => units.size(s, { bare: true }).replaceAll(NARROW_SPACE, '')).join('; ');
+  return stations
+    .map((s) => units.size(s, { bare: true, exact: true }).replaceAll(NARROW_SPACE, ''))
+    .join('; ');
 }
 
 /**

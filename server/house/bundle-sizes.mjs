@@ -1,6 +1,6 @@
 import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { gzipSync } from 'node:zlib';
+import { brotliCompressSync, gzipSync } from 'node:zlib';
 
 /** @typedef {import('./bundle-sizes.d.mts').BuiltChunk} BuiltChunk */
 
@@ -46,7 +46,7 @@ export function pageSizes(chunks) {
 /** @param {BuiltChunk | undefined} chunk */
 const packedSize = (chunk) => (chunk?.code === undefined ? 0 : gzipSync(chunk.code, { level: 9 }).length);
 
-/** Tells and keeps the sizes at the end of a build, and lays a packed twin beside each text file. */
+/** Tells and keeps the sizes at the end of a build, and lays packed twins beside each text file. */
 export function bundleSizes() {
   return {
     name: 'featherbeam-bundle-sizes',
@@ -62,7 +62,9 @@ export function bundleSizes() {
       for (const { fileName } of Object.values(bundle)) {
         if (!PACKED.test(fileName)) continue;
         const file = join(dir, fileName);
-        writeFileSync(`${file}.gz`, gzipSync(readFileSync(file), { level: 9 }));
+        const text = readFileSync(file);
+        writeFileSync(`${file}.gz`, gzipSync(text, { level: 9 }));
+        writeFileSync(`${file}.br`, brotliCompressSync(text));
       }
     },
   };

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { extname, join, resolve } from 'node:path';
 import express, { Router, type RequestHandler, type Response } from 'express';
+import { sendText } from '#server/http/packed.ts';
 
 /** The built client: its page, and the hashes of the scripts that stand in it. */
 export interface Client {
@@ -37,22 +38,28 @@ export function clientFiles(client: Client): Router {
   return router;
 }
 
+/** How the build packs, by the ending of the packed twin; the tighter first. */
+const TWINS = { br: '.br', gzip: '.gz' } as const;
+
 /** Sends the packed twin that the build laid beside a file to whoever takes it. */
 function packedFiles(folder: string): RequestHandler {
-  const twins = new Set(existsSync(folder) ? readdirSync(folder).filter((name) => name.endsWith('.gz')) : []);
+  const names = new Set(existsSync(folder) ? readdirSync(folder) : []);
   return (req, res, next) => {
-    const name = `${req.path.slice(1)}.gz`;
-    if (!twins.has(name)) return next();
+    const name = req.path.slice(1);
+    const encodings = (['br', 'gzip'] as const).filter((encoding) => names.has(name + TWINS[encoding]));
+    if (encodings.length === 0) return next();
     res.vary('Accept-Encoding');
-    if (!req.acceptsEncodings('gzip')) return next();
-    res.set('Content-Encoding', 'gzip').type(extname(req.path));
-    return res.sendFile(name, { root: folder, immutable: true, maxAge: '365d' }, (error) => {
+    const encoding = encodings.find((one) => req.acceptsEncodings(one));
+    if (encoding === undefined) return next();
+    res.set('Content-Encoding', encoding).type(extname(name));
+    const options = { root: folder, immutable: true, maxAge: '365d' };
+    return res.sendFile(name + TWINS[encoding], options, (error) => {
       if (error) next(error);
     });
   };
 }
 
-function sendPage(res: Response, page: string | null): void {
+async function sendPage(res: Response, page: string | null): Promise<void> {
   res.set('Cache-Control', 'no-cache');
   if (page === null) {
     res
@@ -61,5 +68,5 @@ function sendPage(res: Response, page: string | null): void {
       .send('The pages have not been built yet. Run the build and start again.');
     return;
   }
-  res.type('html').send(page);
+  await sendText(res, 'text/html', page);
 }

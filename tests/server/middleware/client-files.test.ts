@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { gzipSync } from 'node:zlib';
+import { brotliCompressSync, gzipSync } from 'node:zlib';
 import { afterAll, describe, expect, it } from 'vitest';
 import { inlineScriptHashes } from '#server/middleware/client-files.ts';
 import { useApp } from '../support/app.ts';
@@ -18,6 +18,7 @@ writeFileSync(join(folder, 'icon.svg'), '<svg xmlns="http://www.w3.org/2000/svg"
 writeFileSync(join(folder, 'assets', 'app-1a2b.js'), 'export {}');
 writeFileSync(join(folder, 'assets', 'packed-3c4d.js'), 'export const long = 1;');
 writeFileSync(join(folder, 'assets', 'packed-3c4d.js.gz'), gzipSync('export const long = 1;'));
+writeFileSync(join(folder, 'assets', 'packed-3c4d.js.br'), brotliCompressSync('export const long = 1;'));
 
 afterAll(() => rmSync(folder, { recursive: true }));
 
@@ -37,6 +38,17 @@ describe('a built client', () => {
     expect(asset.headers['cache-control']).toBe('public, max-age=31536000, immutable');
     const icon = await app.visitor().get('/icon.svg').expect(200);
     expect(icon.headers['cache-control']).toBe('public, max-age=0');
+  });
+
+  it('sends the tighter twin to a browser that takes both, unless it says no', async () => {
+    const encodingFor = async (accepted: string) => {
+      const headers = { 'Accept-Encoding': accepted };
+      const res = await fetch(`${app.url}/assets/packed-3c4d.js`, { headers });
+      expect(await res.text()).toBe('export const long = 1;');
+      return res.headers.get('content-encoding');
+    };
+    expect(await encodingFor('gzip, deflate, br')).toBe('br');
+    expect(await encodingFor('br;q=0, gzip;q=0.5')).toBe('gzip');
   });
 
   it('sends the packed twin of a file to a browser that takes it, and the file itself to one that does not', async () => {

@@ -1,30 +1,9 @@
-import { createBrowserRouter, Navigate, type RouteObject } from 'react-router-dom';
+import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { Layout } from './layout.tsx';
 import { ErrorPage } from './pages/error-page.tsx';
 import { NotFoundPage } from './pages/not-found-page.tsx';
-
-/** The places of a glider, each in a file of its own that is fetched when it is first opened. */
-const drawing: RouteObject = {
-  path: 'drawing',
-  lazy: async () => ({ Component: (await import('./pages/glider/drawing-page.tsx')).DrawingPage }),
-};
-const balance: RouteObject = {
-  path: 'balance',
-  lazy: async () => ({ Component: (await import('./pages/glider/balance-page.tsx')).BalancePage }),
-};
-const loading: RouteObject = {
-  path: 'loading',
-  lazy: async () => ({ Component: (await import('./pages/glider/loading-page.tsx')).LoadingPage }),
-};
-const trial: RouteObject = {
-  path: 'trial',
-  lazy: async () => ({ Component: (await import('./pages/glider/trial-page.tsx')).TrialPage }),
-};
-const sheets: RouteObject = {
-  path: 'sheets',
-  lazy: async () => ({ Component: (await import('./pages/glider/sheets-page.tsx')).SheetsPage }),
-};
-const first: RouteObject = { index: true, element: <Navigate to="drawing" replace /> };
+import { PLACES, SAMPLE_PLACES } from './paths.ts';
+import { placeRoutes } from './place-routes.tsx';
 
 const routes: RouteObject[] = [
   {
@@ -61,14 +40,14 @@ const routes: RouteObject[] = [
             lazy: async () => ({
               Component: (await import('./pages/glider/glider-layout.tsx')).GliderLayout,
             }),
-            children: [first, drawing, balance, loading, trial, sheets],
+            children: placeRoutes(PLACES),
           },
           {
             path: 'sample',
             lazy: async () => ({
               Component: (await import('./pages/glider/sample-layout.tsx')).SampleLayout,
             }),
-            children: [first, drawing, balance, loading, trial],
+            children: placeRoutes(SAMPLE_PLACES),
           },
           {
             path: 'sheets/:sheetId',

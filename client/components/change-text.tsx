@@ -10,10 +10,13 @@ interface ChangeTextProps {
   most?: number;
   /** changes that are not in the list */
   more?: number;
+  /** without the name, where it stands before already */
+  bare?: boolean;
 }
 
 /** Changes in words in one line: what was changed stands out, what became of it follows. */
-export function ChangeText({ changes, materials, most = Infinity, more = 0 }: ChangeTextProps) {
+export function ChangeText(props: ChangeTextProps) {
+  const { changes, materials, most = Infinity, more = 0, bare = false } = props;
   const words = changesInWords(changes, materials, useUnits());
   const rest = more + Math.max(0, words.length - most);
   return (
@@ -21,7 +24,7 @@ export function ChangeText({ changes, materials, most = Infinity, more = 0 }: Ch
       {words.slice(0, most).map(({ name, text }, i) => (
         <span key={`${name} ${text}`}>
           {i > 0 && '; '}
-          <b className="font-semibold">{name}</b> {text}
+          {!bare && <b className="font-semibold">{name}</b>} {text}
         </span>
       ))}
       {rest > 0 && `; and ${rest} more`}

@@ -1,4 +1,5 @@
 import { isRouteErrorResponse, Link, useRouteError } from 'react-router-dom';
+import { fetchFailed } from '#client/app/fetch-failed.ts';
 import { paths } from '#client/app/paths.ts';
 import { ErrorScreen } from '#client/components/error-screen.tsx';
 import { useTitle } from '#client/hooks/use-title.ts';
@@ -22,9 +23,4 @@ export function ErrorPage() {
       </ErrorScreen>
     </div>
   );
-}
-
-/** Browsers word a page file that could not be fetched each in their own way. */
-function fetchFailed(error: unknown): boolean {
-  return error instanceof TypeError && /import|module|fetch/i.test(error.message);
 }

@@ -9,11 +9,14 @@ interface DialogProps {
   /** One sentence under the title, read with it. */
   description?: ReactNode;
   wide?: boolean;
+  /** As large as the window allows, for a picture. */
+  full?: boolean;
   children: ReactNode;
 }
 
 /** A sheet laid over the table: keeps the focus, closes with Escape, gives the focus back. */
-export function Dialog({ open, onOpenChange, title, description, wide = false, children }: DialogProps) {
+export function Dialog(props: DialogProps) {
+  const { open, onOpenChange, title, description, wide = false, full = false, children } = props;
   return (
     <Radix.Root open={open} onOpenChange={onOpenChange}>
       <Radix.Portal>
@@ -23,7 +26,7 @@ export function Dialog({ open, onOpenChange, title, description, wide = false, c
           className={cn(
             'fixed inset-x-0 bottom-0 z-50 max-h-[92dvh] overflow-y-auto border border-strong-rule bg-sheet p-5 shadow-float',
             'sm:inset-x-auto sm:top-1/2 sm:bottom-auto sm:left-1/2 sm:-translate-x-1/2 sm:-translate-y-1/2 sm:rounded-md sm:p-6',
-            wide ? 'sm:w-[min(46rem,94vw)]' : 'sm:w-[min(30rem,94vw)]',
+            full ? 'sm:w-[min(80rem,94vw)]' : wide ? 'sm:w-[min(46rem,94vw)]' : 'sm:w-[min(30rem,94vw)]',
           )}
         >
           <Radix.Title className="pr-12 text-heading font-semibold">{title}</Radix.Title>

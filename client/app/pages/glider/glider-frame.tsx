@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { NavLink, Outlet, useLocation } from 'react-router-dom';
 import type { Place } from '#client/app/paths.ts';
 import { SectionBoundary } from '#client/components/section-boundary.tsx';
@@ -14,6 +14,7 @@ const LABELS: Record<Place, string> = {
   loading: 'Loading',
   trial: 'Wood trial',
   sheets: 'Sheets',
+  log: 'Log',
 };
 
 interface GliderFrameProps {
@@ -31,11 +32,21 @@ export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps
   const { pathname } = useLocation();
   const { undo, redo, said } = useUndo(workspace);
   useUndoKeys(workspace.plan, undo, redo);
+  const tabs = useRef<HTMLElement>(null);
+  // On the phone the row of tabs is wider than the window; the open one stays in it.
+  useEffect(() => {
+    const open = tabs.current?.querySelector<HTMLElement>('[aria-current]');
+    if (open) tabs.current?.scrollTo({ left: open.offsetLeft - open.offsetWidth });
+  }, [pathname]);
   return (
     <div className="flex flex-1 flex-col print:block">
       {notices}
       <div className="no-print flex flex-wrap-reverse items-end gap-x-4">
-        <nav aria-label={`Places of ${workspace.plan.name}`} className="-mb-px min-w-0 overflow-x-auto">
+        <nav
+          ref={tabs}
+          aria-label={`Places of ${workspace.plan.name}`}
+          className="relative -mb-px min-w-0 overflow-x-auto"
+        >
           <ul className="flex">
             {places.map((place) => (
               <li key={place}>
@@ -69,7 +80,7 @@ export function GliderFrame({ places, hrefOf, notices, aside }: GliderFrameProps
 function tabClass({ isActive }: { isActive: boolean }): string {
   return cn(
     'flex min-h-9 items-center border border-b-0 px-4 whitespace-nowrap no-underline pointer-coarse:min-h-11',
-    'focus-visible:-outline-offset-2 max-sm:px-2',
+    'focus-visible:-outline-offset-2 max-sm:px-1.5',
     isActive
       ? 'rounded-t-md border-strong-rule bg-sheet font-semibold text-pencil'
       : 'border-transparent text-graphite hover:text-ink',

@@ -1,7 +1,9 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
+import { useEffect } from 'react';
 import { Link, useNavigate, useParams } from 'react-router-dom';
 import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths, PLACES } from '#client/app/paths.ts';
+import { fetchPlaces } from '#client/app/place-routes.tsx';
 import { QueryView } from '#client/components/query-view.tsx';
 import { DeskNotices } from '#client/features/gliders/desk-notices.tsx';
 import { LeaveGuard } from '#client/features/gliders/leave-guard.tsx';
@@ -48,6 +50,7 @@ function Desk({ id, userName }: { id: string; userName: string }) {
   const navigate = useNavigate();
   const client = useQueryClient();
   useTitle(workspace.plan.name);
+  useEffect(() => fetchPlaces(PLACES), []);
   useCrumbs([{ label: 'Bench', href: paths.bench }, { label: workspace.plan.name }]);
   const hrefOf = (place: (typeof PLACES)[number]) => paths.glider(id, place);
   const within = (pathname: string) => PLACES.some((place) => hrefOf(place) === pathname);

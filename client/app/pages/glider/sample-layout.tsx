@@ -18,7 +18,8 @@ export function SampleLayout() {
   );
 }
 
-const hrefOf = (place: Place) => (place === 'sheets' ? paths.sample() : paths.sample(place));
+const hrefOf = (place: Place) =>
+  place === 'sheets' || place === 'log' ? paths.sample() : paths.sample(place);
 
 function Desk() {
   const workspace = useWorkspace();

@@ -18,6 +18,8 @@ export interface Half {
   skinEdges: number[];
   /** what lies over each face, laid out once: it is asked at every sample of every strip */
   over: Record<'upper' | 'lower', SkinFace[]>;
+  /** stretches already looked at, for many parts begin and end at the same stations */
+  stretches: Map<string, Half>;
   notice: (notice: Notice) => void;
 }
 
@@ -91,6 +93,7 @@ export function halfOf(
     skinEnds,
     skinEdges,
     over,
+    stretches: new Map(),
     notice,
   };
 }
@@ -101,9 +104,12 @@ export function halfOf(
  * @example stretchOf(EXAMPLE_HALF, 0, 100).strips.length // → 1
  */
 export function stretchOf(half: Half, from: number, to: number): Half {
+  const key = `${from} ${to}`;
+  const known = half.stretches.get(key);
+  if (known) return known;
   const isNear = (part: { from: number; to: number }) =>
     Math.min(part.from, part.to) <= to + SLACK && Math.max(part.from, part.to) >= from - SLACK;
-  return {
+  const stretch: Half = {
     ...half,
     strips: half.strips.filter(isNear),
     skins: half.skins.filter(isNear),
@@ -112,7 +118,10 @@ export function stretchOf(half: Half, from: number, to: number): Half {
       upper: half.over.upper.filter(({ skin }) => isNear(skin)),
       lower: half.over.lower.filter(({ skin }) => isNear(skin)),
     },
+    stretches: new Map(),
   };
+  half.stretches.set(key, stretch);
+  return stretch;
 }
 
 /** Place and size of a strip where a station cuts it, mm. */

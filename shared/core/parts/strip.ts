@@ -77,7 +77,7 @@ export function measureStrip(half: Half, part: Strip, basis: Basis): Measure {
     const at = pointOf(station, place.centre + shift * place.width, stripZ(near, part, station, place));
     addAmount(lump, (basis === 'volume' ? area : face) * along, at, place.width ** 2 / 12);
   }
-  checkStrip(half, part, from, to);
+  checkStrip(near.strips.includes(part) ? near : half, part, from, to);
   return {
     pieces: 1,
     length: total.length,

@@ -123,6 +123,7 @@ describe('the focus', () => {
     const down = button(element, 'Move Spar, top down');
     down.focus();
     await press('Move Spar, top down');
+    await settle();
     expect(document.activeElement).toBe(button(element, 'Move Spar, top down'));
     const ids = plan().surfaces[0]!.parts.map(({ id }) => id);
     expect(ids.indexOf('spar-top')).toBe(ids.indexOf('spar-bottom') + 1);

@@ -8,7 +8,7 @@ import {
   scaleNote,
   toPx,
   zoomed,
-} from '#client/features/drawing/figure/sheet.ts';
+} from '#client/components/drawing/sheet.ts';
 import { halfLayers, modelLayers } from '#client/features/drawing/figure/drawings.ts';
 import { planSentence, planTitle } from '#client/features/drawing/figure/plan-words.ts';
 import { estimate } from '#shared/core/estimate.ts';

@@ -4,8 +4,8 @@ import { stationAt, surfaceLine } from '#shared/core/stations.ts';
 import { macMark, ribNumbers } from '#shared/drawing/marks.ts';
 import { tipLength } from '#shared/drawing/outline.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
-import { SheetText } from './sheet-text.tsx';
-import { toPx, type Sheet } from './sheet.ts';
+import { SheetText } from '#client/components/drawing/sheet-text.tsx';
+import { toPx, type Sheet } from '#client/components/drawing/sheet.ts';
 
 interface BoardMarksProps {
   surface: Surface;

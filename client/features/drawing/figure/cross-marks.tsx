@@ -1,8 +1,8 @@
 import { formatNumber } from '#shared/format/numbers.ts';
 import type { Marks } from '#shared/drawing/marks.ts';
 import { spread, type Label } from './labels.ts';
-import { SheetText } from './sheet-text.tsx';
-import { toPx, type Sheet } from './sheet.ts';
+import { SheetText } from '#client/components/drawing/sheet-text.tsx';
+import { toPx, type Sheet } from '#client/components/drawing/sheet.ts';
 
 interface CrossMarksProps {
   marks: Marks;

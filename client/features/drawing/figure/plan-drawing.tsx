@@ -8,8 +8,9 @@ import { CrossMarks } from './cross-marks.tsx';
 import type { Layer } from './drawings.ts';
 import type { PlanFigureProps } from './plan-figure.tsx';
 import { planSentence } from './plan-words.ts';
-import { LitLayer, ShapeLayer } from './shape-layer.tsx';
-import { fromPx, type Margins, type Sheet, type Zoom } from './sheet.ts';
+import { ShapeLayer } from '#client/components/drawing/shape-layer.tsx';
+import { LitLayer } from './lit-layer.tsx';
+import { fromPx, type Margins, type Sheet, type Zoom } from '#client/components/drawing/sheet.ts';
 import { SideMarks } from './side-marks.tsx';
 import { useDrag } from './use-drag.ts';
 

@@ -9,7 +9,14 @@ import { halfLayers, modelLayers, type Layer, type PlanViewName } from './drawin
 import { FigureHead } from './figure-head.tsx';
 import { PlanDrawing } from './plan-drawing.tsx';
 import { planTitle } from './plan-words.ts';
-import { FITTED, layOnPaper, scaleNote, zoomed, type Margins, type Zoom } from './sheet.ts';
+import {
+  FITTED,
+  layOnPaper,
+  scaleNote,
+  zoomed,
+  type Margins,
+  type Zoom,
+} from '#client/components/drawing/sheet.ts';
 import { useSteady } from './use-steady.ts';
 
 export interface PlanFigureProps {

@@ -4,9 +4,10 @@ import { lineAt, targetsOf } from '#shared/drawing/hit.ts';
 import type { SectionView } from '#shared/drawing/section-view.ts';
 import type { Point } from '#shared/drawing/shape.ts';
 import type { Hover } from '../hover.ts';
-import { LitLayer, ShapeLayer } from './shape-layer.tsx';
-import { SheetText } from './sheet-text.tsx';
-import { fromPx, toPx, type Sheet } from './sheet.ts';
+import { ShapeLayer } from '#client/components/drawing/shape-layer.tsx';
+import { LitLayer } from './lit-layer.tsx';
+import { SheetText } from '#client/components/drawing/sheet-text.tsx';
+import { fromPx, toPx, type Sheet } from '#client/components/drawing/sheet.ts';
 import { useDrag } from './use-drag.ts';
 
 interface SectionDrawingProps {

@@ -9,7 +9,7 @@ import { boundsOf } from '#shared/drawing/shape.ts';
 import type { Hover } from '../hover.ts';
 import { SectionDrawing } from './section-drawing.tsx';
 import { sectionWords } from './section-words.ts';
-import { layOnPaper, scaleNote, type Margins } from './sheet.ts';
+import { layOnPaper, scaleNote, type Margins } from '#client/components/drawing/sheet.ts';
 import { StationPicker } from './station-picker.tsx';
 import { useSteady } from './use-steady.ts';
 

@@ -1,7 +1,7 @@
 import type { Marks } from '#shared/drawing/marks.ts';
 import { formatNumber } from '#shared/format/numbers.ts';
-import { SheetText } from './sheet-text.tsx';
-import { toPx, type Sheet } from './sheet.ts';
+import { SheetText } from '#client/components/drawing/sheet-text.tsx';
+import { toPx, type Sheet } from '#client/components/drawing/sheet.ts';
 
 interface SideMarksProps {
   marks: Marks;

@@ -7,7 +7,7 @@ import { readSection, selfCrossingAt } from '#shared/core/section.ts';
 import { contourOf } from '#shared/drawing/contour.ts';
 import { boundsOf } from '#shared/drawing/shape.ts';
 import { formatQuantity } from '#shared/format/numbers.ts';
-import { layOnPaper, pathOf } from '../figure/sheet.ts';
+import { layOnPaper, pathOf } from '#client/components/drawing/sheet.ts';
 import { parsePoints, pointsText } from './section-text.ts';
 
 interface PointsDialogProps {

@@ -1,12 +1,21 @@
 /** Longer than a closing menu takes to give the focus back to its button, ms. */
 const AFTER_MENUS = 40;
 
+/** The row itself, the first field of its form, or the arrow that moved it. */
+type Place = 'row' | 'form' | 'up' | 'down';
+const SELECTORS: Record<Place, string> = {
+  row: '[data-row]',
+  form: '[data-form] input',
+  up: '[data-move="up"]',
+  down: '[data-move="down"]',
+};
+
 /** A wish to move the focus to a row that is only about to appear. */
 export class FocusWish {
-  private wanted: { line: string | null; where: 'row' | 'form' } | null = null;
+  private wanted: { line: string | null; where: Place } | null = null;
 
-  /** The row itself, or the first field of its form; null: whatever follows the list. */
-  ask(line: string | null, where: 'row' | 'form'): void {
+  /** A place in the row of a line; null: whatever follows the list. */
+  ask(line: string | null, where: Place): void {
     this.wanted = { line, where };
   }
 
@@ -21,9 +30,9 @@ export class FocusWish {
   }
 }
 
-function within(list: HTMLElement, line: string, where: 'row' | 'form'): HTMLElement | null {
+function within(list: HTMLElement, line: string, where: Place): HTMLElement | null {
   const row = list.querySelector<HTMLElement>(`[data-line="${CSS.escape(line)}"]`);
-  return row?.querySelector<HTMLElement>(where === 'row' ? '[data-row]' : '[data-form] input') ?? null;
+  return row?.querySelector<HTMLElement>(SELECTORS[where]) ?? null;
 }
 
 function afterList(list: HTMLElement): HTMLElement | null {

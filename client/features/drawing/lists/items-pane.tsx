@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Item } from '#shared/core/plan.ts';
@@ -6,6 +7,7 @@ import { changeItems } from '../edits/plan-edits.ts';
 import { freshId, freshName, withRow } from '../edits/rows.ts';
 import type { Form } from '../forms/form.ts';
 import { ItemForm } from '../forms/item-form.tsx';
+import type { RowWords } from './row-group.tsx';
 import { RowsPane, type Desk } from './rows-pane.tsx';
 import { itemPlace } from './size-text.ts';
 
@@ -13,6 +15,10 @@ import { itemPlace } from './size-text.ts';
 export function ItemsPane({ desk }: { desk: Desk }) {
   const { items } = desk.plan;
   const units = useUnits();
+  const words = useMemo(
+    (): RowWords<Item> => ({ lineOf: ({ id }) => `item/${id}`, sizeOf: (item) => itemPlace(item, units) }),
+    [units],
+  );
   const add = () => {
     const bare = newItem();
     const item: Item = {
@@ -39,8 +45,7 @@ export function ItemsPane({ desk }: { desk: Desk }) {
       title="Gear, fittings, ballast"
       sizeHead={`${units.label('length')} aft`}
       rows={items}
-      lineOf={({ id }) => `item/${id}`}
-      sizeOf={(row) => itemPlace(row, units)}
+      words={words}
       pathOf={(i) => `items/${i}`}
       change={changeItems}
       empty="Nothing yet. Whatever has a mass and a place goes here: gear, wire, ballast."

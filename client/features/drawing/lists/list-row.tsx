@@ -1,4 +1,4 @@
-import { memo, useEffect, useId, useRef, type ReactNode } from 'react';
+import { memo, useEffect, useId, useRef, type ReactNode, type RefObject } from 'react';
 import { Amount } from '#client/components/ui/amount.tsx';
 import { cn } from '#client/lib/cn.ts';
 import { useIsHovered, type Hover } from '../hover.ts';
@@ -6,6 +6,7 @@ import { PhonePanel } from './phone-panel.tsx';
 import { RowTools, type RowOps } from './row-tools.tsx';
 
 interface ListRowProps {
+  rowRef?: RefObject<HTMLLIElement | null> | undefined;
   id: string;
   /** id of its line on the balance sheet */
   line: string;
@@ -32,10 +33,11 @@ export const ListRow = memo(function ListRow(props: ListRowProps) {
   const { id, line, name, note, size, mass, picked, hover, ops, narrow, wrong, form } = props;
   const hovered = useIsHovered(hover, line);
   const formId = useId();
-  const row = useRef<HTMLLIElement>(null);
+  const ownRef = useRef<HTMLLIElement>(null);
+  const row = props.rowRef ?? ownRef;
   useEffect(() => {
     if (picked && !narrow) row.current?.scrollIntoView({ block: 'nearest' });
-  }, [picked, narrow]);
+  }, [picked, narrow, row]);
   const tools = props.canEdit && <RowTools {...{ id, name, ops }} first={props.first} last={props.last} />;
 
   return (
@@ -44,7 +46,7 @@ export const ListRow = memo(function ListRow(props: ListRowProps) {
       data-line={line}
       onPointerEnter={() => hover.set(line)}
       onPointerLeave={() => hover.set(null)}
-      className="scroll-my-3"
+      className="scroll-my-3 [contain-intrinsic-size:auto_var(--row)] [content-visibility:auto]"
     >
       <button
         type="button"

@@ -1,4 +1,3 @@
-import { useLayoutEffect, useRef } from 'react';
 import { cn } from '#client/lib/cn.ts';
 
 /** What can be done with a row as a whole. Always the same object, so that rows do not render for it. */
@@ -25,41 +24,28 @@ const TOOL =
 
 /** Copy, order, removal. At the ends the arrows are dimmed but stay, so that the focus does not fall off them. */
 export function RowTools({ id, name, ops, first, last }: RowToolsProps) {
-  const up = useRef<HTMLButtonElement>(null);
-  const down = useRef<HTMLButtonElement>(null);
-  const moved = useRef<HTMLButtonElement | null>(null);
-  // Moving a row takes its element out of the page for a moment, and the focus with it.
-  useLayoutEffect(() => {
-    moved.current?.focus();
-    moved.current = null;
-  });
-  const move = (by: 1 | -1, stays: boolean, button: HTMLButtonElement | null) => {
-    if (stays) return;
-    moved.current = button;
-    ops.move(id, by);
-  };
   return (
     <div className="mt-2 flex flex-wrap gap-x-1 border-t border-rule pt-2">
       <button type="button" className={TOOL} onClick={() => ops.copy(id)}>
         Copy
       </button>
       <button
-        ref={up}
         type="button"
+        data-move="up"
         aria-label={`Move ${name} up`}
         aria-disabled={first}
         className={TOOL}
-        onClick={() => move(-1, first, up.current)}
+        onClick={() => !first && ops.move(id, -1)}
       >
         ↑ Up
       </button>
       <button
-        ref={down}
         type="button"
+        data-move="down"
         aria-label={`Move ${name} down`}
         aria-disabled={last}
         className={TOOL}
-        onClick={() => move(1, last, down.current)}
+        onClick={() => !last && ops.move(id, 1)}
       >
         ↓ Down
       </button>

@@ -1,11 +1,20 @@
-import { useEffect, useLayoutEffect, useMemo, useRef, useState, type ReactNode } from 'react';
+import {
+  useDeferredValue,
+  useEffect,
+  useLayoutEffect,
+  useMemo,
+  useRef,
+  useState,
+  type ReactNode,
+} from 'react';
 import { Button } from '#client/components/ui/button.tsx';
+import { useSettled } from '#client/hooks/use-settled.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Recipe } from '../edits/plan-edits.ts';
 import { copiedRow, movedRow, withoutRow } from '../edits/rows.ts';
 import type { Hover } from '../hover.ts';
-import { ListRow } from './list-row.tsx';
+import { GROUP, RowGroup, type RowWords } from './row-group.tsx';
 import type { RowOps } from './row-tools.tsx';
 import type { FocusWish } from './focus-wish.ts';
 
@@ -31,9 +40,8 @@ interface RowsPaneProps<T> {
   /** heads of the columns of size and mass */
   sizeHead: string;
   rows: readonly T[];
-  lineOf: (row: T) => string;
-  noteOf?: (row: T) => string;
-  sizeOf: (row: T) => string;
+  /** always the same object for one list */
+  words: RowWords<T>;
   /** where a row stands in the plan, such as `items/3` */
   pathOf: (index: number) => string;
   change: (rows: (rows: T[]) => T[]) => Recipe;
@@ -52,15 +60,20 @@ interface Removed {
   after: Plan | null;
 }
 
+/** How long typing rests before what is far off follows, ms. */
+const REST = 250;
+
 /** A list whose rows are picked, opened, copied, moved and removed, with the focus always somewhere sensible. */
 export function RowsPane<T extends { id: string; name: string }>(props: RowsPaneProps<T>) {
-  const { desk, title, rows, lineOf, noteOf, sizeOf, pathOf, formOf, empty, add } = props;
+  const { desk, title, rows, words, formOf, empty, add } = props;
   const { plan, picked, narrow, hover, wish, canEdit, masses } = desk;
   const list = useRef<HTMLUListElement>(null);
   const [removed, setRemoved] = useState<Removed | null>(null);
   if (removed && removed.after === null && plan !== removed.before) setRemoved({ ...removed, after: plan });
   const ops = useOps(props, (name, line) => setRemoved({ name, line, before: plan, after: null }));
   useEffect(() => wish.grant(list.current));
+  const restedMasses = useDeferredValue(useSettled(masses, REST));
+  const wrong = desk.issues.size > 0 ? wrongLines(props) : null;
 
   return (
     <section aria-label={title}>
@@ -71,23 +84,20 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
       </div>
       {rows.length === 0 && <p className="px-2 py-3 text-note text-graphite">{empty}</p>}
       <ul ref={list}>
-        {rows.map((row, i) => {
-          const line = lineOf(row);
+        {groupsOf(rows).map((group, g) => {
+          const lines = group.map(words.lineOf);
+          const at = picked === null ? -1 : lines.indexOf(picked);
+          const row = group[at];
           return (
-            <ListRow
-              key={row.id}
-              id={row.id}
-              line={line}
-              name={row.name}
-              note={noteOf?.(row) ?? ''}
-              size={sizeOf(row)}
-              mass={masses.get(line)}
-              picked={picked === line}
-              first={i === 0}
-              last={i === rows.length - 1}
-              wrong={desk.issues.size > 0 && hasIssue(desk.issues, `${pathOf(i)}/`)}
-              form={picked === line ? formOf(row, i) : null}
-              {...{ hover, ops, narrow, canEdit }}
+            <RowGroup
+              key={g}
+              rows={group}
+              picked={row ? picked : null}
+              form={row ? formOf(row, g * GROUP + at) : null}
+              wrong={wrong && lines.some((line) => wrong.has(line)) ? wrong : null}
+              first={g === 0}
+              last={(g + 1) * GROUP >= rows.length}
+              {...{ words, masses, restedMasses, hover, ops, narrow, canEdit }}
             />
           );
         })}
@@ -116,9 +126,17 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
   );
 }
 
-function hasIssue(issues: Workspace['issues'], under: string): boolean {
-  for (const path of issues.keys()) if (path.startsWith(under)) return true;
-  return false;
+function groupsOf<T>(rows: readonly T[]): (readonly T[])[] {
+  return Array.from({ length: Math.ceil(rows.length / GROUP) }, (_, g) =>
+    rows.slice(g * GROUP, (g + 1) * GROUP),
+  );
+}
+
+/** Lines of the rows in which something is refused. */
+function wrongLines<T>({ desk, rows, words, pathOf }: RowsPaneProps<T>): ReadonlySet<string> {
+  const paths = [...desk.issues.keys()];
+  const wrong = rows.filter((_, i) => paths.some((path) => path.startsWith(`${pathOf(i)}/`)));
+  return new Set(wrong.map(words.lineOf));
 }
 
 /** Operations that stay the same object while what they act on changes. */
@@ -134,7 +152,7 @@ function useOps<T extends { id: string; name: string }>(
     const now = () => latest.current.props;
     const lineAt = (i: number) => {
       const row = now().rows[i];
-      return row ? now().lineOf(row) : null;
+      return row ? now().words.lineOf(row) : null;
     };
     return {
       pick: (line) => now().desk.pick(line),
@@ -143,27 +161,33 @@ function useOps<T extends { id: string; name: string }>(
         now().desk.pick(null);
       },
       copy: (id) => {
-        const { desk, rows, change, lineOf } = now();
+        const { desk, rows, change, words } = now();
         const { copy } = copiedRow(rows, id);
         if (!copy) return;
         desk.edit(
           change((all) => copiedRow(all, id).rows),
           `copy ${id}`,
         );
-        desk.wish.ask(lineOf(copy), 'form');
-        desk.pick(lineOf(copy));
+        desk.wish.ask(words.lineOf(copy), 'form');
+        desk.pick(words.lineOf(copy));
       },
-      move: (id, by) =>
-        now().desk.edit(
-          now().change((all) => movedRow(all, id, by)),
+      move: (id, by) => {
+        const { desk, rows, change, words } = now();
+        const row = rows.find((r) => r.id === id);
+        if (!row) return;
+        // Moving a row takes its element out of the page for a moment, and the focus with it.
+        desk.wish.ask(words.lineOf(row), by === -1 ? 'up' : 'down');
+        desk.edit(
+          change((all) => movedRow(all, id, by)),
           `move ${id}`,
-        ),
+        );
+      },
       remove: (id) => {
         const { desk, rows, change } = now();
         const at = rows.findIndex((row) => row.id === id);
         const row = rows[at];
         if (!row) return;
-        latest.current.onRemoved(row.name, now().lineOf(row));
+        latest.current.onRemoved(row.name, now().words.lineOf(row));
         desk.wish.ask(lineAt(at + 1) ?? lineAt(at - 1), 'row');
         desk.pick(null);
         desk.edit(

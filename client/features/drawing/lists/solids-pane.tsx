@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import { useUnits } from '#client/lib/units.ts';
@@ -9,6 +10,7 @@ import { changeSolids, dropUnused, inTurn, keepMaterial } from '../edits/plan-ed
 import { freshId, freshName, withRow } from '../edits/rows.ts';
 import type { Form } from '../forms/form.ts';
 import { SolidForm } from '../forms/solid-form.tsx';
+import type { RowWords } from './row-group.tsx';
 import { RowsPane, type Desk } from './rows-pane.tsx';
 import { solidSize } from './size-text.ts';
 
@@ -21,6 +23,13 @@ interface SolidsPaneProps {
 export function SolidsPane({ desk, table }: SolidsPaneProps) {
   const { solids } = desk.plan;
   const units = useUnits();
+  const words = useMemo(
+    (): RowWords<Solid> => ({
+      lineOf: ({ id }) => `solid/${id}`,
+      sizeOf: (solid) => solidSize(solid, units),
+    }),
+    [units],
+  );
   const add = ({ choice, wishes }: (typeof SOLID_CHOICES)[number]) => {
     const bare = newSolid(choice);
     const material = preferred(desk.plan, table, fitsSolid(bare), wishes);
@@ -50,8 +59,7 @@ export function SolidsPane({ desk, table }: SolidsPaneProps) {
       title="Sticks, tubes and plates"
       sizeHead={units.label('length')}
       rows={solids}
-      lineOf={({ id }) => `solid/${id}`}
-      sizeOf={(row) => solidSize(row, units)}
+      words={words}
       pathOf={(i) => `solids/${i}`}
       change={changeSolids}
       empty="Nothing yet. Fuselage sides, booms, blocks and joiners go here."

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import { useUnits } from '#client/lib/units.ts';
@@ -10,6 +11,7 @@ import { freshId, freshName, withRow } from '../edits/rows.ts';
 import type { Form } from '../forms/form.ts';
 import { PartForm } from '../forms/part-form.tsx';
 import { PanelsTable } from './panels-table.tsx';
+import type { RowWords } from './row-group.tsx';
 import { RowsPane, type Desk } from './rows-pane.tsx';
 import { SectionsTable } from './sections-table.tsx';
 import { partNote, partSize } from './size-text.ts';
@@ -26,6 +28,15 @@ interface SurfacePaneProps {
 /** One surface on the left of its drawing: panels, sections, parts. */
 export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfacePaneProps) {
   const units = useUnits();
+  const { key } = surface;
+  const words = useMemo(
+    (): RowWords<Part> => ({
+      lineOf: ({ id }) => `${key}/${id}`,
+      noteOf: partNote,
+      sizeOf: (part) => partSize(part, units),
+    }),
+    [key, units],
+  );
   const change = (parts: (parts: Part[]) => Part[]) => changeParts(index, parts);
   const add = (choice: PartChoice) => {
     const bare = newPart(choice, surface);
@@ -61,9 +72,7 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
         title="Parts"
         sizeHead={units.label('length')}
         rows={surface.parts}
-        lineOf={(part) => `${surface.key}/${part.id}`}
-        noteOf={partNote}
-        sizeOf={(row) => partSize(row, units)}
+        words={words}
         pathOf={(i) => `surfaces/${index}/parts/${i}`}
         change={change}
         empty="No parts yet. Begin with ribs and spars, or with a sheet for a plate tail."

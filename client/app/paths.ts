@@ -4,17 +4,23 @@ export type Place = (typeof PLACES)[number];
 /** The sample is not stored, so it has no sheets and no log. */
 export const SAMPLE_PLACES = ['drawing', 'balance', 'loading', 'trial'] as const satisfies readonly Place[];
 
+/** What a read-only link shows to whoever has it. */
+export const SHARED_PLACES = ['drawing', 'balance', 'loading'] as const satisfies readonly Place[];
+
 /** Every address of the client, for links; the routes are in `router.tsx`. */
 export const paths = {
   home: '/',
   signIn: (next?: string) => (next === undefined ? '/sign-in' : `/sign-in?next=${encodeURIComponent(next)}`),
   signUp: (next?: string) => (next === undefined ? '/sign-up' : `/sign-up?next=${encodeURIComponent(next)}`),
+  forgotPassword: '/forgot-password',
   bench: '/bench',
   materials: '/materials',
   account: '/account',
   sharing: (id: string) => `/gliders/${id}/sharing`,
   glider: (id: string, place: Place = 'drawing') => `/gliders/${id}/${place}`,
   sample: (place: (typeof SAMPLE_PLACES)[number] = 'drawing') => `/sample/${place}`,
+  shared: (token: string, place: (typeof SHARED_PLACES)[number] = 'drawing') => `/shared/${token}/${place}`,
+  invitation: (token: string) => `/invitations/${token}`,
   sheet: (id: string) => `/sheets/${id}`,
 } as const;
 

@@ -2,7 +2,7 @@ import { createBrowserRouter, type RouteObject } from 'react-router-dom';
 import { Layout } from './layout.tsx';
 import { ErrorPage } from './pages/error-page.tsx';
 import { NotFoundPage } from './pages/not-found-page.tsx';
-import { PLACES, SAMPLE_PLACES } from './paths.ts';
+import { PLACES, SAMPLE_PLACES, SHARED_PLACES } from './paths.ts';
 import { placeRoutes } from './place-routes.tsx';
 
 const routes: RouteObject[] = [
@@ -34,6 +34,43 @@ const routes: RouteObject[] = [
           {
             path: 'materials',
             lazy: async () => ({ Component: (await import('./pages/materials-page.tsx')).MaterialsPage }),
+          },
+          {
+            path: 'forgot-password',
+            lazy: async () => ({
+              Component: (await import('./pages/forgot-password-page.tsx')).ForgotPasswordPage,
+            }),
+          },
+          {
+            path: 'reset-password/:token',
+            lazy: async () => ({
+              Component: (await import('./pages/reset-password-page.tsx')).ResetPasswordPage,
+            }),
+          },
+          {
+            path: 'verify-email/:token',
+            lazy: async () => ({
+              Component: (await import('./pages/verify-email-page.tsx')).VerifyEmailPage,
+            }),
+          },
+          {
+            path: 'invitations/:token',
+            lazy: async () => ({ Component: (await import('./pages/invitation-page.tsx')).InvitationPage }),
+          },
+          {
+            path: 'account',
+            lazy: async () => ({ Component: (await import('./pages/account-page.tsx')).AccountPage }),
+          },
+          {
+            path: 'shared/:token',
+            lazy: async () => ({
+              Component: (await import('./pages/glider/shared-layout.tsx')).SharedLayout,
+            }),
+            children: placeRoutes(SHARED_PLACES),
+          },
+          {
+            path: 'gliders/:id/sharing',
+            lazy: async () => ({ Component: (await import('./pages/sharing-page.tsx')).SharingPage }),
           },
           {
             path: 'gliders/:id',

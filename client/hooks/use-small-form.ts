@@ -9,13 +9,15 @@ interface SmallFormOptions<T extends Record<string, string>> {
   schema: () => Promise<z.ZodType<T>>;
   /** sends what passed the schema; what it throws is told at the fields */
   send: (values: T) => Promise<unknown>;
+  /** empty once it was sent */
+  clears?: boolean;
   /** a field to tell a refusal at that points to none */
   blame?: (error: unknown) => (keyof T & string) | null;
 }
 
 /** A form of a few text fields, which the browser itself holds. */
 export function useSmallForm<T extends Record<string, string>>(options: SmallFormOptions<T>) {
-  const { names, schema, send, blame } = options;
+  const { names, schema, send, blame, clears = false } = options;
   const [errors, setErrors] = useState<Partial<Record<string, string>>>({});
   const [root, setRoot] = useState<string | null>(null);
   const [pending, setPending] = useState(false);
@@ -48,6 +50,7 @@ export function useSmallForm<T extends Record<string, string>>(options: SmallFor
     show(form, [], null);
     try {
       await send(parsed.data);
+      if (clears) form.reset();
     } catch (error) {
       const blamed = blame?.(error) ?? null;
       const refusal = refusalOf(error, names);

@@ -16,7 +16,12 @@ export function SignInPage() {
       <h1 className="text-figure font-semibold">Sign in</h1>
       <p className="mt-1 mb-6 text-graphite">to your bench and its gliders.</p>
       <SignInForm />
-      <p className="mt-6">
+      <p className="mt-4">
+        <Link to={paths.forgotPassword} className="link">
+          Forgotten password?
+        </Link>
+      </p>
+      <p className="mt-3">
         No account yet?{' '}
         <Link to={paths.signUp(next ?? undefined)} className="link">
           Sign up

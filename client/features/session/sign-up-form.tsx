@@ -7,8 +7,7 @@ import { LIMITS } from '#shared/schemas/limits.ts';
 import type { SignUp } from '#shared/schemas/session.ts';
 import { useSignUp } from './mutations.ts';
 
-/** `email` is what an invitation was sent to. */
-export function SignUpForm({ email }: { email?: string | undefined }) {
+export function SignUpForm() {
   const { mutateAsync } = useSignUp();
   const { form, field, root, pending } = useSmallForm<SignUp>({
     names: ['name', 'email', 'password'],
@@ -24,13 +23,7 @@ export function SignUpForm({ email }: { email?: string | undefined }) {
         </Notice>
       )}
       <TextField {...field('name')} label="Name" autoComplete="name" hint="Stands on your balance sheets." />
-      <TextField
-        {...field('email')}
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        defaultValue={email}
-      />
+      <TextField {...field('email')} label="E-mail" type="email" autoComplete="username" />
       <TextField
         {...field('password')}
         label="Password"

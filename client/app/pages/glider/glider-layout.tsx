@@ -5,6 +5,7 @@ import { useCrumbs } from '#client/app/crumbs.tsx';
 import { paths, PLACES } from '#client/app/paths.ts';
 import { fetchPlaces } from '#client/app/place-routes.tsx';
 import { QueryView } from '#client/components/query-view.tsx';
+import { buttonClass } from '#client/components/ui/button.tsx';
 import { DeskNotices } from '#client/features/gliders/desk-notices.tsx';
 import { LeaveGuard } from '#client/features/gliders/leave-guard.tsx';
 import { gliderQueries } from '#client/features/gliders/queries.ts';
@@ -60,6 +61,11 @@ function Desk({ id, userName }: { id: string; userName: string }) {
       <GliderFrame
         places={PLACES}
         hrefOf={hrefOf}
+        aside={
+          <Link to={paths.sharing(id)} className={buttonClass('plain', 'text-note max-sm:hidden')}>
+            {workspace.glider?.can.share ? 'Share' : 'Members'}
+          </Link>
+        }
         notices={
           keeper.kind === 'saved' && (
             <DeskNotices

@@ -38,6 +38,7 @@ export class UnexpectedAnswer extends Error {
 
 interface RequestOptions {
   method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
+  /** JSON, or a form with a file */
   body?: unknown;
   headers?: Record<string, string>;
   signal?: AbortSignal | undefined;
@@ -79,7 +80,9 @@ async function send(
     credentials: 'same-origin',
   };
   if (signal) init.signal = signal;
-  if (body !== undefined) {
+  // A form names its own parts and their border.
+  if (body instanceof FormData) init.body = body;
+  else if (body !== undefined) {
     init.body = JSON.stringify(body);
     init.headers = { ...init.headers, 'Content-Type': 'application/json' };
   }

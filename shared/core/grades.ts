@@ -36,10 +36,9 @@ export interface PieceSize {
 }
 
 /**
- * Density in kg/m³ of a square-edged piece that was weighed, g; null without a size or a mass.
- * @example densityOfPiece(16, { length: 1000, width: 100, thickness: 1 }) // → 160
+ * Density in kg/m³ of what was weighed, g, and has a volume in mm³; null without either.
+ * @example densityOf(16, 100_000) // → 160
  */
-export function densityOfPiece(massG: number, { length, width, thickness }: PieceSize): number | null {
-  const volume = length * width * thickness;
-  return volume > 0 && massG > 0 && Number.isFinite(volume) ? (massG / volume) * 1e6 : null;
+export function densityOf(massG: number, volumeMm3: number): number | null {
+  return volumeMm3 > 0 && massG > 0 && Number.isFinite(volumeMm3) ? (massG / volumeMm3) * 1e6 : null;
 }

@@ -6,7 +6,15 @@ import type { Quantity } from '#shared/units/quantities.ts';
 import type { ParseProblem } from '#shared/units/scan.ts';
 import type { Unit } from '#shared/units/units.ts';
 import { Field, type FieldLook } from './field.tsx';
-import { besideOf, NUMBER_HELP, problemText, rangeText, stepped, textOf } from './number-text.ts';
+import {
+  besideOf,
+  NUMBER_HELP,
+  problemText,
+  rangeText,
+  stepped,
+  textOf,
+  underneathOf,
+} from './number-text.ts';
 
 interface NumberFieldProps extends FieldLook {
   quantity: Quantity;
@@ -60,9 +68,8 @@ export function NumberField(props: NumberFieldProps) {
   // An unfinished `1/` is no error while it is being typed.
   const error = props.error ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
 
-  const beside = besideOf(text, quantity, unit);
   // In a cell the heading names the unit; what another unit or a sum comes to still has to be told.
-  const told = compact && own && beside.startsWith('=') ? beside : undefined;
+  const told = compact && own ? underneathOf(text, quantity, unit) || undefined : undefined;
 
   const take = (next: string) => {
     const parsed = parseQuantity(next, quantity, unit);
@@ -83,7 +90,7 @@ export function NumberField(props: NumberFieldProps) {
     <Field
       {...{ label, error, inline }}
       hint={hint ?? told}
-      suffix={suffix ?? (compact ? undefined : beside)}
+      suffix={suffix ?? (compact ? undefined : besideOf(text, quantity, unit))}
       hideLabel={hideLabel ?? compact}
       keepRoom={keepRoom ?? (!compact && !inline)}
     >
@@ -112,7 +119,7 @@ export function NumberField(props: NumberFieldProps) {
           onKeyDown={onKeyDown}
           className={cn(
             'inked min-h-row w-full text-right',
-            compact ? 'min-w-14 px-1.5' : 'px-2',
+            compact ? 'min-w-14 px-1.5 max-sm:px-0.5 max-sm:text-note' : 'px-2',
             props.className,
           )}
         />

@@ -5,8 +5,8 @@ import type { ParseProblem } from '#shared/units/scan.ts';
 import { otherUnit, QUANTITIES, type Quantity } from '#shared/units/quantities.ts';
 import { convert, type Unit } from '#shared/units/units.ts';
 
-/** Decimals that a field shows at most, trailing zeros left out: in each unit at least as fine as 0.003 mm or 0.003 g. */
-const FIELD_DIGITS: Partial<Record<Unit, number>> = { in: 4, ft: 5, oz: 4, lb: 5 };
+/** Decimals that a field shows at most, trailing zeros left out: in each unit as fine as can be measured. */
+const FIELD_DIGITS: Partial<Record<Unit, number>> = { in: 3, ft: 4, oz: 3, lb: 4 };
 const USUAL_DIGITS = 6;
 /** An inch fraction within this of the value, mm, is that fraction and no coincidence of rounding. */
 const SAME_MM = 1e-6;
@@ -52,10 +52,17 @@ export function besideOf(text: string, quantity: Quantity, unit: Unit): string {
   return `${label} · ${inUnit(read.value, quantity, other)}`;
 }
 
-function inUnit(value: number, quantity: Quantity, unit: Unit): string {
+/** The same where a heading names the unit: only what another unit or a sum comes to; empty where neither was typed. */
+export function underneathOf(text: string, quantity: Quantity, unit: Unit): string {
+  const read = parseQuantity(text, quantity, unit);
+  if (!('value' in read) || (!read.sum && read.unit === unit)) return '';
+  return `= ${inUnit(read.value, quantity, unit, true)}`;
+}
+
+function inUnit(value: number, quantity: Quantity, unit: Unit, bare = false): string {
   const fraction = quantity === 'length' && unit === 'in' ? exactFraction(value) : null;
-  if (fraction !== null) return `${fraction}${NARROW_SPACE}in`;
-  return formatQuantity(value, quantity, { unit, fine: Math.abs(value) < FINE_BELOW });
+  if (fraction !== null) return bare ? fraction : `${fraction}${NARROW_SPACE}in`;
+  return formatQuantity(value, quantity, { unit, bare, fine: Math.abs(value) < FINE_BELOW });
 }
 
 /** Small sizes and masses are told with one more decimal, mm or g. */

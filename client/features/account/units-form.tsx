@@ -1,7 +1,6 @@
 import { Select } from '#client/components/ui/select.tsx';
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
 import { INCH_CHOICES, unitsOf, type ChosenUnits } from '#shared/format/units.ts';
-import { unitName } from '#shared/units/names.ts';
 import { QUANTITIES } from '#shared/units/quantities.ts';
 import { UNITS } from '#shared/units/units.ts';
 import { presetOf, UNIT_ROWS, unitIn, withUnit } from './unit-list.ts';
@@ -67,7 +66,7 @@ export function UnitsForm({ units, onUnits }: UnitsFormProps) {
                     value={unitIn(units, quantity)}
                     options={QUANTITIES[quantity].units.map((unit) => ({
                       value: unit,
-                      label: `${UNITS[unit].label}, ${unitName(unit)}`,
+                      label: UNITS[unit].label,
                     }))}
                     onValue={(unit) => onUnits(withUnit(units, quantity, unit))}
                   />

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { besideOf, rangeText, stepped, textOf } from '#client/components/ui/number-text.ts';
+import { besideOf, rangeText, stepped, textOf, underneathOf } from '#client/components/ui/number-text.ts';
 
 // Expected texts follow from 1 in = 25.4 mm exactly (NIST SP 811); the choice of what to show is our own.
 describe('text of a field that was not typed into', () => {
@@ -19,7 +19,7 @@ describe('text of a field that was not typed into', () => {
     // 31/64 in = 12.303125 mm; 372.5 mm = 14.66535 in (25.4 mm, NIST SP 811)
     expect(textOf(12.303125, 'length', 'in')).toBe('31/64');
     expect(textOf(88.9, 'length', 'in')).toBe('3 1/2');
-    expect(textOf(372.5, 'length', 'in')).toBe('14.6654');
+    expect(textOf(372.5, 'length', 'in')).toBe('14.665');
   });
 
   it('shows a share in per cent without noise of binary fractions', () => {
@@ -38,6 +38,13 @@ describe('text of a field that was not typed into', () => {
 describe('what stands behind a field', () => {
   it('says what inches are in mm', () => {
     expect(besideOf('1/16 in', 'length', 'mm')).toBe('= 1.59\u202fmm');
+  });
+
+  it('in a cell tells only what another unit or a sum comes to', () => {
+    expect(underneathOf('14 1/2 in', 'length', 'mm')).toBe('= 368.3');
+    expect(underneathOf('12+3.5', 'length', 'mm')).toBe('= 15.5');
+    expect(underneathOf('6 mm + 1/4', 'length', 'in')).toBe('= 0.486');
+    expect([underneathOf('372,5', 'length', 'mm'), underneathOf('', 'length', 'mm')]).toEqual(['', '']);
   });
 
   it('says what a sum comes to', () => {
@@ -73,7 +80,7 @@ describe('arrow keys', () => {
   it('step by sixteenths in a field of inches, from decimals to the next decimal', () => {
     expect(stepped('15 1/2', 'length', 'in', 1)).toBe('15 9/16');
     expect(stepped('31/2', 'length', 'in', -1)).toBe('15 7/16');
-    expect(stepped('14.6654', 'length', 'in', 1)).toBe('14.7279');
+    expect(stepped('14.665', 'length', 'in', 1)).toBe('14.728');
   });
 
   it('step by sixteenths in a field typed in inches', () => {

@@ -54,5 +54,5 @@ export function solidSize(solid: Solid, units: Units): string {
 
 /** Where an item sits along the model. */
 export function itemPlace(item: Item, units: Units): string {
-  return `at ${units.format(item.at[0], 'length', { bare: true })}`;
+  return `at ${units.size(item.at[0], { bare: true })}`;
 }

@@ -38,7 +38,12 @@ export function BenchTable({ gliders, view, onView, selected, onSelected, ...lin
   }, []);
   const all = selected !== null && gliders.every(({ id }) => selected.has(id));
   const heading = (sort: GliderOrder, label: string) => (
-    <SortHeading view={view} sort={sort} onSort={() => onView(sortedBy(view, sort))}>
+    <SortHeading
+      view={view}
+      sort={sort}
+      onSort={() => onView(sortedBy(view, sort))}
+      numeric={sort !== 'name'}
+    >
       {label}
     </SortHeading>
   );
@@ -118,19 +123,25 @@ interface SortHeadingProps {
   view: BenchView;
   sort: GliderOrder;
   onSort: () => void;
+  /** the mark stands before the word, so that the word ends with the figures */
+  numeric: boolean;
   children: ReactNode;
 }
 
-function SortHeading({ view, sort, onSort, children }: SortHeadingProps) {
+function SortHeading({ view, sort, onSort, numeric, children }: SortHeadingProps) {
   const sorted = view.sort === sort;
   return (
     <button
       type="button"
       onClick={onSort}
-      className={cn('min-h-row font-semibold whitespace-nowrap hover:text-ink', sorted && 'text-pencil')}
+      className={cn(
+        'inline-flex min-h-row items-center gap-1 font-semibold whitespace-nowrap hover:text-ink',
+        numeric && 'flex-row-reverse',
+        sorted && 'text-pencil',
+      )}
     >
       {children}
-      <span aria-hidden="true" className="ml-1 inline-block w-2 text-[0.625rem]">
+      <span aria-hidden="true" className="w-2 text-[0.625rem]">
         {sorted ? (view.direction === 'up' ? '▲' : '▼') : ''}
       </span>
     </button>

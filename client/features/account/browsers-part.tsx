@@ -55,7 +55,7 @@ function Browser({ session, onSignedOut }: BrowserProps) {
     );
   return (
     <li className="flex min-h-row flex-wrap items-center gap-x-4 border-b border-rule py-1">
-      <span className="mr-auto">
+      <span className="min-w-0 flex-1">
         <span className="font-semibold">{device}</span>
         {current && <span className="text-graphite">, this one</span>}
         <span className="block text-note text-graphite">

@@ -22,7 +22,7 @@ export function UnitsForm({ units, onUnits }: UnitsFormProps) {
   return (
     <>
       <fieldset>
-        <legend className="mb-1 text-note font-semibold">Units</legend>
+        <legend className="sr-only">Units</legend>
         <div className="flex flex-wrap gap-x-6">
           {PRESETS.map(({ value, label, choices }) => (
             <label key={value} className="flex min-h-row items-center gap-2">

@@ -123,7 +123,7 @@ function Pending({ gliderId, invitation }: { gliderId: string; invitation: Invit
     );
   return (
     <li className="flex min-h-row flex-wrap items-center gap-x-3 border-b border-rule py-1">
-      <span className="mr-auto min-w-0">
+      <span className="min-w-0 flex-1">
         <span className="font-semibold">{email}</span> as {roleName(role).toLowerCase()}
         <span className="block text-note text-graphite">
           good until <time dateTime={expiresAt}>{formatMoment(expiresAt)}</time>

@@ -23,7 +23,7 @@ export function SharingPlace({ glider, accountHref, onLeft }: SharingPlaceProps)
   return (
     <QueryView query={query}>
       {({ members }) => (
-        <div className="grid max-w-3xl gap-y-9">
+        <div className="grid max-w-3xl grid-cols-1 gap-y-9">
           <header>
             <h1 className="text-figure font-semibold">{headline(glider.name, members)}</h1>
             <p className="mt-1 text-graphite">

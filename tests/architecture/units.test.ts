@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { sourcesIn, withoutComments } from './sources.ts';
 
-/** Speaks of a unit that it is given, not of the reader's. */
-const GIVEN_UNITS = new Set(['client/components/ui/number-text.ts']);
+/** Speak of a unit that they are given, not of the reader's. */
+const GIVEN_UNITS = new Set(['number-text', 'number-words'].map((name) => `client/components/ui/${name}.ts`));
 /** Quantities that have one unit for everybody. */
 const PLAIN = /'(share|fineShare|percentMac|ratio|reynolds|count|angle)'/;
 /** A unit that a reader may have chosen otherwise, written out behind a figure. */

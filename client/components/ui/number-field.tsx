@@ -6,15 +6,8 @@ import type { Quantity } from '#shared/units/quantities.ts';
 import type { ParseProblem } from '#shared/units/scan.ts';
 import type { Unit } from '#shared/units/units.ts';
 import { Field, type FieldLook } from './field.tsx';
-import {
-  besideOf,
-  NUMBER_HELP,
-  problemText,
-  rangeText,
-  stepped,
-  textOf,
-  underneathOf,
-} from './number-text.ts';
+import { besideOf, stepped, textOf, underneathOf } from './number-text.ts';
+import { boundIn, NUMBER_HELP, problemText, rangeText } from './number-words.ts';
 
 interface NumberFieldProps extends FieldLook {
   quantity: Quantity;
@@ -66,7 +59,8 @@ export function NumberField(props: NumberFieldProps) {
   const problem = 'problem' in read && !(optional && read.problem === 'missing') ? read.problem : null;
   const wrongSize = 'value' in read ? rangeText(read.value, { ...props, unit }) : undefined;
   // An unfinished `1/` is no error while it is being typed.
-  const error = props.error ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
+  const refused = props.error === undefined ? undefined : boundIn(props.error, quantity, unit);
+  const error = refused ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
 
   // In a cell the heading names the unit; what another unit or a sum comes to still has to be told.
   const told = compact && own ? underneathOf(text, quantity, unit) || undefined : undefined;

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { besideOf, rangeText, stepped, textOf, underneathOf } from '#client/components/ui/number-text.ts';
+import { besideOf, stepped, textOf, underneathOf } from '#client/components/ui/number-text.ts';
+import { boundIn, rangeText } from '#client/components/ui/number-words.ts';
 
 // Expected texts follow from 1 in = 25.4 mm exactly (NIST SP 811); the choice of what to show is our own.
 describe('text of a field that was not typed into', () => {
@@ -99,6 +100,15 @@ describe('arrow keys', () => {
 describe('size of a value', () => {
   it('refuses the bound itself where more is asked for', () => {
     expect(rangeText(0, { quantity: 'length', unit: 'mm', above: 0 })).toBe('Must be more than 0 mm.');
+  });
+
+  it('tells the bound of a plan’s rule in the field’s own unit', () => {
+    // 20 000 mm = 787.402 in, 100 000 g = 3527.396 oz (NIST SP 811)
+    expect(boundIn('Must be at most 20000 mm.', 'length', 'in')).toBe('Must be at most 787.402 in.');
+    expect(boundIn('Must be at most 20000 mm.', 'length', 'mm')).toBe('Must be at most 20000 mm.');
+    expect(boundIn('Must be at most 100000.', 'mass', 'oz')).toBe('Must be at most 3527.396 oz.');
+    expect(boundIn('Must be at most 0.9.', 'share', 'percent')).toBe('Must be at most 90 %.');
+    expect(boundIn('Must be a number.', 'length', 'in')).toBe('Must be a number.');
   });
 
   it('names the bound in the unit of the field', () => {

@@ -3,10 +3,10 @@ import { sourcesIn, withoutComments } from './sources.ts';
 
 /** Speak of a unit that they are given, not of the reader's. */
 const GIVEN_UNITS = new Set(['number-text', 'number-words'].map((name) => `client/components/ui/${name}.ts`));
-/** Quantities that have one unit for everybody. */
-const PLAIN = /'(share|fineShare|percentMac|ratio|reynolds|count|angle)'/;
+/** Quantities that have one unit for everybody, and units named on purpose, such as both of two systems. */
+const PLAIN = /'(share|fineShare|percentMac|ratio|reynolds|count|angle)'|\bunit:/;
 /** A unit that a reader may have chosen otherwise, written out behind a figure. */
-const WRITTEN_OUT = /(?:\}\s|NARROW_SPACE\}|\\u202f|\u202f)(?:mm|dm²|g\/dm²|kg\/m³|g\/m²|m\/s)(?![\w/])/;
+const WRITTEN_OUT = /(?:\}\s|NARROW_SPACE\}|\\u202f|\u202f)(?:mm|dm²|g\/dm²|kg\/m³|g\/m²|m\/s)(?![\w/²])/;
 
 /** What is wrong with a text that shows figures. */
 function offences(path: string, code: string): string[] {
@@ -49,6 +49,7 @@ describe('the reader of formats', () => {
     "unitLabel('mass')",
     'const a = `${value}${NARROW_SPACE}mm.`;',
     'const a = `${density} kg/m³`;',
+    'const a = `${speed} m/s.`;',
     'const a = <p>{length} mm of span</p>;',
   ])('finds %s', (text) => {
     expect(told(text)).toHaveLength(1);
@@ -56,6 +57,8 @@ describe('the reader of formats', () => {
 
   it.each([
     "formatQuantity(of(x), 'share')",
+    "formatQuantity(x, 'length', { unit: 'mm' })",
+    'const a = `g = ${gravity} m/s²`;',
     'const a = `${formatNumber(x, 1)} % MAC and ${count} models`;',
     "// formatQuantity(mass, 'mass') would be wrong here",
     "const path = `M${x} 4`; const size = '3 mm';",

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { Navigate, type RouteObject } from 'react-router-dom';
+import { fetchWhy } from '#client/components/why/why-provider.tsx';
 import { PlaceError } from './pages/glider/place-error.tsx';
 import type { Place } from './paths.ts';
 
@@ -31,7 +32,9 @@ const SETTLED = 3_000;
 /** Fetches the other places ahead, so that a lost connection leaves none of them shut; the answer stops it. */
 export function fetchPlaces(places: readonly Place[]): () => void {
   const timer = setTimeout(() => {
-    for (const place of places) FILES[place]().catch(() => undefined);
+    for (const fetchFile of [...places.map((place) => FILES[place]), fetchWhy]) {
+      fetchFile().catch(() => undefined);
+    }
   }, SETTLED);
   return () => clearTimeout(timer);
 }

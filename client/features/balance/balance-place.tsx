@@ -21,7 +21,6 @@ import { SheetTable } from './sheet-table.tsx';
 import { TipWeight } from './tip-weight.tsx';
 import { verdictOf } from './verdict.ts';
 import { WantedFields } from './wanted-fields.tsx';
-import { whyLine, whySum } from './why.ts';
 
 const Charts = lazy(async () => ({ default: (await import('./charts.tsx')).Charts }));
 
@@ -46,7 +45,6 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   const units = useUnits();
   const [open, setOpen] = useState<ReadonlySet<string>>(new Set());
   const [lit, setLit] = useState<string | null>(null);
-  const [asked, setAsked] = useState<string | null>(null);
 
   // Kept while only the light moves over the sheet.
   const beam = useMemo(() => beamOf(result, wingReference(plan), plan.target), [result, plan]);
@@ -63,19 +61,6 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
     if (!next.delete(key)) next.add(key);
     setOpen(next);
     if (pickedGroup === key && shown.has(key)) select(null);
-  };
-  const why = (what: string) => {
-    if (what === 'total') return whySum(result.lines, units);
-    const [kind, ...rest] = what.split('/');
-    const id = rest.join('/');
-    if (kind === 'group') {
-      return whySum(
-        result.lines.filter((line) => sheetGroupKey(line) === id),
-        units,
-      );
-    }
-    const line = result.lines.find((one) => one.id === id);
-    return line ? whyLine(plan, line, units) : null;
   };
 
   return (
@@ -100,7 +85,7 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
           <section aria-label="Balance sheet">
             <div className="flex items-baseline justify-between gap-4">
               <h2 className="caption">Balance sheet</h2>
-              <p className="text-note text-graphite print:hidden">Press a mass to ask how it was made.</p>
+              <p className="text-note text-graphite print:hidden">Press a figure to ask how it was made.</p>
             </div>
             <SheetTable
               plan={plan}
@@ -110,12 +95,9 @@ function Balance({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
               lit={lit}
               selected={selected}
               onSelect={select}
-              asked={asked}
-              onAsk={setAsked}
-              why={why}
             />
           </section>
-          {beam && <Facts plan={plan} result={result} beam={beam} />}
+          {beam && <Facts result={result} beam={beam} />}
         </div>
         {beam && (
           <div className="grid grid-cols-1 gap-y-7 print:hidden">

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { balanceAfter, ballastFor } from '#shared/core/ballast.ts';
@@ -72,8 +73,10 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
         <p>Nothing to add: it balances {beam.wanted ? 'on the wanted point' : 'where it does'}.</p>
       ) : (
         <p>
-          <strong className="text-heading font-semibold">{grams(needed)}</strong> {placeOf(arm, units)} brings
-          it to {units.format(balanceAfter(mass, from, needed, arm), 'length')}
+          <strong className="text-heading font-semibold">
+            <AskWhy question={{ of: 'ballast', arm, to }}>{grams(needed)}</AskWhy>
+          </strong>{' '}
+          {placeOf(arm, units)} brings it to {units.format(balanceAfter(mass, from, needed, arm), 'length')}
           <span className="text-graphite">; then {grams(mass + needed)} in all.</span>
         </p>
       )}

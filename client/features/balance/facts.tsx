@@ -1,17 +1,11 @@
-import { useState, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { Amount } from '#client/components/ui/amount.tsx';
-import { useUnits } from '#client/lib/units.ts';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
+import type { WhyQuestion } from '#client/lib/why/question.ts';
 import type { Beam } from '#shared/core/beam.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import type { Plan } from '#shared/core/plan.ts';
-import { cn } from '#client/lib/cn.ts';
-import type { Units } from '#shared/format/units.ts';
-import { whyBalance, type Why } from './why.ts';
-import { whyNeutralPoint } from './why-neutral.ts';
-import { WhyPanel } from './why-panel.tsx';
 
 interface FactsProps {
-  plan: Plan;
   result: Estimate;
   beam: Beam;
 }
@@ -19,46 +13,31 @@ interface FactsProps {
 interface Fact {
   label: string;
   figure: ReactNode;
-  why: Why | null;
+  /** null where there is no figure to ask about */
+  question: WhyQuestion | null;
 }
 
 /** The balance in figures, each to be asked how it was made. */
-export function Facts({ plan, result, beam }: FactsProps) {
-  const units = useUnits();
-  const [asked, setAsked] = useState<string | null>(null);
+export function Facts({ result, beam }: FactsProps) {
   return (
     <section aria-label="Balance in figures">
       <h2 className="caption">Balance in figures</h2>
       <dl className="mt-1">
-        {factsOf(plan, result, beam, units).map(({ label, figure, why }) => (
+        {factsOf(result, beam).map(({ label, figure, question }) => (
           <div
             key={label}
             className="grid min-h-row grid-cols-[auto_1fr] items-center gap-x-4 border-b border-rule"
           >
             <dt className="text-graphite">{label}</dt>
             <dd className="text-right font-semibold">
-              {why ? (
-                <button
-                  type="button"
-                  aria-expanded={asked === label}
-                  onClick={() => setAsked(asked === label ? null : label)}
-                  className={cn(
-                    'min-h-row underline decoration-strong-rule decoration-dotted underline-offset-4 hover:text-ink hover:decoration-ink',
-                    asked === label && 'text-ink decoration-ink',
-                  )}
-                >
+              {question ? (
+                <AskWhy question={question} name={label} className="min-h-row">
                   {figure}
-                  <span className="sr-only">: ask why</span>
-                </button>
+                </AskWhy>
               ) : (
                 figure
               )}
             </dd>
-            {asked === label && why && (
-              <dd className="col-span-2 pb-3">
-                <WhyPanel why={why} />
-              </dd>
-            )}
           </div>
         ))}
       </dl>
@@ -66,24 +45,23 @@ export function Facts({ plan, result, beam }: FactsProps) {
   );
 }
 
-function factsOf(plan: Plan, { totals, balance }: Estimate, beam: Beam, units: Units): Fact[] {
-  const balanceWhy = whyBalance({ totals, balance }, beam.chord, units);
-  const neutralWhy = whyNeutralPoint(plan, balance, units);
+function factsOf({ balance }: Estimate, beam: Beam): Fact[] {
   const mac = beam.chord ? beam.chord.to - beam.chord.from : null;
   const np =
     mac === null || beam.chord === null || balance.neutralPoint === null
       ? null
       : (100 * (balance.neutralPoint - beam.chord.from)) / mac;
+  const asked = (question: WhyQuestion, there: number | null) => (there === null ? null : question);
   return [
     {
       label: 'Balance point',
       figure: <Amount value={balance.x} u={balance.u} quantity="length" />,
-      why: balanceWhy,
+      question: asked({ of: 'balance' }, balance.x),
     },
     {
       label: 'of the mean aerodynamic chord',
       figure: <Amount value={balance.percentMac} u={balance.uPercentMac} quantity="percentMac" of="MAC" />,
-      why: balanceWhy,
+      question: asked({ of: 'balance' }, balance.percentMac),
     },
     {
       label: 'Neutral point',
@@ -98,18 +76,22 @@ function factsOf(plan: Plan, { totals, balance }: Estimate, beam: Beam, units: U
           )}
         </>
       ),
-      why: neutralWhy,
+      question: asked({ of: 'neutralPoint' }, balance.neutralPoint),
     },
     {
       label: 'Static margin',
       figure: <Amount value={balance.staticMargin} quantity="fineShare" of="MAC" />,
-      why: neutralWhy,
+      question: asked({ of: 'staticMargin' }, balance.staticMargin),
     },
-    { label: 'Mean aerodynamic chord', figure: <Amount value={mac} quantity="length" />, why: null },
+    {
+      label: 'Mean aerodynamic chord',
+      figure: <Amount value={mac} quantity="length" />,
+      question: asked({ of: 'chord' }, mac),
+    },
     {
       label: 'its leading edge',
       figure: <Amount value={beam.chord?.from ?? null} quantity="length" />,
-      why: null,
+      question: asked({ of: 'chord' }, mac),
     },
   ];
 }

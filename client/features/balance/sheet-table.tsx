@@ -1,12 +1,12 @@
-import { Fragment, useId, type ReactNode } from 'react';
+import { Fragment, type ReactNode } from 'react';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { cn } from '#client/lib/cn.ts';
 import { useUnits } from '#client/lib/units.ts';
+import type { WhyQuestion } from '#client/lib/why/question.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { PrintedFigures, PrintedSheet } from '#shared/core/printed-sheet.ts';
 import { formatNumber, NO_VALUE } from '#shared/format/numbers.ts';
-import type { Why } from './why.ts';
-import { WhyPanel } from './why-panel.tsx';
 
 interface SheetTableProps {
   plan: Plan;
@@ -18,24 +18,19 @@ interface SheetTableProps {
   lit: string | null;
   selected: string | null;
   onSelect: (id: string | null) => void;
-  /** what is being asked: `line/…`, `group/…` or `total` */
-  asked: string | null;
-  onAsk: (what: string | null) => void;
-  why: (what: string) => Why | null;
 }
 
 /** Mass, arm and moment by group and part; every figure can be asked how it was made. */
 export function SheetTable(props: SheetTableProps) {
-  const { plan, sheet, open, onToggle, lit, selected, onSelect, asked, onAsk, why } = props;
+  const { plan, sheet, open, onToggle, lit, selected, onSelect } = props;
   const units = useUnits();
-  const row = (what: string, name: ReactNode, said: string, figures: PrintedFigures, look: RowLook) => (
-    <FigureRow
-      {...{ name, said, figures, look }}
-      digits={sheet.digits}
-      why={asked === what ? why(what) : null}
-      onAsk={() => onAsk(asked === what ? null : what)}
-    />
-  );
+  const row = (
+    question: WhyQuestion,
+    name: ReactNode,
+    said: string,
+    figures: PrintedFigures,
+    look: RowLook,
+  ) => <FigureRow {...{ question, name, said, figures, look }} digits={sheet.digits} />;
   return (
     <Table caption="Balance sheet" className="tabular-nums">
       <thead>
@@ -58,7 +53,7 @@ export function SheetTable(props: SheetTableProps) {
           return (
             <Fragment key={group.key}>
               {row(
-                `group/${group.key}`,
+                { of: 'group', key: group.key },
                 <button
                   type="button"
                   aria-expanded={isOpen}
@@ -76,7 +71,7 @@ export function SheetTable(props: SheetTableProps) {
                 group.rows.map((part) => (
                   <Fragment key={part.id}>
                     {row(
-                      `line/${part.id}`,
+                      { of: 'line', id: part.id },
                       <button
                         type="button"
                         aria-pressed={selected === part.id}
@@ -99,7 +94,7 @@ export function SheetTable(props: SheetTableProps) {
             </Fragment>
           );
         })}
-        {row('total', plan.name, plan.name, sheet.total, { strong: true, last: true })}
+        {row({ of: 'total' }, plan.name, plan.name, sheet.total, { strong: true, last: true })}
       </tbody>
     </Table>
   );
@@ -113,68 +108,57 @@ interface RowLook {
 }
 
 interface FigureRowProps {
+  question: WhyQuestion;
   name: ReactNode;
   /** the name alone, for the button's own */
   said: string;
   figures: PrintedFigures;
   digits: PrintedSheet['digits'];
   look: RowLook;
-  why: Why | null;
-  onAsk: () => void;
 }
 
-function FigureRow({ name, said, figures, digits, look, why, onAsk }: FigureRowProps) {
+function FigureRow({ question, name, said, figures, digits, look }: FigureRowProps) {
   const show = (text: string | null, column: keyof PrintedSheet['digits']) =>
     text === null ? NO_VALUE : formatNumber(Number(text), digits[column]);
-  const line = look.last ? 'border-b-0 border-t border-t-strong-rule' : undefined;
-  const id = useId();
   const units = useUnits();
+  const line = look.last ? 'border-b-0 border-t border-t-strong-rule' : undefined;
   const under = (text: string) => (
     <span className="block text-label font-normal text-graphite sm:hidden"> {text}</span>
   );
+  // One answer tells of all figures of a line, so that the first alone is a stop for the keyboard.
+  const also = (figure: ReactNode) => (
+    <AskWhy question={question} second className="min-h-row">
+      {figure}
+    </AskWhy>
+  );
   return (
-    <>
-      <Tr lit={look.lit ?? false} strong={look.strong ?? false}>
-        <RowTh className={cn(line, 'py-0', look.picked && 'text-ink')}>{name}</RowTh>
-        <Td numeric className={cn(line, 'pr-2')}>
-          <button
-            type="button"
-            aria-expanded={why !== null}
-            aria-controls={why ? id : undefined}
-            onClick={onAsk}
-            className={cn(
-              '-mr-1 min-h-row rounded-sm px-1 underline decoration-strong-rule decoration-dotted underline-offset-4 hover:text-ink hover:decoration-ink',
-              why && 'text-ink decoration-ink',
-            )}
-          >
-            <span className="sr-only">{said} </span>
-            {show(figures.mass, 'mass')}
-            <span className="sr-only"> {units.label('mass')}, ask why</span>
-            {under(`± ${show(figures.u, 'u')}`)}
-          </button>
-        </Td>
-        <Td numeric className={cn(line, 'font-normal text-graphite max-sm:hidden')}>
-          {show(figures.u, 'u')}
-        </Td>
-        <Td numeric className={line}>
-          {show(figures.arm, 'arm')}
-        </Td>
-        <Td numeric className={line}>
-          {show(figures.moment, 'moment')}
-          {under(`${show(figures.share, 'share')} %`)}
-        </Td>
-        <Td numeric className={cn(line, 'max-sm:hidden')}>
-          {show(figures.share, 'share')}
-        </Td>
-      </Tr>
-      {why && (
-        <tr id={id}>
-          <td colSpan={6} className="border-b border-rule py-2 sm:pl-4">
-            <WhyPanel why={why} />
-          </td>
-        </tr>
-      )}
-    </>
+    <Tr lit={look.lit ?? false} strong={look.strong ?? false}>
+      <RowTh className={cn(line, 'py-0', look.picked && 'text-ink')}>{name}</RowTh>
+      <Td numeric className={cn(line, 'pr-2')}>
+        <AskWhy question={question} name={said} className="-mr-1 min-h-row px-1">
+          {show(figures.mass, 'mass')}
+          <span className="sr-only"> {units.label('mass')}</span>
+          {under(`± ${show(figures.u, 'u')}`)}
+        </AskWhy>
+      </Td>
+      <Td numeric className={cn(line, 'font-normal text-graphite max-sm:hidden')}>
+        {also(show(figures.u, 'u'))}
+      </Td>
+      <Td numeric className={line}>
+        {also(show(figures.arm, 'arm'))}
+      </Td>
+      <Td numeric className={line}>
+        {also(
+          <>
+            {show(figures.moment, 'moment')}
+            {under(`${show(figures.share, 'share')} %`)}
+          </>,
+        )}
+      </Td>
+      <Td numeric className={cn(line, 'max-sm:hidden')}>
+        {also(show(figures.share, 'share'))}
+      </Td>
+    </Tr>
   );
 }
 

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { ballastFor } from '#shared/core/ballast.ts';
@@ -71,8 +72,10 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
         <p>Weight there makes it worse: choose a place to {light}.</p>
       ) : (
         <p>
-          <strong className="text-heading font-semibold">{grams(needed)}</strong> at the {light} wing brings
-          it to the middle
+          <strong className="text-heading font-semibold">
+            <AskWhy question={{ of: 'tipWeight', arm }}>{grams(needed)}</AskWhy>
+          </strong>{' '}
+          at the {light} wing brings it to the middle
           <span className="text-graphite">
             ; on the balance arm ({units.format(x, 'length')}) it leaves fore and aft alone.
           </span>

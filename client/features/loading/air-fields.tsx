@@ -1,5 +1,6 @@
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { airAt } from '#shared/core/atmosphere.ts';
@@ -95,7 +96,7 @@ export function AirFields(props: AirFieldsProps) {
         />
       </div>
       <p className="text-note text-graphite">
-        Air of {units.format(density, 'airDensity')}; at{' '}
+        Air of <AskWhy question={{ of: 'air', ...weather }}>{units.format(density, 'airDensity')}</AskWhy>; at{' '}
         {formatNumber(convert(weather.altitude, 'm', units.long), 0)}
         {NARROW_SPACE}
         {units.long} the standard day has {formatNumber(standard, 1)}

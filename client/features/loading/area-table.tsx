@@ -1,4 +1,5 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
@@ -27,11 +28,21 @@ export function AreaTable({ plan, result }: { plan: Plan; result: Estimate }) {
                 <span className={key === 'projected' ? 'font-semibold' : undefined}>{name}</span>
                 <span className="block text-note text-graphite">{note}</span>
               </RowTh>
-              <Td numeric>{units.format(area, 'area', { bare: true })}</Td>
-              <Td numeric className="font-semibold">
-                {units.format(loading, 'loading', { bare: true, fine: true })}
+              <Td numeric>
+                <AskWhy question={{ of: 'area', kind: key }}>
+                  {units.format(area, 'area', { bare: true })}
+                </AskWhy>
               </Td>
-              <Td numeric>{units.format(loading, 'loading', { unit: other, bare: true, fine: true })}</Td>
+              <Td numeric className="font-semibold">
+                <AskWhy question={{ of: 'loading', kind: key }}>
+                  {units.format(loading, 'loading', { bare: true, fine: true })}
+                </AskWhy>
+              </Td>
+              <Td numeric>
+                <AskWhy question={{ of: 'loading', kind: key }} second>
+                  {units.format(loading, 'loading', { unit: other, bare: true, fine: true })}
+                </AskWhy>
+              </Td>
             </tr>
           ))}
         </tbody>

@@ -65,6 +65,7 @@ export function Flight({ workspace, plan, flown, children }: FlightProps) {
             density={air.density}
           />
           <SpeedTable
+            air={air}
             rows={[
               { name: 'Stall', lift: clMax, ...stall },
               { name: 'Trim', lift: trimLift, ...trim },

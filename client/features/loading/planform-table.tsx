@@ -1,13 +1,18 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
+import type { PlanformFigure } from '#client/lib/why/question.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate, Planform } from '#shared/core/result.ts';
 import { sheetGroupName } from '#shared/core/sheet-groups.ts';
+import { NO_VALUE } from '#shared/format/numbers.ts';
 import type { Units } from '#shared/format/units.ts';
 
 interface Figure {
+  figure: PlanformFigure;
   label: string;
-  of: (planform: Planform) => string;
+  /** null where the surface has none */
+  of: (planform: Planform) => string | null;
 }
 
 /** What is told of each surface. An upright fin has no shadow, so no projected area and span. */
@@ -17,15 +22,28 @@ function figuresIn(units: Units): Figure[] {
   const [length, area] = [units.label('length'), units.label('area')];
   return [
     {
+      figure: 'areaProjected',
       label: `Area, projected ${area}`,
-      of: ({ areaProjected }) => (areaProjected > 0 ? wide(areaProjected) : '–'),
+      of: ({ areaProjected }) => (areaProjected > 0 ? wide(areaProjected) : null),
     },
-    { label: `Area, developed ${area}`, of: ({ areaDeveloped }) => wide(areaDeveloped) },
-    { label: `Span, projected ${length}`, of: ({ span }) => (span > 0 ? long(span) : '–') },
-    { label: 'Aspect ratio', of: ({ aspectRatio }) => units.format(aspectRatio, 'ratio') },
-    { label: `Mean aerodynamic chord ${length}`, of: ({ mac }) => long(mac) },
-    { label: `its leading edge, x ${length}`, of: ({ xLeMac }) => long(xLeMac) },
-    { label: `and place along the span, y ${length}`, of: ({ yMac }) => long(yMac) },
+    {
+      figure: 'areaDeveloped',
+      label: `Area, developed ${area}`,
+      of: ({ areaDeveloped }) => wide(areaDeveloped),
+    },
+    {
+      figure: 'span',
+      label: `Span, projected ${length}`,
+      of: ({ span }) => (span > 0 ? long(span) : null),
+    },
+    {
+      figure: 'aspectRatio',
+      label: 'Aspect ratio',
+      of: ({ aspectRatio }) => (aspectRatio === null ? null : units.format(aspectRatio, 'ratio')),
+    },
+    { figure: 'mac', label: `Mean aerodynamic chord ${length}`, of: ({ mac }) => long(mac) },
+    { figure: 'xLeMac', label: `its leading edge, x ${length}`, of: ({ xLeMac }) => long(xLeMac) },
+    { figure: 'yMac', label: `and place along the span, y ${length}`, of: ({ yMac }) => long(yMac) },
   ];
 }
 
@@ -52,14 +70,21 @@ export function PlanformTable({ plan, result }: { plan: Plan; result: Estimate }
           </tr>
         </thead>
         <tbody>
-          {figuresIn(units).map(({ label, of }) => (
+          {figuresIn(units).map(({ figure, label, of }) => (
             <tr key={label}>
               <RowTh>{label}</RowTh>
-              {surfaces.map(({ key, planform }) => (
-                <Td key={key} numeric>
-                  {of(planform)}
-                </Td>
-              ))}
+              {surfaces.map(({ key, planform }) => {
+                const text = of(planform);
+                return (
+                  <Td key={key} numeric>
+                    {text === null ? (
+                      NO_VALUE
+                    ) : (
+                      <AskWhy question={{ of: 'planform', surface: key, figure }}>{text}</AskWhy>
+                    )}
+                  </Td>
+                );
+              })}
             </tr>
           ))}
         </tbody>

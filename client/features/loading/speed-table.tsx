@@ -1,10 +1,13 @@
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
+import type { Air } from '#shared/core/atmosphere.ts';
 import { formatNumber } from '#shared/format/numbers.ts';
 import type { Unit } from '#shared/units/units.ts';
 import type { SpeedAt } from './speeds.ts';
 
 interface SpeedTableProps {
+  air: Pick<Air, 'density' | 'viscosity'>;
   rows: readonly (SpeedAt & { name: string; lift: number })[];
 }
 
@@ -12,7 +15,7 @@ interface SpeedTableProps {
 const FLOWN_BY: readonly Unit[] = ['m/s', 'km/h', 'ft/s'];
 
 /** Speeds in the units that people fly by, and the Reynolds number of each. */
-export function SpeedTable({ rows }: SpeedTableProps) {
+export function SpeedTable({ rows, air: { density, viscosity } }: SpeedTableProps) {
   const units = useUnits();
   const own = units.unit('speed');
   const others = FLOWN_BY.filter((unit) => unit !== own).slice(0, 2);
@@ -37,14 +40,22 @@ export function SpeedTable({ rows }: SpeedTableProps) {
               <RowTh className="font-semibold">{name}</RowTh>
               <Td numeric>{formatNumber(lift, 2)}</Td>
               <Td numeric className="font-semibold">
-                {units.format(speed, 'speed', { bare: true })}
+                <AskWhy question={{ of: 'speed', lift, density }}>
+                  {units.format(speed, 'speed', { bare: true })}
+                </AskWhy>
               </Td>
               {others.map((unit) => (
                 <Td key={unit} numeric>
-                  {units.format(speed, 'speed', { unit, bare: true })}
+                  <AskWhy question={{ of: 'speed', lift, density }} second>
+                    {units.format(speed, 'speed', { unit, bare: true })}
+                  </AskWhy>
                 </Td>
               ))}
-              <Td numeric>{units.format(reynolds, 'reynolds')}</Td>
+              <Td numeric>
+                <AskWhy question={{ of: 'reynolds', lift, density, viscosity }}>
+                  {units.format(reynolds, 'reynolds')}
+                </AskWhy>
+              </Td>
             </tr>
           ))}
         </tbody>

@@ -1,13 +1,14 @@
+import type { ReactNode } from 'react';
 import { RowTh, Td, Tr } from '#client/components/ui/table.tsx';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
-import type { TrialRefusal, TrialResult } from '#shared/core/wood-trial.ts';
+import type { TrialFigure } from '#client/lib/why/question.ts';
+import type { Trial, TrialRefusal, TrialResult } from '#shared/core/wood-trial.ts';
 import type { Units } from '#shared/format/units.ts';
 import type { Quantity } from '#shared/units/quantities.ts';
 
-type Figure = 'wingMass' | 'bare' | 'percentMac' | 'ballast' | 'allUp' | 'wingLoading';
-
 const ROWS: readonly {
-  figure: Figure;
+  figure: TrialFigure;
   label: string;
   quantity: Quantity;
   strong?: boolean;
@@ -21,8 +22,16 @@ const ROWS: readonly {
   { figure: 'wingLoading', label: 'Wing loading', quantity: 'loading', fine: true },
 ];
 
+interface TrialFiguresProps {
+  /** as drawn first */
+  trials: readonly Trial[];
+  results: readonly TrialResult[];
+  /** where the ballast is put, mm */
+  arm: number;
+}
+
 /** What each trial comes to, and how far it is from the plan as drawn. */
-export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
+export function TrialFigures({ trials, results, arm }: TrialFiguresProps) {
   const [drawn] = results;
   const units = useUnits();
   return (
@@ -41,7 +50,9 @@ export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
                     {refusalText(result.refused, units)}
                   </span>
                 ) : (
-                  units.format(value, quantity, { fine })
+                  <Figure figure={figure} trial={trials[index]} arm={arm} there={value !== null}>
+                    {units.format(value, quantity, { fine })}
+                  </Figure>
                 )}
                 {index > 0 && value !== null && base !== null && (
                   <span className="text-note font-normal text-graphite max-sm:block sm:ml-2 sm:inline-block sm:min-w-12">
@@ -55,6 +66,19 @@ export function TrialFigures({ results }: { results: readonly TrialResult[] }) {
       ))}
     </tbody>
   );
+}
+
+interface FigureProps {
+  figure: TrialFigure;
+  trial: Trial | undefined;
+  arm: number;
+  there: boolean;
+  children: ReactNode;
+}
+
+function Figure({ figure, trial, arm, there, children }: FigureProps) {
+  if (!trial || !there) return children;
+  return <AskWhy question={{ of: 'trial', figure, trial, arm }}>{children}</AskWhy>;
 }
 
 function refusalText(refused: TrialRefusal | null, units: Units): string {

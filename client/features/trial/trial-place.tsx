@@ -57,10 +57,8 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   );
   const arm = chosenArm ?? usualArm(plan);
   const asked = useDeferredValue(trials);
-  const run = useMemo(
-    () => runTrials(plan, [{ name: 'As drawn', materials: {} }, ...asked], { arm }),
-    [plan, asked, arm],
-  );
+  const tried = useMemo(() => [{ name: 'As drawn', materials: {} }, ...asked], [asked]);
+  const run = useMemo(() => runTrials(plan, tried, { arm }), [plan, tried, arm]);
   const { headline, detail } = trialHeadline(run, units);
 
   if (groups.length === 0) {
@@ -108,7 +106,9 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
         groups={groups}
         woods={woods}
         trials={trials}
+        tried={tried}
         results={run.results}
+        arm={arm}
         onChange={change}
         onRemove={(index) => keep(trials.filter((_, i) => i !== index))}
         onUse={use}

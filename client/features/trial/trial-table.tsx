@@ -18,8 +18,11 @@ interface TrialTableProps {
   groups: readonly DrawnGroup[];
   woods: readonly TrialWood[];
   trials: readonly Trial[];
-  /** as drawn first, then one for each trial */
+  /** what the results are of: as drawn first, then one for each trial */
+  tried: readonly Trial[];
   results: readonly TrialResult[];
+  /** where the ballast is put, mm */
+  arm: number;
   onChange: (index: number, trial: Trial) => void;
   onRemove: (index: number) => void;
   onUse: (trial: Trial) => void;
@@ -28,7 +31,7 @@ interface TrialTableProps {
 
 /** Woods by group and what they come to, one trial beside the other. */
 export function TrialTable(props: TrialTableProps) {
-  const { plan, groups, woods, trials, results, onChange, onRemove, onUse, canEdit } = props;
+  const { plan, groups, woods, trials, tried, results, arm, onChange, onRemove, onUse, canEdit } = props;
   const units = useUnits();
   const columns = (cell: (trial: Trial, index: number) => ReactNode) =>
     trials.map((trial, index) => (
@@ -84,7 +87,7 @@ export function TrialTable(props: TrialTableProps) {
           </tr>
         ))}
       </tbody>
-      <TrialFigures results={results} />
+      <TrialFigures trials={tried} results={results} arm={arm} />
       <tbody>
         <Tr>
           <RowTh className="sticky left-0 z-1 border-b-0 bg-sheet">

@@ -1,4 +1,5 @@
 import { useId } from 'react';
+import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { cn } from '#client/lib/cn.ts';
@@ -18,13 +19,15 @@ interface CaseTableProps {
   /** least margin and rise of the tip, mm, at a load factor */
   marginAt: (n: number) => number | null;
   riseAt: (n: number) => number | null;
+  /** station with the least margin, mm */
+  worst: number;
 }
 
 const LOAD_FACTOR_MAX = 100;
 
 /** Ways of loading the wing side by side; the one picked is drawn. */
 export function CaseTable(props: CaseTableProps) {
-  const { rows, shown, onShown, onSpeed, stated, onStated, marginAt, riseAt } = props;
+  const { rows, shown, onShown, onSpeed, stated, onStated, marginAt, riseAt, worst } = props;
   const units = useUnits();
   const group = useId();
   return (
@@ -99,7 +102,13 @@ export function CaseTable(props: CaseTableProps) {
                 )}
               </Td>
               <Td numeric className="font-semibold">
-                <Margin margin={margin} />
+                {loadFactor === null || margin === null ? (
+                  <Margin margin={margin} />
+                ) : (
+                  <AskWhy question={{ of: 'spar', station: worst, loadFactor }}>
+                    <Margin margin={margin} />
+                  </AskWhy>
+                )}
               </Td>
               <Td numeric>
                 {units.format(loadFactor === null ? null : riseAt(loadFactor), 'length', { bare: true })}

@@ -132,6 +132,7 @@ function Reckoned({ workspace, plan, wing, drawingHref }: SparSectionProps) {
                 : null
             }
             marginAt={(n) => (atStrength === null ? null : atStrength / n)}
+            worst={worst.s}
             riseAt={(n) => (bend === null ? null : bend.tip * n)}
           />
           <Cautions stall={result.speeds.stall} bend={bend} rise={rise} span={wingSpan(result, wing)} />

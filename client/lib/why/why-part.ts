@@ -18,6 +18,8 @@ import type { Units } from '#shared/format/units.ts';
 export interface Making {
   /** `25.94 cm³` or `319.3 cm²`, null where the mass comes another way */
   measure: string | null;
+  /** what the mass is, where it is no measure times a figure of its material */
+  product?: string;
   /** how the measure comes about */
   steps: string[];
 }
@@ -43,7 +45,7 @@ const pieces = (count: number, one: string, many: string) => `${count} ${count =
 /** How a part of a surface measures up. */
 export function makingOfPart(plan: Plan, surface: Surface, part: Part, line: Line, units: Units): Making {
   const say = sayIn(units);
-  if (part.kind === 'glue') return { measure: null, steps: glueSteps(plan, part, line, say) };
+  if (part.kind === 'glue') return makingOfGlue(plan, part, line, say);
   return { measure: measureOf(line, say), steps: partSteps(surface, part, line, say) };
 }
 
@@ -94,19 +96,23 @@ function partSteps(surface: Surface, part: Exclude<Part, Glue>, line: Line, say:
   }
 }
 
-function glueSteps(plan: Plan, part: Glue, line: Line, { units, area }: Say): string[] {
+function makingOfGlue(plan: Plan, part: Glue, line: Line, { units, area }: Say): Making {
   if (part.method === 'share') {
     const wood = part.share ? line.mass / part.share : 0;
-    return [
-      `${formatQuantity(part.share ?? 0, 'fineShare')} of the ${units.format(wood, 'mass')} of wood in this surface, placed at the wood's centre of mass.`,
-    ];
+    return {
+      measure: null,
+      product: `${formatQuantity(part.share ?? 0, 'fineShare')} of ${units.format(wood, 'mass', { fine: true })} of wood`,
+      steps: ["A share of this surface's wood, placed at the wood's centre of mass."],
+    };
   }
   const spread = plan.materials[part.material]?.spread ?? 0;
   const layers = part.layers ?? 1;
   const one = gramsOfArea(1, spread * layers);
-  return [
-    `${area(one > 0 ? line.mass / one : 0)} of joints × ${units.format(spread, 'spread')}${layers === 1 ? '' : ` × ${formatNumber(layers, Number.isInteger(layers) ? 0 : 1)} layers`}: ribs on strips, sheeting on ribs and strips, tips on the last section.`,
-  ];
+  return {
+    measure: null,
+    product: `${area(one > 0 ? line.mass / one : 0)} of joints × ${units.format(spread, 'spread')}${layers === 1 ? '' : ` × ${formatNumber(layers, Number.isInteger(layers) ? 0 : 1)} layers`}`,
+    steps: ['Joints: ribs on strips, sheeting on ribs and strips, tips on the last section.'],
+  };
 }
 
 /** How a stick, block or plate outside the surfaces measures up. */

@@ -1,6 +1,18 @@
-import { infiniteQueryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import {
+  infiniteQueryOptions,
+  useMutation,
+  useQueryClient,
+  type InfiniteData,
+  type QueryClient,
+} from '@tanstack/react-query';
 import { request } from '#client/lib/api.ts';
-import { gliderCopies, gliderList, gliderSummary, type GliderSummaryDto } from '#shared/schemas/glider.ts';
+import {
+  gliderCopies,
+  gliderList,
+  gliderSummary,
+  type GliderListDto,
+  type GliderSummaryDto,
+} from '#shared/schemas/glider.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import type { BenchView } from './bench-view.ts';
 
@@ -24,8 +36,42 @@ export function benchQuery(view: BenchView) {
     },
     initialPageParam: null as string | null,
     getNextPageParam: ({ nextCursor }) => nextCursor,
+    // Pages stay the objects that they are; comparing thousands of outlines point by point would take its time.
+    structuralSharing: false,
     select: ({ pages }) => pages.flatMap(({ gliders }) => gliders),
   });
+}
+
+type Pages = InfiniteData<GliderListDto, string | null>;
+/** More pages than this are not all asked for again; the list begins anew at its top. */
+const REFRESHED = 4;
+
+/** Asks for what is shown anew, because something has come to it. */
+function refreshLists(client: QueryClient): Promise<void> {
+  client.setQueriesData<Pages>({ queryKey: LIST }, (list) =>
+    list && list.pages.length > REFRESHED
+      ? { pages: list.pages.slice(0, 1), pageParams: list.pageParams.slice(0, 1) }
+      : list,
+  );
+  return client.invalidateQueries({ queryKey: LIST });
+}
+
+/** Takes gliders out of what is shown; of a long list nothing has to be asked for again. */
+export function dropFromLists(client: QueryClient, ids: readonly string[]): void {
+  const gone = new Set(ids);
+  client.setQueriesData<Pages>(
+    { queryKey: LIST },
+    (list) =>
+      list && {
+        ...list,
+        pages: list.pages.map((page) => ({
+          ...page,
+          gliders: page.gliders.filter(({ id }) => !gone.has(id)),
+        })),
+      },
+  );
+  // Other views are asked for when they are looked at.
+  void client.invalidateQueries({ queryKey: LIST, refetchType: 'none' });
 }
 
 interface CopyWish {
@@ -51,7 +97,7 @@ export function useCopyGliders() {
       }
       return copies;
     },
-    onSettled: () => client.invalidateQueries({ queryKey: LIST }),
+    onSettled: () => refreshLists(client),
   });
 }
 
@@ -70,8 +116,8 @@ export function useArchiveGliders() {
           method: 'PUT',
           body: { archived },
         });
+        dropFromLists(client, [id]);
       }
     },
-    onSettled: () => client.invalidateQueries({ queryKey: LIST }),
   });
 }

@@ -48,7 +48,7 @@ export function BenchTable({ gliders, view, onView, selected, onSelected, ...lin
     </SortHeading>
   );
   return (
-    <Table caption="Gliders on the bench">
+    <Table caption="Gliders on the bench" className="table-fixed">
       <thead className={selected === null ? 'max-sm:sr-only' : undefined}>
         <tr>
           {selected !== null && (
@@ -68,19 +68,19 @@ export function BenchTable({ gliders, view, onView, selected, onSelected, ...lin
           <SortTh view={view} sort="name">
             {heading('name', 'Glider')}
           </SortTh>
-          <SortTh numeric view={view} sort="mass" className="max-sm:sr-only">
+          <SortTh numeric view={view} sort="mass" className="w-28 max-sm:sr-only">
             {heading('mass', 'Mass')}
           </SortTh>
-          <Th numeric className="max-sm:sr-only">
+          <Th numeric className="w-32 max-sm:sr-only">
             Balance
           </Th>
-          <Th numeric className="max-sm:sr-only">
+          <Th numeric className="w-32 max-sm:sr-only">
             Wing loading
           </Th>
-          <SortTh numeric view={view} sort="changed" className="max-sm:sr-only">
+          <SortTh numeric view={view} sort="changed" className="w-40 max-sm:sr-only">
             {heading('changed', 'Last change')}
           </SortTh>
-          <Th className="max-sm:sr-only">
+          <Th className="w-14 max-sm:sr-only">
             <span className="sr-only">Actions</span>
           </Th>
         </tr>

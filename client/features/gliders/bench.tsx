@@ -39,8 +39,9 @@ export function Bench({ onOpen, ...links }: BenchProps) {
     setParams(paramsOf(next), { replace: true });
   };
   const usual = view.archived === 'no' && view.search === '' && search === '';
-  const nothingYet = usual && query.data?.length === 0;
   const { hasNextPage, isFetchingNextPage, fetchNextPage } = query;
+  const isEmpty = (gliders: readonly GliderSummaryDto[]) => gliders.length === 0 && !hasNextPage;
+  const nothingYet = usual && query.data !== undefined && isEmpty(query.data);
 
   return (
     <>
@@ -63,7 +64,7 @@ export function Bench({ onOpen, ...links }: BenchProps) {
       <div className="mt-6" aria-busy={query.isPlaceholderData}>
         <QueryView
           query={query}
-          isEmpty={(gliders) => gliders.length === 0}
+          isEmpty={isEmpty}
           empty={nothingYet ? <EmptyBench onOpen={onOpen} /> : <NothingFound view={view} />}
         >
           {(gliders) => (

@@ -2,6 +2,7 @@ import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { command, request } from '#client/lib/api.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { glider, type GliderDto } from '#shared/schemas/glider.ts';
+import { dropFromLists } from './bench-queries.ts';
 import { gliderQueries } from './queries.ts';
 
 /** Saves a plan over that version; a newer one on the server refuses it with 412. */
@@ -39,6 +40,9 @@ export function useDeleteGlider() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (id: string) => command(`/gliders/${encodeURIComponent(id)}`, { method: 'DELETE' }),
-    onSuccess: () => client.invalidateQueries({ queryKey: gliderQueries.all }),
+    onSuccess: (_, id) => {
+      dropFromLists(client, [id]);
+      client.removeQueries({ queryKey: gliderQueries.detail(id).queryKey });
+    },
   });
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { presetOf, UNIT_ROWS, unitIn, withUnit } from '#client/features/account/unit-list.ts';
-import { INCH_CHOICES, unitsOf, type ChosenUnits } from '#shared/format/units.ts';
+import { INCH_CHOICES, unitsOf } from '#shared/format/units.ts';
 import { unitChoices } from '#shared/schemas/preferences.ts';
 import { QUANTITIES } from '#shared/units/quantities.ts';
 
@@ -30,7 +30,7 @@ describe('the units that a reader chooses', () => {
   it('show another figure in each unit of a quantity', () => {
     for (const { quantity, example } of UNIT_ROWS) {
       const shown = QUANTITIES[quantity].units.map((unit) =>
-        unitsOf({ [quantity]: unit } as ChosenUnits).format(example, quantity),
+        unitsOf({ [quantity]: unit }).format(example, quantity),
       );
       expect(new Set(shown).size, quantity).toBe(shown.length);
     }

@@ -9,33 +9,50 @@ export interface Served {
   /** address of the served product */
   baseUrl: string;
   stop: () => Promise<void>;
+  /** ends the server as a power cut would, in the middle of whatever it does; the database goes on */
+  kill: () => Promise<void>;
+  /** starts it again at the same address */
+  restart: () => Promise<void>;
 }
 
 /** The product as `npm start` serves it: real server, real PostgreSQL of its own, built client, demo scenario. */
 export async function serve(): Promise<Served> {
   const cluster = await startCluster({ throwaway: true });
-  const server = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+  let server = launch(cluster.url(), '0');
+  const stop = async () => {
+    await end(server, 'SIGTERM');
+    await cluster.stop();
+  };
+  try {
+    const baseUrl = await addressOf(server);
+    return {
+      baseUrl,
+      stop,
+      kill: () => end(server, 'SIGKILL'),
+      restart: async () => {
+        server = launch(cluster.url(), new URL(baseUrl).port);
+        await addressOf(server);
+      },
+    };
+  } catch (error) {
+    await stop();
+    throw error;
+  }
+}
+
+function launch(databaseUrl: string, port: string): ChildProcess {
+  return spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
     cwd: ROOT,
     env: {
       ...process.env,
-      DATABASE_URL: cluster.url(),
-      PORT: '0',
+      DATABASE_URL: databaseUrl,
+      PORT: port,
       NODE_ENV: 'production',
       LOG_LEVEL: 'error',
       FEATHERBEAM_RATE_LIMIT_SCALE: '1000',
     },
     stdio: ['ignore', 'pipe', 'inherit'],
   });
-  const stop = async () => {
-    await end(server);
-    await cluster.stop();
-  };
-  try {
-    return { baseUrl: await addressOf(server), stop };
-  } catch (error) {
-    await stop();
-    throw error;
-  }
 }
 
 function addressOf(server: ChildProcess): Promise<string> {
@@ -56,9 +73,9 @@ function addressOf(server: ChildProcess): Promise<string> {
   });
 }
 
-async function end(server: ChildProcess): Promise<void> {
-  if (server.exitCode !== null) return;
+async function end(server: ChildProcess, signal: NodeJS.Signals): Promise<void> {
+  if (server.exitCode !== null || server.signalCode !== null) return;
   const ended = new Promise((resolve) => server.once('exit', resolve));
-  server.kill('SIGTERM');
+  server.kill(signal);
   await ended;
 }

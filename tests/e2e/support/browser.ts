@@ -28,8 +28,8 @@ export interface Visit {
 /** A fresh visitor: own cookies, own storage. */
 export async function visit(browser: Browser, options: BrowserContextOptions = DESKTOP): Promise<Visit> {
   const context = await browser.newContext({
-    ...options,
     baseURL: inject('baseUrl'),
+    ...options,
     reducedMotion: 'reduce',
   });
   const page = await context.newPage();

@@ -1,3 +1,5 @@
+import { isAlike, isBranch } from './alike.ts';
+
 /** A value as it can be told in one line. */
 export type ChangeValue = number | string | boolean | number[] | null;
 
@@ -69,19 +71,8 @@ export function fieldChanges(
 /** Plates are told by their thickness. */
 const sectionUnit = (one: unknown, other: unknown) => (isPlate(one) && isPlate(other) ? 'mm' : undefined);
 
-const isBranch = (value: unknown): value is Record<string, unknown> =>
-  typeof value === 'object' && value !== null;
-
 const isPlate = (value: unknown): value is { flat: number } =>
   isBranch(value) && Object.hasOwn(value, 'flat');
-
-function isAlike(one: unknown, other: unknown): boolean {
-  if (!isBranch(one) || !isBranch(other)) return Object.is(one, other) || (one === 0 && other === 0);
-  const keys = new Set([...Object.keys(one), ...Object.keys(other)]);
-  return (
-    Array.isArray(one) === Array.isArray(other) && [...keys].every((key) => isAlike(one[key], other[key]))
-  );
-}
 
 function valueOf(value: unknown): ChangeValue {
   switch (typeof value) {

@@ -24,10 +24,11 @@ export function Headline({ groups, materials }: HeadlineProps) {
     return (
       <header>
         <h1 className="text-figure font-semibold">
-          Saved by {newest.savedBy}, {formatMoment(newest.savedAt)}
+          {newest.version === 1 ? 'As it was made' : 'Last saved'}, {formatMoment(newest.savedAt)}
         </h1>
         <p className="mt-1 text-graphite">
-          Every edit from here on is listed with who made it, when, and what it did to mass and balance.
+          By {newest.savedBy}. Every edit from here on is listed with who made it, when, and what it did to
+          mass and balance.
         </p>
       </header>
     );

@@ -24,7 +24,11 @@ export function useStood(gliderId: string, side: Side, workspace: Workspace): St
     (): Stood | undefined => (plan ? { plan, result: own ?? estimate(plan) } : undefined),
     [plan, own],
   );
-  if (side === 'now')
-    return { data, error: null, isPending: data === undefined, refetch: query.refetch } as StoodQuery;
+  if (side === 'now') {
+    const error = data
+      ? null
+      : new Error('What lies on the desk has to be mended before it can be compared.');
+    return { data, error, isPending: false, refetch: query.refetch } as StoodQuery;
+  }
   return { data, error: query.error, isPending: query.isPending, refetch: query.refetch } as StoodQuery;
 }

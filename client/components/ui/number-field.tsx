@@ -98,7 +98,7 @@ export function NumberField(props: NumberFieldProps) {
           }
           autoComplete="off"
           spellCheck={false}
-          title={NUMBER_HELP}
+          title={props.readOnly || props.disabled ? undefined : NUMBER_HELP}
           value={text}
           disabled={props.disabled}
           readOnly={props.readOnly}

@@ -35,7 +35,7 @@ describe('changes in words', () => {
   it('follow the reader to inches, in fractions where stock is one', () => {
     const inches = unitsOf(INCH_CHOICES);
     expect(told((p) => Object.assign(ribs(p), { thickness: 3.175 }), inches)).toMatch(
-      /thickness 0\.0787 → 1\/8 in$/,
+      /thickness 0\.079 → 1\/8 in$/,
     );
   });
 

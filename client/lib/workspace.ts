@@ -5,6 +5,12 @@ import type { GliderDto } from '#shared/schemas/glider.ts';
 /** `unsaved`: waits for its turn or for a cure; `offline`: will be sent when the connection is back. */
 export type SaveState = 'saved' | 'saving' | 'unsaved' | 'offline' | 'conflict' | 'invalid';
 
+/**
+ * A change whose name begins so is made while something is held, such as a drag: all changes of that name are one
+ * step back, however long they take. Each hold needs a name of its own.
+ */
+export const HELD = 'hold ';
+
 /** The open glider: the live plan, what it works out to, and how to change it. Every place of a glider gets it. */
 export interface Workspace {
   plan: Plan;

@@ -3,10 +3,11 @@ import { pointOf, type Station, type SurfaceLine } from '#shared/core/stations.t
 import type { Point } from './shape.ts';
 
 /**
- * How a point of a surface is seen. `above`: x aft, y to starboard. `side`: x aft, z up. `board`: x aft, s along
- * the panels as they are laid on the board, so that nothing is foreshortened. The port half has −y and −s.
+ * How a point of a surface is seen. `above`: x aft, y to starboard. `side`: x aft, z up. `front`: from ahead, −y, so
+ * that starboard lies to the left, and z up. `board`: x aft, s along the panels as they are laid on the board, so
+ * that nothing is foreshortened. The port half has −y and −s.
  */
-export type FrameName = 'above' | 'side' | 'board';
+export type FrameName = 'above' | 'side' | 'front' | 'board';
 export type SideName = 'starboard' | 'port';
 
 /**
@@ -28,6 +29,11 @@ export function frameOf(name: FrameName, side: SideName = 'starboard'): Frame {
         const [bodyX, , bodyZ] = pointOf(station, x, z);
         return [bodyX, bodyZ + beyond * station.panel.sin];
       };
+    case 'front':
+      return (station, x, z = 0, beyond = 0) => {
+        const [, y, bodyZ] = pointOf(station, x, z);
+        return [-sign * (y + beyond * station.panel.cos), bodyZ + beyond * station.panel.sin];
+      };
     case 'board':
       return (station, x, _z, beyond = 0) => [station.leadingEdge + x, sign * (station.s + beyond)];
   }
@@ -36,9 +42,12 @@ export function frameOf(name: FrameName, side: SideName = 'starboard'): Frame {
 /** Least foreshortening at which a surface's parts are still worth drawing. */
 const EDGE_ON = 0.3;
 
-/** True where a view meets a surface so flatly that only its sections are to be seen, as a fin from above. */
+/**
+ * True where a view meets a surface so flatly that only its sections are to be seen, as a fin from above. From ahead
+ * every surface is seen by its thickness.
+ */
 export function isEdgeOn(name: FrameName, line: SurfaceLine): boolean {
-  if (name === 'board' || line.length <= 0) return false;
+  if (name === 'board' || name === 'front' || line.length <= 0) return false;
   const seen = line.panels.reduce(
     (sum, panel) => sum + (panel.end - panel.start) * Math.abs(name === 'above' ? panel.cos : panel.sin),
     0,

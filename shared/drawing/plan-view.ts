@@ -19,6 +19,11 @@ export function sideView(plan: Plan): Shape[] {
   return modelShapes(plan, 'side', ['starboard']);
 }
 
+/** The whole model from ahead, mm: −y, so that starboard lies to the left, and z up. Lowest first. */
+export function frontView(plan: Plan): Shape[] {
+  return modelShapes(plan, 'front', undefined);
+}
+
 /** Solids lie under the surfaces from above and over them from the side; items lie on top of all. */
 function modelShapes(plan: Plan, view: ModelView, sides: readonly SideName[] | undefined): Shape[] {
   const surfaces = plan.surfaces.flatMap((surface) =>

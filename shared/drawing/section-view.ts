@@ -1,13 +1,11 @@
-import { covers, ribExtent, type Half } from '#shared/core/half.ts';
-import type { Part, Plan, Ribs, Strip, Surface } from '#shared/core/plan.ts';
+import type { Half } from '#shared/core/half.ts';
+import type { Plan, Surface, TipBlock } from '#shared/core/plan.ts';
 import { heightAt } from '#shared/core/section-integrals.ts';
-import { polygonIntegrals } from '#shared/core/polygon.ts';
 import { stationAt, type Station } from '#shared/core/stations.ts';
-import { contourOf, sliceOf } from './contour.ts';
+import { contourOf } from './contour.ts';
 import type { SideName } from './frames.ts';
-import { bandUnder, contourLines, depthOf } from './section-skins.ts';
-import { rectangle, sanded, stripSection } from './section-strips.ts';
-import { webPieces } from './section-web.ts';
+import { sectionOf } from './section-parts.ts';
+import { tipContour, tipShare } from './section-tip.ts';
 import { shapeMaterial, type Point, type Shape, type ShapeKind } from './shape.ts';
 import { layOut } from './surface-view.ts';
 
@@ -15,6 +13,8 @@ import { layOut } from './surface-view.ts';
 export interface SectionView {
   s: number;
   chord: number;
+  /** where the chord begins, mm behind the leading edge; only a tip block's lies elsewhere than there */
+  front: number;
   /** greatest thickness, mm, and where it lies, x/c */
   thickness: number;
   thicknessAt: number;
@@ -47,7 +47,10 @@ export function sectionView(
   side: SideName = 'starboard',
 ): SectionView {
   const half = layOut(surface, side);
-  const station = stationAt(half.line, Math.min(half.line.length, Math.max(0, s)));
+  const { length } = half.line;
+  const tip = tipBlockOf(half);
+  if (tip && s > length) return tipView(half, tip, Math.min(s - length, tip.length), materials);
+  const station = stationAt(half.line, Math.min(length, Math.max(0, s)));
   const rib = half.ribs.find(({ part, stations }) =>
     stations.some((r) => Math.abs(r.s - station.s) <= part.thickness / 2 + 1e-6),
   )?.part;
@@ -59,94 +62,55 @@ export function sectionView(
       return { line, material, closed: true, hidden: false, ...drawn };
     }),
   );
-  const outline: Shape = {
-    kind: 'outline',
-    line: null,
-    points: contourOf(station),
-    closed: true,
-    material: null,
-    hidden: false,
-  };
-  const layered = [...shapes, outline].sort((a, b) => LAYERS.indexOf(a.kind) - LAYERS.indexOf(b.kind));
+  const layered = [...shapes, outlineOf(contourOf(station))].sort(
+    (a, b) => LAYERS.indexOf(a.kind) - LAYERS.indexOf(b.kind),
+  );
   return {
     s: station.s,
     chord: station.chord,
+    front: 0,
     ...greatestThickness(station),
     rib: rib ? `${surface.key}/${rib.id}` : null,
     shapes: layered,
   };
 }
 
-type Drawn = Pick<Shape, 'kind' | 'points'> & Partial<Shape>;
+const outlineOf = (points: Point[]): Shape => ({
+  kind: 'outline',
+  line: null,
+  points,
+  closed: true,
+  material: null,
+  hidden: false,
+});
 
-function sectionOf(half: Half, part: Part, station: Station, rib: Ribs | undefined): Drawn[] {
-  const { chord, s } = station;
-  if (chord <= 0) return [];
-  switch (part.kind) {
-    case 'ribs':
-      return part === rib ? ribSection(half, part, station) : [];
-    case 'strip':
-      return covers(part, s) ? stripShapes(half, part, station, rib !== undefined) : [];
-    case 'skin': {
-      if (!covers(part, s)) return [];
-      const depth = depthOf(half, part, s);
-      const bands = contourLines(part, station).map((line) => bandUnder(line, depth, part.thickness));
-      return bands.map((points) => ({ kind: 'skin', points }));
-    }
-    case 'capStrips': {
-      if (!rib || !covers(part, s)) return [];
-      const bands = contourLines(part, station).map((line) => bandUnder(line, 0, part.thickness));
-      return bands.map((points) => ({ kind: 'capStrips', points }));
-    }
-    case 'web':
-      if (!covers(part, s)) return [];
-      // A rib takes the web's room; what is seen is the web of the next bay behind it.
-      return webPieces(half, part, station).map((points) => ({
-        kind: 'web',
-        points,
-        hidden: rib !== undefined,
-      }));
-    case 'covering':
-    case 'finish':
-      if (!covers(part, s)) return [];
-      return contourLines(part, station).map((points) => ({ kind: part.kind, points, closed: false }));
-    case 'sheet':
-      return [{ kind: 'sheet', points: rectangle(0, chord, -part.thickness / 2, part.thickness / 2) }];
-    case 'tipBlock':
-    case 'glue':
-      return [];
-  }
+/** The longest tip block of a half: what is cut beyond the last station. */
+function tipBlockOf(half: Half): TipBlock | undefined {
+  const tips = half.parts.filter((part) => part.kind === 'tipBlock');
+  return tips.reduce<TipBlock | undefined>((a, b) => (a && a.length >= b.length ? a : b), undefined);
 }
 
-/** The rib before skins and notches are taken off, and a dashed hint of what lightening takes out. */
-function ribSection(half: Half, part: Ribs, station: Station): Drawn[] {
-  const [from, to] = ribExtent(half, station);
-  const points = sliceOf(station, from, to);
-  const { centroid } = polygonIntegrals(points);
-  if (part.lightening <= 0 || !centroid) return [{ kind: 'ribs', points }];
-  const size = Math.sqrt(part.lightening);
-  const shrunk = points.map(([x, z]): Point => [
-    centroid[0] + size * (x - centroid[0]),
-    centroid[1] + size * (z - centroid[1]),
-  ]);
-  return [
-    { kind: 'ribs', points },
-    { kind: 'lightening', points: shrunk, hidden: true },
-  ];
-}
-
-function stripShapes(half: Half, strip: Strip, station: Station, onRib: boolean): Drawn[] {
-  const section = stripSection(half, strip, station);
-  const { place, z, points, hole } = section;
-  if (strip.seat === 'nose' || strip.seat === 'tail') {
-    const left = sanded(strip, section, station);
-    const stock: Drawn = { kind: 'stock', points, hidden: true };
-    return left.length > 2 ? [{ kind: 'strip', points: left }, stock] : [stock];
-  }
-  const own: Drawn = { kind: 'strip', points, ...(hole && { hole }) };
-  if (!strip.letIn || !onRib) return [own];
-  const notch = rectangle(place.front, place.back, z - place.height / 2, z + place.height / 2);
-  return [{ kind: 'notch', points: notch }, own];
+/** A tip block cut `beyond` mm outside the last station. */
+function tipView(half: Half, tip: TipBlock, beyond: number, materials: Plan['materials']): SectionView {
+  const last = stationAt(half.line, half.line.length);
+  const share = tipShare(beyond, tip.length);
+  const points = tipContour(last, share);
+  const full = greatestThickness(last);
+  const block: Shape = {
+    ...outlineOf(points),
+    kind: 'tipBlock',
+    line: `${half.surface.key}/${tip.id}`,
+    material: shapeMaterial(materials, tip.material),
+  };
+  return {
+    s: last.s + beyond,
+    chord: last.chord * share,
+    front: Math.min(...points.map(([x]) => x)),
+    thickness: full.thickness * share,
+    thicknessAt: full.thicknessAt,
+    rib: null,
+    shapes: share > 0 ? [block, outlineOf(points)] : [],
+  };
 }
 
 function greatestThickness({ section, chord }: Station): { thickness: number; thicknessAt: number } {

@@ -2,6 +2,7 @@ import { halfOf, type Half } from '#shared/core/half.ts';
 import type { Plan, Surface } from '#shared/core/plan.ts';
 import { stationAt, surfaceLine, type SurfaceLine } from '#shared/core/stations.ts';
 import { frameOf, isEdgeOn, sidesOf, type FrameName, type SideName } from './frames.ts';
+import { frontShapes } from './front-view.ts';
 import { halfOutline, tipLength } from './outline.ts';
 import { contourOf } from './contour.ts';
 import type { Shape, ShapeKind } from './shape.ts';
@@ -37,6 +38,7 @@ export function surfaceShapes(
   const line = surfaceLine(surface);
   const edgeOn = isEdgeOn(name, line);
   const shapes = sides.flatMap((side) => {
+    if (name === 'front') return frontShapes(line, tipLength(surface, side), side);
     if (edgeOn) return sectionsOf(line, name, side);
     const half = layOut(surface, side, line);
     const frame = frameOf(name, side);

@@ -24,7 +24,7 @@ export interface Zoom {
   panY: number;
 }
 export const FITTED: Zoom = { factor: 1, panX: 0, panY: 0 };
-const ZOOM_STEP = 1.4;
+export const ZOOM_STEP = 1.4;
 const ZOOM_LIMITS = { min: 1, max: 24 } as const;
 
 /** CSS px of one mm on paper: a CSS inch has 96 px (CSS Values and Units, 5.2) and 25.4 mm. */
@@ -54,8 +54,16 @@ interface Paper {
   factor?: number;
 }
 
+/** A drawing on its paper: how it lies, how large the paper is and where its middle is, px. */
+export interface Laid {
+  sheet: Sheet;
+  width: number;
+  height: number;
+  middle: Point;
+}
+
 /** Lays bounds on paper of a given width, as large as fits, centred; zoomed about the middle of the paper. */
-export function layOnPaper(bounds: Bounds, paper: Paper): { sheet: Sheet; width: number; height: number } {
+export function layOnPaper(bounds: Bounds, paper: Paper): Laid {
   const { axes, width, margins, maxHeight, minHeight, maxScale = Infinity, factor = 1 } = paper;
   const size = [bounds.max[0] - bounds.min[0], bounds.max[1] - bounds.min[1]] as const;
   const [across, down] = axes === 'plan' ? [size[1], size[0]] : [size[0], size[1]];
@@ -71,15 +79,40 @@ export function layOnPaper(bounds: Bounds, paper: Paper): { sheet: Sheet; width:
     sheet: { scale, originX: middle[0] - away[0], originY: middle[1] - away[1], axes },
     width,
     height,
+    middle,
   };
 }
 
-export function zoomed(zoom: Zoom, direction: 1 | -1): Zoom {
-  const wanted = zoom.factor * (direction === 1 ? ZOOM_STEP : 1 / ZOOM_STEP);
-  const factor = Math.min(ZOOM_LIMITS.max, Math.max(ZOOM_LIMITS.min, wanted));
+/** The view larger or smaller, with the place `at` (px) staying where it is; `middle` is that of the paper. */
+export function zoomedAt(zoom: Zoom, by: number, at: Point, middle: Point): Zoom {
+  const factor = Math.min(ZOOM_LIMITS.max, Math.max(ZOOM_LIMITS.min, zoom.factor * by));
   if (factor < 1.01) return FITTED;
-  const by = factor / zoom.factor;
-  return { factor, panX: zoom.panX * by, panY: zoom.panY * by };
+  const grown = factor / zoom.factor;
+  const pan = (place: number, centre: number, before: number) =>
+    place - centre - (place - centre - before) * grown;
+  return { factor, panX: pan(at[0], middle[0], zoom.panX), panY: pan(at[1], middle[1], zoom.panY) };
+}
+
+/** The least of a drawing that stays in sight however it is pushed, px. */
+const IN_SIGHT = 60;
+
+/** The view pushed aside, but never out of sight; `paper` is that of the present view. */
+export function panned(zoom: Zoom, dx: number, dy: number, bounds: Bounds, paper: Laid): Zoom {
+  const [a, b] = [toPx(paper.sheet, bounds.min), toPx(paper.sheet, bounds.max)];
+  const within = (value: number, low: number, high: number) => Math.max(low, Math.min(high, value));
+  return {
+    factor: zoom.factor,
+    panX: within(
+      zoom.panX + dx,
+      IN_SIGHT - Math.max(a[0], b[0]),
+      paper.width - IN_SIGHT - Math.min(a[0], b[0]),
+    ),
+    panY: within(
+      zoom.panY + dy,
+      IN_SIGHT - Math.max(a[1], b[1]),
+      paper.height - IN_SIGHT - Math.min(a[1], b[1]),
+    ),
+  };
 }
 
 /** `1 : 3.2` or `2.5 : 1`, true on a screen with CSS px of their nominal size. */

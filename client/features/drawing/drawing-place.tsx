@@ -1,4 +1,4 @@
-import { useMemo, useRef, useState } from 'react';
+import { lazy, Suspense, useMemo, useRef, useState } from 'react';
 import { useToast } from '#client/components/ui/toast.tsx';
 import { useMedia } from '#client/hooks/use-media.ts';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
@@ -18,7 +18,12 @@ import { SurfacePane } from './lists/surface-pane.tsx';
 import { useMaterialTable } from '#client/hooks/use-material-table.ts';
 import { NoticesList } from './notices-list.tsx';
 import { Views } from './views.tsx';
+import { useLooking } from './use-looking.ts';
 import { usePlace } from './use-place.ts';
+
+const PrintDialog = lazy(async () => ({
+  default: (await import('./print/print-dialog.tsx')).PrintDialog,
+}));
 
 /** The plan as it is drawn: what it is made of on the left, the drawing that follows every letter on the right. */
 export function DrawingPlace({ workspace }: { workspace: Workspace }) {
@@ -97,8 +102,12 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
       </Fold>
     </div>
   );
+  const looking = useLooking();
+  const [printing, setPrinting] = useState(false);
   const views = (
     <Views
+      looking={looking}
+      onPrint={() => setPrinting(true)}
       plan={valid}
       stale={valid !== plan}
       result={result}
@@ -107,6 +116,8 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
       onStation={setStation}
       picked={selected}
       onPick={select}
+      edit={canEdit ? edit : null}
+      undo={undo}
       hover={hover}
       narrow={narrow}
     />
@@ -134,6 +145,18 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
             </div>
           </div>
         </div>
+      )}
+      {printing && valid && (
+        <Suspense>
+          <PrintDialog
+            plan={valid}
+            surface={tab.kind === 'surface' ? (valid.surfaces[tab.index] ?? null) : null}
+            station={station}
+            looking={looking}
+            balance={result.balance.x}
+            onClose={() => setPrinting(false)}
+          />
+        </Suspense>
       )}
     </div>
   );

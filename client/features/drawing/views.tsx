@@ -1,12 +1,14 @@
-import { useCallback, useEffect, useRef, useState } from 'react';
+import { useMemo } from 'react';
+import type { Workspace } from '#client/lib/workspace.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
-import type { SideName } from '#shared/drawing/frames.ts';
 import type { Tab } from './edits/line-id.ts';
-import type { PlanViewName } from './figure/drawings.ts';
-import { PlanFigure } from './figure/plan-figure.tsx';
+import { PlanFigure, type Grip } from './figure/plan-figure.tsx';
 import { SectionFigure } from './figure/section-figure.tsx';
+import { handlesOf } from './handles/handles-of.ts';
 import type { Hover } from './hover.ts';
+import { useLatest } from './use-latest.ts';
+import { cutAt, type Looking } from './use-looking.ts';
 import { useViewportHeight } from './use-viewport-height.ts';
 
 interface ViewsProps {
@@ -18,8 +20,13 @@ interface ViewsProps {
   tab: Tab;
   station: number;
   onStation: (s: number) => void;
+  looking: Looking;
+  onPrint: () => void;
   picked: string | null;
   onPick: (line: string | null) => void;
+  /** null for a reader */
+  edit: Workspace['edit'] | null;
+  undo: () => void;
   hover: Hover;
   narrow: boolean;
 }
@@ -29,11 +36,21 @@ const within = (low: number, value: number, high: number) => Math.max(low, Math.
 /** Plan and section of what is at hand. */
 export function Views(props: ViewsProps) {
   const { plan, stale, result, tab, station, picked, hover, narrow } = props;
-  const [view, setView] = useState<PlanViewName>('half');
-  const [side, setSide] = useState<SideName>('starboard');
+  const { view, setView, side, setSide, measuring, setMeasuring } = props.looking;
   const height = useViewportHeight();
   const onPick = useLatest((line: string) => props.onPick(line));
   const onStation = useLatest((s: number) => props.onStation(s));
+  const onPrint = useLatest(() => props.onPrint());
+  const edit = useLatest<Workspace['edit']>((recipe, what) => props.edit?.(recipe, what));
+  const undo = useLatest(() => props.undo());
+  const index = tab.kind === 'surface' ? tab.index : -1;
+  const surface = plan?.surfaces[index] ?? null;
+  const editable = props.edit !== null && !stale;
+  const grip = useMemo(
+    (): Grip | null =>
+      surface && editable ? { handles: handlesOf(surface, index, picked), edit, undo } : null,
+    [surface, editable, index, picked, edit, undo],
+  );
   if (!plan) {
     return (
       <p className="py-6 text-graphite">
@@ -41,13 +58,9 @@ export function Views(props: ViewsProps) {
       </p>
     );
   }
-  const surface = (tab.kind === 'surface' && plan.surfaces[tab.index]) || null;
-  const length = surface?.panels.reduce((sum, panel) => sum + panel.span, 0) ?? 0;
-  const cut = surface ? within(0, station, length) : null;
-  const oneSided =
-    surface?.mirrored && surface.parts.some((p) => p.side === 'port' || p.side === 'starboard');
-  const half = oneSided ? side : 'starboard';
-  const common = { picked, hover, side: half, brief: narrow } as const;
+  const half = surface?.mirrored ? side : 'starboard';
+  const cut = surface && cutAt(surface, half, station);
+  const common = { picked, hover, side: half, brief: narrow, measuring, onMeasuring: setMeasuring } as const;
   return (
     <>
       <div
@@ -64,10 +77,12 @@ export function Views(props: ViewsProps) {
           surface={surface}
           view={view}
           onView={setView}
-          sides={oneSided ? setSide : null}
+          sides={surface?.mirrored ? setSide : null}
           onPick={onPick}
           station={cut}
           onStation={onStation}
+          grip={grip}
+          onPrint={onPrint}
           maxHeight={
             narrow
               ? within(150, height * 0.28, 260)
@@ -94,13 +109,4 @@ export function Views(props: ViewsProps) {
       )}
     </>
   );
-}
-
-/** The same function for ever, which does what the latest one does; so that drawings need not render for it. */
-function useLatest<A>(fn: (a: A) => void): (a: A) => void {
-  const latest = useRef(fn);
-  useEffect(() => {
-    latest.current = fn;
-  });
-  return useCallback((a: A) => latest.current(a), []);
 }

@@ -1,3 +1,5 @@
+import { HELD } from '#client/lib/workspace.ts';
+
 /** One change: what it was made on, and what came of it. */
 export interface Step<T> {
   before: T;
@@ -37,7 +39,8 @@ export function changed<T>(history: History<T>, present: T, what: string, at: nu
   if (Object.is(present, history.present)) return history;
   const { last, past } = history;
   const before = past.at(-1);
-  const joins = last !== null && last.what === what && at - last.at <= JOIN && before !== undefined;
+  const repeats = last !== null && last.what === what && (at - last.at <= JOIN || what.startsWith(HELD));
+  const joins = repeats && before !== undefined;
   const step = { before: joins ? before.before : history.present, after: present };
   return {
     past: [...(joins ? past.slice(0, -1) : past), step].slice(-DEPTH),

@@ -1,3 +1,4 @@
+import { fileName, saveFile } from '#client/lib/save-file.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { checkPlan, issueLines } from './plan-check.ts';
 
@@ -62,20 +63,5 @@ export function downloadPlan(plan: Plan): void {
 }
 
 export function downloadJson(content: unknown, name: string): void {
-  const blob = new Blob([JSON.stringify(content, null, 2)], { type: 'application/json' });
-  const link = document.createElement('a');
-  link.href = URL.createObjectURL(blob);
-  link.download = `${fileName(name)}.json`;
-  link.click();
-  setTimeout(() => URL.revokeObjectURL(link.href), 10_000);
-}
-
-/** A name that every file system takes. */
-export function fileName(name: string): string {
-  const plain = name
-    .normalize('NFKD')
-    .replace(/\p{M}/gu, '')
-    .replace(/[^\w-]+/g, '-')
-    .replace(/^-+|-+$/g, '');
-  return plain === '' ? 'plan' : plain;
+  saveFile(JSON.stringify(content, null, 2), 'application/json', `${fileName(name)}.json`);
 }

@@ -4,10 +4,12 @@ import {
   FITTED,
   fromPx,
   layOnPaper,
+  panned,
   pathOf,
   scaleNote,
   toPx,
-  zoomed,
+  zoomedAt,
+  type Zoom,
 } from '#client/components/drawing/sheet.ts';
 import { halfLayers, modelLayers } from '#client/features/drawing/figure/drawings.ts';
 import { planSentence, planTitle } from '#client/features/drawing/figure/plan-words.ts';
@@ -53,11 +55,30 @@ describe('the sheet', () => {
     expect(scaleNote({ scale: 96 / 25.4 / 12 })).toBe('1\u202f:\u202f12');
   });
 
-  it('zooms in steps about what was looked at and ends fitted', () => {
-    const near = zoomed({ factor: 1.4, panX: 10, panY: -20 }, 1);
-    expect(near.panX / 10).toBeCloseTo(near.factor / 1.4, 9);
-    expect(zoomed(zoomed(FITTED, 1), -1)).toEqual(FITTED);
-    expect(zoomed(FITTED, -1)).toEqual(FITTED);
+  it('becomes larger about the place that is pointed at, and smaller again until it is fitted', () => {
+    const { sheet, middle } = layOnPaper(wing, { ...paper, axes: 'plan' });
+    const place = [500, 90] as const;
+    const seen = (zoom: Zoom) => {
+      const larger = layOnPaper(wing, { ...paper, axes: 'plan', factor: zoom.factor }).sheet;
+      return fromPx(larger, [place[0] - zoom.panX, place[1] - zoom.panY]);
+    };
+    const near = zoomedAt(FITTED, 3, place, middle);
+    const nearer = zoomedAt(near, 1.7, place, middle);
+    for (const zoom of [near, nearer]) {
+      expect(seen(zoom)[0]).toBeCloseTo(fromPx(sheet, place)[0], 9);
+      expect(seen(zoom)[1]).toBeCloseTo(fromPx(sheet, place)[1], 9);
+    }
+    expect(nearer.factor).toBeCloseTo(5.1, 9);
+    expect(zoomedAt(nearer, 1 / 6, place, middle)).toEqual(FITTED);
+    expect(zoomedAt(FITTED, 0.5, place, middle)).toEqual(FITTED);
+  });
+
+  it('cannot be pushed out of sight', () => {
+    const laid = layOnPaper(wing, { ...paper, axes: 'plan', factor: 4 });
+    const pushed = panned({ factor: 4, panX: 0, panY: 0 }, 1e6, -1e6, wing, laid);
+    const left = toPx(laid.sheet, wing.min)[0] + pushed.panX;
+    const bottom = toPx(laid.sheet, wing.max)[1] + pushed.panY;
+    expect([left, bottom]).toEqual([laid.width - 60, 60]);
   });
 
   it('writes lines in tenths of a px, closed where they are areas', () => {

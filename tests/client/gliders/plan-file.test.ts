@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { fileName, readPlans } from '#client/features/gliders/plan-file.ts';
+import { readPlans } from '#client/features/gliders/plan-file.ts';
+import { fileName } from '#client/lib/save-file.ts';
 import { planNamed } from './plans.ts';
 
 describe('importing a plan', () => {

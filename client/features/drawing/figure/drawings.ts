@@ -5,8 +5,8 @@ import type { Shape } from '#shared/drawing/shape.ts';
 import { itemShape, solidShapes, type ModelView } from '#shared/drawing/solid-shapes.ts';
 import { surfaceShapes } from '#shared/drawing/surface-view.ts';
 
-/** One surface's half laid flat, the whole model from above, or from the side. */
-export type PlanViewName = 'half' | 'whole' | 'side';
+/** One surface's half laid flat, or the whole model from above, from the side or from ahead. */
+export type PlanViewName = 'half' | 'whole' | 'side' | 'front';
 
 /** A layer of the drawing that is drawn anew only when what it shows was changed. */
 export interface Layer {
@@ -24,6 +24,7 @@ interface Drawn {
 const drawnBefore: Record<FrameName, WeakMap<Surface, Drawn>> = {
   above: new WeakMap(),
   side: new WeakMap(),
+  front: new WeakMap(),
   board: new WeakMap(),
 };
 
@@ -46,11 +47,11 @@ export function halfLayers(surface: Surface, materials: Plan['materials'], side:
   return [{ key: surface.key, shapes: shapesOf(surface, materials, 'board', [side]) }];
 }
 
-/** The whole model. Solids lie under the surfaces from above and over them from the side. */
+/** The whole model. Solids lie under the surfaces from above and over them from the side and from ahead. */
 export function modelLayers(plan: Plan, view: ModelView): Layer[] {
   const { materials } = plan;
   const surfaces = plan.surfaces.map((surface): Layer => {
-    const sides = view === 'above' ? sidesOf(surface) : (['starboard'] as const);
+    const sides = view === 'side' ? (['starboard'] as const) : sidesOf(surface);
     return { key: surface.key, shapes: shapesOf(surface, materials, view, sides) };
   });
   const solids: Layer = {

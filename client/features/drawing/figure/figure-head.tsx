@@ -3,7 +3,12 @@ import { cn } from '#client/lib/cn.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
 import type { PlanViewName } from './drawings.ts';
 
-const VIEW_WORDS: Record<PlanViewName, string> = { half: 'Surface', whole: 'Above', side: 'Side' };
+const VIEW_WORDS: Record<PlanViewName, string> = {
+  half: 'Surface',
+  whole: 'Above',
+  side: 'Side',
+  front: 'Front',
+};
 const TOOL =
   'grid min-h-row min-w-row place-items-center rounded-md px-2 text-note text-ink hover:bg-ink-wash ' +
   'aria-disabled:text-graphite aria-disabled:opacity-60 aria-pressed:font-semibold aria-pressed:underline ' +
@@ -23,12 +28,16 @@ interface FigureHeadProps {
   onZoom: (direction: 1 | -1) => void;
   onFit: () => void;
   fitted: boolean;
+  measuring: boolean;
+  onMeasuring: (measuring: boolean) => void;
+  onPrint: () => void;
   brief: boolean;
 }
 
 /** Title and scale of the plan, and how it is looked at. */
 export function FigureHead(props: FigureHeadProps) {
-  const { id, title, note, view, views, onView, side, onSide, onZoom, onFit, fitted, brief } = props;
+  const { id, title, note, view, views, onView, side, onSide, onZoom, onFit, fitted, measuring, brief } =
+    props;
   return (
     <figcaption className="flex flex-wrap items-center gap-x-3">
       <span id={id} className="caption mr-auto py-1">
@@ -61,6 +70,25 @@ export function FigureHead(props: FigureHeadProps) {
             {VIEW_WORDS[name]}
           </button>
         ))}
+      </span>
+      <span className="flex" role="group" aria-label="Tools">
+        <button
+          type="button"
+          aria-pressed={measuring}
+          title="Measure between two places"
+          onClick={() => props.onMeasuring(!measuring)}
+          className={TOOL}
+        >
+          Measure
+        </button>
+        <button
+          type="button"
+          title="Print to scale, or save as a file"
+          onClick={props.onPrint}
+          className={TOOL}
+        >
+          Print
+        </button>
       </span>
       {!brief && (
         <span className="flex" role="group" aria-label="Zoom">

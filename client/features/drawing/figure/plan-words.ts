@@ -10,6 +10,13 @@ export function surfaceTitle({ key }: Pick<Surface, 'key'>): string {
   return key === '' ? 'No name' : key.charAt(0).toUpperCase() + key.slice(1);
 }
 
+const SEEN: Record<PlanViewName, string> = {
+  half: 'from above',
+  whole: 'from above',
+  side: 'from the side',
+  front: 'from ahead',
+};
+
 /** What the plan shows; in brief, for a phone, without what can be seen. */
 export function planTitle(
   view: PlanViewName,
@@ -18,6 +25,7 @@ export function planTitle(
   brief: boolean,
 ): string {
   if (view === 'side') return brief ? 'Side' : 'Side elevation';
+  if (view === 'front') return brief ? 'Front' : 'Front elevation';
   if (view === 'whole' || !surface) return brief ? 'Plan' : 'Plan, whole model';
   if (brief) return surfaceTitle(surface);
   const half = surface.mirrored ? `, ${side} half` : '';
@@ -48,7 +56,7 @@ export function planSentence(
     );
   }
   const names = plan.surfaces.map((s) => s.key).join(', ');
-  const seen = view === 'side' ? 'from the side' : 'from above';
+  const seen = SEEN[view];
   const rest = `${plan.solids.length} solids and ${plan.items.length} items`;
   return `${plan.name} ${seen}: ${names === '' ? 'no surfaces' : names}, ${rest}.${where}`;
 }

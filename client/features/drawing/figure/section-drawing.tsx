@@ -1,18 +1,23 @@
-import { useId, useMemo } from 'react';
+import { ShapeLayer } from '#client/components/drawing/shape-layer.tsx';
+import { SheetText } from '#client/components/drawing/sheet-text.tsx';
+import { fromPx, toPx, type Laid, type Zoom } from '#client/components/drawing/sheet.ts';
 import { useUnits } from '#client/lib/units.ts';
-import { lineAt, targetsOf } from '#shared/drawing/hit.ts';
 import type { SectionView } from '#shared/drawing/section-view.ts';
 import type { Point } from '#shared/drawing/shape.ts';
+import { snapPoint } from '#shared/drawing/snap.ts';
 import type { Hover } from '../hover.ts';
-import { ShapeLayer } from '#client/components/drawing/shape-layer.tsx';
+import { DrawingFrame } from './drawing-frame.tsx';
 import { LitLayer } from './lit-layer.tsx';
-import { SheetText } from '#client/components/drawing/sheet-text.tsx';
-import { fromPx, toPx, type Sheet } from '#client/components/drawing/sheet.ts';
-import { useDrag } from './use-drag.ts';
+import { MeasureLayer } from './measure-layer.tsx';
+import type { Measure } from './measure.ts';
+import { useTargets } from './use-targets.ts';
 
 interface SectionDrawingProps {
   section: SectionView;
-  paper: { sheet: Sheet; width: number; height: number };
+  labelId: string;
+  paper: Laid;
+  zoom: Zoom;
+  measure: Measure;
   /** thickness, in words */
   thick: string;
   /** the section in a sentence */
@@ -20,50 +25,58 @@ interface SectionDrawingProps {
   picked: string | null;
   hover: Hover;
   onPick: (line: string) => void;
+  onPan: (dx: number, dy: number) => void;
+  onZoom: (by: number, at: Point) => boolean;
+  onFit: () => void;
 }
 
-/** How near to a thin part the pointer must be, px. */
+/** How near to a thin part, and to a corner, the pointer must be, px. */
 const REACH = 4;
+const CORNER = 9;
 
 /** The section itself, with its chord as a dimension under it. */
 export function SectionDrawing(props: SectionDrawingProps) {
-  const { section, thick, sentence, picked, hover } = props;
-  const { sheet, width, height } = props.paper;
-  const { shapes } = section;
-  const id = useId();
+  const { section, thick, sentence, picked, hover, paper, zoom, measure } = props;
+  const { sheet, height } = paper;
+  const { shapes, front, chord } = section;
+  const { panX, panY } = zoom;
   const units = useUnits();
-  const targets = useMemo(() => targetsOf(shapes), [shapes]);
-  const find = (at: Point) => lineAt(targets, fromPx(sheet, at), REACH / sheet.scale);
-  const drag = useDrag({
-    onPress: (at) => {
-      const line = find(at);
-      if (line !== null) props.onPick(line);
-    },
-    onHover: (at) => hover.set(at && find(at)),
-    onDrag: () => undefined,
-  });
-  const [[x0], [x1]] = [toPx(sheet, [0, 0]), toPx(sheet, [section.chord, 0])];
+  const lineNear = useTargets(shapes);
+  const toDrawing = (at: Point) => fromPx(sheet, [at[0] - panX, at[1] - panY]);
+  const fromDrawing = (at: Point): Point => {
+    const [x, y] = toPx(sheet, at);
+    return [x + panX, y + panY];
+  };
+  const find = (at: Point) => lineNear(toDrawing(at), REACH / sheet.scale);
+  const [x0, x1] = [toPx(sheet, [front, 0])[0], toPx(sheet, [front + chord, 0])[0]];
+  const y = height - 21 - panY;
   return (
-    <svg
-      role="img"
-      aria-labelledby={id}
-      width={width}
-      height={height}
-      {...drag}
-      className="block touch-pan-y"
+    <DrawingFrame
+      {...{ paper, sentence, measure, toDrawing, fromDrawing }}
+      labelId={props.labelId}
+      larger={zoom.factor > 1}
+      step={units.system === 'inch' ? 25.4 / 64 : 0.5}
+      snap={(at) => snapPoint(shapes, at, CORNER / sheet.scale).at}
+      onPress={(at) => {
+        const line = find(at);
+        if (line !== null) props.onPick(line);
+      }}
+      onHover={(at) => hover.set(at && find(at))}
+      onPan={props.onPan}
+      onZoom={props.onZoom}
+      onFit={props.onFit}
     >
-      <title id={id}>{sentence}</title>
-      <ShapeLayer shapes={shapes} sheet={sheet} />
-      <LitLayer cut {...{ shapes, sheet, picked, hover }} />
-      <g pointerEvents="none">
-        <path
-          d={`M${x0} ${height - 26}v10M${x1} ${height - 26}v10M${x0} ${height - 21}H${x1}`}
-          stroke="var(--graphite)"
-        />
-        <SheetText x={(x0 + x1) / 2} y={height - 6} textAnchor="middle">
-          {`${units.format(section.chord, 'length', { bare: true })} · ${thick}`}
-        </SheetText>
+      <g transform={`translate(${panX} ${panY})`}>
+        <ShapeLayer shapes={shapes} sheet={sheet} />
+        <LitLayer cut {...{ shapes, sheet, picked, hover }} />
+        <g pointerEvents="none">
+          <path d={`M${x0} ${y - 5}v10M${x1} ${y - 5}v10M${x0} ${y}H${x1}`} stroke="var(--graphite)" />
+          <SheetText x={(x0 + x1) / 2} y={y + 15} textAnchor="middle">
+            {`${units.format(chord, 'length', { bare: true })} · ${thick}`}
+          </SheetText>
+        </g>
+        <MeasureLayer {...{ measure, sheet }} view="section" />
       </g>
-    </svg>
+    </DrawingFrame>
   );
 }

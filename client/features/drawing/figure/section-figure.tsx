@@ -1,17 +1,22 @@
 import { memo, useId, useMemo } from 'react';
+import { layOnPaper, scaleNote, type Margins } from '#client/components/drawing/sheet.ts';
+import { Button } from '#client/components/ui/button.tsx';
 import { useWidth } from '#client/hooks/use-width.ts';
 import { useUnits } from '#client/lib/units.ts';
 import type { Plan, Surface } from '#shared/core/plan.ts';
 import type { SideName } from '#shared/drawing/frames.ts';
 import { ribNumbers } from '#shared/drawing/marks.ts';
+import { tipLength } from '#shared/drawing/outline.ts';
 import { sectionView } from '#shared/drawing/section-view.ts';
 import { boundsOf } from '#shared/drawing/shape.ts';
 import type { Hover } from '../hover.ts';
+import { MeasureNote } from './measure-note.tsx';
+import { useMeasure } from './measure.ts';
 import { SectionDrawing } from './section-drawing.tsx';
 import { sectionWords } from './section-words.ts';
-import { layOnPaper, scaleNote, type Margins } from '#client/components/drawing/sheet.ts';
 import { StationPicker } from './station-picker.tsx';
 import { useSteady } from './use-steady.ts';
+import { useZoom } from './use-zoom.ts';
 
 interface SectionFigureProps {
   surface: Surface;
@@ -22,6 +27,8 @@ interface SectionFigureProps {
   picked: string | null;
   hover: Hover;
   onPick: (line: string) => void;
+  measuring: boolean;
+  onMeasuring: (measuring: boolean) => void;
   maxHeight: number;
   brief: boolean;
 }
@@ -35,6 +42,7 @@ const MIN_HEIGHT = 80;
 /** The surface cut at one station, with everything in its place. */
 export const SectionFigure = memo(function SectionFigure(props: SectionFigureProps) {
   const { surface, materials, side, station, picked, hover, onPick, maxHeight, brief } = props;
+  const { measuring, onMeasuring } = props;
   const [ref, width] = useWidth<HTMLDivElement>(brief ? 340 : 900);
   const id = useId();
   const units = useUnits();
@@ -44,6 +52,9 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
   );
   const bounds = useSteady(section.chord > 0 ? boundsOf(section.shapes) : null);
   const margins = brief ? BRIEF : MARGINS;
+  const { zoom, fit, zoomBy, pan } = useZoom(surface.key);
+  const measure = useMeasure(measuring, () => onMeasuring(false));
+  const { factor } = zoom;
   const paper = useMemo(
     () =>
       bounds &&
@@ -54,8 +65,9 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
         maxHeight,
         minHeight: MIN_HEIGHT,
         maxScale: MAX_SCALE,
+        factor,
       }),
-    [bounds, width, margins, maxHeight],
+    [bounds, width, margins, maxHeight, factor],
   );
   const numbers = useMemo(() => ribNumbers(surface), [surface]);
   const { title, thick, sentence } = sectionWords(surface, section, numbers, units);
@@ -65,21 +77,33 @@ export const SectionFigure = memo(function SectionFigure(props: SectionFigurePro
         <span id={id} className="caption mr-auto py-1">
           {paper ? `${title} · ${scaleNote(paper.sheet)}` : title}
         </span>
+        {factor > 1 && (
+          <Button variant="plain" className="text-note" onClick={fit}>
+            Fit the section
+          </Button>
+        )}
         <StationPicker
           station={section.s}
           ribs={numbers}
-          length={surface.panels.reduce((sum, panel) => sum + panel.span, 0)}
+          length={surface.panels.reduce((sum, panel) => sum + panel.span, 0) + tipLength(surface, side)}
           onStation={props.onStation}
           label={`Section of the ${surface.key}`}
         />
       </figcaption>
       <div ref={ref} className="min-w-0 overflow-hidden">
-        {paper ? (
-          <SectionDrawing {...{ section, paper, thick, sentence, picked, hover, onPick }} />
+        {paper && bounds ? (
+          <SectionDrawing
+            {...{ section, paper, zoom, measure, thick, sentence, picked, hover, onPick }}
+            labelId={id}
+            onPan={(dx, dy) => pan(dx, dy, bounds, paper)}
+            onZoom={(by, at) => zoomBy(by, at, paper)}
+            onFit={fit}
+          />
         ) : (
           <p className="py-4 text-graphite">The surface has no chord at this station.</p>
         )}
       </div>
+      <MeasureNote measure={measure} view="section" />
     </figure>
   );
 });

@@ -22,9 +22,11 @@ export function sectionWords(
   const at = even ? '' : ` at ${units.format(section.thicknessAt, 'share')}`;
   const thick = `${units.format(section.thickness, 'length')} thick${at}`;
   const chord = `chord ${units.format(section.chord, 'length')}`;
-  const between = section.rib === null ? ', between ribs' : '';
+  const inTip = section.s > surface.panels.reduce((sum, panel) => sum + panel.span, 0) + 1e-6;
+  const between = inTip ? ', in the tip block' : section.rib === null ? ', between ribs' : '';
+  const title = inTip ? 'Section of the tip' : 'Section';
   return {
-    title: rib >= 0 ? `Section at rib ${rib + 1} · ${where}` : `Section · ${where}`,
+    title: rib >= 0 ? `Section at rib ${rib + 1} · ${where}` : `${title} · ${where}`,
     thick,
     sentence: `Section of ${surfaceTitle(surface)}, ${where}: ${chord}, ${thick}${even ? '' : ' of the chord'}${between}.`,
   };

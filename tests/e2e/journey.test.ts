@@ -35,7 +35,7 @@ describe('from plan and wood to a balance sheet', () => {
     await expect.poll(() => titleBlock.textContent(), PATIENT).not.toContain('221.4');
 
     await page.getByRole('link', { name: 'Sign up' }).first().click();
-    await page.waitForURL('**/sign-up*');
+    await page.getByRole('heading', { level: 1, name: 'Sign up' }).waitFor();
     await page.getByLabel('Name').fill('Wilma Thatcher');
     await page.getByLabel('E-mail').fill('wilma@example.org');
     await page.getByLabel('Password').fill('short');

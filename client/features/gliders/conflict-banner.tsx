@@ -23,8 +23,9 @@ export function ConflictBanner({ theirs, userName, count, onOpen }: ConflictBann
       className={IN_SIGHT}
       actions={<Button onClick={onOpen}>Choose …</Button>}
     >
-      {who} changed the same {count === 1 ? 'field' : `${count} fields`} at {formatMoment(theirs.updatedAt)}.
-      You can go on drawing; your edits are kept on this device until you choose.
+      {who} changed the same {count === 1 ? 'field' : `in ${count} places`} at{' '}
+      {formatMoment(theirs.updatedAt)}. You can go on drawing; your edits are kept on this device until you
+      choose.
     </Notice>
   );
 }

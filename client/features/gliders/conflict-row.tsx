@@ -87,7 +87,7 @@ function Option({ group, inputRef, chosen, onChosen, label, text, effect }: Opti
     <label
       htmlFor={id}
       className={cn(
-        'grid grid-cols-[auto_minmax(0,1fr)] gap-x-2 rounded-md border px-2.5 py-1.5 *:col-start-2',
+        'grid grid-cols-[auto_minmax(0,1fr)] content-start gap-x-2 rounded-md border px-2.5 py-1.5 *:col-start-2',
         chosen ? 'border-ink bg-ink-wash' : 'border-strong-rule hover:border-ink',
       )}
     >

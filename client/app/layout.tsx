@@ -1,5 +1,6 @@
 import { useEffect, useRef } from 'react';
 import { Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
+import { Shortcuts } from '#client/components/shortcuts/shortcuts.tsx';
 import { HatchDefs } from '#client/components/ui/hatch.tsx';
 import { CrumbsProvider } from './crumbs.tsx';
 import { Header } from './header.tsx';
@@ -36,6 +37,7 @@ export function Layout() {
           <Outlet />
         </main>
       </div>
+      <Shortcuts />
       <ScrollRestoration />
     </CrumbsProvider>
   );

@@ -18,6 +18,7 @@ import { SurfacePane } from './lists/surface-pane.tsx';
 import { useMaterialTable } from '#client/hooks/use-material-table.ts';
 import { NoticesList } from './notices-list.tsx';
 import { Views } from './views.tsx';
+import { useDrawingKeys } from './use-drawing-keys.ts';
 import { useLooking } from './use-looking.ts';
 import { usePlace } from './use-place.ts';
 
@@ -54,6 +55,13 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
     setTab({ kind: 'surface', index: plan.surfaces.length });
     edit((p) => ({ ...p, surfaces: [...p.surfaces, newSurface(p, role)] }), `add a ${role}`);
   };
+
+  const root = useRef<HTMLDivElement>(null);
+  const looking = useLooking();
+  const [printing, setPrinting] = useState(false);
+  const print = () => setPrinting(true);
+  const picking = { picked: selected, pick: select };
+  useDrawingKeys({ root, plan, tab, wish, looking, station, setStation, print, ...picking });
 
   const nav = useRef<HTMLElement>(null);
   const say = useToast();
@@ -102,12 +110,10 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
       </Fold>
     </div>
   );
-  const looking = useLooking();
-  const [printing, setPrinting] = useState(false);
   const views = (
     <Views
       looking={looking}
-      onPrint={() => setPrinting(true)}
+      onPrint={print}
       plan={valid}
       stale={valid !== plan}
       result={result}
@@ -125,7 +131,7 @@ export function DrawingPlace({ workspace }: { workspace: Workspace }) {
   const notices = valid && <NoticesList notices={result.notices} plan={valid} onPick={select} />;
 
   return (
-    <div className="flex flex-1 flex-col">
+    <div ref={root} className="flex flex-1 flex-col">
       <div className="px-4 pt-5 pb-4 sm:px-7">
         <Headline {...{ plan, result, edit, canEdit, issues, narrow }} />
       </div>

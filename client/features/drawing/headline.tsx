@@ -1,3 +1,4 @@
+import { shortcutBook } from '#client/components/shortcuts/shortcut-book.ts';
 import { TextField } from '#client/components/ui/text-field.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
@@ -24,7 +25,17 @@ export function Headline({ plan, result, edit, canEdit, issues, narrow }: Headli
         <p className="text-note text-graphite">
           {canEdit
             ? 'Pick a part in the list or in the drawing; every change is drawn and weighed at once.'
-            : 'You may look at this plan but not change it.'}
+            : 'You may look at this plan but not change it.'}{' '}
+          {!narrow && (
+            <button
+              type="button"
+              aria-haspopup="dialog"
+              onClick={() => shortcutBook.setOpen(true)}
+              className="link min-h-6 px-1"
+            >
+              Keys
+            </button>
+          )}
         </p>
       </div>
       {!narrow && (

@@ -2,6 +2,7 @@ import { memo, useEffect, useId, useRef, type ReactNode, type RefObject } from '
 import { Amount } from '#client/components/ui/amount.tsx';
 import { cn } from '#client/lib/cn.ts';
 import { useIsHovered, type Hover } from '../hover.ts';
+import { FormBox } from './form-box.tsx';
 import { PhonePanel } from './phone-panel.tsx';
 import { RowTools, type RowOps } from './row-tools.tsx';
 
@@ -79,10 +80,10 @@ export const ListRow = memo(function ListRow(props: ListRowProps) {
             {tools}
           </PhonePanel>
         ) : (
-          <div id={formId} data-form="" className="mb-3 border border-ink p-3">
+          <FormBox id={formId} onClose={() => ops.close(line)}>
             {form}
             {tools}
-          </div>
+          </FormBox>
         ))}
     </li>
   );

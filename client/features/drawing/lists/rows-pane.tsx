@@ -103,7 +103,7 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
         })}
       </ul>
       <div className="flex flex-wrap items-center gap-x-3 gap-y-1 pt-2">
-        {canEdit && add}
+        {canEdit && <span data-add="">{add}</span>}
         <p role="status" className="flex min-h-row items-center gap-x-2 text-note text-graphite">
           {removed?.after === plan && (
             <>

@@ -1,16 +1,20 @@
 // @vitest-environment happy-dom
-import { act } from 'react';
+import { act, type ReactNode } from 'react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import { shortcutBook, useShortcuts, type Shortcut } from '#client/components/shortcuts/shortcut-book.ts';
 import { Shortcuts } from '#client/components/shortcuts/shortcuts.tsx';
-import { mount, onlyInput, press } from '#tests/client/lib/mount.tsx';
+import { mount, onlyInput, press, type Mounted } from '#tests/client/lib/mount.tsx';
 
-afterEach(() =>
+let shown: Mounted | null = null;
+const open = async (node: ReactNode) => (shown = await mount(node));
+
+afterEach(async () => {
   act(() => {
     shortcutBook.setOpen(false);
     shortcutBook.setOn(true);
-  }),
-);
+  });
+  await shown?.unmount();
+});
 
 function Page({ shortcuts }: { shortcuts: readonly Shortcut[] }) {
   useShortcuts('Page', shortcuts);
@@ -26,7 +30,7 @@ function Page({ shortcuts }: { shortcuts: readonly Shortcut[] }) {
 describe('single keys', () => {
   it('do what the page has entered for them, whichever case the letter is in', async () => {
     const run = vi.fn<() => void>();
-    await mount(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
+    await open(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
     await press(document.body, 'm');
     await press(document.body, 'M');
     expect(run).toHaveBeenCalledTimes(2);
@@ -34,7 +38,7 @@ describe('single keys', () => {
 
   it('are letters in a field, and leave the browser’s own combinations alone', async () => {
     const run = vi.fn<() => void>();
-    const { element } = await mount(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
+    const { element } = await open(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
     await press(onlyInput(element), 'm');
     await press(document.body, 'm', { ctrlKey: true });
     await press(document.body, 'm', { altKey: true });
@@ -43,7 +47,7 @@ describe('single keys', () => {
 
   it('do nothing once they are turned off, and that is remembered', async () => {
     const run = vi.fn<() => void>();
-    await mount(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
+    await open(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
     act(() => shortcutBook.setOn(false));
     await press(document.body, 'm');
     await press(document.body, '?');
@@ -53,7 +57,7 @@ describe('single keys', () => {
   });
 
   it('are listed by a question mark, those of the page that is shown first', async () => {
-    await mount(<Page shortcuts={[{ keys: 'm', what: 'Measure between two places' }]} />);
+    await open(<Page shortcuts={[{ keys: 'm', what: 'Measure between two places' }]} />);
     await press(document.body, '?');
     // The list is fetched like a file of the page.
     await act(async () => {
@@ -67,7 +71,7 @@ describe('single keys', () => {
 
   it('are gone with the page that entered them', async () => {
     const run = vi.fn<() => void>();
-    const { show } = await mount(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
+    const { show } = await open(<Page shortcuts={[{ keys: 'm', what: 'Measure', run }]} />);
     await show(<Shortcuts />);
     await press(document.body, 'm');
     expect(run).not.toHaveBeenCalled();

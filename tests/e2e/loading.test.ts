@@ -64,7 +64,9 @@ describe('loading', () => {
       .getByText(/over/)
       .waitFor();
     // A table that has grown a column is measured in the next frame, and then reached by the keyboard if it scrolls.
-    await page.evaluate(() => new Promise((done) => requestAnimationFrame(() => requestAnimationFrame(done))));
+    await page.evaluate(
+      () => new Promise((done) => requestAnimationFrame(() => requestAnimationFrame(done))),
+    );
     await expectAccessible(page, 'weather on the phone');
     await picture(page, 'loading-weather-phone');
     const wider = await page.evaluate(() => document.documentElement.scrollWidth - innerWidth);

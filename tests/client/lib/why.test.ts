@@ -12,7 +12,7 @@ import type { Trial } from '#shared/core/wood-trial.ts';
 import { INCH_CHOICES, unitsOf, USUAL_UNITS } from '#shared/format/units.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 
-const asked = [dunlinJson, ploverJson, whimbrelJson].flatMap((json) => {
+const explained = [dunlinJson, ploverJson, whimbrelJson].flatMap((json) => {
   const plan = planSchema.parse(json);
   return estimate(plan).lines.map((line) => ({ plan, line, why: whyLine(plan, line, USUAL_UNITS) }));
 });
@@ -22,7 +22,7 @@ const FORMULA =
 
 describe('whyLine', () => {
   it('multiplies to the mass that it explains, for every part that has a measure', () => {
-    const formulas = asked.filter(({ why }) => why.formula.includes('×'));
+    const formulas = explained.filter(({ why }) => why.formula.includes('×'));
     expect(formulas.length).toBeGreaterThan(60);
     for (const { line, why } of formulas) {
       const [, mass, measure, power, figure] = FORMULA.exec(why.formula) ?? [];
@@ -36,7 +36,7 @@ describe('whyLine', () => {
   });
 
   it('has steps and a doubt for every line, and a source for every material', () => {
-    for (const { line, why } of asked) {
+    for (const { line, why } of explained) {
       expect(why.steps.length, line.id).toBeGreaterThan(line.material === null ? 0 : 1);
       expect(why.doubt, line.id).toBeTruthy();
       expect(why.source === null, line.id).toBe(line.material === null);
@@ -46,7 +46,7 @@ describe('whyLine', () => {
 
 describe('whySum', () => {
   it('divides moment by mass', () => {
-    const lines = asked.slice(0, 3).map(({ line }) => line);
+    const lines = explained.slice(0, 3).map(({ line }) => line);
     const arm = lines.reduce((s, l) => s + l.moment, 0) / lines.reduce((s, l) => s + l.mass, 0);
     expect(whySum('All', lines, USUAL_UNITS).steps[0]).toContain(`= ${arm.toFixed(1)}\u202fmm`);
   });

@@ -219,17 +219,6 @@ describe('GET /api/photos/:id/image', () => {
   });
 });
 
-describe('PUT /api/photos/:id', () => {
-  it('changes the caption and nothing else', async () => {
-    const { owner, glider } = await ownerOfOne();
-    const photo = await makePhoto(glider, owner.user, 'old');
-    const res = await owner.agent.put(`/api/photos/${photo.id}`).send({ caption: 'new' }).expect(200);
-    expect(photoSchema.parse(res.body).caption).toBe('new');
-    const row = await GliderPhoto.findByPk(photo.id, { rejectOnEmpty: true });
-    expect(row.get()).toEqual({ ...photo.get(), caption: 'new' });
-  });
-});
-
 describe('DELETE /api/photos/:id', () => {
   it('removes the photo with its files, and no other', async () => {
     const { owner, glider } = await ownerOfOne();

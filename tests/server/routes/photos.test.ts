@@ -5,7 +5,7 @@ import { QueryTypes } from 'sequelize';
 import sharp from 'sharp';
 import { describe, expect, it, vi } from 'vitest';
 import { photo as photoSchema, photoList } from '#shared/schemas/photo.ts';
-import { GliderPhoto } from '#server/models/glider-photo.ts';
+import type { GliderPhoto } from '#server/models/glider-photo.ts';
 import { removeUnusedFiles } from '#server/services/stored-files.ts';
 import { surroundings } from '#server/surroundings.ts';
 import { useApp } from '../support/app.ts';

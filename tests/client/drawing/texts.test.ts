@@ -1,11 +1,8 @@
+import { noteWords, problemWords } from '#client/features/drawing/forms/section-findings.ts';
+import { readSectionText } from '#shared/sections/read-section.ts';
 import { describe, expect, it } from 'vitest';
 import { outlineText, parseOutline } from '#client/features/drawing/forms/outline-text.ts';
-import {
-  parsePoints,
-  parseSection,
-  pointsText,
-  sectionText,
-} from '#client/features/drawing/forms/section-text.ts';
+import { parseSection, pointsText, sectionText } from '#client/features/drawing/forms/section-text.ts';
 import { parseStations, stationsText } from '#client/features/drawing/forms/station-text.ts';
 import { partNote, partSize } from '#client/features/drawing/lists/size-text.ts';
 import { unitsOf, USUAL_UNITS } from '#shared/format/units.ts';
@@ -70,18 +67,32 @@ describe('pasted points', () => {
   ];
 
   it('are read back as they were written, past a title line', () => {
-    expect(parsePoints(`Some title\n${pointsText({ points })}`)).toEqual({ value: points });
+    expect(readSectionText(`Some title\n${pointsText({ points })}`)).toMatchObject({
+      section: { name: 'Some title', points },
+    });
   });
 
-  it('may be per cent of the chord and have decimal commas', () => {
-    expect(parsePoints('100 0,1\n50 8\n0 0\n50 -2\n100 -0.1')).toEqual({ value: points });
+  it.each([
+    ['1 0\n0.5 x\n0 0\n0.5 0\n1 0', 'Line 2, “0.5 x”, is not two numbers.'],
+    ['1 0\n0 0', 'Only 2 points are found; a section takes at least 5.'],
+    ['', 'No points are found.'],
+    ['4 4\n0 0\n.5 .1\n1 0\n0 0\n1 0', 'Line 1 says 8 points; 5 follow.'],
+    ['1 0\n.5 .1\n.7 .1\n0 0\n.5 0\n1 0', 'goes back along the first face'],
+    ['1 0\n.5 1.9\n0 0\n.5 -.1\n1 0', 'Line 2, “.5 1.9”, lies farther from the chord'],
+    ['1 0\n.5 .1\n0 0\n.3 0\n.6 0', 'At line 5 the second face ends far before the trailing edge.'],
+    ['0 .2\n.5 .3\n1 0\n\n0 0\n.5 0\n1 0', 'At line 5 the second face begins 20.0 % of the chord'],
+    ['0 1\n0 2\n0 3\n0 4\n0 5', 'all points have the same x'],
+  ])('are refused in words that name the line: %#', (text, words) => {
+    const reading = readSectionText(text);
+    expect('problem' in reading && problemWords(reading.problem)).toContain(words);
   });
 
-  it('are refused with the line that is wrong, and in the wrong order', () => {
-    expect(problem(parsePoints('1 0\n0.5 x\n0 0'))).toContain('Line 2');
-    expect(problem(parsePoints('1 0\n0 0'))).toContain('at least 5');
-    expect(problem(parsePoints('0 0\n0.5 0.1\n1 0\n0.5 -0.1\n0 0'))).toContain('trailing edge');
-    expect(problem(parsePoints('1 0\n0.5 1.9\n0 0\n0.5 -0.1\n1 0'))).toContain('far off the chord');
+  it('tell in words what was mended', () => {
+    expect(noteWords({ code: 'thinned', from: 5002, to: 812, tolerance: 3.2e-6 })).toBe(
+      '5\u202f002 points are thinned to 812; none left out lies more than 0.0003 % of the chord off the line.',
+    );
+    expect(noteWords({ code: 'nose_joined', gap: 0.0312 })).toContain('open by 3.1 %');
+    expect(noteWords({ code: 'scaled', chord: 187 })).toContain('187.00');
   });
 });
 

@@ -1,63 +1,108 @@
 import { useMemo, useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
+import { Checkbox } from '#client/components/ui/checkbox.tsx';
 import { Dialog, DialogActions } from '#client/components/ui/dialog.tsx';
+import { Field } from '#client/components/ui/field.tsx';
 import { TextArea, TextField } from '#client/components/ui/text-field.tsx';
 import type { SectionSpec } from '#shared/core/plan.ts';
-import { readSection, selfCrossingAt } from '#shared/core/section.ts';
-import { contourOf } from '#shared/drawing/contour.ts';
-import { boundsOf } from '#shared/drawing/shape.ts';
-import { formatQuantity } from '#shared/format/numbers.ts';
-import { layOnPaper, pathOf } from '#client/components/drawing/sheet.ts';
-import { parsePoints, pointsText } from './section-text.ts';
+import { LIMITS } from '#shared/schemas/limits.ts';
+import { readSectionText } from '#shared/sections/read-section.ts';
+import { problemWords } from './section-findings.ts';
+import { SectionPreview } from './section-preview.tsx';
+import { pointsText } from './section-text.ts';
 
 interface PointsDialogProps {
   title: string;
   /** the section as it is; its own points are what the dialog opens with */
   spec: SectionSpec;
-  onSpec: (spec: SectionSpec) => void;
+  /** `everywhere`: for root and tip of all panels */
+  onSpec: (spec: SectionSpec, everywhere: boolean) => void;
   onClose: () => void;
 }
 
-/** Pastes a section's own coordinates and shows them before they are taken. */
+/** Bytes of a file of coordinates; far more than any has. */
+const LARGEST = 2_000_000;
+
+/** Takes a section's own coordinates from a file or from a pasted text, and shows them before they are taken. */
 export function PointsDialog({ title, spec, onSpec, onClose }: PointsDialogProps) {
   const before = 'points' in spec ? spec : null;
-  const [name, setName] = useState(before?.name ?? 'Own section');
+  const [typedName, setTypedName] = useState<string | null>(before?.name ?? null);
+  const [fileTitle, setFileTitle] = useState('');
   const [text, setText] = useState(before ? pointsText(before) : '');
+  const [refusedFile, setRefusedFile] = useState<string>();
+  const [everywhere, setEverywhere] = useState(false);
   const [asked, setAsked] = useState(false);
-  const parsed = useMemo(() => parsePoints(text), [text]);
-  const points = 'value' in parsed ? parsed.value : null;
-  const problem = 'problem' in parsed && (asked || text.trim() !== '') ? parsed.problem : undefined;
+  const reading = useMemo(() => readSectionText(text), [text]);
+  const section = 'section' in reading ? reading.section : null;
+  const isEmpty = text.trim() === '';
+  const problem = 'problem' in reading && (asked || !isEmpty) ? problemWords(reading.problem) : undefined;
+  const name = typedName ?? section?.name ?? fileTitle;
+
+  const choose = async (file: File | undefined) => {
+    setRefusedFile(undefined);
+    if (!file) return;
+    if (file.size > LARGEST) {
+      setRefusedFile('This file is too large for a section.');
+      return;
+    }
+    try {
+      setText(await file.text());
+      setFileTitle(file.name.replace(/\.[^.]*$/, ''));
+    } catch {
+      setRefusedFile('This file cannot be read.');
+    }
+  };
   return (
     <Dialog
       open
       onOpenChange={(open) => !open && onClose()}
       title={title}
-      description="One point to a line, x and z of the chord (0 to 1) or in per cent: from the trailing edge over the top to the nose, and back along the underside."
+      description="Points round from the trailing edge, or upper and lower face one after the other; of the chord, in per cent or at any size."
+      wide
     >
       <form
         className="grid gap-y-1"
         onSubmit={(event) => {
           event.preventDefault();
           setAsked(true);
-          if (points && name.trim() !== '') onSpec({ name: name.trim(), points });
+          if (section && name.trim() !== '') {
+            onSpec({ name: name.trim(), points: section.points }, everywhere);
+          }
         }}
       >
-        <TextField
-          label="Name"
-          value={name}
-          maxLength={120}
-          error={asked && name.trim() === '' ? 'Give it a name.' : undefined}
-          onChange={(event) => setName(event.target.value)}
-        />
-        <TextArea
-          label="Points"
-          rows={9}
-          spellCheck={false}
-          value={text}
-          error={problem}
-          onChange={(event) => setText(event.target.value)}
-        />
-        {points && <Preview points={points} />}
+        <div className="grid gap-x-6 sm:grid-cols-2">
+          <div>
+            <Field label="Coordinate file" error={refusedFile}>
+              {(control) => (
+                <input
+                  {...control}
+                  type="file"
+                  accept=".dat,.txt,.csv,.cor,text/plain"
+                  onChange={(event) => void choose(event.target.files?.[0])}
+                  className="inked min-h-row w-full px-2 py-1.5 file:mr-3 file:rounded-md file:border file:border-ink file:bg-sheet file:px-2 file:font-semibold file:text-ink"
+                />
+              )}
+            </Field>
+            <TextField
+              label="Name"
+              value={name}
+              maxLength={LIMITS.name.max}
+              error={asked && name.trim() === '' ? 'Give it a name.' : undefined}
+              onChange={(event) => setTypedName(event.target.value)}
+            />
+          </div>
+          <TextArea
+            label="Points"
+            hint="One to a line, x and z; or paste the whole file."
+            rows={6}
+            spellCheck={false}
+            value={text}
+            error={problem}
+            onChange={(event) => setText(event.target.value)}
+          />
+        </div>
+        {section && <SectionPreview section={section} />}
+        <Checkbox label="For root and tip of all panels" checked={everywhere} onValue={setEverywhere} />
         <DialogActions>
           <Button onClick={onClose}>Cancel</Button>
           <Button type="submit" variant="primary">
@@ -66,34 +111,5 @@ export function PointsDialog({ title, spec, onSpec, onClose }: PointsDialogProps
         </DialogActions>
       </form>
     </Dialog>
-  );
-}
-
-const WIDTH = 420;
-
-function Preview({ points }: { points: [number, number][] }) {
-  const section = readSection({ name: '', points }, 1);
-  const shape = { points: contourOf({ section, chord: 1 }) };
-  const bounds = boundsOf([shape]);
-  const crossing = selfCrossingAt(section);
-  if (!bounds) return null;
-  const { sheet, height } = layOnPaper(bounds, {
-    axes: 'elevation',
-    width: WIDTH,
-    margins: { top: 6, right: 6, bottom: 6, left: 6 },
-    maxHeight: 120,
-    minHeight: 40,
-  });
-  return (
-    <>
-      <svg viewBox={`0 0 ${WIDTH} ${height}`} aria-hidden="true" className="w-full">
-        <path d={pathOf(sheet, shape.points, true)} fill="var(--wood-light)" stroke="var(--pencil)" />
-      </svg>
-      <p role="status" className={crossing === null ? 'text-note text-graphite' : 'text-note text-red'}>
-        {crossing === null
-          ? `${points.length} points read.`
-          : `▲ The two faces cross at ${formatQuantity(crossing, 'share')} of the chord.`}
-      </p>
-    </>
   );
 }

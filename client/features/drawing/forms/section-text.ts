@@ -1,7 +1,6 @@
 import type { PointsSpec, SectionSpec } from '#shared/core/plan.ts';
 import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
 import type { Units } from '#shared/format/units.ts';
-import { LIMITS } from '#shared/schemas/limits.ts';
 import { parseQuantity } from '#shared/units/parse.ts';
 import type { Parsed } from './parsed-field.tsx';
 
@@ -35,42 +34,4 @@ export function pointsText({ points }: Pick<PointsSpec, 'points'>): string {
   return points
     .map(([x, z]) => `${formatNumber(x, 5)} ${formatNumber(z, 5)}`.replaceAll('\u2212', '-'))
     .join('\n');
-}
-
-/** Coordinates beyond this are taken to be in per cent of the chord. */
-const LARGEST_SHARE = 2;
-
-/**
- * Reads pasted coordinates: one point to a line, round from the trailing edge over the top, the nose and the
- * underside. A first line without numbers is its title and is passed over; figures up to 100 are per cent.
- */
-export function parsePoints(text: string): Parsed<[number, number][]> {
-  const lines = text
-    .split(/\r?\n/)
-    .map((line) => line.trim())
-    .filter((line) => line !== '');
-  const points: [number, number][] = [];
-  for (const [i, line] of lines.entries()) {
-    const [x, z, ...rest] = line
-      .split(/[\s;]+/)
-      .map((word) => Number(word.replace(',', '.').replace('\u2212', '-')));
-    const isPoint =
-      x !== undefined && z !== undefined && rest.length === 0 && Number.isFinite(x) && Number.isFinite(z);
-    if (isPoint) points.push([x, z]);
-    else if (i > 0) return { problem: `Line ${i + 1}, “${line.slice(0, 24)}”, is not two numbers.` };
-  }
-  const { min, max } = LIMITS.sectionPoints;
-  if (points.length < min) return { problem: `Paste at least ${min} points, one to a line.` };
-  if (points.length > max) return { problem: `At most ${max} points can be kept.` };
-  const isPercent = points.some(([x]) => Math.abs(x) > LARGEST_SHARE);
-  const shares = isPercent ? points.map(([x, z]): [number, number] => [x / 100, z / 100]) : points;
-  if (shares.some(([x, z]) => x < -0.5 || x > 1.5 || Math.abs(z) > 1)) {
-    return { problem: 'A point lies far off the chord. Give x from 0 to 1 and z beside it.' };
-  }
-  if ((shares[0]?.[0] ?? 0) < 0.5 || (shares.at(-1)?.[0] ?? 0) < 0.5) {
-    return {
-      problem: 'Begin and end at the trailing edge: over the top to the nose, back along the underside.',
-    };
-  }
-  return { value: shares };
 }

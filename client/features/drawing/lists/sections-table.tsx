@@ -25,6 +25,14 @@ export function SectionsTable({ desk, surface, index }: SectionsTableProps) {
       changeSurface(index, (s) => ({ ...s, panels: changePanel(s.panels, i, { [end]: spec }) })),
       `${surface.key}: panel ${i + 1} ${END_WORDS[end]} section`,
     );
+  const setAll = (spec: SectionSpec) =>
+    desk.edit(
+      changeSurface(index, (s) => ({
+        ...s,
+        panels: s.panels.map((panel) => ({ ...panel, rootSection: spec, tipSection: spec })),
+      })),
+      `${surface.key}: all sections`,
+    );
   const opened = own && surface.panels[own.panel]?.[own.end];
   return (
     <div className="mt-3 grid gap-y-1">
@@ -67,8 +75,9 @@ export function SectionsTable({ desk, surface, index }: SectionsTableProps) {
           spec={opened}
           title={`Panel ${own.panel + 1}, ${END_WORDS[own.end]} section`}
           onClose={() => setOwn(null)}
-          onSpec={(spec) => {
-            set(own.panel, own.end, spec);
+          onSpec={(spec, everywhere) => {
+            if (everywhere) setAll(spec);
+            else set(own.panel, own.end, spec);
             setOwn(null);
           }}
         />

@@ -52,7 +52,8 @@ export function mergePanels(surface: string, three: Three<Panels>, settle: Settl
 
 /**
  * For each panel of a side the number of the one of the base that it is, or was before it was changed; `new-1` and
- * so on for the others. Null where changed panels and new ones cannot be told apart.
+ * so on for the others, which may only follow the last. Null where changed panels and new ones cannot be told apart:
+ * a panel before one of the base's may be new there, or be the base's own, changed, with a copy of it put behind.
  */
 function alignedKeys(base: Panels, side: Panels): string[] | null {
   const pairs = [...commonPairs(base, side), [base.length, side.length] as const];
@@ -61,6 +62,7 @@ function alignedKeys(base: Panels, side: Panels): string[] | null {
   for (const [toBase, toSide] of pairs) {
     const [before, after] = [toBase - b, toSide - s];
     if (before !== after && before > 0 && after > 0) return null;
+    if (before === 0 && after > 0 && toBase < base.length) return null;
     for (let i = 0; i < after; i++) keys.push(before === 0 ? `new-${keys.length + 1}` : String(b + i + 1));
     if (toSide < side.length) keys.push(String(toBase + 1));
     [b, s] = [toBase + 1, toSide + 1];

@@ -163,6 +163,13 @@ describe('what is asked', () => {
       expect(planSchema.safeParse(choosing(mine, theirs, choice).plan).success).toBe(true);
   });
 
+  it('are the panels as a whole where one side changed a panel and put a copy of the old one behind', () => {
+    const mine = wingWith([ribs, spar], { panels: [{ ...panel, rootChord: 150 }] });
+    const theirs = wingWith([ribs, spar], { panels: [{ ...panel, rootChord: 120 }, panel] });
+    expect(told(mine, theirs)).toEqual(['surfaces/wing#panels']);
+    expect(told(theirs, mine)).toEqual(['surfaces/wing#panels']);
+  });
+
   it('are the panels as a whole where both sides cut the wing anew', () => {
     const mine = wingWith([ribs, spar], { panels: [panel, { ...panel, span: 100 }] });
     const theirs = wingWith([ribs, spar], { panels: [{ ...panel, span: 80 }, panel] });

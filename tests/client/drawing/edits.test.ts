@@ -8,7 +8,8 @@ import {
   keepMaterial,
   nextPanel,
 } from '#client/features/drawing/edits/plan-edits.ts';
-import { copiedRow, freshId, freshName, movedRow, withoutRow } from '#client/features/drawing/edits/rows.ts';
+import { copiedRow, movedRow, withoutRow } from '#client/features/drawing/edits/rows.ts';
+import { freshId, freshName } from '#shared/plan-start/names.ts';
 import type { Panel } from '#shared/core/plan.ts';
 import { demoPlan, MATERIALS, planOf, wingOf } from '#tests/support/plans.ts';
 

@@ -1,7 +1,7 @@
 import { snapshotOf } from '#client/lib/material-snapshot.ts';
 import { describe, expect, it } from 'vitest';
-import { choices, fitsPart, fitsSolid, preferred } from '#client/features/drawing/edits/materials.ts';
-import { newPart, PART_CHOICES, WISHES } from '#client/features/drawing/edits/new-part.ts';
+import { PART_CHOICES, SET_CHOICES, withParts } from '#client/features/drawing/edits/add-parts.ts';
+import { choices, preferred } from '#client/features/drawing/edits/materials.ts';
 import { newItem, newSolid, newSurface, SOLID_CHOICES } from '#client/features/drawing/edits/new-rows.ts';
 import { noticeWords } from '#client/components/notice-text.ts';
 import { startPlan } from '#client/features/gliders/start-plan.ts';
@@ -9,6 +9,10 @@ import delivered from '#data/materials.json';
 import { estimate } from '#shared/core/estimate.ts';
 import type { Part, Plan, Surface } from '#shared/core/plan.ts';
 import { USUAL_UNITS } from '#shared/format/units.ts';
+import { fitsPart, fitsSolid } from '#shared/plan-start/fits.ts';
+import { newPart } from '#shared/plan-start/new-part.ts';
+import { newSet } from '#shared/plan-start/part-sets.ts';
+import { WISHES } from '#shared/plan-start/wishes.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { DEMO_NAMES, demoPlan } from '#tests/support/plans.ts';
 
@@ -27,6 +31,56 @@ function withNew(plan: Plan, surface: Surface, choice: (typeof PART_CHOICES)[num
     surfaces: plan.surfaces.map((s) => (s.key === surface.key ? { ...s, parts: [...s.parts, part] } : s)),
   };
 }
+
+describe('a set of parts', () => {
+  const withSet = (plan: Plan, index: number, choice: (typeof SET_CHOICES)[number]['choice']) => {
+    const surface = plan.surfaces[index]!;
+    return withParts(plan, surface, index, newSet(choice, surface), table).recipe(plan);
+  };
+
+  it.each(SET_CHOICES)('“$label” suits every surface of the demo gliders and a blank wing', ({ choice }) => {
+    for (const plan of [empty, ...DEMO_NAMES.map(demoPlan)]) {
+      for (const index of plan.surfaces.keys()) {
+        const after = withSet(plan, index, choice);
+        expect(planSchema.safeParse(after).error?.issues ?? []).toEqual([]);
+        const before = plan.surfaces[index]!.parts.length;
+        expect(after.surfaces[index]!.parts.length - before).toBe(
+          newSet(choice, plan.surfaces[index]!).length,
+        );
+      }
+    }
+  });
+
+  it('each in turn makes a wing of a blank one, that weighs something and fits without a red word', () => {
+    const plan = SET_CHOICES.reduce((p, { choice }) => withSet(p, 0, choice), empty);
+    const { lines, notices } = estimate(plan);
+    // Ribs, two spars, sheeting and web, two stringers, two edges, a tip
+    expect(lines).toHaveLength(10);
+    for (const line of lines) expect(line.mass, line.name).toBeGreaterThan(0);
+    const words = notices.map((notice) => noticeWords(notice, plan, USUAL_UNITS));
+    expect(words.filter(({ tone }) => tone === 'red')).toEqual([]);
+  });
+
+  it('of ribs stands at the root, at every break and at the tip, whole bays between', () => {
+    const { surfaces } = demoPlan('whimbrel');
+    const [ribs] = newSet('ribSet', surfaces[0]!);
+    const stations = ribs?.part.kind === 'ribs' ? (ribs.part.stations ?? []) : [];
+    let end = 0;
+    for (const { span } of surfaces[0]!.panels) expect(stations).toContain((end += span));
+    expect(stations[0]).toBe(0);
+    expect(stations.at(-1)).toBe(end);
+    const bays = stations.slice(1).map((s, i) => s - stations[i]!);
+    expect(Math.max(...bays) / Math.min(...bays)).toBeLessThan(2.5);
+  });
+
+  it('of stringers goes before the spars where there are some behind', () => {
+    const once = withSet(empty, 0, 'stringerPair');
+    const twice = withSet(once, 0, 'stringerPair');
+    const places = twice.surfaces[0]!.parts.map((part) => (part.kind === 'strip' ? part.at?.[0] : null));
+    expect(places).toEqual([0.6, 0.6, 0.12, 0.12]);
+    expect(twice.surfaces[0]!.parts.map(({ name }) => name)[2]).toBe('Stringer, top 2');
+  });
+});
 
 describe('a new part', () => {
   it.each(PART_CHOICES)('$label suits every surface of the demo gliders and a blank wing', ({ choice }) => {

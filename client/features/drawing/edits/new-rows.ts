@@ -1,6 +1,6 @@
 import type { Bar, Item, Panel, Plan, Plate, SectionSpec, Surface, SurfaceRole } from '#shared/core/plan.ts';
 import { planformOf } from '#shared/core/planform.ts';
-import { freshId } from './rows.ts';
+import { freshId } from '#shared/plan-start/names.ts';
 
 const whole = (value: number) => Math.round(value);
 

@@ -3,7 +3,8 @@ import { useUnits } from '#client/lib/units.ts';
 import type { MaterialCategory, Plan, PlanMaterial } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import type { Units } from '#shared/format/units.ts';
-import { choices, type Fits } from '../edits/materials.ts';
+import type { Fits } from '#shared/plan-start/fits.ts';
+import { choices } from '../edits/materials.ts';
 
 interface MaterialFieldProps {
   materials: Plan['materials'];

@@ -1,7 +1,7 @@
 import { useUnits } from '#client/lib/units.ts';
 import type { Part, Plan, PlanMaterial, Side } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
-import { fitsPart } from '../edits/materials.ts';
+import { fitsPart } from '#shared/plan-start/fits.ts';
 import { Fold } from '../fold.tsx';
 import { ChoiceOf, TextOf } from './choice-of.tsx';
 import type { Form } from './form.ts';

@@ -1,7 +1,7 @@
 import { useUnits } from '#client/lib/units.ts';
 import type { Bar, Plan, Plate, Solid } from '#shared/core/plan.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
-import { fitsSolid } from '../edits/materials.ts';
+import { fitsSolid } from '#shared/plan-start/fits.ts';
 import { ChoiceOf, TextOf } from './choice-of.tsx';
 import type { Form } from './form.ts';
 import { MaterialField } from './material-field.tsx';

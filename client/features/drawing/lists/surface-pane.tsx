@@ -1,13 +1,15 @@
 import { useMemo } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
-import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
+import { Menu, MenuItem, MenuLine } from '#client/components/ui/menu.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Part, Surface } from '#shared/core/plan.ts';
+import { newPart, type PartChoice } from '#shared/plan-start/new-part.ts';
+import { newSet, type SetChoice, type SetPart } from '#shared/plan-start/part-sets.ts';
 import type { TableMaterial } from '#client/lib/material-snapshot.ts';
-import { fitsPart, inTable, preferred } from '../edits/materials.ts';
-import { newPart, PART_CHOICES, WISHES, type PartChoice } from '../edits/new-part.ts';
+import { PART_CHOICES, SET_CHOICES, withParts } from '../edits/add-parts.ts';
+import { inTable } from '../edits/materials.ts';
 import { changeParts, dropUnused, inTurn, keepMaterial } from '../edits/plan-edits.ts';
-import { freshId, freshName, withRow } from '../edits/rows.ts';
+import { withRow } from '../edits/rows.ts';
 import type { Form } from '../forms/form.ts';
 import { PartForm } from '../forms/part-form.tsx';
 import { PanelsTable } from './panels-table.tsx';
@@ -38,29 +40,15 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
     [key, units],
   );
   const change = (parts: (parts: Part[]) => Part[]) => changeParts(index, parts);
-  const add = (choice: PartChoice) => {
-    const bare = newPart(choice, surface);
-    const material = preferred(desk.plan, table, fitsPart(bare), WISHES[choice]);
-    const part: Part = {
-      ...bare,
-      id: freshId(
-        idOf(bare.name),
-        surface.parts.map((p) => p.id),
-      ),
-      name: freshName(
-        bare.name,
-        surface.parts.map((p) => p.name),
-      ),
-      material: material?.key ?? '',
-    };
-    const recipe = change((parts) => [...parts, part]);
-    desk.edit(
-      material ? inTurn(keepMaterial(material.key, material.material), recipe) : recipe,
-      `add ${part.id}`,
-    );
-    desk.wish.ask(`${surface.key}/${part.id}`, 'form');
-    desk.pick(`${surface.key}/${part.id}`);
+  const put = (added: readonly SetPart[]) => {
+    const { recipe, lines } = withParts(desk.plan, surface, index, added, table);
+    const first = lines[0] ?? null;
+    desk.edit(recipe, `add ${lines.join(', ')}`);
+    desk.wish.ask(first, lines.length === 1 ? 'form' : 'row');
+    desk.pick(first);
   };
+  const add = (choice: PartChoice) => put([{ choice, part: newPart(choice, surface) }]);
+  const addSet = (choice: SetChoice) => put(newSet(choice, surface));
   return (
     <div className="grid gap-y-6">
       <div>
@@ -76,7 +64,7 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
         pathOf={(i) => `surfaces/${index}/parts/${i}`}
         change={change}
         empty="No parts yet. Begin with ribs and spars, or with a sheet for a plate tail."
-        add={<AddPart onAdd={add} />}
+        add={<AddPart onAdd={add} onSet={addSet} />}
         formOf={(part, i) => (
           <OnePart desk={desk} surface={surface} index={index} table={table} part={part} at={i} />
         )}
@@ -85,12 +73,6 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
     </div>
   );
 }
-
-const idOf = (name: string) =>
-  name
-    .toLowerCase()
-    .replace(/[^a-z0-9]+/g, '-')
-    .replace(/^-|-$/g, '');
 
 interface OnePartProps extends Omit<SurfacePaneProps, 'onRemoved'> {
   part: Part;
@@ -131,9 +113,22 @@ function OnePart({ desk, surface, index, table, part, at }: OnePartProps) {
   );
 }
 
-function AddPart({ onAdd }: { onAdd: (choice: PartChoice) => void }) {
+interface AddPartProps {
+  onAdd: (choice: PartChoice) => void;
+  onSet: (choice: SetChoice) => void;
+}
+
+function AddPart({ onAdd, onSet }: AddPartProps) {
   return (
     <Menu align="start" trigger={<Button>Add a part</Button>}>
+      <p className="caption px-3 pt-1.5 pb-1">Together, in sizes that suit</p>
+      {SET_CHOICES.map(({ choice, label }) => (
+        <MenuItem key={choice} onSelect={() => onSet(choice)}>
+          {label}
+        </MenuItem>
+      ))}
+      <MenuLine />
+      <p className="caption px-3 pt-1.5 pb-1">One by one</p>
       {PART_CHOICES.map(({ choice, label }) => (
         <MenuItem key={choice} onSelect={() => onAdd(choice)}>
           {label}

@@ -2,40 +2,21 @@ import { halfOf } from '#shared/core/half.ts';
 import type { Part, Strip, Surface } from '#shared/core/plan.ts';
 import { surfaceLine } from '#shared/core/stations.ts';
 
-/** What can be added to a surface, in the words of the trade and in the order in which a wing is built. */
-export const PART_CHOICES = [
-  { choice: 'ribs', label: 'Ribs' },
-  { choice: 'spar', label: 'Spar' },
-  { choice: 'stringer', label: 'Stringer' },
-  { choice: 'leadingEdge', label: 'Leading edge' },
-  { choice: 'trailingEdge', label: 'Trailing edge' },
-  { choice: 'sheeting', label: 'Nose sheeting' },
-  { choice: 'capStrips', label: 'Cap strips' },
-  { choice: 'web', label: 'Shear web' },
-  { choice: 'tipBlock', label: 'Tip block' },
-  { choice: 'sheet', label: 'Sheet, a plate of the whole outline' },
-  { choice: 'covering', label: 'Covering' },
-  { choice: 'finish', label: 'Finish' },
-  { choice: 'glue', label: 'Glue' },
-] as const;
-export type PartChoice = (typeof PART_CHOICES)[number]['choice'];
-
-/** Keys of the materials table that a builder would reach for first. */
-export const WISHES: Record<PartChoice, readonly string[]> = {
-  ribs: ['balsa-medium', 'balsa-light'],
-  spar: ['spruce', 'balsa-hard'],
-  stringer: ['balsa-hard', 'balsa-medium'],
-  leadingEdge: ['balsa-medium', 'balsa-hard'],
-  trailingEdge: ['balsa-medium', 'balsa-hard'],
-  sheeting: ['balsa-light', 'balsa-medium'],
-  capStrips: ['balsa-light', 'balsa-medium'],
-  web: ['balsa-medium', 'balsa-light'],
-  tipBlock: ['balsa-light', 'balsa-contest'],
-  sheet: ['balsa-light', 'balsa-medium'],
-  covering: ['tissue-light', 'film-iron-on-light'],
-  finish: ['dope-clear', 'sanding-sealer'],
-  glue: ['pva'],
-};
+/** What can be added to a surface, in the order in which a wing is built. */
+export type PartChoice =
+  | 'ribs'
+  | 'spar'
+  | 'stringer'
+  | 'leadingEdge'
+  | 'trailingEdge'
+  | 'sheeting'
+  | 'capStrips'
+  | 'web'
+  | 'tipBlock'
+  | 'sheet'
+  | 'covering'
+  | 'finish'
+  | 'glue';
 
 type Bare<P> = P extends Part ? Omit<P, 'id' | 'material'> : never;
 /** A part without the id and the material that its plan gives it. */

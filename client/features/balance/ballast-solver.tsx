@@ -74,7 +74,9 @@ export function BallastSolver({ workspace, beam, nose }: BallastSolverProps) {
       ) : (
         <p>
           <strong className="text-heading font-semibold">
-            <AskWhy question={{ of: 'ballast', arm, to }}>{grams(needed)}</AskWhy>
+            <AskWhy inText question={{ of: 'ballast', arm, to }}>
+              {grams(needed)}
+            </AskWhy>
           </strong>{' '}
           {placeOf(arm, units)} brings it to {units.format(balanceAfter(mass, from, needed, arm), 'length')}
           <span className="text-graphite">; then {grams(mass + needed)} in all.</span>

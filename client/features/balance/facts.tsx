@@ -31,7 +31,7 @@ export function Facts({ result, beam }: FactsProps) {
             <dt className="text-graphite">{label}</dt>
             <dd className="text-right font-semibold">
               {question ? (
-                <AskWhy question={question} name={label} className="min-h-row">
+                <AskWhy question={question} name={label}>
                   {figure}
                 </AskWhy>
               ) : (

@@ -127,7 +127,7 @@ function FigureRow({ question, name, said, figures, digits, look }: FigureRowPro
   );
   // One answer tells of all figures of a line, so that the first alone is a stop for the keyboard.
   const also = (figure: ReactNode) => (
-    <AskWhy question={question} second className="min-h-row">
+    <AskWhy question={question} second>
       {figure}
     </AskWhy>
   );
@@ -135,7 +135,7 @@ function FigureRow({ question, name, said, figures, digits, look }: FigureRowPro
     <Tr lit={look.lit ?? false} strong={look.strong ?? false}>
       <RowTh className={cn(line, 'py-0', look.picked && 'text-ink')}>{name}</RowTh>
       <Td numeric className={cn(line, 'pr-2')}>
-        <AskWhy question={question} name={said} className="-mr-1 min-h-row px-1">
+        <AskWhy question={question} name={said} className="-mr-1 px-1">
           {show(figures.mass, 'mass')}
           <span className="sr-only"> {units.label('mass')}</span>
           {under(`± ${show(figures.u, 'u')}`)}

@@ -73,7 +73,9 @@ export function TipWeight({ workspace, at, tip }: TipWeightProps) {
       ) : (
         <p>
           <strong className="text-heading font-semibold">
-            <AskWhy question={{ of: 'tipWeight', arm }}>{grams(needed)}</AskWhy>
+            <AskWhy inText question={{ of: 'tipWeight', arm }}>
+              {grams(needed)}
+            </AskWhy>
           </strong>{' '}
           at the {light} wing brings it to the middle
           <span className="text-graphite">

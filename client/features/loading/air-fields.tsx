@@ -96,8 +96,11 @@ export function AirFields(props: AirFieldsProps) {
         />
       </div>
       <p className="text-note text-graphite">
-        Air of <AskWhy question={{ of: 'air', ...weather }}>{units.format(density, 'airDensity')}</AskWhy>; at{' '}
-        {formatNumber(convert(weather.altitude, 'm', units.long), 0)}
+        Air of{' '}
+        <AskWhy inText question={{ of: 'air', ...weather }}>
+          {units.format(density, 'airDensity')}
+        </AskWhy>
+        ; at {formatNumber(convert(weather.altitude, 'm', units.long), 0)}
         {NARROW_SPACE}
         {units.long} the standard day has {formatNumber(standard, 1)}
         {NARROW_SPACE}°C (US Standard Atmosphere 1976).{' '}

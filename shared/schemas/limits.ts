@@ -41,6 +41,17 @@ export const LIMITS = {
   changes: { max: 100 },
   /** waiting for an answer, of one glider */
   invitations: { max: 30 },
+  /** stock pieces of one user, those used and split up included */
+  rack: { max: 10_000 },
+  /** pieces that one file brings in */
+  rackImport: { max: 2_000 },
+  /** bytes of a table that is brought in */
+  csvBytes: { max: 2_000_000 },
+  /** pieces that one is split into, and leftovers of one that is used */
+  splitParts: { max: 50 },
+  /** wood trials of one glider, and groups and parts that one names */
+  trials: { max: 50 },
+  trialWoods: { max: 200 },
   /** bytes of a JSON body; a plan of 2,000 parts takes about half a megabyte */
   bodyBytes: { max: 4_000_000 },
 } as const;

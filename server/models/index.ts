@@ -4,6 +4,7 @@ import { GliderMember, initGliderMember } from './glider-member.ts';
 import { GliderPhoto, initGliderPhoto } from './glider-photo.ts';
 import { initGliderSaveName } from './glider-save-name.ts';
 import { GliderSave, initGliderSave } from './glider-save.ts';
+import { GliderTrials, initGliderTrials } from './glider-trials.ts';
 import { Glider, initGlider } from './glider.ts';
 import { initIdempotencyKey } from './idempotency-key.ts';
 import { initMaterial } from './material.ts';
@@ -24,6 +25,7 @@ export function initModels(sequelize: Sequelize): void {
   initGliderSaveName(sequelize);
   initGliderPhoto(sequelize);
   initSheet(sequelize);
+  initGliderTrials(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
@@ -34,4 +36,5 @@ export function initModels(sequelize: Sequelize): void {
   GliderMaterial.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
   GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
   GliderPhoto.belongsTo(User, { as: 'adder', foreignKey: 'addedBy' });
+  GliderTrials.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
 }

@@ -16,6 +16,7 @@ import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';
 import { session, signIn, user } from '#shared/schemas/session.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
+import { gliderTrials, trialsInput } from '#shared/schemas/trials.ts';
 import { health } from '#server/routes/health.ts';
 import { newUser } from '#server/routes/users.ts';
 
@@ -42,6 +43,8 @@ const NAMES: Record<string, z.ZodType> = {
   PhotoForm: photoForm,
   PhotoInput: photoInput,
   PhotoList: photoList,
+  TrialsInput: trialsInput,
+  GliderTrials: gliderTrials,
   MaterialInput: materialInput,
   Material: material,
   MaterialList: materialList,

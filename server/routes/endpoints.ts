@@ -3,6 +3,7 @@ import { estimateEndpoints } from './estimates.ts';
 import { gliderEndpoints } from './gliders.ts';
 import { gliderBenchEndpoints } from './glider-bench.ts';
 import { gliderSaveEndpoints } from './glider-saves.ts';
+import { gliderTrialsEndpoints } from './glider-trials.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
 import { photoEndpoints } from './photos.ts';
@@ -18,6 +19,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...gliderSaveEndpoints,
   ...sheetEndpoints,
   ...photoEndpoints,
+  ...gliderTrialsEndpoints,
   ...materialEndpoints,
   ...userEndpoints,
   ...sessionEndpoints,

@@ -33,6 +33,8 @@ const GLIDER_ROUTES: Record<string, { action: GliderAction; allowed: GliderRole[
   'post /gliders/:id/sheets': { action: 'saveSheet', allowed: ['owner', 'builder', 'pilot'] },
   'get /gliders/:id/photos': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'post /gliders/:id/photos': { action: 'addPhoto', allowed: ['owner', 'builder', 'pilot'] },
+  'get /gliders/:id/trials': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
+  'put /gliders/:id/trials': { action: 'edit', allowed: ['owner', 'builder'] },
   'get /photos/:id/image': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'get /photos/:id/thumbnail': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'put /photos/:id': { action: 'captionPhoto', allowed: ['owner', 'builder', 'pilot'] },

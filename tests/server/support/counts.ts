@@ -12,6 +12,11 @@ const TABLES = [
   'sheets',
   'glider_photos',
   'unused_files',
+  'glider_trials',
+  'glider_assignments',
+  'stock_pieces',
+  'rack_counters',
+  'rack_imports',
   'idempotency_keys',
 ];
 

@@ -14,6 +14,7 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'put /gliders/:id/archived': () => ({ archived: true }),
   'put /gliders/:id/saves/:version/name': () => ({ name: 'Before covering' }),
   'post /gliders/:id/sheets': () => ({ note: '' }),
+  'put /gliders/:id/trials': () => ({ trials: [], terms: { arm: null, minimumMass: null } }),
   'put /photos/:id': () => ({ caption: 'Nose block glued' }),
   'post /materials': () => ({ ...MATERIAL }),
   'put /materials/:id': () => ({ ...MATERIAL }),

@@ -1,3 +1,6 @@
+import type { BuiltPart } from './built/as-built.ts';
+import { startBuilt } from './built/as-built-state.ts';
+import { sidedLines } from './built/sided-lines.ts';
 import { estimate } from './estimate.ts';
 import { halfOf } from './half.ts';
 import type { CapStrips, Plan, Ribs, Skin, Strip, Surface, Web } from './plan.ts';
@@ -123,3 +126,22 @@ export const EXAMPLE_PLAN: Plan = {
 
 /** What that plan comes to. */
 export const EXAMPLE_ESTIMATE = estimate(EXAMPLE_PLAN);
+
+const EXAMPLE_HALF_PART = {
+  line: 'wing/tip',
+  name: 'Tip',
+  group: 'wing',
+  surface: 'wing',
+  material: 'balsa',
+  u: 0,
+  estimated: 10,
+  mass: 10,
+  weighing: null,
+} as const;
+
+/** A part of 10 g half-way out on each half. */
+export const EXAMPLE_PORT: BuiltPart = { ...EXAMPLE_HALF_PART, side: 'port', at: [50, -250, 0] };
+export const EXAMPLE_STARBOARD: BuiltPart = { ...EXAMPLE_HALF_PART, side: 'starboard', at: [50, 250, 0] };
+
+/** The account of that plan before anything was weighed. */
+export const EXAMPLE_BUILT = startBuilt(sidedLines(EXAMPLE_PLAN), EXAMPLE_PLAN.materials);

@@ -17,17 +17,20 @@ const EVEN_VARIANCE = 1 / 3;
 
 /** Draws at a time: their deviates lie near the processor, and each loop is short enough to be compiled well. */
 const BLOCK = 100;
+/** Blocks from one rest to the next. */
+const BLOCKS_A_STEP = 10;
 
 /**
  * The loop over the draws. Each draw is gone through once more for how mass and balance go with each deviate: these
  * are independent, so a regression on one is a regression on all. A draw without any mass balances as reckoned.
- * @example drawOut(foldPlan(EXAMPLE_PLAN), layoutOf(foldPlan(EXAMPLE_PLAN), {}), { seed: 1, draws: 10 }).x.length // → 10
+ * Rests after every thousand draws, with the number drawn, so that whoever draws can do other things or stop there.
+ * @example [...drawOut(foldPlan(EXAMPLE_PLAN), layoutOf(foldPlan(EXAMPLE_PLAN), {}), { seed: 1, draws: 2_500 })] // → [1000, 2000]
  */
-export function drawOut(
+export function* drawOut(
   fold: FoldedPlan,
   layout: Layout,
   { seed, draws }: { seed: number; draws: number },
-): Drawn {
+): Generator<number, Drawn, undefined> {
   const { mass: wholeMass, at } = weigh(fold);
   const whole = { mass: wholeMass, x: at?.[0] ?? 0 };
   const random = randomOf(seed);
@@ -44,6 +47,7 @@ export function drawOut(
     sumMasses(layout, z, r, out, from, to, whole.x);
     gather(z, normals, out, from, to, whole);
     gather(r, evens, out, from, to, whole);
+    if (to < draws && to % (BLOCK * BLOCKS_A_STEP) === 0) yield to;
   }
   const own = (sums: Float64Array) => sums.map((sum, i) => ((layout.normal[i] ?? i) === i ? sum : 0));
   const shares = (drawn: Float64Array, byNormal: Float64Array, byEven: Float64Array) => {

@@ -46,19 +46,32 @@ export interface Draws {
 export const DEFAULT_DRAWS = 20_000;
 
 /**
- * Draws masses at random: each line's density by its spread, sheet's thickness by its tolerance, an item by its own
- * uncertainty, lines of one measured piece together, glue by share with its wood (JCGM 101:2008). One draw is one
- * product a line; nothing is allotted in between.
+ * Draws masses at random, in one go: see `drawSteps`.
  * @throws RangeError when `draws` is not a whole number above 1
  * @example drawMasses(foldPlan(EXAMPLE_PLAN), { seed: 1, draws: 100 }).mass.length // → 100
  */
 export function drawMasses(fold: FoldedPlan, options: DrawOptions): Draws {
+  const steps = drawSteps(fold, options);
+  let step = steps.next();
+  while (step.done !== true) step = steps.next();
+  return step.value;
+}
+
+/**
+ * Draws masses at random: each line's density by its spread, sheet's thickness by its tolerance, an item by its own
+ * uncertainty, lines of one measured piece together, glue by share with its wood (JCGM 101:2008). One draw is one
+ * product a line; nothing is allotted in between. Rests after every thousand draws with the number drawn; how often
+ * it is interrupted, and for how long, does not change the answer.
+ * @throws RangeError when `draws` is not a whole number above 1
+ * @example drawSteps(foldPlan(EXAMPLE_PLAN), { seed: 1, draws: 5_000 }).next() // → { value: 1000, done: false }
+ */
+export function* drawSteps(fold: FoldedPlan, options: DrawOptions): Generator<number, Draws, undefined> {
   const { seed, draws = DEFAULT_DRAWS } = options;
   if (!Number.isInteger(draws) || draws < 2) throw new RangeError(`${draws} draws are too few`);
   const layout = layoutOf(fold, options);
   const { mass, at, percentMac } = weigh(fold);
   const nominal = { mass, x: at?.[0] ?? null, percentMac };
-  const out = drawOut(fold, layout, { seed, draws });
+  const out = yield* drawOut(fold, layout, { seed, draws });
   const first = firstOrderOf(fold, layout);
   const { wing } = fold;
   const causes = layout.causes.map((cause, i): CauseShares => {

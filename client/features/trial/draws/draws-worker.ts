@@ -1,0 +1,3 @@
+import { serveDraws } from './serve-draws.ts';
+
+serveDraws(self);

@@ -11,6 +11,7 @@ export const PROBLEMS = {
   not_found: { status: 404, title: 'Not found' },
   email_taken: { status: 409, title: 'The address has an account already' },
   material_in_use: { status: 409, title: 'The material is in use' },
+  piece_in_use: { status: 409, title: 'The piece is in use' },
   key_reused: { status: 409, title: 'The idempotency key was used for something else' },
   stale_version: { status: 412, title: 'Changed in the meantime' },
   too_large: { status: 413, title: 'The body is too large' },
@@ -47,7 +48,7 @@ export class AppError extends Error {
 export const notFound = (noun: Noun) => new AppError('not_found', `That ${noun} does not exist.`);
 
 export type Noun =
-  'glider' | 'sheet' | 'material' | 'saved state' | 'photo' | 'member' | 'invitation' | 'session';
+  'glider' | 'piece' | 'sheet' | 'material' | 'saved state' | 'photo' | 'member' | 'invitation' | 'session';
 
 export const nothingHere = () => new AppError('not_found', 'There is nothing at this address.');
 

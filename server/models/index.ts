@@ -10,6 +10,7 @@ import { initIdempotencyKey } from './idempotency-key.ts';
 import { initMaterial } from './material.ts';
 import { Session, initSession } from './session.ts';
 import { initSheet } from './sheet.ts';
+import { StockPiece, initStockPiece } from './stock-piece.ts';
 import { User, initUser } from './user.ts';
 
 /** Binds every model to a database; all associations between them are here and nowhere else. */
@@ -26,6 +27,7 @@ export function initModels(sequelize: Sequelize): void {
   initGliderPhoto(sequelize);
   initSheet(sequelize);
   initGliderTrials(sequelize);
+  initStockPiece(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
@@ -36,5 +38,6 @@ export function initModels(sequelize: Sequelize): void {
   GliderMaterial.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
   GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
   GliderPhoto.belongsTo(User, { as: 'adder', foreignKey: 'addedBy' });
+  StockPiece.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   GliderTrials.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
 }

@@ -14,8 +14,17 @@ import { material, materialInput, materialList, materialUses } from '#shared/sch
 import { photo, photoForm, photoInput, photoList } from '#shared/schemas/photo.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';
+import {
+  rackList,
+  reservationInput,
+  splitInput,
+  splitResult,
+  useInput,
+  useResult,
+} from '#shared/schemas/rack.ts';
 import { session, signIn, user } from '#shared/schemas/session.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
+import { stockPiece, stockPieceInput } from '#shared/schemas/stock-piece.ts';
 import { gliderTrials, trialsInput } from '#shared/schemas/trials.ts';
 import { health } from '#server/routes/health.ts';
 import { newUser } from '#server/routes/users.ts';
@@ -43,6 +52,14 @@ const NAMES: Record<string, z.ZodType> = {
   PhotoForm: photoForm,
   PhotoInput: photoInput,
   PhotoList: photoList,
+  StockPieceInput: stockPieceInput,
+  StockPiece: stockPiece,
+  RackList: rackList,
+  SplitInput: splitInput,
+  SplitResult: splitResult,
+  ReservationInput: reservationInput,
+  UseInput: useInput,
+  UseResult: useResult,
   TrialsInput: trialsInput,
   GliderTrials: gliderTrials,
   MaterialInput: materialInput,

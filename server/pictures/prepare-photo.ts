@@ -27,9 +27,10 @@ export interface PreparedPhoto {
 /**
  * Makes of a picture a JPEG of bounded size that stands upright and holds nothing but the picture: no place, no
  * camera, no hidden file behind it.
+ * @param field of the form that it came in
  * @throws AppError `unsupported_type`, or `invalid_input` for what cannot be read or has too many pixels
  */
-export async function preparePhoto(bytes: Buffer): Promise<PreparedPhoto> {
+export async function preparePhoto(bytes: Buffer, field = 'photo'): Promise<PreparedPhoto> {
   const type = pictureType(bytes);
   if (type === null || type === 'HEIC') {
     const detail = 'Photos are JPEG, PNG, WebP or AVIF.';
@@ -45,7 +46,7 @@ export async function preparePhoto(bytes: Buffer): Promise<PreparedPhoto> {
     const tooLarge = error instanceof Error && /pixel limit/i.test(error.message);
     throw invalidInput([
       {
-        pointer: '#/photo',
+        pointer: `#/${field}`,
         detail: tooLarge
           ? `Has more than ${LIMITS.photoPixels.max / 1_000_000} million pixels.`
           : `Cannot be read as a ${type} picture.`,

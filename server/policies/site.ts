@@ -6,6 +6,7 @@ const DOING: Record<SiteAction, string> = {
   addOwnMaterial: 'add materials',
   addSharedMaterial: 'add to the shared table of materials',
   addGlider: 'add gliders',
+  addStockPiece: 'add pieces to a rack',
 };
 
 export function maySite(role: UserDto['role'], action: SiteAction): boolean {

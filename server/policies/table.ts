@@ -3,6 +3,9 @@ import type { GliderRole } from '#shared/schemas/glider.ts';
 /** What the asker is to a row of materials: to everybody's rows by site role, to a private one as its keeper. */
 export type MaterialStanding = 'visitor' | 'user' | 'admin' | 'keeper';
 
+/** What the asker is to a stock piece. */
+export type StockPieceStanding = 'keeper';
+
 /**
  * Who may do what. Every service asks this table and nothing else; a test walks every role through every route.
  * Who has no role on a glider, or no standing to a material, is answered as if it did not exist.
@@ -28,17 +31,27 @@ export const POLICY = {
     edit: ['admin', 'keeper'],
     delete: ['admin', 'keeper'],
   },
+  stockPiece: {
+    read: ['keeper'],
+    edit: ['keeper'],
+    cut: ['keeper'],
+    reserve: ['keeper'],
+    delete: ['keeper'],
+  },
   site: {
     addOwnMaterial: ['user', 'admin'],
     addSharedMaterial: ['admin'],
     addGlider: ['user', 'admin'],
+    addStockPiece: ['user', 'admin'],
   },
 } as const satisfies {
   glider: Record<string, readonly GliderRole[]>;
   material: Record<string, readonly MaterialStanding[]>;
+  stockPiece: Record<string, readonly StockPieceStanding[]>;
   site: Record<string, readonly ('user' | 'admin')[]>;
 };
 
 export type GliderAction = keyof typeof POLICY.glider;
 export type MaterialAction = keyof typeof POLICY.material;
+export type StockPieceAction = keyof typeof POLICY.stockPiece;
 export type SiteAction = keyof typeof POLICY.site;

@@ -7,8 +7,10 @@ import { gliderTrialsEndpoints } from './glider-trials.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
 import { photoEndpoints } from './photos.ts';
+import { rackEndpoints } from './rack.ts';
 import { sessionEndpoints } from './session.ts';
 import { sheetEndpoints } from './sheets.ts';
+import { stockPieceEndpoints } from './stock-pieces.ts';
 import { userEndpoints } from './users.ts';
 
 /** Everything that the API answers to, except its own description. */
@@ -20,6 +22,8 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...sheetEndpoints,
   ...photoEndpoints,
   ...gliderTrialsEndpoints,
+  ...rackEndpoints,
+  ...stockPieceEndpoints,
   ...materialEndpoints,
   ...userEndpoints,
   ...sessionEndpoints,

@@ -9,15 +9,16 @@ import { preparePhoto } from '#server/pictures/prepare-photo.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
 import type { GliderAction } from '#server/policies/table.ts';
 import { presentPhoto } from '#server/presenters/photo.ts';
-import { surroundings } from '#server/surroundings.ts';
 import { allowOnGlider, gliderRoleOf, lockGlider } from './glider-access.ts';
 import { makeOnce } from './idempotency.ts';
-import { announceFiles, removeUnusedFiles } from './stored-files.ts';
-import { database, inTransaction } from './transaction.ts';
-
-export type PhotoSize = 'image' | 'thumbnail';
-
-const keyOf = (file: string, size: PhotoSize) => `photos/${file}${size === 'image' ? '' : '.small'}.jpg`;
+import {
+  readPicture,
+  removeUnusedFiles,
+  takePicture,
+  writePicture,
+  type PictureSize,
+} from './stored-files.ts';
+import { inTransaction } from './transaction.ts';
 
 const adder = { association: 'adder', attributes: ['name'] };
 
@@ -63,10 +64,7 @@ export async function addPhoto(
   await allowOnGlider(actor, gliderId, 'addPhoto');
   const { image, thumbnail, width, height } = await preparePhoto(bytes);
   const file = randomUUID();
-  const keys = [keyOf(file, 'image'), keyOf(file, 'thumbnail')] as const;
-  await announceFiles(keys);
-  await surroundings().files.write(keys[0], image);
-  await surroundings().files.write(keys[1], thumbnail);
+  await writePicture(file, { image, thumbnail });
   const id = await inTransaction(async (transaction) => {
     const { glider } = await lockGlider(actor, gliderId, 'addPhoto', transaction);
     return makeOnce(
@@ -78,7 +76,7 @@ export async function addPhoto(
         }
         const row = { id: newId, ownerId: glider.ownerId, gliderId, file, caption, width, height };
         await GliderPhoto.create({ ...row, addedBy: actor.id }, { transaction });
-        await database().query('DELETE FROM unused_files WHERE key = ANY($1)', { bind: [keys], transaction });
+        await takePicture(file, transaction);
       },
     );
   });
@@ -90,10 +88,10 @@ export async function addPhoto(
 export async function readPhoto(
   actor: UserDto,
   id: string,
-  size: PhotoSize,
+  size: PictureSize,
 ): Promise<{ bytes: Buffer; tag: string }> {
   const { file } = await findPhoto(actor, id, 'read');
-  const bytes = await surroundings().files.read(keyOf(file, size));
+  const bytes = await readPicture(file, size);
   if (!bytes) throw notFound('photo');
   return { bytes, tag: `${file}-${size}` };
 }

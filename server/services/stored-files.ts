@@ -1,4 +1,4 @@
-import { QueryTypes } from 'sequelize';
+import { QueryTypes, type Transaction } from 'sequelize';
 import { surroundings } from '#server/surroundings.ts';
 import { database, inTransaction } from './transaction.ts';
 
@@ -16,6 +16,29 @@ export async function announceFiles(keys: readonly string[]): Promise<void> {
     { bind: [keys] },
   );
 }
+
+export type PictureSize = 'image' | 'thumbnail';
+
+const pictureKey = (file: string, size: PictureSize) =>
+  `photos/${file}${size === 'image' ? '' : '.small'}.jpg`;
+const pictureKeys = (file: string) => [pictureKey(file, 'image'), pictureKey(file, 'thumbnail')];
+
+/** Writes a picture in both sizes; it is removed again unless a row takes it. */
+export async function writePicture(file: string, sizes: Record<PictureSize, Buffer>): Promise<void> {
+  await announceFiles(pictureKeys(file));
+  await surroundings().files.write(pictureKey(file, 'image'), sizes.image);
+  await surroundings().files.write(pictureKey(file, 'thumbnail'), sizes.thumbnail);
+}
+
+/** To be called in the transaction that keeps the picture's row. */
+export async function takePicture(file: string, transaction: Transaction): Promise<void> {
+  const bind = [pictureKeys(file)];
+  await database().query('DELETE FROM unused_files WHERE key = ANY($1)', { bind, transaction });
+}
+
+/** null where there is no such file */
+export const readPicture = (file: string, size: PictureSize): Promise<Buffer | null> =>
+  surroundings().files.read(pictureKey(file, size));
 
 /** Removes the files of rows that are gone or never came to be; what fails is tried again at the next tidying. */
 export async function removeUnusedFiles(): Promise<void> {

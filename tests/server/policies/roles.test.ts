@@ -8,6 +8,7 @@ import {
   type GliderAction,
   type MaterialAction,
   type MaterialStanding,
+  type StockPieceAction,
 } from '#server/policies/table.ts';
 import { ENDPOINTS } from '#server/routes/endpoints.ts';
 import { useApp } from '../support/app.ts';
@@ -49,6 +50,19 @@ const MATERIAL_ROUTES: Record<string, { action: MaterialAction; allowed: Materia
   'get /materials/:id/uses': { action: 'readUses', allowed: ['user', 'admin', 'keeper'] },
   'put /materials/:id': { action: 'edit', allowed: ['admin', 'keeper'] },
   'delete /materials/:id': { action: 'delete', allowed: ['admin', 'keeper'] },
+};
+
+const PIECE_ROUTES: Record<string, StockPieceAction> = {
+  'get /rack/:id': 'read',
+  'put /rack/:id': 'edit',
+  'delete /rack/:id': 'delete',
+  'post /rack/:id/split': 'cut',
+  'post /rack/:id/use': 'cut',
+  'put /rack/:id/reservation': 'reserve',
+  'delete /rack/:id/reservation': 'reserve',
+  'put /rack/:id/photo': 'edit',
+  'get /rack/:id/photo': 'read',
+  'delete /rack/:id/photo': 'edit',
 };
 
 function endpointOf(name: string): Endpoint {
@@ -115,6 +129,21 @@ describe('standing to a material', () => {
   });
 });
 
+describe('standing to a stock piece', () => {
+  it.each(Object.keys(PIECE_ROUTES))('%s is for the keeper of the rack alone', async (route) => {
+    const { owner, glider, paramsOf } = await makeWorld(app);
+    const builder = await makePerson(app);
+    await addMember(glider, builder.user, 'builder');
+    const admin = await makePerson(app, { role: 'admin' });
+    const endpoint = endpointOf(route);
+    const body = route === 'put /rack/:id/reservation' ? { gliderId: glider.id } : undefined;
+    for (const { agent } of [builder, admin]) {
+      expectProblem(await send(agent, endpoint, paramsOf(endpoint), body), 'not_found');
+    }
+    expect((await send(owner.agent, endpoint, paramsOf(endpoint), body)).ok).toBe(true);
+  });
+});
+
 describe('the table', () => {
   it('says of every action what is expected here', () => {
     for (const { action, allowed } of Object.values(GLIDER_ROUTES))
@@ -125,11 +154,13 @@ describe('the table', () => {
       addOwnMaterial: ['user', 'admin'],
       addSharedMaterial: ['admin'],
       addGlider: ['user', 'admin'],
+      addStockPiece: ['user', 'admin'],
     });
+    for (const action of Object.values(PIECE_ROUTES)) expect(POLICY.stockPiece[action]).toEqual(['keeper']);
   });
 
   it('is walked here for every route about one glider, sheet or material', () => {
-    const walked = [...Object.keys(GLIDER_ROUTES), ...Object.keys(MATERIAL_ROUTES)];
+    const walked = [GLIDER_ROUTES, MATERIAL_ROUTES, PIECE_ROUTES].flatMap((routes) => Object.keys(routes));
     const all = ENDPOINTS.filter(({ path }) => path.includes(':id')).map(nameOf);
     expect(walked.toSorted()).toEqual(all.toSorted());
   });

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import type { Person } from './people.ts';
+import { SHEET } from './stock.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
 
 export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
@@ -14,6 +15,12 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'put /gliders/:id/archived': () => ({ archived: true }),
   'put /gliders/:id/saves/:version/name': () => ({ name: 'Before covering' }),
   'post /gliders/:id/sheets': () => ({ note: '' }),
+  'post /rack': () => ({ ...SHEET }),
+  'put /rack/:id': () => ({ ...SHEET }),
+  'post /rack/:id/split': () => ({ along: 'length', wanted: [100], kerf: 1 }),
+  'post /rack/:id/use': () => ({ gliderId: null, leftovers: [] }),
+  'put /rack/:id/reservation': () => ({ gliderId: randomUUID() }),
+  'put /rack/:id/photo': () => ({}),
   'put /gliders/:id/trials': () => ({ trials: [], terms: { arm: null, minimumMass: null } }),
   'put /photos/:id': () => ({ caption: 'Nose block glued' }),
   'post /materials': () => ({ ...MATERIAL }),

@@ -10,6 +10,8 @@ export const PROBLEMS = {
   forbidden: { status: 403, title: 'Not allowed' },
   not_found: { status: 404, title: 'Not found' },
   email_taken: { status: 409, title: 'The address has an account already' },
+  corrected_already: { status: 409, title: 'Corrected already' },
+  signed_already: { status: 409, title: 'Another record was signed under this id' },
   material_in_use: { status: 409, title: 'The material is in use' },
   piece_in_use: { status: 409, title: 'The piece is in use' },
   key_reused: { status: 409, title: 'The idempotency key was used for something else' },
@@ -48,7 +50,17 @@ export class AppError extends Error {
 export const notFound = (noun: Noun) => new AppError('not_found', `That ${noun} does not exist.`);
 
 export type Noun =
-  'glider' | 'piece' | 'sheet' | 'material' | 'saved state' | 'photo' | 'member' | 'invitation' | 'session';
+  | 'glider'
+  | 'piece'
+  | 'sheet'
+  | 'material'
+  | 'saved state'
+  | 'photo'
+  | 'member'
+  | 'invitation'
+  | 'session'
+  | 'weighing'
+  | 'record';
 
 export const nothingHere = () => new AppError('not_found', 'There is nothing at this address.');
 

@@ -1,4 +1,6 @@
 import type { Sequelize } from 'sequelize';
+import { BuildTerms, initBuildTerms } from './build-terms.ts';
+import { initFirstFlight } from './first-flight.ts';
 import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
 import { GliderMember, initGliderMember } from './glider-member.ts';
 import { GliderPhoto, initGliderPhoto } from './glider-photo.ts';
@@ -12,6 +14,7 @@ import { Session, initSession } from './session.ts';
 import { initSheet } from './sheet.ts';
 import { StockPiece, initStockPiece } from './stock-piece.ts';
 import { User, initUser } from './user.ts';
+import { initWeighing } from './weighing.ts';
 
 /** Binds every model to a database; all associations between them are here and nowhere else. */
 export function initModels(sequelize: Sequelize): void {
@@ -28,6 +31,9 @@ export function initModels(sequelize: Sequelize): void {
   initSheet(sequelize);
   initGliderTrials(sequelize);
   initStockPiece(sequelize);
+  initWeighing(sequelize);
+  initBuildTerms(sequelize);
+  initFirstFlight(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
@@ -40,4 +46,5 @@ export function initModels(sequelize: Sequelize): void {
   GliderPhoto.belongsTo(User, { as: 'adder', foreignKey: 'addedBy' });
   StockPiece.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   GliderTrials.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
+  BuildTerms.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
 }

@@ -26,6 +26,14 @@ import { session, signIn, user } from '#shared/schemas/session.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
 import { stockPiece, stockPieceInput } from '#shared/schemas/stock-piece.ts';
 import { gliderTrials, trialsInput } from '#shared/schemas/trials.ts';
+import {
+  buildTerms,
+  buildTermsInput,
+  weighing,
+  weighingInput,
+  weighingList,
+} from '#shared/schemas/weighing.ts';
+import { firstFlight, firstFlightInput, firstFlightList } from '#shared/schemas/first-flight.ts';
 import { health } from '#server/routes/health.ts';
 import { newUser } from '#server/routes/users.ts';
 
@@ -62,6 +70,14 @@ const NAMES: Record<string, z.ZodType> = {
   UseResult: useResult,
   TrialsInput: trialsInput,
   GliderTrials: gliderTrials,
+  WeighingInput: weighingInput,
+  Weighing: weighing,
+  WeighingList: weighingList,
+  BuildTermsInput: buildTermsInput,
+  BuildTerms: buildTerms,
+  FirstFlightInput: firstFlightInput,
+  FirstFlight: firstFlight,
+  FirstFlightList: firstFlightList,
   MaterialInput: materialInput,
   Material: material,
   MaterialList: materialList,

@@ -20,6 +20,8 @@ const DOING: Record<GliderAction, string> = {
   share: 'share this glider',
   transfer: 'hand this glider over',
   leave: 'leave this glider; hand it over first',
+  weigh: 'weigh parts of this glider',
+  signFlight: 'sign first flights of this glider',
 };
 
 /** @throws AppError `forbidden` */
@@ -40,5 +42,7 @@ export function gliderAbilities(role: GliderRole): GliderAbilities {
     share: mayOnGlider(role, 'share'),
     transfer: mayOnGlider(role, 'transfer'),
     leave: mayOnGlider(role, 'leave'),
+    weigh: mayOnGlider(role, 'weigh'),
+    signFlight: mayOnGlider(role, 'signFlight'),
   };
 }

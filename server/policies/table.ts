@@ -24,6 +24,9 @@ export const POLICY = {
     share: ['owner'],
     transfer: ['owner'],
     leave: ['builder', 'pilot', 'reader'],
+    /** readings, corrections, target mass and the lead at hand */
+    weigh: ['owner', 'builder', 'pilot'],
+    signFlight: ['owner', 'builder', 'pilot'],
   },
   material: {
     read: ['visitor', 'user', 'admin', 'keeper'],

@@ -4,6 +4,9 @@ import { gliderEndpoints } from './gliders.ts';
 import { gliderBenchEndpoints } from './glider-bench.ts';
 import { gliderSaveEndpoints } from './glider-saves.ts';
 import { gliderTrialsEndpoints } from './glider-trials.ts';
+import { buildTermsEndpoints } from './build-terms.ts';
+import { firstFlightEndpoints } from './first-flights.ts';
+import { weighingEndpoints } from './weighings.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
 import { photoEndpoints } from './photos.ts';
@@ -20,6 +23,9 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...gliderBenchEndpoints,
   ...gliderSaveEndpoints,
   ...sheetEndpoints,
+  ...weighingEndpoints,
+  ...buildTermsEndpoints,
+  ...firstFlightEndpoints,
   ...photoEndpoints,
   ...gliderTrialsEndpoints,
   ...rackEndpoints,

@@ -19,6 +19,8 @@ export const gliderAbilities = z.strictObject({
   /** hand the glider over to a member */
   transfer: z.boolean(),
   leave: z.boolean(),
+  weigh: z.boolean(),
+  signFlight: z.boolean(),
 });
 
 /** The figures of the last saved plan, kept beside it for the bench. */

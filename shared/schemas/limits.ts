@@ -52,6 +52,16 @@ export const LIMITS = {
   /** wood trials of one glider, and groups and parts that one names */
   trials: { max: 50 },
   trialWoods: { max: 200 },
+  /** weighings of one glider, corrections included, and readings of one */
+  weighings: { max: 2_000 },
+  repeats: { max: 50 },
+  /** pieces of lead and putty at hand */
+  ballastPieces: { max: 60 },
+  /** records of one glider, scales under it, lines of the check, glides */
+  firstFlights: { max: 200 },
+  supports: { max: 12 },
+  checks: { max: 60 },
+  glides: { max: 60 },
   /** bytes of a JSON body; a plan of 2,000 parts takes about half a megabyte */
   bodyBytes: { max: 4_000_000 },
 } as const;

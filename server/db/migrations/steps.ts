@@ -6,7 +6,18 @@ import { bench } from './20261201-5-bench.ts';
 import { log } from './20261201-6-log.ts';
 import { photos } from './20261201-7-photos.ts';
 import { rack } from './20261201-9-rack.ts';
+import { built } from './20261201-10-built.ts';
 import type { Migration } from './migration.ts';
 
 /** Every step of the database, oldest first. Steps are added at the end and never changed. */
-export const STEPS: readonly Migration[] = [people, materials, gliders, sheets, bench, log, photos, rack];
+export const STEPS: readonly Migration[] = [
+  people,
+  materials,
+  gliders,
+  sheets,
+  bench,
+  log,
+  photos,
+  rack,
+  built,
+];

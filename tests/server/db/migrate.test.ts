@@ -81,6 +81,6 @@ describe('the steps of the database', () => {
   it('are all in the list, in the order of their names', () => {
     const files = readdirSync(new URL('../../../server/db/migrations', import.meta.url));
     const steps = files.filter((file) => /^\d/.test(file)).map((file) => file.replace(/\.ts$/, ''));
-    expect(names).toEqual(steps.toSorted());
+    expect(names).toEqual(steps.toSorted((a, b) => a.localeCompare(b, 'en', { numeric: true })));
   });
 });

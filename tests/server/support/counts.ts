@@ -17,6 +17,9 @@ const TABLES = [
   'stock_pieces',
   'rack_counters',
   'rack_imports',
+  'weighings',
+  'build_terms',
+  'first_flights',
   'idempotency_keys',
 ];
 

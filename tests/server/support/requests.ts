@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import type { Person } from './people.ts';
 import { SHEET } from './stock.ts';
+import { buildTermsBody, firstFlightBody, weighingBody } from './built.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
 
 export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
@@ -22,6 +23,9 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'put /rack/:id/reservation': () => ({ gliderId: randomUUID() }),
   'put /rack/:id/photo': () => ({}),
   'put /gliders/:id/trials': () => ({ trials: [], terms: { arm: null, minimumMass: null } }),
+  'post /gliders/:id/weighings': () => ({ ...weighingBody() }),
+  'put /gliders/:id/build-terms': () => ({ ...buildTermsBody() }),
+  'post /gliders/:id/first-flights': () => ({ ...firstFlightBody() }),
   'put /photos/:id': () => ({ caption: 'Nose block glued' }),
   'post /materials': () => ({ ...MATERIAL }),
   'put /materials/:id': () => ({ ...MATERIAL }),

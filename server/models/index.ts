@@ -1,6 +1,7 @@
 import type { Sequelize } from 'sequelize';
 import { BuildTerms, initBuildTerms } from './build-terms.ts';
 import { initFirstFlight } from './first-flight.ts';
+import { GliderAssignment, initGliderAssignment } from './glider-assignment.ts';
 import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
 import { GliderMember, initGliderMember } from './glider-member.ts';
 import { GliderPhoto, initGliderPhoto } from './glider-photo.ts';
@@ -34,6 +35,7 @@ export function initModels(sequelize: Sequelize): void {
   initWeighing(sequelize);
   initBuildTerms(sequelize);
   initFirstFlight(sequelize);
+  initGliderAssignment(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
@@ -45,6 +47,7 @@ export function initModels(sequelize: Sequelize): void {
   GliderSave.belongsTo(User, { as: 'author', foreignKey: 'savedBy' });
   GliderPhoto.belongsTo(User, { as: 'adder', foreignKey: 'addedBy' });
   StockPiece.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  GliderAssignment.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
   GliderTrials.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
   BuildTerms.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
 }

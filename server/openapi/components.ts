@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { assignmentInput, gliderAssignment } from '#shared/schemas/assignment.ts';
 import { estimate, estimateInput } from '#shared/schemas/estimate.ts';
 import { gliderSave, gliderSaveList, gliderState, saveNameInput } from '#shared/schemas/glider-save.ts';
 import {
@@ -68,6 +69,8 @@ const NAMES: Record<string, z.ZodType> = {
   ReservationInput: reservationInput,
   UseInput: useInput,
   UseResult: useResult,
+  AssignmentInput: assignmentInput,
+  GliderAssignment: gliderAssignment,
   TrialsInput: trialsInput,
   GliderTrials: gliderTrials,
   WeighingInput: weighingInput,

@@ -1,6 +1,7 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
 import { estimateEndpoints } from './estimates.ts';
 import { gliderEndpoints } from './gliders.ts';
+import { gliderAssignmentEndpoints } from './glider-assignments.ts';
 import { gliderBenchEndpoints } from './glider-bench.ts';
 import { gliderSaveEndpoints } from './glider-saves.ts';
 import { gliderTrialsEndpoints } from './glider-trials.ts';
@@ -28,6 +29,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...firstFlightEndpoints,
   ...photoEndpoints,
   ...gliderTrialsEndpoints,
+  ...gliderAssignmentEndpoints,
   ...rackEndpoints,
   ...stockPieceEndpoints,
   ...materialEndpoints,

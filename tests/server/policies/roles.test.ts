@@ -42,6 +42,8 @@ const GLIDER_ROUTES: Record<string, { action: GliderAction; allowed: GliderRole[
   'put /gliders/:id/build-terms': { action: 'weigh', allowed: ['owner', 'builder', 'pilot'] },
   'get /gliders/:id/first-flights': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'post /gliders/:id/first-flights': { action: 'signFlight', allowed: ['owner', 'builder', 'pilot'] },
+  'get /gliders/:id/assignment': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
+  'put /gliders/:id/assignment': { action: 'edit', allowed: ['owner', 'builder'] },
   'get /photos/:id/image': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'get /photos/:id/thumbnail': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
   'put /photos/:id': { action: 'captionPhoto', allowed: ['owner', 'builder', 'pilot'] },

@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import type { Person } from './people.ts';
-import { SHEET } from './stock.ts';
 import { buildTermsBody, firstFlightBody, weighingBody } from './built.ts';
+import { assignmentOf, SHEET } from './stock.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
 
 export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
@@ -22,6 +22,7 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'post /rack/:id/use': () => ({ gliderId: null, leftovers: [] }),
   'put /rack/:id/reservation': () => ({ gliderId: randomUUID() }),
   'put /rack/:id/photo': () => ({}),
+  'put /gliders/:id/assignment': () => assignmentOf(),
   'put /gliders/:id/trials': () => ({ trials: [], terms: { arm: null, minimumMass: null } }),
   'post /gliders/:id/weighings': () => ({ ...weighingBody() }),
   'put /gliders/:id/build-terms': () => ({ ...buildTermsBody() }),

@@ -1,3 +1,4 @@
+import type { AssignmentInput } from '#shared/schemas/assignment.ts';
 import type { StockPieceDto, StockPieceInput } from '#shared/schemas/stock-piece.ts';
 import { StockPiece } from '#server/models/stock-piece.ts';
 import type { User } from '#server/models/user.ts';
@@ -64,3 +65,20 @@ export async function fillRack(app: TestApp, user: User, count: number): Promise
     replacements,
   });
 }
+
+const BLANK = { side: null, length: 60, width: 12, thickness: 1.5875, at: null, fixed: false } as const;
+
+/** An assignment that cuts ribs, one after the other, from these pieces; null for one to be bought. */
+export const assignmentOf = (...pieceIds: (string | null)[]): AssignmentInput => ({
+  entries: pieceIds.map((pieceId, n) => ({ ...BLANK, line: 'wing/ribs', n, pieceId })),
+  terms: {
+    aim: 'matched',
+    kerf: 0.5,
+    shortestOffcut: 50,
+    massTolerance: 0.2,
+    momentTolerance: null,
+    gap: 0.01,
+    note: 'Exact within the gap',
+  },
+  gliderVersion: 1,
+});

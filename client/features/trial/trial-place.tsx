@@ -16,6 +16,9 @@ import { isBallast, runTrials, type Trial } from '#shared/core/wood-trial.ts';
 import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
 import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
+import { DrawsSection } from './draws/draws-section.tsx';
+import { useDrawSettings } from './draws/settings.ts';
+import { trimmedPlan } from './draws/trimmed-plan.ts';
 import { trialHeadline } from './headline.ts';
 import { useTrials } from './trial-store.ts';
 import { TrialTable } from './trial-table.tsx';
@@ -59,6 +62,19 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
   const asked = useDeferredValue(trials);
   const tried = useMemo(() => [{ name: 'As drawn', materials: {} }, ...asked], [asked]);
   const run = useMemo(() => runTrials(plan, tried, { arm }), [plan, tried, arm]);
+  const [drawSettings, keepDrawSettings] = useDrawSettings(glider?.id ?? 'sample');
+  const models = useMemo(
+    () => [
+      { name: 'As drawn', plan },
+      ...asked.flatMap((trial, i) => {
+        const mass = run.results[i + 1]?.ballast ?? null;
+        return mass === null
+          ? []
+          : [{ name: trial.name, plan: trimmedPlan(plan, trial, [{ mass, x: arm }]) }];
+      }),
+    ],
+    [plan, asked, run, arm],
+  );
   const { headline, detail } = trialHeadline(run, units);
 
   if (groups.length === 0) {
@@ -132,6 +148,7 @@ function Trials({ workspace, plan }: { workspace: Workspace; plan: Plan }) {
           </Suspense>
         </SectionBoundary>
       </div>
+      <DrawsSection models={models} settings={drawSettings} onSettings={keepDrawSettings} />
     </div>
   );
 }

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { drawMasses } from '#shared/core/draws.ts';
+import { drawMasses, drawSteps } from '#shared/core/draws.ts';
 import { agreementOf, summaryOf } from '#shared/core/draws-summary.ts';
 import { estimate } from '#shared/core/estimate.ts';
 import { foldPlan } from '#shared/core/linear-model.ts';
@@ -53,6 +53,16 @@ const withoutShares = (plan: Plan): Plan => ({
 });
 
 describe('draws of the masses', () => {
+  it('are the same in one go and in steps, with other draws in between', () => {
+    const fold = foldPlan(demoPlan('plover'));
+    const options = { seed: 9, draws: 2_345 };
+    const steps = drawSteps(fold, options);
+    expect(steps.next()).toEqual({ value: 1_000, done: false });
+    drawMasses(fold, { seed: 10, draws: 500 });
+    expect(steps.next()).toEqual({ value: 2_000, done: false });
+    expect(steps.next()).toEqual({ value: drawMasses(fold, options), done: true });
+  });
+
   it('are the same from the same seed, and others from another', () => {
     const fold = foldPlan(demoPlan('dunlin'));
     const [one, again, other] = [4, 4, 5].map((seed) => drawMasses(fold, { seed, draws: 50 }));

@@ -25,10 +25,13 @@ const PACKED = /\.(js|css|svg|json)$/;
 export function pageSizes(chunks) {
   const byName = new Map(chunks.map((chunk) => [chunk.fileName, chunk]));
   return BUDGETS.map(({ page, budget, modules }) => {
-    const roots = chunks.filter(
-      ({ isEntry, facadeModuleId }) => isEntry || modules.some((module) => facadeModuleId?.endsWith(module)),
-    );
-    if (roots.length <= modules.length) throw new Error(`${page}: a file of this page was not built`);
+    const entries = chunks.filter(({ isEntry }) => isEntry);
+    if (entries.length === 0) throw new Error('the build has no entry');
+    const own = modules.map((module) => {
+      const found = chunks.find(({ facadeModuleId }) => facadeModuleId?.endsWith(module));
+      if (!found) throw new Error(`${page}: ${module} has no file of its own in the build`);
+      return found;
+    });
     /** @type {Set<string>} */
     const needed = new Set();
     /** @param {string} name */
@@ -37,14 +40,18 @@ export function pageSizes(chunks) {
       needed.add(name);
       byName.get(name)?.imports?.forEach(need);
     };
-    roots.forEach(({ fileName }) => need(fileName));
-    const bytes = [...needed].reduce((sum, name) => sum + packedSize(byName.get(name)), 0);
+    [...entries, ...own].forEach(({ fileName }) => need(fileName));
+    const bytes = [...needed].reduce((sum, name) => sum + packedSize(page, byName.get(name), name), 0);
     return { page, size: bytes / 1000, budget };
   });
 }
 
-/** @param {BuiltChunk | undefined} chunk */
-const packedSize = (chunk) => (chunk?.code === undefined ? 0 : gzipSync(chunk.code, { level: 9 }).length);
+/** A file that is needed and not there would count as nothing.
+ * @param {string} page @param {BuiltChunk | undefined} chunk @param {string} name */
+function packedSize(page, chunk, name) {
+  if (chunk?.code === undefined) throw new Error(`${page}: ${name} is needed and was not built`);
+  return gzipSync(chunk.code, { level: 9 }).length;
+}
 
 /** Tells and keeps the sizes at the end of a build, and lays packed twins beside each text file. */
 export function bundleSizes() {

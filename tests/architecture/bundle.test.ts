@@ -44,8 +44,12 @@ describe('the size of a page', () => {
     expect(second?.size).toBeCloseTo(5 * one, 9);
   });
 
-  it('is not told without the page', () => {
-    expect(() => sized([])).toThrow(/Balance: a file of this page was not built/);
+  it('is not told without the page, an entry, or a file that it needs', () => {
+    expect(() => sized([])).toThrow(/Balance: .*balance-page.tsx has no file of its own/);
+    expect(() => sized([balance({ imports: ['gone.js'] })])).toThrow(/gone.js is needed and was not built/);
+    expect(() => pageSizes([])).toThrow(/no entry/);
+    // A second entry, as of a worker, does not stand for a page that is missing.
+    expect(() => sized([chunk('worker.js', 'w', { isEntry: true })])).toThrow(/has no file of its own/);
   });
 });
 

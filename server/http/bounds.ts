@@ -11,6 +11,9 @@ export const MOST_PROBLEMS = 1_000;
 /** NUL and half a surrogate pair: JSON can write them, PostgreSQL's text cannot hold them. */
 const UNSTORABLE = /\0|\p{Surrogate}/u;
 
+/** Whether PostgreSQL can hold a text. */
+export const isStorable = (text: string) => !UNSTORABLE.test(text);
+
 /**
  * What no body may be, whatever its schema: too deep, too long a list, or holding characters that cannot be
  * kept. Looked at first and in one pass, so that a hostile body costs no more than its reading.

@@ -16,6 +16,9 @@ import { photo, photoForm, photoInput, photoList } from '#shared/schemas/photo.t
 import { planSchema } from '#shared/schemas/plan.ts';
 import { problem } from '#shared/schemas/problem.ts';
 import {
+  importInput,
+  importPreview,
+  importResult,
   rackList,
   reservationInput,
   splitInput,
@@ -64,6 +67,9 @@ const NAMES: Record<string, z.ZodType> = {
   StockPieceInput: stockPieceInput,
   StockPiece: stockPiece,
   RackList: rackList,
+  ImportPreview: importPreview,
+  ImportInput: importInput,
+  ImportResult: importResult,
   SplitInput: splitInput,
   SplitResult: splitResult,
   ReservationInput: reservationInput,

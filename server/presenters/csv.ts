@@ -15,5 +15,8 @@ function csvCell(cell: Cell): string {
   return /[",\r\n]/.test(value) ? `"${value.replaceAll('"', '""')}"` : value;
 }
 
-/** A spreadsheet takes a text that begins so for a formula and would carry it out. */
-const harmless = (text: string) => (/^[=+\-@\t\r\n＝＋－＠]/u.test(text) ? `'${text}` : text);
+/**
+ * A spreadsheet takes a text that begins so for a formula and would carry it out. A text that stands behind such a mark
+ * already gets one more, so that a reader who takes one off has what was written.
+ */
+const harmless = (text: string) => (/^'*[=+\-@\t\r\n＝＋－＠]/u.test(text) ? `'${text}` : text);

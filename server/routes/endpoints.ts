@@ -11,6 +11,7 @@ import { weighingEndpoints } from './weighings.ts';
 import { healthEndpoints } from './health.ts';
 import { materialEndpoints } from './materials.ts';
 import { photoEndpoints } from './photos.ts';
+import { rackFileEndpoints } from './rack-files.ts';
 import { rackEndpoints } from './rack.ts';
 import { sessionEndpoints } from './session.ts';
 import { sheetEndpoints } from './sheets.ts';
@@ -30,6 +31,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...photoEndpoints,
   ...gliderTrialsEndpoints,
   ...gliderAssignmentEndpoints,
+  ...rackFileEndpoints,
   ...rackEndpoints,
   ...stockPieceEndpoints,
   ...materialEndpoints,

@@ -13,6 +13,8 @@ export const rackQuery = z.strictObject({
   search: z.string().trim().max(LIMITS.name.max).optional(),
 });
 
+export const exportQuery = z.strictObject({ state: rackState.default('onRack') });
+
 export const photoQuery = z.strictObject({
   /** at most 320 pixels wide and high, or 2400 */
   size: z.enum(['thumb', 'full']).default('full'),

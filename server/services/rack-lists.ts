@@ -2,7 +2,7 @@ import { col, fn, Op, where, type WhereOptions } from 'sequelize';
 import { z } from 'zod';
 import type { RackListDto, RackOrder, RackState } from '#shared/schemas/rack.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
-import type { StockKind } from '#shared/schemas/stock-piece.ts';
+import type { StockKind, StockPieceDto } from '#shared/schemas/stock-piece.ts';
 import { StockPiece } from '#server/models/stock-piece.ts';
 import { decodeCursor, pageOf, type PageQuery } from './paging.ts';
 import { presentPieces } from './stock-access.ts';
@@ -66,8 +66,7 @@ export async function listRack(actor: UserDto, query: RackQuery): Promise<RackLi
     where: {
       [Op.and]: [
         { userId: actor.id },
-        where(column('on_rack'), state === 'onRack' || state === 'free' || state === 'reserved'),
-        ...(state === 'onRack' ? [] : [{ state }]),
+        ...standing(state),
         ...(kind ? [{ kind }] : []),
         ...(search ? [matching(search)] : []),
         ...(after ? [beyondPlace(key, order, beyond, after)] : []),
@@ -82,6 +81,21 @@ export async function listRack(actor: UserDto, query: RackQuery): Promise<RackLi
     row.number,
   ]);
   return { pieces: await presentPieces(actor.id, rows), nextCursor };
+}
+
+/** Every index of the rack tells first whether a piece is still there. */
+function standing(state: RackState): WhereOptions[] {
+  const onRack = state === 'onRack' || state === 'free' || state === 'reserved';
+  return [where(column('on_rack'), onRack), ...(state === 'onRack' ? [] : [{ state }])];
+}
+
+/** The pieces of the asker's rack in one list, by number: there are at most `LIMITS.rack.max`. */
+export async function listForExport(actor: UserDto, state: RackState): Promise<StockPieceDto[]> {
+  const rows = await StockPiece.findAll({
+    where: { [Op.and]: [{ userId: actor.id }, ...standing(state)] },
+    order: [['number', 'ASC']],
+  });
+  return presentPieces(actor.id, rows);
 }
 
 function beyondPlace(

@@ -6,7 +6,7 @@ import { authorizeSite } from '#server/policies/site.ts';
 import { makeOnce } from './idempotency.ts';
 import { savedAlready } from './saved-already.ts';
 import { findPiece, lockPiece, pieceNotAtHand, presentPiece, presentPieces } from './stock-access.ts';
-import { insertPieces, stockColumns } from './stock-rows.ts';
+import { insertPieces, keptFields, stockColumns } from './stock-rows.ts';
 import { removeUnusedFiles } from './stored-files.ts';
 import { inTransaction } from './transaction.ts';
 
@@ -45,7 +45,7 @@ export function savePiece(
   return inTransaction(async (transaction) => {
     const row = await lockPiece(actor, id, 'edit', transaction);
     if (row.version !== version) {
-      return savedAlready<StockPieceDto>(await presentPiece(row, transaction), fields, STALE);
+      return savedAlready<StockPieceDto>(await presentPiece(row, transaction), keptFields(fields), STALE);
     }
     const columns = stockColumns(fields);
     const weighed =

@@ -7,15 +7,34 @@ import { invalidInput } from '#server/errors.ts';
 import { StockPiece } from '#server/models/stock-piece.ts';
 import { database } from './transaction.ts';
 
-/** Masses are kept to so many digits, which is beyond any scale: what is cut up then adds up to the last of them. */
-export const MASS_DIGITS = 12;
+/**
+ * Figures are kept to so many digits, beyond any scale and rule: 3½ in is then 88.9 mm, and what is cut up adds up to
+ * the last of them.
+ */
+const DIGITS = 12;
+const kept = (value: number) => Number(value.toPrecision(DIGITS));
 
-/** The columns of what a user says of a piece. */
-export function stockColumns({ material, ...fields }: StockPieceInput) {
-  const mass = fields.mass === null ? null : Number(fields.mass.toPrecision(MASS_DIGITS));
+/** What a user says of a piece, as it is kept. */
+export function keptFields(fields: StockPieceInput): StockPieceInput {
+  const { length, width, thickness, wall, mass, resolution } = fields;
   return {
     ...fields,
-    mass,
+    length: kept(length),
+    width: kept(width),
+    thickness: kept(thickness),
+    // A solid rod stays one.
+    wall: wall === null ? null : Math.min(kept(wall), kept(width) / 2),
+    mass: mass === null ? null : kept(mass),
+    resolution: resolution === null ? null : kept(resolution),
+  };
+}
+
+/** The columns of what a user says of a piece. */
+export function stockColumns(input: StockPieceInput) {
+  const { material, ...fields } = keptFields(input);
+  const { mass } = fields;
+  return {
+    ...fields,
     // A mass that is lighter than numbers go for its volume still has a density.
     density: mass === null ? null : Math.max((mass / volumeOfStock(fields)) * 1e6, Number.MIN_VALUE),
     materialKey: material.key,

@@ -22,6 +22,8 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'post /rack/:id/use': () => ({ gliderId: null, leftovers: [] }),
   'put /rack/:id/reservation': () => ({ gliderId: randomUUID() }),
   'put /rack/:id/photo': () => ({}),
+  'post /rack/import-previews': () => ({}),
+  'post /rack/imports': () => ({ rows: [SHEET] }),
   'put /gliders/:id/assignment': () => assignmentOf(),
   'put /gliders/:id/trials': () => ({ trials: [], terms: { arm: null, minimumMass: null } }),
   'post /gliders/:id/weighings': () => ({ ...weighingBody() }),

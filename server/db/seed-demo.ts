@@ -10,10 +10,11 @@ import { insertGlider } from '#server/services/gliders.ts';
 import { insertSheet } from '#server/services/sheets.ts';
 import { database, inTransaction } from '#server/services/transaction.ts';
 import { readDemoPlan, readPeople, SeedError, type People } from './seed-files.ts';
+import { seedDemoRack } from './seed-rack.ts';
 import { SEED_LOCK } from './seed-materials.ts';
 
 /**
- * Adds the demo's people and gliders where nobody has an account yet, whole or not at all.
+ * Adds the demo's people, gliders and wood where nobody has an account yet, whole or not at all.
  * @returns whether it was added
  */
 export async function seedDemo(): Promise<boolean> {
@@ -28,7 +29,11 @@ export async function seedDemo(): Promise<boolean> {
       const user = await User.create({ name, email, role, passwordHash: hashes[i] ?? '' }, { transaction });
       users.set(key, user);
     }
-    for (const glider of gliders) await addGlider(glider, users, transaction);
+    const gliderIds = new Map<string, string>();
+    for (const glider of gliders) {
+      gliderIds.set(glider.file, await addGlider(glider, users, transaction));
+    }
+    await seedDemoRack(users, gliderIds, transaction);
     return true;
   });
 }
@@ -37,7 +42,7 @@ async function addGlider(
   { file, owner, members, sheets }: People['gliders'][number],
   users: ReadonlyMap<string, User>,
   transaction: Transaction,
-): Promise<void> {
+): Promise<string> {
   const person = (key: string) => {
     const user = users.get(key);
     if (!user) throw new SeedError(`data/demo/people.json has no person “${key}”.`);
@@ -63,4 +68,5 @@ async function addGlider(
       transaction,
     });
   }
+  return id;
 }

@@ -29,6 +29,16 @@ export async function lockPiece(
   return row;
 }
 
+/** What becomes of a locked piece, and for which glider. */
+export async function changeState(
+  row: StockPiece,
+  state: StockState,
+  gliderId: string | null,
+  transaction: Transaction,
+): Promise<void> {
+  await row.update({ state, gliderId, version: row.version + 1, updatedAt: new Date() }, { transaction });
+}
+
 /** Pieces of one user as they are shown, each with the name of its glider where that user sees it. */
 export async function presentPieces(
   userId: string,

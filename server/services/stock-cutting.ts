@@ -6,7 +6,14 @@ import type { UserDto } from '#shared/schemas/session.ts';
 import { invalidInput } from '#server/errors.ts';
 import type { StockPiece } from '#server/models/stock-piece.ts';
 import { presentStockFields } from '#server/presenters/stock-piece.ts';
-import { findPiece, lockPiece, pieceNotAtHand, presentPiece, presentPieces } from './stock-access.ts';
+import {
+  changeState,
+  findPiece,
+  lockPiece,
+  pieceNotAtHand,
+  presentPiece,
+  presentPieces,
+} from './stock-access.ts';
 import { lockGliderForStock } from './stock-gliders.ts';
 import { insertPieces } from './stock-rows.ts';
 import { inTransaction } from './transaction.ts';
@@ -41,32 +48,34 @@ async function requireWhole(row: StockPiece, transaction: Transaction): Promise<
  * what it was reserved for its pieces are.
  * @throws AppError `invalid_input` where it is too short, `piece_in_use` where it was cut up or used already
  */
-export function splitPiece(
-  actor: UserDto,
-  id: string,
-  { along, wanted, kerf }: SplitInput,
-): Promise<SplitResultDto> {
+export function splitPiece(actor: UserDto, id: string, cuts: SplitInput): Promise<SplitResultDto> {
   return inTransaction(async (transaction) => {
     const whole = await lockPiece(actor, id, 'cut', transaction);
-    await requireWhole(whole, transaction);
-    if (along === 'width' && whole.kind === 'tube') {
-      throw invalidInput([{ pointer: '#/along', detail: 'A tube is cut across only.' }]);
-    }
-    const cuts = divideMeasure({ whole: whole[along], wanted, kerf });
-    if ('missing' in cuts) {
-      const detail = `The piece is ${Number(cuts.missing.toPrecision(6))} mm too short for these with their cuts.`;
-      throw invalidInput([{ pointer: '#/wanted', detail }]);
-    }
-    const { length, width, thickness, gliderId } = whole;
-    const blanks = cuts.pieces.map((measure) => ({ length, width, thickness, [along]: measure }));
-    const { pieces, lost } = cutFrom(whole, blanks, gliderId);
-    await whole.update(
-      { state: 'split', gliderId: null, version: whole.version + 1, updatedAt: new Date() },
-      { transaction },
-    );
-    const made = await insertPieces(actor.id, pieces, transaction);
+    const { made, lost } = await cutUp(whole, cuts, transaction);
     return { pieces: await presentPieces(actor.id, made, transaction), lost };
   });
+}
+
+/** `whole` is locked. */
+export async function cutUp(
+  whole: StockPiece,
+  { along, wanted, kerf }: SplitInput,
+  transaction: Transaction,
+): Promise<{ made: StockPiece[]; lost: number | null }> {
+  await requireWhole(whole, transaction);
+  if (along === 'width' && whole.kind === 'tube') {
+    throw invalidInput([{ pointer: '#/along', detail: 'A tube is cut across only.' }]);
+  }
+  const cuts = divideMeasure({ whole: whole[along], wanted, kerf });
+  if ('missing' in cuts) {
+    const detail = `The piece is ${Number(cuts.missing.toPrecision(6))} mm too short for these with their cuts.`;
+    throw invalidInput([{ pointer: '#/wanted', detail }]);
+  }
+  const { length, width, thickness, gliderId } = whole;
+  const blanks = cuts.pieces.map((measure) => ({ length, width, thickness, [along]: measure }));
+  const { pieces, lost } = cutFrom(whole, blanks, gliderId);
+  await changeState(whole, 'split', null, transaction);
+  return { made: await insertPieces(whole.userId, pieces, transaction), lost };
 }
 
 /**
@@ -74,36 +83,35 @@ export function splitPiece(
  * @throws AppError `invalid_input` for leftovers that are more than the piece, `piece_in_use` for a piece that was cut
  * up or used already, or is reserved for another glider
  */
-export async function buildPieceIn(
-  actor: UserDto,
-  id: string,
-  { gliderId, leftovers }: UseInput,
-): Promise<UseResultDto> {
+export async function buildPieceIn(actor: UserDto, id: string, use: UseInput): Promise<UseResultDto> {
   await findPiece(actor, id, 'cut');
   return inTransaction(async (transaction) => {
-    if (gliderId !== null) await lockGliderForStock(actor, gliderId, transaction);
-    const whole = await lockPiece(actor, id, 'cut', transaction);
-    await requireWhole(whole, transaction);
-    if (whole.state === 'reserved' && whole.gliderId !== gliderId) {
-      throw await pieceNotAtHand(whole, transaction);
-    }
-    checkLeftovers(whole, leftovers);
-    const { thickness } = whole;
-    const { pieces } = cutFrom(
-      whole,
-      leftovers.map((leftover) => ({ ...leftover, thickness })),
-      null,
-    );
-    await whole.update(
-      { state: 'used', gliderId, version: whole.version + 1, updatedAt: new Date() },
-      { transaction },
-    );
-    const made = await insertPieces(actor.id, pieces, transaction);
+    if (use.gliderId !== null) await lockGliderForStock(actor, use.gliderId, transaction);
+    const piece = await lockPiece(actor, id, 'cut', transaction);
+    const leftovers = await buildIn(piece, use, transaction);
     return {
-      piece: await presentPiece(whole, transaction),
-      leftovers: await presentPieces(actor.id, made, transaction),
+      piece: await presentPiece(piece, transaction),
+      leftovers: await presentPieces(actor.id, leftovers, transaction),
     };
   });
+}
+
+/** `whole` is locked, and so is the glider. */
+export async function buildIn(
+  whole: StockPiece,
+  { gliderId, leftovers }: UseInput,
+  transaction: Transaction,
+): Promise<StockPiece[]> {
+  await requireWhole(whole, transaction);
+  if (whole.state === 'reserved' && whole.gliderId !== gliderId) {
+    throw await pieceNotAtHand(whole, transaction);
+  }
+  checkLeftovers(whole, leftovers);
+  const { thickness } = whole;
+  const blanks = leftovers.map((leftover) => ({ ...leftover, thickness }));
+  const { pieces } = cutFrom(whole, blanks, null);
+  await changeState(whole, 'used', gliderId, transaction);
+  return insertPieces(whole.userId, pieces, transaction);
 }
 
 /** Measures that came from inches may be this much too large, as a share. */

@@ -6,7 +6,14 @@ import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { StockPiece } from '#server/models/stock-piece.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
-import { findPiece, lockPiece, pieceInUse, pieceNotAtHand, presentPiece } from './stock-access.ts';
+import {
+  changeState,
+  findPiece,
+  lockPiece,
+  pieceInUse,
+  pieceNotAtHand,
+  presentPiece,
+} from './stock-access.ts';
 import { inTransaction } from './transaction.ts';
 
 /**
@@ -42,10 +49,7 @@ export async function reservePiece(actor: UserDto, id: string, gliderId: string)
     await lockGliderForStock(actor, gliderId, transaction);
     const row = await lockPiece(actor, id, 'reserve', transaction);
     if (row.state === 'split' || row.state === 'used') throw await pieceNotAtHand(row, transaction);
-    if (row.gliderId !== gliderId) {
-      const version = row.version + 1;
-      await row.update({ state: 'reserved', gliderId, version, updatedAt: new Date() }, { transaction });
-    }
+    if (row.gliderId !== gliderId) await changeState(row, 'reserved', gliderId, transaction);
     return presentPiece(row, transaction);
   });
 }
@@ -66,10 +70,7 @@ export function freePiece(actor: UserDto, id: string): Promise<StockPieceDto> {
       });
       if (cut.length > 0) throw pieceInUse(row, wordOffcuts(row, cut));
     }
-    if (row.state !== 'free') {
-      const version = row.version + 1;
-      await row.update({ state: 'free', gliderId: null, version, updatedAt: new Date() }, { transaction });
-    }
+    if (row.state !== 'free') await changeState(row, 'free', null, transaction);
     return presentPiece(row, transaction);
   });
 }

@@ -1,10 +1,12 @@
 import { readFileSync } from 'node:fs';
 import { QueryTypes } from 'sequelize';
 import { describe, expect, it } from 'vitest';
+import { balsaGrade } from '#shared/core/grades.ts';
 import { gliderList } from '#shared/schemas/glider.ts';
+import { rackList } from '#shared/schemas/rack.ts';
 import { materialList } from '#shared/schemas/material.ts';
 import { seedDemo } from '#server/db/seed-demo.ts';
-import { readPeople, readSeedMaterials } from '#server/db/seed-files.ts';
+import { readDemoRack, readPeople, readSeedMaterials } from '#server/db/seed-files.ts';
 import { seedMaterials } from '#server/db/seed-materials.ts';
 import { Material } from '#server/models/material.ts';
 import { User } from '#server/models/user.ts';
@@ -25,6 +27,7 @@ async function everything(): Promise<string> {
     'glider_members',
     'glider_saves',
     'sheets',
+    'stock_pieces',
   ];
   const rows = await Promise.all(
     tables.map((table) =>
@@ -65,6 +68,31 @@ describe('seeding', () => {
     expect(counts.get('gliders')).toBe(gliders.length);
     expect(counts.get('sheets')).toBe(gliders.reduce((sum, { sheets }) => sum + sheets.length, 0));
     expect(counts.get('glider_materials')).toBeGreaterThan(0);
+  });
+
+  it('fills the builder’s rack with wood of densities that there are, some of it put to gliders', async () => {
+    const { owner, pieces } = await readDemoRack();
+    const { people } = await readPeople();
+    const { email } = people.find(({ key }) => key === owner)!;
+    const builder = await signInAs(app, await User.findOne({ where: { email }, rejectOnEmpty: true }));
+    const listOf = async (state: string) =>
+      rackList.parse((await builder.agent.get('/api/rack').query({ state, limit: '100' }).expect(200)).body)
+        .pieces;
+    const [onRack, reserved] = [await listOf('onRack'), await listOf('reserved')];
+    expect(new Set(reserved.map(({ reservedFor }) => reservedFor?.name))).toEqual(new Set(['Whimbrel']));
+    expect(reserved).toHaveLength(pieces.filter(({ reservedFor }) => reservedFor).length);
+    const [used, split] = [await listOf('used'), await listOf('split')];
+    expect([used.map(({ usedIn }) => usedIn?.name), split.length]).toEqual([['Dunlin'], 1]);
+    const cut = onRack.filter(({ parent }) => parent !== null);
+    expect(cut.map(({ weighed }) => weighed)).toEqual([false, false, false, false]);
+    const materials = new Map((await readSeedMaterials()).map((material) => [material.key, material]));
+    for (const { material, density, number, grade } of [...onRack, ...used, ...split]) {
+      const row = materials.get(material.key ?? '');
+      expect(row?.name, `piece ${number}`).toBe(material.name);
+      if (density === null) continue;
+      if (row?.density) expect(Math.abs(density / row.density - 1), `piece ${number}`).toBeLessThan(0.2);
+      if (material.key?.startsWith('balsa')) expect(balsaGrade(density), `piece ${number}`).toBe(grade);
+    }
   });
 
   it('changes nothing the second time', async () => {

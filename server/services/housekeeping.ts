@@ -11,9 +11,9 @@ const KEY_LIFE_MS = 30 * 24 * HOUR_MS;
 /** Deletes what has had its time: sessions, counters, idempotency keys, files. */
 export async function tidy(now = new Date()): Promise<void> {
   await lucia.deleteExpiredSessions();
-  await IdempotencyKey.destroy({
-    where: { createdAt: { [Op.lt]: new Date(now.getTime() - KEY_LIFE_MS) } },
-  });
+  const keptSince = new Date(now.getTime() - KEY_LIFE_MS);
+  await IdempotencyKey.destroy({ where: { createdAt: { [Op.lt]: keptSince } } });
+  await database().query('DELETE FROM rack_imports WHERE made_at < $1', { bind: [keptSince] });
   await removeUnusedFiles();
   await database().query('DELETE FROM rate_counters WHERE resets_at < now()');
 }

@@ -4,6 +4,7 @@ import { gliderList } from '#shared/schemas/glider.ts';
 import { useApp } from '../support/app.ts';
 import { ownDatabase } from '../support/database.ts';
 import { makePerson, type Person } from '../support/people.ts';
+import { nodesOf, type PlanNode } from '../support/query-plans.ts';
 
 const app = useApp({}, () => ownDatabase('bench', 'migrated'));
 
@@ -34,16 +35,6 @@ beforeAll(async () => {
   await fillBench(other.user.id);
   await app.sequelize.query('ANALYZE');
 });
-
-interface PlanNode {
-  'Node Type': string;
-  'Relation Name'?: string;
-  'Index Name'?: string;
-  'Actual Rows': number;
-  Plans?: PlanNode[];
-}
-
-const nodesOf = (node: PlanNode): PlanNode[] => [node, ...(node.Plans ?? []).flatMap(nodesOf)];
 
 /** The statements about gliders that a request sends to the database. */
 async function statementsOf(query: object): Promise<{ statements: string[]; body: unknown }> {

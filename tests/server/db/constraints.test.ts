@@ -4,6 +4,7 @@ import { describe, expect, it } from 'vitest';
 import { gliderRole } from '#shared/schemas/glider.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { materialBasis, materialCategory } from '#shared/schemas/material.ts';
+import { grainCut, stockKind, stockState } from '#shared/schemas/stock-piece.ts';
 import { user as userSchema } from '#shared/schemas/session.ts';
 import { failureOf } from '#server/db/failure.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
@@ -13,6 +14,7 @@ import { useApp } from '../support/app.ts';
 import { makeUser } from '../support/people.ts';
 import { makeGlider, makeMaterial, MATERIAL, planWith } from '../support/rows.ts';
 import { makeSheet } from '../support/sheets.ts';
+import { makePiece } from '../support/stock.ts';
 
 const app = useApp();
 
@@ -58,6 +60,17 @@ describe('the numbers typed into CHECK constraints', () => {
     ['materials_source_length', LIMITS.note.max],
     ['gliders_name_length', LIMITS.name.max],
     ['sheets_note_length', LIMITS.note.max],
+    ['stock_pieces_length', LIMITS.lengthMm.max],
+    ['stock_pieces_width', LIMITS.lengthMm.max],
+    ['stock_pieces_thickness', LIMITS.lengthMm.max],
+    ['stock_pieces_wall', LIMITS.lengthMm.max],
+    ['stock_pieces_mass', LIMITS.massG.max],
+    ['stock_pieces_resolution', LIMITS.massG.max],
+    ['stock_pieces_material_key', LIMITS.key.max],
+    ['stock_pieces_material_name', LIMITS.name.max],
+    ['stock_pieces_grade_length', LIMITS.name.max],
+    ['stock_pieces_note_length', LIMITS.note.max],
+    ['rack_imports_count', LIMITS.rackImport.max],
   ])('%s are the limits of the schema', async (constraint, limit) => {
     const numbers = [...(await definitionOf(constraint)).matchAll(/\d+(?:\.\d+)?/g)].map(Number);
     expect(Math.max(...numbers)).toBe(limit);
@@ -68,6 +81,10 @@ describe('the numbers typed into CHECK constraints', () => {
     ['materials_category', materialCategory.options],
     ['materials_basis', materialBasis.options],
     ['glider_members_role', gliderRole.options],
+    ['stock_pieces_kind', stockKind.options],
+    ['stock_pieces_material_category', materialCategory.options],
+    ['stock_pieces_grain_cut', grainCut.options],
+    ['stock_pieces_state', stockState.options],
   ])('%s lists the words of the schema', async (constraint, words) => {
     const listed = [...(await definitionOf(constraint)).matchAll(/'([^']+)'/g)].map(([, word]) => word);
     expect(new Set(listed)).toEqual(new Set(words));
@@ -170,5 +187,40 @@ describe('a sheet and a save in the database', () => {
       [sheet.id],
     );
     expect((await refusal(copy)).constraint).toBe('sheets_glider_id_number_key');
+  });
+});
+
+describe('a stock piece', () => {
+  it.each([
+    ['held by no glider while reserved', "state = 'reserved'", 'stock_pieces_place'],
+    ['of an unknown state', "state = 'lost'", 'stock_pieces_state'],
+    [
+      'with a density and no mass',
+      'mass_g = NULL, resolution_g = NULL, weighed = false',
+      'stock_pieces_dense',
+    ],
+    ['weighed without a mass', 'mass_g = NULL, density_kg_m3 = NULL', 'stock_pieces_weighed'],
+    ['with a wall that is no tube', 'wall_mm = 1', 'stock_pieces_tube'],
+    ['with a tube’s kind and no wall', "kind = 'tube'", 'stock_pieces_tube'],
+    ['heavier than it may be', 'mass_g = 100001', 'stock_pieces_mass'],
+  ])('is never %s', async (_, change, constraint) => {
+    const { id } = await makePiece(await makeUser());
+    const failure = await refusal(run(`UPDATE stock_pieces SET ${change} WHERE id = ?`, [id]));
+    expect(failure).toEqual({ sqlState: CHECK, constraint });
+  });
+
+  it('has a number of its own', async () => {
+    const owner = await makeUser();
+    const [, { id }] = [await makePiece(owner), await makePiece(owner)];
+    const failure = await refusal(run('UPDATE stock_pieces SET number = 1 WHERE id = ?', [id]));
+    expect(failure.constraint).toBe('stock_pieces_user_id_number_key');
+  });
+
+  it('is cut from no piece of somebody else', async () => {
+    const [mine, other] = [await makePiece(await makeUser()), await makePiece(await makeUser())];
+    const failure = await refusal(
+      run('UPDATE stock_pieces SET parent_id = ? WHERE id = ?', [other.id, mine.id]),
+    );
+    expect(failure).toEqual({ sqlState: FOREIGN_KEY, constraint: 'stock_pieces_parent' });
   });
 });

@@ -28,6 +28,13 @@ const schema = z.object({
     .string()
     .regex(/^https?:\/\/[^/\s]+$/, 'must be like https://gliders.example, without a path')
     .optional(),
+  /** The mail server; without one, mails wait, or are shown at /api/dev/mails where only this machine is served. */
+  FEATHERBEAM_SMTP_URL: z
+    .string()
+    .regex(/^smtps?:\/\//, 'must start with smtp:// or smtps://')
+    .optional(),
+  /** Who mails come from. */
+  FEATHERBEAM_MAIL_FROM: z.string().default('Featherbeam <featherbeam@localhost>'),
   /** Multiplies every rate limit. */
   FEATHERBEAM_RATE_LIMIT_SCALE: number(0.001, 1_000_000).default(1),
   /** How many reverse proxies stand in front; their X-Forwarded-For is believed so far and no further. */

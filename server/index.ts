@@ -8,8 +8,9 @@ import { seedDemo } from './db/seed-demo.ts';
 import { SeedError } from './db/seed-files.ts';
 import { seedMaterials } from './db/seed-materials.ts';
 import { openSequelize } from './db/sequelize.ts';
-import { EnvError, readEnv } from './env.ts';
+import { EnvError, readEnv, type Env } from './env.ts';
 import { home } from './house/paths.mjs';
+import { employPostman, smtpSender, type Postman } from './mail/delivery.ts';
 import { createLogger } from './middleware/request-log.ts';
 import { tidyHourly } from './services/housekeeping.ts';
 import { folderStore } from './storage/folder-store.ts';
@@ -33,6 +34,10 @@ function listen(server: Server, port: number, host: string): Promise<AddressInfo
   });
 }
 
+/** Served on loopback, and known by no other address. */
+const isOnlyHere = ({ HOST, FEATHERBEAM_ADDRESS }: Env) =>
+  FEATHERBEAM_ADDRESS === undefined && ['127.0.0.1', '::1', 'localhost'].includes(HOST);
+
 async function main(): Promise<void> {
   const env = readEnv();
   const logger = createLogger(env.LOG_LEVEL);
@@ -40,6 +45,7 @@ async function main(): Promise<void> {
   await connect(sequelize);
   await migrateUp(sequelize);
   let port = env.PORT;
+  let postman: Postman | undefined;
   const app = createApp({
     sequelize,
     logger,
@@ -49,13 +55,19 @@ async function main(): Promise<void> {
     surroundings: {
       files: folderStore(env.FEATHERBEAM_FILES ?? join(home, 'files')),
       address: () => env.FEATHERBEAM_ADDRESS ?? `http://${env.HOST}:${port}`,
-      mailsAreShown: false,
+      // Whoever reads a mail can follow its link: they are shown only where nobody but this machine is served.
+      mailsAreShown: env.FEATHERBEAM_SMTP_URL === undefined && isOnlyHere(env),
+      mailWaits: () => postman?.wake(),
     },
   });
   await seedMaterials();
   await seedDemo();
 
   const server = createServer(app);
+  if (env.FEATHERBEAM_SMTP_URL !== undefined) {
+    const send = smtpSender(env.FEATHERBEAM_SMTP_URL, env.FEATHERBEAM_MAIL_FROM);
+    postman = employPostman(send, (error) => logger.error({ err: error }, 'sending mail failed'));
+  }
   const stopTidying = tidyHourly((error) => logger.error({ err: error }, 'tidying failed'));
   // The system has chosen where it was left the choice.
   port = (await listen(server, env.PORT, env.HOST)).port;
@@ -72,6 +84,7 @@ async function main(): Promise<void> {
     const impatience = setTimeout(() => server.closeAllConnections(), STOP_PATIENCE_MS);
     await closed;
     clearTimeout(impatience);
+    await postman?.stop();
     await sequelize.close();
     process.exit(0);
   };

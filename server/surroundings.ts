@@ -7,6 +7,8 @@ export interface Surroundings {
   address: () => string;
   /** mails are kept to be read at `/api/dev/mails`, for want of a mail server */
   mailsAreShown: boolean;
+  /** a mail was written and waits to be sent */
+  mailWaits: () => void;
 }
 
 let bound: Surroundings | undefined;

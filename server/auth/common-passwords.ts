@@ -89,3 +89,9 @@ function isTwoWords(text: string): boolean {
   }
   return false;
 }
+
+/** How a common password is refused. */
+export const commonPassword = {
+  pointer: '#/password',
+  detail: 'This password is among the first that others would try. Take another one.',
+};

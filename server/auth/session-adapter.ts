@@ -11,7 +11,7 @@ const asDatabaseSession = (row: Session, id: string): DatabaseSession => ({
   id,
   userId: row.userId,
   expiresAt: row.expiresAt,
-  attributes: {},
+  attributes: { device: row.device, lastUsedAt: row.lastUsedAt },
 });
 
 const asDatabaseUser = (row: User): DatabaseUser => ({
@@ -38,6 +38,8 @@ export const sessionAdapter: Adapter = {
       idHash: hashSessionId(session.id),
       userId: session.userId,
       expiresAt: session.expiresAt,
+      device: session.attributes.device,
+      lastUsedAt: session.attributes.lastUsedAt,
     });
   },
 
@@ -57,3 +59,8 @@ export const sessionAdapter: Adapter = {
     await Session.destroy({ where: { expiresAt: { [Op.lte]: new Date() } } });
   },
 };
+
+/** Notes that a session is in use. */
+export async function touchSession(sessionId: string): Promise<void> {
+  await Session.update({ lastUsedAt: new Date() }, { where: { idHash: hashSessionId(sessionId) } });
+}

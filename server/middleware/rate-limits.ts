@@ -24,6 +24,13 @@ export const RATE_LIMITS = {
   signInByAddress: { hits: 50, minutes: 15, by: 'address', shared: true, failuresOnly: true },
   signInByAccount: { hits: 10, minutes: 15, by: 'account', shared: true, failuresOnly: true },
   signUps: { hits: 20, minutes: 60, by: 'address', shared: true },
+  /** whatever sends a mail to an address that somebody typed */
+  mailsByUser: { hits: 30, minutes: 60, by: 'user', shared: true },
+  mailsByAddress: { hits: 20, minutes: 60, by: 'address', shared: true },
+  mailsByAccount: { hits: 5, minutes: 60, by: 'account', shared: true },
+  /** guesses at mailed links and at the account's own password */
+  linkGuesses: { hits: 60, minutes: 15, by: 'address', shared: true, failuresOnly: true },
+  passwordGuesses: { hits: 10, minutes: 15, by: 'user', shared: true, failuresOnly: true },
   uploads: { hits: 120, minutes: 60, by: 'user', shared: true },
 } as const satisfies Record<string, Limit>;
 

@@ -9,7 +9,11 @@ import { initGliderSaveName } from './glider-save-name.ts';
 import { GliderSave, initGliderSave } from './glider-save.ts';
 import { GliderTrials, initGliderTrials } from './glider-trials.ts';
 import { Glider, initGlider } from './glider.ts';
+import { initInvitation, Invitation } from './invitation.ts';
+import { initReadLink, ReadLink } from './read-link.ts';
 import { initIdempotencyKey } from './idempotency-key.ts';
+import { initMail } from './mail.ts';
+import { initMailedLink, MailedLink } from './mailed-link.ts';
 import { initMaterial } from './material.ts';
 import { Session, initSession } from './session.ts';
 import { initSheet } from './sheet.ts';
@@ -21,6 +25,10 @@ import { initWeighing } from './weighing.ts';
 export function initModels(sequelize: Sequelize): void {
   initUser(sequelize);
   initSession(sequelize);
+  initMailedLink(sequelize);
+  initMail(sequelize);
+  initInvitation(sequelize);
+  initReadLink(sequelize);
   initIdempotencyKey(sequelize);
   initMaterial(sequelize);
   initGlider(sequelize);
@@ -38,6 +46,10 @@ export function initModels(sequelize: Sequelize): void {
   initGliderAssignment(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  MailedLink.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Invitation.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
+  Invitation.belongsTo(User, { as: 'inviter', foreignKey: 'invitedBy' });
+  ReadLink.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
   Glider.belongsTo(User, { as: 'owner', foreignKey: 'ownerId' });
   Glider.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
   Glider.hasMany(GliderMember, { as: 'members', foreignKey: 'gliderId' });

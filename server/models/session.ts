@@ -15,6 +15,12 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
   declare userId: string;
   declare expiresAt: Date;
   declare createdAt: CreationOptional<Date>;
+  /** by which the user’s list names it; no secret */
+  declare id: CreationOptional<string>;
+  /** such as “Firefox on Windows” */
+  declare device: CreationOptional<string>;
+  /** to the hour */
+  declare lastUsedAt: CreationOptional<Date>;
   declare user?: NonAttribute<User>;
 }
 
@@ -25,6 +31,9 @@ export function initSession(sequelize: Sequelize): void {
       userId: { type: DataTypes.UUID, allowNull: false },
       expiresAt: { type: DataTypes.DATE, allowNull: false },
       createdAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+      id: { type: DataTypes.UUID, allowNull: false, defaultValue: DataTypes.UUIDV4 },
+      device: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
+      lastUsedAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     },
     { sequelize, tableName: 'sessions' },
   );

@@ -27,6 +27,33 @@ import {
   useResult,
 } from '#shared/schemas/rack.ts';
 import { session, signIn, user } from '#shared/schemas/session.ts';
+import {
+  account,
+  accountChanges,
+  accountDeletion,
+  accountDeletionInput,
+  accountSessionList,
+  emailChange,
+  passwordChange,
+  passwordForgotten,
+  passwordReset,
+  tokenInput,
+  verifiedEmail,
+} from '#shared/schemas/account.ts';
+import { mailList } from '#shared/schemas/mail.ts';
+import {
+  invitation,
+  invitationAccepted,
+  invitationInput,
+  invitationList,
+  invitationPreview,
+  member,
+  memberInput,
+  memberList,
+  ownershipInput,
+  readLinkState,
+  sharedGlider,
+} from '#shared/schemas/sharing.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
 import { stockPiece, stockPieceInput } from '#shared/schemas/stock-piece.ts';
 import { gliderTrials, trialsInput } from '#shared/schemas/trials.ts';
@@ -91,6 +118,29 @@ const NAMES: Record<string, z.ZodType> = {
   Material: material,
   MaterialList: materialList,
   MaterialUses: materialUses,
+  Account: account,
+  AccountChanges: accountChanges,
+  AccountDeletion: accountDeletion,
+  AccountDeletionInput: accountDeletionInput,
+  AccountSessionList: accountSessionList,
+  EmailChange: emailChange,
+  PasswordChange: passwordChange,
+  PasswordForgotten: passwordForgotten,
+  PasswordReset: passwordReset,
+  TokenInput: tokenInput,
+  VerifiedEmail: verifiedEmail,
+  MailList: mailList,
+  Invitation: invitation,
+  InvitationAccepted: invitationAccepted,
+  InvitationInput: invitationInput,
+  InvitationList: invitationList,
+  InvitationPreview: invitationPreview,
+  Member: member,
+  MemberInput: memberInput,
+  MemberList: memberList,
+  OwnershipInput: ownershipInput,
+  ReadLinkState: readLinkState,
+  SharedGlider: sharedGlider,
   NewUser: newUser,
   SignIn: signIn,
   User: user,

@@ -1,4 +1,8 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
+import { accountEndpoints } from './account.ts';
+import { invitationEndpoints } from './invitations.ts';
+import { mailedLinkEndpoints } from './mailed-links.ts';
+import { sharingEndpoints } from './sharing.ts';
 import { estimateEndpoints } from './estimates.ts';
 import { gliderEndpoints } from './gliders.ts';
 import { gliderAssignmentEndpoints } from './glider-assignments.ts';
@@ -35,7 +39,11 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...rackEndpoints,
   ...stockPieceEndpoints,
   ...materialEndpoints,
+  ...sharingEndpoints,
+  ...invitationEndpoints,
   ...userEndpoints,
+  ...accountEndpoints,
+  ...mailedLinkEndpoints,
   ...sessionEndpoints,
   ...healthEndpoints,
 ];

@@ -1,7 +1,7 @@
 import { session, signIn as signInSchema } from '#shared/schemas/session.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
-import { presentUser } from '#server/presenters/user.ts';
-import { endSession, signIn } from '#server/services/sessions.ts';
+import { browserOf } from '#server/http/browser.ts';
+import { currentSession, endSession, signIn } from '#server/services/sessions.ts';
 
 export const sessionEndpoints: Endpoint[] = [
   endpoint({
@@ -11,7 +11,7 @@ export const sessionEndpoints: Endpoint[] = [
     summary: 'Who is signed in here; null for a visitor',
     access: 'anyone',
     answer: { status: 200, schema: session },
-    handle: ({ actor }) => ({ body: { user: actor && presentUser(actor) } }),
+    handle: async ({ actor }) => ({ body: await currentSession(actor) }),
   }),
   endpoint({
     method: 'post',
@@ -24,8 +24,8 @@ export const sessionEndpoints: Endpoint[] = [
     answer: { status: 200, schema: session },
     problems: ['wrong_credentials'],
     handle: async ({ body, req }) => {
-      const { user, cookie } = await signIn(body, req.get('Cookie'));
-      return { body: { user }, cookie };
+      const { session: begun, cookie } = await signIn(body, browserOf(req));
+      return { body: begun, cookie };
     },
   }),
   endpoint({

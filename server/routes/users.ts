@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { session, signUp as signUpSchema, type SignUp } from '#shared/schemas/session.ts';
-import { isCommonPassword } from '#server/auth/common-passwords.ts';
+import { commonPassword, isCommonPassword } from '#server/auth/common-passwords.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
+import { browserOf } from '#server/http/browser.ts';
 import { signUp } from '#server/services/users.ts';
 
 const typed = z.looseObject({
@@ -15,7 +16,7 @@ export const newUser = signUpSchema.refine(
   (input: SignUp) => !isCommonPassword(input.password, typed.parse(input)),
   {
     path: ['password'],
-    message: 'This password is among the first that others would try. Take another one.',
+    message: commonPassword.detail,
     when: ({ value }) => (typed.safeParse(value).data?.password ?? '') !== '',
   },
 );
@@ -32,8 +33,8 @@ export const userEndpoints: Endpoint[] = [
     answer: { status: 201, schema: session },
     problems: ['email_taken'],
     handle: async ({ body, req }) => {
-      const { user, cookie } = await signUp(body, req.get('Cookie'));
-      return { body: { user }, cookie };
+      const { session: begun, cookie } = await signUp(body, browserOf(req));
+      return { body: begun, cookie };
     },
   }),
 ];

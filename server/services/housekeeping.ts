@@ -1,6 +1,9 @@
 import { Op } from 'sequelize';
 import { lucia } from '#server/auth/lucia.ts';
 import { IdempotencyKey } from '#server/models/idempotency-key.ts';
+import { forgetOldMails } from '#server/mail/outbox.ts';
+import { forgetDeadInvitations } from './invitations.ts';
+import { forgetDeadLinks } from './mailed-links.ts';
 import { removeUnusedFiles } from './stored-files.ts';
 import { database } from './transaction.ts';
 
@@ -14,6 +17,9 @@ export async function tidy(now = new Date()): Promise<void> {
   const keptSince = new Date(now.getTime() - KEY_LIFE_MS);
   await IdempotencyKey.destroy({ where: { createdAt: { [Op.lt]: keptSince } } });
   await database().query('DELETE FROM rack_imports WHERE made_at < $1', { bind: [keptSince] });
+  await forgetDeadLinks(now);
+  await forgetDeadInvitations(now);
+  await forgetOldMails(now);
   await removeUnusedFiles();
   await database().query('DELETE FROM rate_counters WHERE resets_at < now()');
 }

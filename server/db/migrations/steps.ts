@@ -5,6 +5,7 @@ import { sheets } from './20261201-4-sheets.ts';
 import { bench } from './20261201-5-bench.ts';
 import { log } from './20261201-6-log.ts';
 import { photos } from './20261201-7-photos.ts';
+import { accounts } from './20261201-8-accounts.ts';
 import { rack } from './20261201-9-rack.ts';
 import { built } from './20261201-10-built.ts';
 import type { Migration } from './migration.ts';
@@ -18,6 +19,7 @@ export const STEPS: readonly Migration[] = [
   bench,
   log,
   photos,
+  accounts,
   rack,
   built,
 ];

@@ -6,7 +6,7 @@ import { useApp } from '../support/app.ts';
 import { changes, countRows } from '../support/counts.ts';
 import { makePerson } from '../support/people.ts';
 import { expectProblem, refusedFields } from '../support/problems.ts';
-import { call, goodBody, send } from '../support/requests.ts';
+import { call, goodBody, NO_TOKEN, send } from '../support/requests.ts';
 import { makeWorld } from '../support/world.ts';
 
 const app = useApp();
@@ -20,7 +20,7 @@ const withId = ENDPOINTS.filter(({ path }) => path.includes(':id'));
 const withBody = ENDPOINTS.filter(({ schemas, upload }) => schemas.body && !upload);
 
 /** Parameters that lead to nobody's row. */
-const nowhere = () => ({ id: randomUUID(), version: '1' });
+const nowhere = () => ({ id: randomUUID(), version: '1', userId: randomUUID(), token: NO_TOKEN });
 
 describe('every endpoint', () => {
   it.each(named(needSession))('%s answers a visitor with 401 and changes nothing', async (_, endpoint) => {

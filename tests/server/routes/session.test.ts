@@ -74,6 +74,7 @@ describe('GET /api/session', () => {
     const { user, agent } = await makePerson(app, { role: 'admin' });
     expect((await agent.get('/api/session').expect(200)).body).toEqual({
       user: { id: user.id, name: user.name, email: user.email, role: 'admin' },
+      preferences: { units: {}, theme: 'system' },
     });
     expect((await app.visitor().get('/api/session').expect(200)).body).toEqual({ user: null });
   });

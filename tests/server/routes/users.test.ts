@@ -22,8 +22,8 @@ describe('POST /api/users', () => {
       .expect(201);
     const { user } = sessionSchema.parse(res.body);
     expect(user).toMatchObject({ name: 'Wren', email: email.toLowerCase(), role: 'user' });
-    expect((await visitor.get('/api/session')).body).toEqual({ user });
-    expect(changes(before, await countRows())).toEqual({ users: 1 });
+    expect((await visitor.get('/api/session')).body).toEqual(res.body);
+    expect(changes(before, await countRows())).toEqual({ users: 1, sessions: 1, mailed_links: 1, mails: 1 });
     const row = await User.findByPk(user?.id ?? '', { rejectOnEmpty: true });
     // OWASP Password Storage Cheat Sheet: argon2id, m = 19456 KiB, t = 2, p = 1.
     expect(row.passwordHash).toMatch(/^\$argon2id\$v=19\$m=19456,t=2,p=1\$/);

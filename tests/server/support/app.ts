@@ -48,7 +48,12 @@ export function useApp(changes: Partial<AppSettings> = {}, database = workerData
       clientDir: '/nowhere',
       rateLimitScale: GENEROUS,
       proxies: 0,
-      surroundings: { files: folderStore(files), address: () => ADDRESS, mailsAreShown: true },
+      surroundings: {
+        files: folderStore(files),
+        address: () => ADDRESS,
+        mailsAreShown: true,
+        mailWaits: () => {},
+      },
       ...changes,
     });
     const server = createServer(app);

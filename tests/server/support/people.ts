@@ -11,7 +11,9 @@ let count = 0;
 let hash: Promise<string> | undefined;
 
 /** A new user; every one of them has `PASSWORD`. */
-export async function makeUser(changes: { name?: string; role?: UserDto['role'] } = {}): Promise<User> {
+export async function makeUser(
+  changes: { name?: string; role?: UserDto['role']; verified?: boolean } = {},
+): Promise<User> {
   count += 1;
   hash ??= hashPassword(PASSWORD);
   const unique = `${count}-${process.env['VITEST_POOL_ID'] ?? 0}-${process.hrtime.bigint()}`;
@@ -20,6 +22,7 @@ export async function makeUser(changes: { name?: string; role?: UserDto['role'] 
     email: `pilot-${unique}@larkmoor.example`,
     role: changes.role ?? 'user',
     passwordHash: await hash,
+    verifiedAt: changes.verified === false ? null : new Date(),
   });
 }
 
@@ -30,7 +33,7 @@ export interface Person {
 }
 
 export async function signInAs(app: TestApp, user: User): Promise<Person> {
-  const session = await lucia.createSession(user.id, {});
+  const session = await lucia.createSession(user.id, { device: 'Test', lastUsedAt: new Date() });
   const agent = app.visitor();
   agent.set('Cookie', `${lucia.sessionCookieName}=${session.id}`);
   return { user, agent };

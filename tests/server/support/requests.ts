@@ -1,9 +1,12 @@
 import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
-import type { Person } from './people.ts';
+import { PASSWORD, type Person } from './people.ts';
 import { buildTermsBody, firstFlightBody, weighingBody } from './built.ts';
 import { assignmentOf, SHEET } from './stock.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
+
+/** In the form of a mailed link's, of which there is none. */
+export const NO_TOKEN = 'A'.repeat(43);
 
 export const nameOf = ({ method, path }: Endpoint) => `${method} ${path}`;
 
@@ -33,6 +36,19 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'post /materials': () => ({ ...MATERIAL }),
   'put /materials/:id': () => ({ ...MATERIAL }),
   'post /gliders/:id/photos': () => ({ caption: 'Nose block glued' }),
+  'patch /account': () => ({ name: 'Ada Quill' }),
+  'post /account/email': () => ({ email: 'quill.new@larkmoor.example', password: PASSWORD }),
+  'put /account/password': () => ({ current: PASSWORD, password: 'nine lime laminations' }),
+  'post /account/deletion': () => ({ password: PASSWORD }),
+  'post /email-verifications': () => ({ token: NO_TOKEN }),
+  'post /password-resets': () => ({ email: 'quill@larkmoor.example' }),
+  'put /password-resets': () => ({ token: NO_TOKEN, password: 'nine lime laminations' }),
+  'post /gliders/:id/invitations': () => ({ email: 'quill@larkmoor.example', role: 'pilot' }),
+  'post /invitations/preview': () => ({ token: NO_TOKEN }),
+  'post /invitations/accept': () => ({ token: NO_TOKEN }),
+  'post /invitations/decline': () => ({ token: NO_TOKEN }),
+  'put /gliders/:id/members/:userId': () => ({ role: 'pilot' }),
+  'post /gliders/:id/ownership': () => ({ userId: randomUUID() }),
   'post /users': () => ({
     name: 'Ada Quill',
     email: 'quill@larkmoor.example',

@@ -3,8 +3,10 @@ import type { GliderRole } from '#shared/schemas/glider.ts';
 import type { MaterialInput } from '#shared/schemas/material.ts';
 import { planSchema, type PlanDto } from '#shared/schemas/plan.ts';
 import { estimatePlan } from '#server/estimating/estimate-plan.ts';
+import { hashToken, newToken } from '#server/auth/tokens.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
+import { Invitation } from '#server/models/invitation.ts';
 import { Material } from '#server/models/material.ts';
 import type { User } from '#server/models/user.ts';
 import { headlineOf } from '#server/services/figures.ts';
@@ -69,6 +71,20 @@ export async function addMember(
   role: Exclude<GliderRole, 'owner'>,
 ): Promise<void> {
   await GliderMember.create({ ownerId: glider.ownerId, gliderId: glider.id, userId: user.id, role });
+}
+
+/** An invitation that waits for an answer; nobody knows its link. */
+export function makeInvitation(glider: Glider, by: User): Promise<Invitation> {
+  return Invitation.create({
+    id: randomUUID(),
+    ownerId: glider.ownerId,
+    gliderId: glider.id,
+    email: 'finch@larkmoor.example',
+    role: 'pilot',
+    tokenHash: hashToken(newToken()),
+    invitedBy: by.id,
+    expiresAt: new Date(Date.now() + 86_400_000),
+  });
 }
 
 export const MATERIAL: MaterialInput = {

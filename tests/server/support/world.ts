@@ -1,10 +1,11 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
+import { Session } from '#server/models/session.ts';
 import { putPiecePhoto } from '#server/services/stock-photos.ts';
 import type { TestApp } from './app.ts';
 import { makePhoto, smallPicture } from './photos.ts';
 import { makePerson, type Person } from './people.ts';
 import type { Params } from './requests.ts';
-import { makeGlider, makeMaterial } from './rows.ts';
+import { addMember, makeGlider, makeInvitation, makeMaterial } from './rows.ts';
 import { makePiece } from './stock.ts';
 import { makeSheet } from './sheets.ts';
 
@@ -24,16 +25,26 @@ export async function makeWorld(app: TestApp): Promise<World> {
   const photo = await makePhoto(glider, owner.user);
   const piece = await makePiece(owner.user);
   await putPiecePhoto(owner.user, piece.id, await smallPicture());
+  const member = await makePerson(app);
+  await addMember(glider, member.user, 'reader');
+  const invitation = await makeInvitation(glider, owner.user);
+  const session = await Session.findOne({ where: { userId: owner.user.id }, rejectOnEmpty: true });
   const ids: Record<string, string> = {
     gliders: glider.id,
     sheets: sheet.id,
     materials: material.id,
     photos: photo.id,
     rack: piece.id,
+    invitations: invitation.id,
+    account: session.id,
   };
   return {
     owner,
     glider,
-    paramsOf: ({ path }) => ({ id: ids[path.split('/')[1] ?? ''] ?? '', version: '1' }),
+    paramsOf: ({ path }) => ({
+      id: ids[path.split('/')[1] ?? ''] ?? '',
+      version: '1',
+      userId: member.user.id,
+    }),
   };
 }

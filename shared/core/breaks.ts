@@ -23,14 +23,14 @@ export function signChanges(
   for (const panel of line.panels) {
     const [a, b] = [Math.max(from, panel.start), Math.min(to, panel.end)];
     if (b <= a) continue;
-    const at = (s: number) => f(stationAt(line, s, panel));
     let low = a;
-    let atLow = at(low);
+    let atLow = f(stationAt(line, low, panel));
     for (let i = 1; i <= pieces; i++) {
       const high = a + ((b - a) * i) / pieces;
-      const atHigh = at(high);
-      if (atLow * atHigh < 0) found.push(bisect(at, low, high, atLow));
-      [low, atLow] = [high, atHigh];
+      const atHigh = f(stationAt(line, high, panel));
+      if (atLow * atHigh < 0) found.push(bisect((s) => f(stationAt(line, s, panel)), low, high, atLow));
+      low = high;
+      atLow = atHigh;
     }
   }
   return found;
@@ -78,11 +78,11 @@ export function breaksOverWeb(half: Half, web: Web, from: number, to: number): n
     strips.push(strip.from, strip.to);
     if (low >= high) continue;
     for (const sign of [1, -1]) {
-      const side = (station: Station) => {
-        const place = stripAt(strip, station);
-        return place.centre - x(station) * station.chord + (sign * place.width) / 2;
-      };
-      strips.push(...signChanges(half.line, low, high, 4, side));
+      const changes = signChanges(half.line, low, high, 4, (station) => {
+        const { centre, width } = stripAt(strip, station);
+        return centre - x(station) * station.chord + (sign * width) / 2;
+      });
+      strips.push(...changes);
     }
   }
   return [...half.skinEnds, ...skins, ...strips];

@@ -19,23 +19,25 @@ export function developedAt(
 ): Sums {
   const { section, chord } = station;
   const [low, high] = extent;
-  const [one, other] = facesOf(part);
+  const faces = facesOf(part);
+  const [one, other] = faces;
   const sum: Sums = { amount: 0, x: 0, z: 0 };
-  const add = (arc: Sums) => {
-    sum.amount += arc.amount * chord;
-    sum.x += arc.x * chord * chord;
-    sum.z += arc.z * chord * chord;
-  };
   if (one && other && one.from <= 0 && other.from <= 0 && low <= 0) {
-    add(wrapArc(section, Math.min(one.to, high), Math.min(other.to, high)));
+    addArc(sum, wrapArc(section, Math.min(one.to, high), Math.min(other.to, high)), chord);
     return sum;
   }
-  for (const range of [one, other]) {
-    if (!range) continue;
-    const [a, b] = [Math.max(range.from, low), Math.min(range.to, high)];
-    if (b > a) add(arcBetween(section, range.face, a, b));
+  for (const { face, from, to } of faces) {
+    const a = Math.max(from, low);
+    const b = Math.min(to, high);
+    if (b > a) addArc(sum, arcBetween(section, face, a, b), chord);
   }
   return sum;
+}
+
+function addArc(sum: Sums, arc: Sums, chord: number): void {
+  sum.amount += arc.amount * chord;
+  sum.x += arc.x * chord * chord;
+  sum.z += arc.z * chord * chord;
 }
 
 /**

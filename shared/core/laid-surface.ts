@@ -1,5 +1,6 @@
-import { surfaceLines, type LineWithLump } from './lines.ts';
+import { measureParts, type LineWithLump } from './lines.ts';
 import { noticeBoard, type Notice } from './notices.ts';
+import { stillKnown, type PartMemory } from './part-memory.ts';
 import { planformOf } from './planform.ts';
 import type { Plan, Surface } from './plan.ts';
 import type { Planform } from './result.ts';
@@ -13,6 +14,8 @@ export interface LaidSurface {
   line: SurfaceLine;
   planform: Planform;
   lines: LineWithLump[];
+  /** what each part came to, for the next estimate */
+  parts: PartMemory;
   /** of its panels and sections */
   shapeNotices: Notice[];
   /** of its parts */
@@ -35,7 +38,7 @@ const KEPT_STATIONS = 6_000;
 
 /**
  * A surface with its parts measured, or what the memory holds of the same surface in the same materials. Where only
- * its parts are others, its stations are still good.
+ * some parts are others, its stations are still good, and so is every part that has none of these within its reach.
  * @throws RangeError when a part names a material that the plan does not hold
  * @example laySurface(EXAMPLE_PLAN, EXAMPLE_WING, newMemory()).planform.mac // → 100
  */
@@ -43,25 +46,29 @@ export function laySurface(plan: Plan, surface: Surface, memory: EstimateMemory)
   const { materials } = plan;
   const known = memory.surfaces.find((laid) => laid.surface === surface && laid.materials === materials);
   if (known) return known;
-  const line = lineKept(surface, memory) ?? surfaceLine(surface);
+  const before = laidOnSameStations(surface, memory);
+  const line = before?.line ?? surfaceLine(surface);
   const shape = noticeBoard();
   checkShape(surface, line, shape.tell);
   const parts = noticeBoard();
+  const stillGood = stillKnown(before?.parts, surface, line);
+  const measured = measureParts(plan, surface, line, parts.tell, stillGood);
   return {
     surface,
     materials,
     line,
     planform: planformOf(surface, line),
-    lines: surfaceLines(plan, surface, line, parts.tell),
+    lines: measured.lines,
+    parts: { surface, line, known: measured.known },
     shapeNotices: shape.notices,
     partNotices: parts.notices,
   };
 }
 
-function lineKept({ panels, apex }: Surface, memory: EstimateMemory): SurfaceLine | undefined {
+function laidOnSameStations({ panels, apex }: Surface, memory: EstimateMemory): LaidSurface | undefined {
   const before = memory.surfaces.find(({ surface }) => surface.panels === panels && surface.apex === apex);
   const stations = before?.line.panels.reduce((sum, { known }) => sum + known.size, 0) ?? 0;
-  return stations <= KEPT_STATIONS ? before?.line : undefined;
+  return stations <= KEPT_STATIONS ? before : undefined;
 }
 
 function checkShape(surface: Surface, line: SurfaceLine, tell: (notice: Notice) => void): void {

@@ -2,6 +2,7 @@ import { gramsOfArea, gramsOfVolume, type Vec3 } from './frame.ts';
 import { halfOf, type Half } from './half.ts';
 import { centroid, emptyLump, mirrorLump, scaleLump, sumLumps, type Lump } from './lump.ts';
 import type { Notice } from './notices.ts';
+import type { RememberedPart } from './part-memory.ts';
 import { measureJoints } from './parts/glue.ts';
 import type { Basis, Measure } from './parts/measure.ts';
 import { measureSheet, measureTipBlock } from './parts/plate.ts';
@@ -92,6 +93,27 @@ function measureOn(
  * @example surfaceLines(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, () => undefined).map(({ line }) => line.mass) // → [2.256, 1, 5]
  */
 export function surfaceLines(plan: Plan, surface: Surface, line: SurfaceLine, tell: Tell): LineWithLump[] {
+  return measureParts(plan, surface, line, tell, () => undefined).lines;
+}
+
+/**
+ * The same with what is worth remembering of each part. What `known` knows of a part is taken over, and told again.
+ * @throws RangeError when the plan has no material under a part's key
+ * @example measureParts(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, () => undefined, () => undefined).known.size // → 3
+ */
+export function measureParts(
+  plan: Plan,
+  surface: Surface,
+  line: SurfaceLine,
+  tellAll: Tell,
+  knownOf: (part: Part, material: PlanMaterial) => RememberedPart | undefined,
+): { lines: LineWithLump[]; known: Map<Part, RememberedPart> } {
+  let notices: Notice[] = [];
+  const tell = (notice: Notice) => {
+    notices.push(notice);
+    tellAll(notice);
+  };
+  const known = new Map<Part, RememberedPart>();
   const halves = halvesOf(surface, line, tell);
   const apex = stationAt(line, 0);
   const root: Vec3 = [apex.leadingEdge, surface.mirrored ? 0 : apex.panel.y, apex.panel.z];
@@ -103,13 +125,23 @@ export function surfaceLines(plan: Plan, surface: Surface, line: SurfaceLine, te
     const head = { id: `${surface.key}/${part.id}`, name, group, surface: surface.key, material };
     return makeLine(head, measure, grams, cv, root);
   };
+  const measured = (part: SolidPart, material: PlanMaterial) => {
+    const basis = part.kind === 'covering' || part.kind === 'finish' ? 'area' : basisOf(material);
+    const measure = measureOn(halves, part, (half) => measurePart(half, part, basis));
+    return lineOf(part, measure, inGrams(measure.lump, basis, material), material.cv);
+  };
   for (const part of surface.parts) {
     if (part.kind === 'glue') continue;
     const material = materialOf(plan, part.material);
-    const basis = part.kind === 'covering' || part.kind === 'finish' ? 'area' : basisOf(material);
-    const measure = measureOn(halves, part, (half) => measurePart(half, part, basis));
-    done.set(part, lineOf(part, measure, inGrams(measure.lump, basis, material), material.cv));
+    const before = knownOf(part, material);
+    if (before) before.notices.forEach(tellAll);
+    const told = (notices = []);
+    const entry = before?.entry ?? measured(part, material);
+    known.set(part, before ?? { material, entry, notices: told });
+    done.set(part, entry);
   }
+  // What is told of glue is no part's that is remembered.
+  notices = [];
   const wood = [...done].filter(([part]) => materialOf(plan, part.material).category === 'wood');
   for (const part of surface.parts) {
     if (part.kind !== 'glue') continue;
@@ -125,7 +157,7 @@ export function surfaceLines(plan: Plan, surface: Surface, line: SurfaceLine, te
       done.set(part, lineOf(part, none, share, material.cv));
     }
   }
-  return surface.parts.flatMap((part) => done.get(part) ?? []);
+  return { lines: surface.parts.flatMap((part) => done.get(part) ?? []), known };
 }
 
 /**

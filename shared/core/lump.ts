@@ -53,9 +53,14 @@ export function sumLumps(lumps: readonly Lump[]): Lump {
  * @example scaleLump({ amount: 2, first: [20, 0, 0], second: [200, 0, 0] }, 3) // → { amount: 6, first: [60, 0, 0], second: [600, 0, 0] }
  */
 export function scaleLump(lump: Lump, factor: number): Lump {
-  const times = (v: Vec3): Vec3 => [v[0] * factor, v[1] * factor, v[2] * factor];
-  return { amount: lump.amount * factor, first: times(lump.first), second: times(lump.second) };
+  return {
+    amount: lump.amount * factor,
+    first: times(lump.first, factor),
+    second: times(lump.second, factor),
+  };
 }
+
+const times = (v: Vec3, factor: number): Vec3 => [v[0] * factor, v[1] * factor, v[2] * factor];
 
 /**
  * The lump's other half, mirrored in the plane of symmetry (y changes its sign).

@@ -42,26 +42,58 @@ function intervalOf(nodes: Float64Array, x: number): number {
 
 const clamp01 = (x: number) => Math.min(1, Math.max(0, x));
 
-/** The fore part of an interval of nodes, as a share of what the interval holds. */
-interface Fore {
-  share: number;
-  /** how far its middle lies before that of the whole interval, along x and z */
-  x: number;
-  z: number;
+/** How far x lies into the interval i, as a share of its width. */
+function shareOf(nodes: Float64Array, i: number, x: number): number {
+  const width = (nodes[i + 1] ?? 1) - (nodes[i] ?? 0);
+  return width > 0 ? (x - (nodes[i] ?? 0)) / width : 0;
 }
 
-/** Value at x of a running integral; `fore` says what of an interval lies before the share f of its width. */
-function runTo(run: Running, nodes: Float64Array, x: number, fore: (i: number, f: number) => Fore): Sums {
-  const i = intervalOf(nodes, x);
-  const width = (nodes[i + 1] ?? 1) - (nodes[i] ?? 0);
-  const part = fore(i, width > 0 ? (x - (nodes[i] ?? 0)) / width : 0);
-  const grown = (a: Float64Array) => part.share * ((a[i + 1] ?? 0) - (a[i] ?? 0));
-  const amount = grown(run.amount);
+/**
+ * Value of a running integral where a share of what the interval i holds has been passed; `foreX` and `foreZ` are how
+ * far the middle of that part lies before that of the whole interval.
+ */
+function passed(run: Running, i: number, share: number, foreX: number, foreZ: number): Sums {
+  const amount = share * ((run.amount[i + 1] ?? 0) - (run.amount[i] ?? 0));
   return {
     amount: (run.amount[i] ?? 0) + amount,
-    x: (run.x[i] ?? 0) + grown(run.x) - amount * part.x,
-    z: (run.z[i] ?? 0) + grown(run.z) - amount * part.z,
+    x: (run.x[i] ?? 0) + share * ((run.x[i + 1] ?? 0) - (run.x[i] ?? 0)) - amount * foreX,
+    z: (run.z[i] ?? 0) + share * ((run.z[i + 1] ?? 0) - (run.z[i] ?? 0)) - amount * foreZ,
   };
+}
+
+const thicknessAt = ({ upper, lower }: Section, i: number) => Math.max(0, (upper[i] ?? 0) - (lower[i] ?? 0));
+const middleAt = ({ upper, lower }: Section, i: number) => ((upper[i] ?? 0) + (lower[i] ?? 0)) / 2;
+
+/**
+ * Area from the nose to `to`. Inside an interval the thickness is taken as linear, so the area grows as a parabola
+ * and its middle moves aft.
+ */
+function areaTo(section: Section, run: Running, to: number): Sums {
+  const { x } = section;
+  const i = intervalOf(x, to);
+  const f = shareOf(x, i, to);
+  const t0 = thicknessAt(section, i);
+  const t1 = thicknessAt(section, i + 1);
+  if (t0 + t1 <= 0) return passed(run, i, f, 0, 0);
+  const reached = t0 + f * (t1 - t0);
+  const back =
+    (t0 + 2 * t1) / (3 * (t0 + t1)) -
+    (t0 + reached > 0 ? (f * (t0 + 2 * reached)) / (3 * (t0 + reached)) : 0);
+  return passed(
+    run,
+    i,
+    (f * (t0 + reached)) / (t0 + t1),
+    back * ((x[i + 1] ?? 1) - (x[i] ?? 0)),
+    back * (middleAt(section, i + 1) - middleAt(section, i)),
+  );
+}
+
+/** Arc of a face from the nose to `to`. */
+function arcTo(x: Float64Array, z: Float64Array, run: Running, to: number): Sums {
+  const i = intervalOf(x, to);
+  const f = shareOf(x, i, to);
+  const back = (1 - f) / 2;
+  return passed(run, i, f, back * ((x[i + 1] ?? 1) - (x[i] ?? 0)), back * ((z[i + 1] ?? 0) - (z[i] ?? 0)));
 }
 
 const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x: a.x - b.x, z: a.z - b.z });
@@ -72,25 +104,9 @@ const difference = (a: Sums, b: Sums): Sums => ({ amount: a.amount - b.amount, x
  */
 export function areaBetween(section: Section, from: number, to: number): Sums {
   const run = (setOf(section).area ??= runningArea(section));
-  const { x, upper, lower } = section;
-  const thickness = (i: number) => Math.max(0, (upper[i] ?? 0) - (lower[i] ?? 0));
-  const middle = (i: number) => ((upper[i] ?? 0) + (lower[i] ?? 0)) / 2;
-  // Inside an interval the thickness is taken as linear, so the area grows as a parabola and its middle moves aft.
-  const fore = (i: number, f: number): Fore => {
-    const [t0, t1] = [thickness(i), thickness(i + 1)];
-    if (t0 + t1 <= 0) return { share: f, x: 0, z: 0 };
-    const reached = t0 + f * (t1 - t0);
-    const back =
-      (t0 + 2 * t1) / (3 * (t0 + t1)) -
-      (t0 + reached > 0 ? (f * (t0 + 2 * reached)) / (3 * (t0 + reached)) : 0);
-    return {
-      share: (f * (t0 + reached)) / (t0 + t1),
-      x: back * ((x[i + 1] ?? 1) - (x[i] ?? 0)),
-      z: back * (middle(i + 1) - middle(i)),
-    };
-  };
-  const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
-  return difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
+  const a = clamp01(Math.min(from, to));
+  const b = clamp01(Math.max(from, to));
+  return difference(areaTo(section, run, b), areaTo(section, run, a));
 }
 
 /**
@@ -121,13 +137,9 @@ export function arcBetween(section: Section, face: FaceName, from: number, to: n
   const set = setOf(section);
   const run = (set[face] ??= runningArc(section, face));
   const { x, [face]: z } = section;
-  const fore = (i: number, f: number): Fore => ({
-    share: f,
-    x: ((1 - f) / 2) * ((x[i + 1] ?? 1) - (x[i] ?? 0)),
-    z: ((1 - f) / 2) * ((z[i + 1] ?? 0) - (z[i] ?? 0)),
-  });
-  const [a, b] = [clamp01(Math.min(from, to)), clamp01(Math.max(from, to))];
-  const arc = difference(runTo(run, x, b, fore), runTo(run, x, a, fore));
+  const a = clamp01(Math.min(from, to));
+  const b = clamp01(Math.max(from, to));
+  const arc = difference(arcTo(x, z, run, b), arcTo(x, z, run, a));
   if (face === 'lower' || a > 0 || b <= 0) return arc;
   return {
     amount: arc.amount + section.noseOnTop,
@@ -158,7 +170,8 @@ export function wrapArc(section: Section, start: number, end: number): Sums {
  */
 export function ordinateAt(section: Section, face: FaceName, x: number): number {
   const i = intervalOf(section.x, clamp01(x));
-  const [x0, x1] = [section.x[i] ?? 0, section.x[i + 1] ?? 1];
+  const x0 = section.x[i] ?? 0;
+  const x1 = section.x[i + 1] ?? 1;
   const z = section[face];
   const f = x1 > x0 ? (clamp01(x) - x0) / (x1 - x0) : 0;
   return (z[i] ?? 0) + f * ((z[i + 1] ?? 0) - (z[i] ?? 0));

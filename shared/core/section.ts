@@ -151,18 +151,19 @@ function readerOf(spec: SectionSpec, grid: Float64Array): (chord: number) => Sec
 export function blendSections(a: Section, b: Section, share: number): Section {
   if (a === b || share === 0) return a;
   if (share === 1) return b;
-  const mix = (p: Float64Array, q: Float64Array) => {
-    const mixed = new Float64Array(p.length);
-    for (let i = 0; i < p.length; i++) mixed[i] = (p[i] ?? 0) + share * ((q[i] ?? 0) - (p[i] ?? 0));
-    return mixed;
-  };
   return {
     x: a.x,
-    upper: mix(a.upper, b.upper),
-    lower: mix(a.lower, b.lower),
+    upper: mix(a.upper, b.upper, share),
+    lower: mix(a.lower, b.lower, share),
     noseOnTop: a.noseOnTop + share * (b.noseOnTop - a.noseOnTop),
     noseFace: a.noseFace + share * (b.noseFace - a.noseFace),
   };
+}
+
+function mix(p: Float64Array, q: Float64Array, share: number): Float64Array {
+  const mixed = new Float64Array(p.length);
+  for (let i = 0; i < p.length; i++) mixed[i] = (p[i] ?? 0) + share * ((q[i] ?? 0) - (p[i] ?? 0));
+  return mixed;
 }
 
 /**

@@ -87,8 +87,9 @@ export function carries(strip: Strip, material: PlanMaterial | undefined): boole
  */
 export function flangesAt(plan: Plan, half: Half, station: Station): (Flange & { part: string })[] {
   return half.strips.flatMap((strip) => {
+    if (!covers(strip, station.s)) return [];
     const material = plan.materials[strip.material];
-    if (!carries(strip, material) || !covers(strip, station.s)) return [];
+    if (!carries(strip, material)) return [];
     const place = stripAt(strip, station);
     const { area } = stripProfile(strip.profile, place.width, place.height, strip.wall);
     if (area <= 0) return [];

@@ -17,22 +17,25 @@ export function ribArea(half: Half, station: Station): Sums {
   const extent = ribExtent(half, station);
   const gross = areaBetween(section, extent[0], extent[1]);
   const net: Sums = { amount: gross.amount * chord ** 2, x: gross.x * chord ** 3, z: gross.z * chord ** 3 };
-  const takeOff = (area: number, x: number, z: number) => {
-    net.amount -= area;
-    net.x -= area * x;
-    net.z -= area * z;
-  };
-  for (const cover of [...half.skins, ...half.caps]) {
-    if (!covers(cover, station.s)) continue;
-    const arc = developedAt(cover, station, extent);
-    if (arc.amount > 0) takeOff(arc.amount * cover.thickness, arc.x / arc.amount, arc.z / arc.amount);
+  for (const covered of [half.skins, half.caps]) {
+    for (const cover of covered) {
+      if (!covers(cover, station.s)) continue;
+      const arc = developedAt(cover, station, extent);
+      if (arc.amount > 0) takeOff(net, arc.amount * cover.thickness, arc.x / arc.amount, arc.z / arc.amount);
+    }
   }
   for (const strip of half.strips) {
     if (!strip.letIn || strip.seat === 'nose' || strip.seat === 'tail' || !covers(strip, station.s)) continue;
     const place = stripAt(strip, station);
-    takeOff(place.width * place.height, place.centre, stripZ(half, strip, station, place));
+    takeOff(net, place.width * place.height, place.centre, stripZ(half, strip, station, place));
   }
   return net;
+}
+
+function takeOff(net: Sums, area: number, x: number, z: number): void {
+  net.amount -= area;
+  net.x -= area * x;
+  net.z -= area * z;
 }
 
 /** True where the notches at one place on the chord, with the skins over it, leave nothing of the rib. */

@@ -40,9 +40,8 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
   const lump = emptyLump();
   let area = 0;
   const near = stretchOf(half, from, to);
-  const room = (station: Station) => webRoom(near, part, station);
   const add = (station: Station, width: number) => {
-    const { height, middle } = room(station);
+    const { height, middle } = webRoom(near, part, station);
     if (height <= 0) {
       half.notice({ code: 'web_without_height', path, station: station.s });
       return;
@@ -54,7 +53,7 @@ export function measureWeb(half: Half, part: Web, basis: Basis): Measure {
   };
   const breaks = breaksOverWeb(near, part, from, to);
   // Where the room closes the web ends, on the way between two breaks.
-  breaks.push(...signChanges(half.line, from, to, 8, (station) => room(station).height));
+  breaks.push(...signChanges(half.line, from, to, 8, (station) => webRoom(near, part, station).height));
   for (const { station, ds } of samplesOver(half.line, from, to, breaks)) add(station, ds);
   for (const { part: ribs, stations } of half.ribs) {
     for (const station of stations) if (covers({ from, to }, station.s)) add(station, -ribs.thickness);

@@ -4,7 +4,8 @@ import { estimate } from '#shared/core/estimate.ts';
 import { newMemory } from '#shared/core/laid-surface.ts';
 import type { Part, Plan, Surface } from '#shared/core/plan.ts';
 import { anyPlan } from '#tests/support/plan-arbitrary.ts';
-import { demoPlan } from '#tests/support/plans.ts';
+import { edits } from '#tests/support/plan-edits.ts';
+import { DEMO_NAMES, demoPlan } from '#tests/support/plans.ts';
 
 /** One of the edits that a builder makes most: a part, a panel, a material, an apex. */
 function edited(plan: Plan, step: number): Plan {
@@ -31,6 +32,29 @@ function edited(plan: Plan, step: number): Plan {
 const thinner = (part: Part): Part =>
   'thickness' in part ? { ...part, thickness: part.thickness * 0.9 } : part;
 
+/** A part moved along the span, put to one side, or set in somewhere else once more. */
+function shifted([n, m, by, what]: [number, number, number, number]): (plan: Plan) => Plan {
+  const change = (part: Part, mirrored: boolean): Part => {
+    if (what === 0 && mirrored) return { ...part, side: 'port' };
+    if (what === 1 && part.kind === 'skin') return { ...part, start: part.start * 0.8 };
+    if (part.kind === 'ribs') return { ...part, stations: [Math.abs(by), Math.abs(by) / 2] };
+    if (!('to' in part)) return part;
+    return { ...part, from: Math.max(0, (part.from ?? 0) + by), to: Math.max(0, (part.to ?? 0) + by / 2) };
+  };
+  return (plan) => {
+    const picked = plan.surfaces[n % Math.max(1, plan.surfaces.length)];
+    if (!picked) return plan;
+    const part = picked.parts[m % Math.max(1, picked.parts.length)];
+    if (!part) return plan;
+    const twin = { ...change(part, picked.mirrored), id: `${part.id}-${n % 97}` };
+    const parts =
+      what < 5
+        ? picked.parts.map((p) => (p === part ? change(p, picked.mirrored) : p))
+        : [...picked.parts, twin];
+    return { ...plan, surfaces: plan.surfaces.map((s) => (s === picked ? { ...s, parts } : s)) };
+  };
+}
+
 describe('an estimate that remembers the one before', () => {
   it('answers every edit as one that remembers nothing, notices and their order included', () => {
     fc.assert(
@@ -44,6 +68,37 @@ describe('an estimate that remembers the one before', () => {
       }),
       { numRuns: 60 },
     );
+  });
+
+  it('does so part by part: through resizing, moving, adding, removing and reordering on full plans', () => {
+    const moved = fc.tuple(fc.nat(), fc.nat(), fc.integer({ min: -400, max: 400 }), fc.nat({ max: 9 }));
+    const steps = fc.array(fc.oneof(edits, moved.map(shifted)), { minLength: 1, maxLength: 8 });
+    fc.assert(
+      fc.property(fc.oneof(anyPlan, fc.constantFrom(...DEMO_NAMES).map(demoPlan)), steps, (first, list) => {
+        const memory = newMemory();
+        estimate(first, memory);
+        list.reduce((plan, step) => {
+          const next = step(plan);
+          expect(estimate(next, memory)).toEqual(estimate(structuredClone(next)));
+          return next;
+        }, first);
+      }),
+      { numRuns: 150 },
+    );
+  });
+
+  it('measures again only what lies within reach of the changed part', () => {
+    const memory = newMemory();
+    const plan = demoPlan('whimbrel');
+    estimate(plan, memory);
+    const before = memory.surfaces[0]!.parts.known;
+    const [wing, ...others] = plan.surfaces;
+    const parts = wing!.parts.map((part) => (part.kind === 'web' ? { ...part, thickness: 9 } : part));
+    estimate({ ...plan, surfaces: [{ ...wing!, parts }, ...others] }, memory);
+    const after = memory.surfaces[0]!.parts.known;
+    const again = parts.filter((part) => after.has(part) && after.get(part) !== before.get(part));
+    // Nothing is measured by a web but the web itself.
+    expect(new Set(again.map(({ kind }) => kind))).toEqual(new Set(['web']));
   });
 
   it('measures only the surface that was changed', () => {

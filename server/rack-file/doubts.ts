@@ -8,6 +8,8 @@ import type { StockPieceInput } from '#shared/schemas/stock-piece.ts';
 const BALSA = { from: 40, to: 350 };
 const WOOD = { from: 40, to: 1_350 };
 
+const times = (ratio: number) => `${Number(ratio.toPrecision(2))} times`;
+
 /** What should be looked at before a piece is taken in; null where nothing should. */
 export function doubtOf(piece: StockPieceInput): string | null {
   if (piece.mass === null || piece.material.category !== 'wood') return null;
@@ -15,6 +17,11 @@ export function doubtOf(piece: StockPieceInput): string | null {
   const isBalsa = /balsa/i.test(piece.material.name);
   const { from, to } = isBalsa ? BALSA : WOOD;
   if (density >= from && density <= to) return null;
-  const how = density < from ? 'light' : 'heavy';
-  return `Comes to ${Number(density.toPrecision(3))} kg/m³: no ${isBalsa ? 'balsa' : 'wood'} is so ${how}. Check sizes, mass and their units.`;
+  const wood = isBalsa ? 'balsa' : 'wood';
+  // As a multiple, which is the same in every unit.
+  const word =
+    density < from
+      ? `${times(from / density)} as light as the lightest ${wood}`
+      : `${times(density / to)} as heavy as the heaviest ${wood}`;
+  return `Would be ${word}. Check sizes, mass and their units.`;
 }

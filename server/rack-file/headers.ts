@@ -58,8 +58,12 @@ const NAMES = new Map(
 /** `Length (in)`, `mass [g]`, `Width, mm`, `thickness mm`, `length/mm` */
 const WITH_UNIT = /^(.*?)\s*(?:\(\s*([^()]*)\s*\)|\[\s*([^[\]]*)\s*\]|[,/]\s*(\S+)|\s(\S+))$/;
 
+/** A longer title names no column that is known, and is not even looked through. */
+export const LONGEST_HEADER = 120;
+
 /** What the cell of a first line says of its column. */
 export function readHeader(header: string): Column {
+  if (header.length > LONGEST_HEADER) return { header, field: null, unit: null, unknownUnit: null };
   const text = header
     .trim()
     .toLowerCase()

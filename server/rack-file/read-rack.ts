@@ -4,7 +4,7 @@ import type { ImportPreviewDto } from '#shared/schemas/rack.ts';
 import { isStorable } from '#server/http/bounds.ts';
 import { decodeTable } from './decode-table.ts';
 import { doubtOf } from './doubts.ts';
-import { missingColumns, readHeaders, type Column } from './headers.ts';
+import { LONGEST_HEADER, missingColumns, readHeaders, type Column } from './headers.ts';
 import { LineReader, type CellProblem, type FindMaterial } from './read-cells.ts';
 
 type Delimiter = ImportPreviewDto['delimiter'];
@@ -13,7 +13,6 @@ type BadLine = ImportPreviewDto['bad'][number];
 
 const DELIMITERS: readonly Delimiter[] = [',', ';', '\t'];
 const MOST_COLUMNS = 100;
-const LONGEST_HEADER = 120;
 const LONGEST_TEXT = 200;
 
 interface Line {
@@ -22,7 +21,8 @@ interface Line {
   cells: string[];
   /** as it stands in the file */
   text: string;
-  broken: boolean;
+  /** a quotation mark that does not match: in this line, or from it on to the end of the file */
+  stray: 'here' | 'onwards' | null;
 }
 
 /**
@@ -33,8 +33,9 @@ interface Line {
 export function readRack(bytes: Buffer, findMaterial: FindMaterial): ImportPreviewDto | { problem: string } {
   const { encoding, text } = decodeTable(bytes);
   const { delimiter, lines } = readLines(text);
-  const [head, ...rest] = lines.filter(({ cells }) => cells.some((cell) => cell.trim() !== ''));
+  const [head, ...rest] = lines;
   if (!head) return { problem: 'Has nothing in it.' };
+  if (head.stray !== null) return { problem: 'Has quotation marks that do not match in its first line.' };
   if (head.cells.length > MOST_COLUMNS) return { problem: `Has more than ${MOST_COLUMNS} columns.` };
   const columns = readHeaders(head.cells);
   const missing = missingColumns(columns);
@@ -64,13 +65,18 @@ export function readRack(bytes: Buffer, findMaterial: FindMaterial): ImportPrevi
   };
 }
 
+const STRAY = {
+  here: 'Has quotation marks that do not match.',
+  onwards: 'Has quotation marks that do not match, as many lines before; what follows is not read.',
+};
+
 function readLine(
-  { cells, text, broken }: Line,
+  { cells, text, stray }: Line,
   columns: readonly Column[],
   findMaterial: FindMaterial,
 ): Pick<GoodLine, 'piece' | 'doubt'> | { problems: CellProblem[] } {
   const whole = (detail: string) => ({ problems: [{ column: null, detail }] });
-  if (broken) return whole('Has quotation marks that do not match.');
+  if (stray !== null) return whole(STRAY[stray]);
   if (!isStorable(text)) return whole('Has a character that is not text.');
   if (cells.slice(columns.length).some((cell) => cell.trim() !== '')) {
     return whole('Has more cells than the first line has columns. Is a decimal comma taken for a border?');
@@ -86,7 +92,7 @@ function readLine(
   };
 }
 
-/** Cuts the text into lines at the delimiter by which its first line names the most columns. */
+/** Lines that are not blank, cut at the delimiter by which its first line names the most columns. */
 function readLines(text: string): { delimiter: Delimiter; lines: Line[] } {
   // Some spreadsheets say so in a line before the first.
   const told = /^sep=([,;\t])\n/i.exec(text);
@@ -101,28 +107,40 @@ function readLines(text: string): { delimiter: Delimiter; lines: Line[] } {
 
 function columnsKnown(text: string, delimiter: Delimiter): number {
   const { data } = Papa.parse<string[]>(text.trimStart(), { delimiter, newline: '\n', preview: 1 });
-  return readHeaders(data[0] ?? []).filter(({ field }) => field !== null).length;
+  return readHeaders((data[0] ?? []).slice(0, MOST_COLUMNS)).filter(({ field }) => field !== null).length;
 }
 
+/** So often a line with a stray quotation mark is stepped over; behind the last one the file is not read on. */
+const MOST_STRAY = 50;
+
 function parse(text: string, start: number, delimiter: Delimiter): Line[] {
-  const body = text.slice(start);
   const lines: Line[] = [];
-  let line = 1 + (start > 0 ? 1 : 0);
-  let from = 0;
-  let filled = 0;
-  Papa.parse<string[]>(body, {
-    delimiter,
-    newline: '\n',
-    step: ({ data, errors, meta }, parser) => {
-      const raw = body.slice(from, meta.cursor);
-      lines.push({ line, cells: data, text: raw.trimEnd(), broken: errors.length > 0 });
-      line += raw.split('\n').length - 1;
-      from = meta.cursor;
-      filled += raw.trim() === '' ? 0 : 1;
-      // The first line, as many as are taken in, and one that tells of more.
-      if (filled > LIMITS.rackImport.max + 1) parser.abort();
-    },
-  });
+  let line = start > 0 ? 2 : 1;
+  let from = start;
+  for (let stray = 0; from < text.length && stray <= MOST_STRAY; stray += 1) {
+    const body = text.slice(from);
+    let done = 0;
+    Papa.parse<string[]>(body, {
+      delimiter,
+      newline: '\n',
+      step: ({ data, errors, meta }, parser) => {
+        const broken = errors.length > 0;
+        // A mark that is not closed would take in the lines behind it.
+        const end = broken && stray < MOST_STRAY ? body.indexOf('\n', done) + 1 || body.length : meta.cursor;
+        const raw = body.slice(done, end);
+        if (data.some((cell) => cell.trim() !== '')) {
+          const mark = stray < MOST_STRAY ? 'here' : 'onwards';
+          lines.push({ line, cells: data, text: raw.trimEnd(), stray: broken ? mark : null });
+        }
+        line += raw.split('\n').length - 1;
+        done = end;
+        // The first line, as many as are taken in, and one that tells of more.
+        if (broken || lines.length > LIMITS.rackImport.max + 1) parser.abort();
+      },
+    });
+    if (lines.length > LIMITS.rackImport.max + 1) break;
+    from += done;
+  }
   return lines;
 }
 

@@ -135,6 +135,44 @@ describe('the reader of a table of stock', () => {
     ]);
   });
 
+  it('steps over a stray quotation mark and reads on behind it', () => {
+    const good = 'sheet,Balsa,900,75,2,20';
+    const { rows, bad } = read(
+      `${HEAD}\n${good}\n"A" grade,Balsa,900,75,2,20\n${good}\nsheet,"Balsa\n${good}\n`,
+    );
+    expect(rows.map(({ line }) => line)).toEqual([2, 4, 6]);
+    expect(bad.map(({ line, text }) => [line, text])).toEqual([
+      [3, '"A" grade,Balsa,900,75,2,20'],
+      [5, 'sheet,"Balsa'],
+    ]);
+  });
+
+  it('takes an inch mark for an inch, quoted or not', () => {
+    const { rows } = read(`${HEAD}\nsheet,Balsa,36",4",1/16",20\nsheet,Balsa,"36""","4""","1/16""",20\n`);
+    expect(rows.map(({ piece }) => piece.thickness)).toEqual([1.5875, 1.5875]);
+  });
+
+  it('answers files made to keep it busy', () => {
+    const long = LIMITS.csvBytes.max;
+    const below = (line: string, count: number) => `${HEAD}\n${line.repeat(count)}`;
+    for (const text of [
+      ','.repeat(long),
+      '"'.repeat(long),
+      `Material,${'('.repeat(long)}`,
+      `a;${','.repeat(long)} y;b`,
+    ]) {
+      expect(refusal(text)).not.toBeNull();
+    }
+    for (const text of [
+      below('\n', long),
+      below(', \n', long / 4),
+      below('"a"b,1,1,1,1,1\n', 100_000),
+      below(`${"'".repeat(long)}\n`, 1),
+    ]) {
+      expect(refusal(text)).toBeNull();
+    }
+  });
+
   it('knows tubes by their wall and rods by their name', () => {
     const head = 'Kind,Material,Length,Diameter,Wall';
     const { rows } = read(`${head}\ntube,Carbon,1000,6,0.5\nrod,Carbon,1000,3,\n,Carbon,1000,3,\n`);
@@ -150,8 +188,8 @@ describe('the reader of a table of stock', () => {
       `${HEAD},State\nsheet,Balsa,1000,100,1,50,\nsheet,Balsa,1000,100,10,5,\nsheet,Birch,1000,100,1,70,\nsheet,Balsa,1000,100,1,15,used\n`,
     );
     expect(rows.map(({ doubt }) => doubt)).toEqual([
-      expect.stringContaining('500 kg/m³: no balsa is so heavy'),
-      expect.stringContaining('5 kg/m³: no balsa is so light'),
+      expect.stringContaining('1.4 times as heavy as the heaviest balsa'),
+      expect.stringContaining('8 times as light as the lightest balsa'),
       null,
       expect.stringContaining('Was used'),
     ]);
@@ -183,6 +221,7 @@ describe('the reader of a table of stock', () => {
 
   it('refuses what is no table of stock as a whole', () => {
     expect(refusal('')).toMatch(/nothing/);
+    expect(refusal('"Material" of it,Length,Width,Thickness\nBalsa,9,9,9\n')).toMatch(/first line/);
     expect(refusal('\n\n  \n')).toMatch(/nothing/);
     expect(refusal('Kind,Length\nsheet,900\n')).toBe(
       'Has no column Material, Width, Thickness: the first line must name the columns.',

@@ -186,6 +186,22 @@ describe('DELETE /api/rack/:id', () => {
 });
 
 describe('deleting a glider', () => {
+  it('leaves nothing held for it, also where wood is put to it at the same moment', async () => {
+    const person = await makePerson(app);
+    const glider = await makeGlider({ owner: person.user });
+    const pieces = await Promise.all(Array.from({ length: 12 }, () => makePiece(person.user)));
+    const reserve = ({ id }: { id: string }) =>
+      person.agent.put(`/api/rack/${id}/reservation`).send({ gliderId: glider.id });
+    for (const piece of pieces.slice(0, 4)) await reserve(piece).expect(200);
+    const [gone, ...answers] = await Promise.all([
+      person.agent.delete(`/api/gliders/${glider.id}`),
+      ...pieces.slice(4).map(reserve),
+    ]);
+    expect(gone.status).toBe(204);
+    expect(answers.filter(({ status }) => status !== 200 && status !== 400)).toEqual([]);
+    for (const { id } of pieces) expect((await get(person, id)).state).toBe('free');
+  });
+
   it('frees what it holds and leaves what was built into it used, in nothing', async () => {
     const person = await makePerson(app);
     const glider = await makeGlider({ owner: person.user });

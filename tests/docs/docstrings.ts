@@ -1,7 +1,7 @@
 /** The comment right before an exported function or constant; empty where there is none. */
 export function docstringOf(text: string, name: string): string {
   const before = new RegExp(
-    String.raw`/\*\*((?:(?!\*/)[^])*)\*/\s*export\s+(?:async\s+)?(?:function|const)\s+${name}\b`,
+    String.raw`/\*\*((?:(?!\*/)[^])*)\*/\s*export\s+(?:async\s+)?(?:function\*?|const)\s+${name}\b`,
   );
   return before.exec(text)?.[1] ?? '';
 }

@@ -12,7 +12,7 @@ import { presentFirstFlight } from '#server/presenters/first-flight.ts';
 import { presentSheet } from '#server/presenters/sheet.ts';
 import { presentWeighing } from '#server/presenters/weighing.ts';
 import { getAccount } from './account.ts';
-import { listPiecesOfUser } from './rack.ts';
+import { exportAssignment, exportRack } from './rack-export.ts';
 import { readPicture } from './stored-files.ts';
 
 const AT_ONCE = 20;
@@ -23,7 +23,7 @@ export async function* exportAccount(actor: UserDto): AsyncGenerator<string> {
   yield ',"materials":';
   yield JSON.stringify((await Material.findAll({ where: { ownerId: actor.id } })).map((row) => row.toJSON()));
   yield ',"rack":';
-  yield JSON.stringify(await listPiecesOfUser(actor.id));
+  yield* exportRack(actor.id);
   const members = await GliderMember.findAll({
     where: { userId: actor.id },
     attributes: ['gliderId', 'role'],
@@ -50,6 +50,7 @@ async function* exportGlider({ id, name, version, plan, updatedAt }: Glider): As
   yield JSON.stringify({
     ...head,
     trials: trials && { trials: trials.trials, terms: trials.terms },
+    assignment: await exportAssignment(id),
     weighings: weighings.map((row) => presentWeighing(row, null)),
     firstFlights: flights.map(presentFirstFlight),
   }).slice(0, -1);

@@ -8,6 +8,8 @@ import type { PlanMaterial } from './plan.ts';
 export interface Weighing {
   /** of each line, in their order */
   masses: Float64Array;
+  /** of each line about the datum, g·mm */
+  moments: Vec3[];
   mass: number;
   wingMass: number;
   /** null where nothing has a mass */
@@ -42,6 +44,7 @@ export function weigh(fold: FoldedPlan, figures?: ArrayLike<number>): Weighing {
   const at: Vec3 | null = mass < NOTHING ? null : [mean(0), mean(1), mean(2)];
   return {
     masses,
+    moments,
     mass,
     wingMass: lines.reduce(
       (sum, { surface }, i) =>

@@ -4,7 +4,7 @@ import { covers, halfOf, stripAt, type Half } from './half.ts';
 import { stripProfile } from './parts/strip.ts';
 import type { Plan, PlanMaterial, Strip, Surface } from './plan.ts';
 import type { Spar, SparStation } from './result.ts';
-import { bendingMoment, spanLoadOf } from './span-load.ts';
+import { bendingMoment, spanLoadOf, type SpanLoad } from './span-load.ts';
 import { stationAt, type Station, type SurfaceLine } from './stations.ts';
 
 /** A spar strip where a station cuts it. Lengths mm. */
@@ -71,14 +71,42 @@ export function worstOf<F extends Flange>(
 /** Places along the half span that are looked at, root and tip included. */
 const STATIONS = 21;
 
+function isSeated({ seat }: Strip): boolean {
+  return seat === 'top' || seat === 'bottom';
+}
+
 /**
  * True of a strip that is reckoned to carry bending: seated `top` or `bottom`, of a material whose modulus and
  * strength the plan knows.
  * @example carries(EXAMPLE_SPAR, EXAMPLE_PLAN.materials['balsa']) // → true
  */
 export function carries(strip: Strip, material: PlanMaterial | undefined): boolean {
-  const isSpar = strip.seat === 'top' || strip.seat === 'bottom';
-  return isSpar && material?.modulus !== undefined && material.strength !== undefined;
+  return isSeated(strip) && material?.modulus !== undefined && material.strength !== undefined;
+}
+
+/** A top or bottom strip where a station cuts it, whatever it is made of. Lengths mm, area mm². */
+type Seated = Pick<Flange, 'area' | 'z' | 'height'> & { part: string; strip: Strip };
+
+function seatedAt(half: Half, station: Station): Seated[] {
+  return half.strips.flatMap((strip) => {
+    if (!covers(strip, station.s) || !isSeated(strip)) return [];
+    const place = stripAt(strip, station);
+    const { area } = stripProfile(strip.profile, place.width, place.height, strip.wall);
+    if (area <= 0) return [];
+    return [{ part: strip.id, strip, area, z: stripZ(half, strip, station, place), height: place.height }];
+  });
+}
+
+function flangesOf(
+  seated: readonly Seated[],
+  materialOf: (strip: Strip) => PlanMaterial | undefined,
+): (Flange & { part: string })[] {
+  return seated.flatMap(({ part, strip, area, z, height }) => {
+    const material = materialOf(strip);
+    if (!carries(strip, material)) return [];
+    const [modulus, strength] = [(material?.modulus ?? 0) * 1000, material?.strength ?? 0];
+    return [{ part, area, z, height, modulus, strength }];
+  });
 }
 
 /**
@@ -86,22 +114,58 @@ export function carries(strip: Strip, material: PlanMaterial | undefined): boole
  * @example flangesAt(EXAMPLE_PLAN, EXAMPLE_HALF, EXAMPLE_STATION)[0].part // → 'spar'
  */
 export function flangesAt(plan: Plan, half: Half, station: Station): (Flange & { part: string })[] {
-  return half.strips.flatMap((strip) => {
-    if (!covers(strip, station.s)) return [];
-    const material = plan.materials[strip.material];
-    if (!carries(strip, material)) return [];
-    const place = stripAt(strip, station);
-    const { area } = stripProfile(strip.profile, place.width, place.height, strip.wall);
-    if (area <= 0) return [];
-    const z = stripZ(half, strip, station, place);
-    const [modulus, strength] = [(material?.modulus ?? 0) * 1000, material?.strength ?? 0];
-    return [{ part: strip.id, area, z, height: place.height, modulus, strength }];
-  });
+  return flangesOf(seatedAt(half, station), ({ material }) => plan.materials[material]);
 }
 
 /** Distance of a station from the root along the projected span, mm. @example projected(EXAMPLE_LINE, 120) // → 120 */
 export function projected(line: SurfaceLine, s: number): number {
   return line.panels.reduce((sum, p) => sum + Math.max(0, Math.min(s, p.end) - p.start) * Math.abs(p.cos), 0);
+}
+
+/** A wing's bending as far as it depends neither on what the strips are made of nor on the mass carried. */
+export interface SparFrame {
+  load: SpanLoad | null;
+  /** N for each g carried, on the half span */
+  forcePerGram: number;
+  stations: { s: number; y: number; seated: Seated[] }[];
+}
+
+/**
+ * The wing's spars cut at their stations, for `sparIn` to tell what they bear in one wood or another.
+ * @example sparFrame(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE).stations.length // → 21
+ */
+export function sparFrame(plan: Plan, wing: Surface, line: SurfaceLine): SparFrame {
+  const load = spanLoadOf(wing, line);
+  const half = halfOf(wing, line, 'starboard', () => {});
+  const share = wing.mirrored ? 0.5 : 1;
+  return {
+    load,
+    forcePerGram: (share / 1000) * GRAVITY * (plan.flight?.loadFactor ?? 1),
+    stations: Array.from({ length: load ? STATIONS : 0 }, (_, i) => {
+      const s = (line.length * i) / (STATIONS - 1);
+      return { s, y: projected(line, s), seated: seatedAt(half, stationAt(line, s)) };
+    }),
+  };
+}
+
+/**
+ * Bending of a wing cut at its stations, its strips of the materials that `materialOf` names, under `carriedG` g;
+ * figures as of `sparOf`.
+ * @example sparIn(sparFrame(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE), () => EXAMPLE_PLAN.materials['balsa'], 10).worst // → 0
+ */
+export function sparIn(
+  { load, forcePerGram, stations }: SparFrame,
+  materialOf: (strip: Strip) => PlanMaterial | undefined,
+  carriedG: number,
+): Spar {
+  if (!load || carriedG <= 0) return { stations: [], worst: null };
+  const borne = stations.flatMap(({ s, y, seated }): SparStation[] => {
+    const moment = bendingMoment(load, forcePerGram * carriedG, y);
+    const worst = worstFlange(flangesOf(seated, materialOf), moment);
+    return worst ? [{ s, moment, ...worst }] : [];
+  });
+  const least = borne.reduce<SparStation | null>((a, b) => (a && a.margin <= b.margin ? a : b), null);
+  return { stations: borne, worst: least?.s ?? null };
 }
 
 /**
@@ -113,18 +177,5 @@ export function projected(line: SurfaceLine, s: number): number {
  * @example sparOf(EXAMPLE_PLAN, EXAMPLE_WING, EXAMPLE_LINE, 10).worst // → 0
  */
 export function sparOf(plan: Plan, wing: Surface, line: SurfaceLine, carriedG: number): Spar {
-  const load = spanLoadOf(wing, line);
-  if (!load || carriedG <= 0) return { stations: [], worst: null };
-  const half = halfOf(wing, line, 'starboard', () => {});
-  const share = wing.mirrored ? 0.5 : 1;
-  const force = share * (carriedG / 1000) * GRAVITY * (plan.flight?.loadFactor ?? 1);
-  const stations = Array.from({ length: STATIONS }, (_, i) => (line.length * i) / (STATIONS - 1)).flatMap(
-    (s): SparStation[] => {
-      const moment = bendingMoment(load, force, projected(line, s));
-      const worst = worstFlange(flangesAt(plan, half, stationAt(line, s)), moment);
-      return worst ? [{ s, moment, ...worst }] : [];
-    },
-  );
-  const least = stations.reduce<SparStation | null>((a, b) => (a && a.margin <= b.margin ? a : b), null);
-  return { stations, worst: least?.s ?? null };
+  return sparIn(sparFrame(plan, wing, line), ({ material }) => plan.materials[material], carriedG);
 }

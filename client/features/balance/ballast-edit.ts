@@ -1,7 +1,7 @@
 import { ballastFor } from '#shared/core/ballast.ts';
 import type { Vec3 } from '#shared/core/frame.ts';
 import type { Item, Plan } from '#shared/core/plan.ts';
-import { isBallast } from '#shared/core/wood-trial.ts';
+import { isBallast } from '#shared/core/wood-trial-base.ts';
 
 /** The plan with a piece of ballast more. */
 export function withBallast(plan: Plan, name: string, mass: number, at: Vec3): Plan {

@@ -2,7 +2,7 @@ import type { TableMaterial } from '#client/lib/material-snapshot.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
 import type { Trial } from '#shared/core/wood-trial.ts';
-import { woodGroupKey, woodGroups, type TrialWood, type WoodGroup } from '#shared/core/wood-groups.ts';
+import { woodGroups, type TrialWood, type WoodGroup } from '#shared/core/wood-groups.ts';
 
 /** Grades of balsa from light to hard, by their keys in the materials table. */
 const GRADES = ['balsa-contest', 'balsa-light', 'balsa-medium', 'balsa-medium-hard', 'balsa-hard'];
@@ -27,25 +27,19 @@ export function woodsOf(plan: Pick<Plan, 'materials'>, table: readonly TableMate
 /** The plan's wood groups with their masses. */
 export function drawnGroups(plan: Plan, { lines }: Pick<Estimate, 'lines'>): DrawnGroup[] {
   const massOf = new Map(lines.map(({ id, mass }) => [id, mass]));
-  const weights = new Map<string, Map<string, number>>();
-  for (const { key, parts } of plan.surfaces) {
-    for (const part of parts) {
-      const group = woodGroupKey(part);
-      const byMaterial = weights.get(group) ?? new Map<string, number>();
-      byMaterial.set(
-        part.material,
-        (byMaterial.get(part.material) ?? 0) + (massOf.get(`${key}/${part.id}`) ?? 0),
-      );
-      weights.set(group, byMaterial);
-    }
-  }
   return woodGroups(plan).map((group) => {
-    const own = group.materials.map((material) => ({
+    const masses = group.materials.map((material) => ({
       material,
-      mass: weights.get(group.key)?.get(material) ?? 0,
+      mass: group.members
+        .filter((member) => member.material === material)
+        .reduce((sum, { id }) => sum + (massOf.get(id) ?? 0), 0),
     }));
-    const [main] = [...own].sort((a, b) => b.mass - a.mass);
-    return { ...group, mass: own.reduce((sum, { mass }) => sum + mass, 0), main: main?.material ?? '' };
+    const [main] = [...masses].sort((a, b) => b.mass - a.mass);
+    return {
+      ...group,
+      mass: masses.reduce((sum, { mass }) => sum + mass, 0),
+      main: main?.material ?? '',
+    };
   });
 }
 

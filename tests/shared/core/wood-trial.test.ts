@@ -5,7 +5,8 @@ import whimbrelJson from '#data/demo/gliders/whimbrel.json' with { type: 'json' 
 import { estimate } from '#shared/core/estimate.ts';
 import { noseOf, tipOf } from '#shared/core/extent.ts';
 import type { Plan, PlanMaterial } from '#shared/core/plan.ts';
-import { isBallast, runTrials } from '#shared/core/wood-trial.ts';
+import { isBallast } from '#shared/core/wood-trial-base.ts';
+import { runTrials } from '#shared/core/wood-trial.ts';
 import { withWood, woodGroups } from '#shared/core/wood-groups.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 

@@ -1,6 +1,7 @@
 import type { Item, Plan } from '#shared/core/plan.ts';
 import { withWood } from '#shared/core/wood-groups.ts';
-import { isBallast, type Trial } from '#shared/core/wood-trial.ts';
+import { isBallast } from '#shared/core/wood-trial-base.ts';
+import { type Trial } from '#shared/core/wood-trial.ts';
 
 /** Ballast that trims a trial: g, and mm aft of the datum. */
 export interface TrimWeight {

@@ -156,4 +156,16 @@ describe('PUT /api/gliders/:id/assignment', () => {
       ['at', 'n', 'side'].map((field) => `#/entries/0/${field}`),
     );
   });
+
+  it('goes over to the new owner with the glider, and the pieces stay whose they are', async () => {
+    const { owner, builder, glider } = await crew();
+    const piece = await makePiece(owner.user);
+    await put(owner, glider.id, 1, assignmentOf(piece.id)).expect(200);
+    const heir = { userId: builder.user.id };
+    await owner.agent.post(`/api/gliders/${glider.id}/ownership`).send(heir).expect(200);
+    const seen = await get(builder, glider.id);
+    expect(seen).toMatchObject({ version: 2, pieces: [{ id: piece.id, own: false, held: true }] });
+    await put(builder, glider.id, 2, assignmentOf(piece.id, null)).expect(200);
+    expect((await get(owner, glider.id)).pieces[0]?.own).toBe(true);
+  });
 });

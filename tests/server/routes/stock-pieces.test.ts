@@ -4,10 +4,9 @@ import sharp from 'sharp';
 import { describe, expect, it } from 'vitest';
 import { stockPiece } from '#shared/schemas/stock-piece.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
-import { User } from '#server/models/user.ts';
 import { listPiecesOfUser } from '#server/services/rack.ts';
 import { useApp } from '../support/app.ts';
-import { makePerson, type Person } from '../support/people.ts';
+import { makePerson, PASSWORD, type Person } from '../support/people.ts';
 import { picture, smallPicture } from '../support/photos.ts';
 import { expectProblem, refusedFields } from '../support/problems.ts';
 import { addMember, makeGlider } from '../support/rows.ts';
@@ -169,17 +168,16 @@ describe('the pieces of a user', () => {
     ]);
   });
 
-  it('go with the account, and what was reserved in them for others too', async () => {
-    const [person, owner] = [await makePerson(app), await makePerson(app)];
-    const glider = await makeGlider({ owner: owner.user });
+  it('go with the account, and what others had reserved for its gliders is free again', async () => {
+    const [person, leaver] = [await makePerson(app), await makePerson(app)];
+    const glider = await makeGlider({ owner: leaver.user });
     await addMember(glider, person.user, 'builder');
-    const piece = await makePiece(person.user);
-    await reserve(person, piece.id, glider.id).expect(200);
-    await app.sequelize.query('DELETE FROM glider_members WHERE user_id = ?', {
-      replacements: [person.user.id],
-    });
-    await app.sequelize.query('DELETE FROM sessions WHERE user_id = ?', { replacements: [person.user.id] });
-    await User.destroy({ where: { id: person.user.id } });
-    expect(await listPiecesOfUser(person.user.id)).toEqual([]);
+    const [held, lost] = [await makePiece(person.user), await makePiece(leaver.user)];
+    await reserve(person, held.id, glider.id).expect(200);
+    await reserve(leaver, lost.id, glider.id).expect(200);
+    await GliderMember.destroy({ where: { gliderId: glider.id, userId: person.user.id } });
+    await leaver.agent.post('/api/account/deletion').send({ password: PASSWORD }).expect(200);
+    expect(await listPiecesOfUser(leaver.user.id)).toEqual([]);
+    expect(await get(person, held.id)).toMatchObject({ state: 'free', reservedFor: null });
   });
 });

@@ -28,7 +28,7 @@ export function letterHtml(letter: Letter): string {
       `<p style="margin:0 0 14px;font-size:13px;color:#69655b;word-break:break-all">${escape(action.href)}</p>`
     : '';
   return (
-    `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>${escape(subject)}</title></head>` +
+    `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width"><title>${escape(subject)}</title></head>` +
     `<body style="margin:0;padding:24px 12px;background:#f4f1e8">` +
     `<table role="presentation" align="center" width="100%" style="max-width:520px;margin:0 auto;background:#fdfbf6;` +
     `border:1px solid #b9b2a0;border-collapse:separate"><tr><td style="padding:28px 28px 18px;` +

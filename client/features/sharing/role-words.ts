@@ -3,8 +3,8 @@ import { memberRole } from '#shared/schemas/sharing.ts';
 
 const ROLE_WORDS: Record<GliderRole, { name: string; may: string }> = {
   owner: { name: 'Owner', may: 'does everything, shares it and hands it over' },
-  builder: { name: 'Builder', may: 'draws, names states, keeps sheets and photos' },
-  pilot: { name: 'Pilot', may: 'looks at everything, keeps sheets and adds photos; does not draw' },
+  builder: { name: 'Builder', may: 'draws, weighs, names states, keeps sheets and photos' },
+  pilot: { name: 'Pilot', may: 'weighs, trims, signs first flights, keeps sheets and photos; does not draw' },
   reader: { name: 'Reader', may: 'looks at everything' },
 };
 

@@ -28,7 +28,7 @@ export function SharingPlace({ glider, accountHref, onLeft }: SharingPlaceProps)
             <h1 className="text-figure font-semibold">{headline(glider.name, members)}</h1>
             <p className="mt-1 text-graphite">
               {glider.can.share
-                ? 'A builder draws with you, a pilot keeps sheets and photos, a reader looks on. Nobody but you can delete it or share it on.'
+                ? 'A builder draws with you, a pilot weighs and flies, a reader looks on. Nobody but you can delete it or share it on.'
                 : `You are its ${glider.role}: a ${glider.role} ${roleMay(glider.role)}.`}
             </p>
           </header>

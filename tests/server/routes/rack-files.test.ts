@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { importPreview, importResult, rackList } from '#shared/schemas/rack.ts';
+import { tidy } from '#server/services/housekeeping.ts';
 import { useApp } from '../support/app.ts';
 import { changes, countRows } from '../support/counts.ts';
 import { makePerson, type Person } from '../support/people.ts';
@@ -113,6 +114,21 @@ describe('POST /api/rack/imports', () => {
     expect(refusedFields(await take(full, [SHEET, SHEET]))).toEqual(['#']);
     expect(changes(before, await countRows())).toEqual({});
     await take(full, [SHEET]).expect(201);
+  });
+});
+
+describe('an import', () => {
+  it('is forgotten together with the key that names it, and its pieces stay', async () => {
+    const person = await makePerson(app);
+    const key = randomUUID();
+    await take(person, [SHEET], key).expect(201);
+    const before = await countRows();
+    await tidy();
+    expect(changes(before, await countRows())).toEqual({});
+    await tidy(new Date(Date.now() + 31 * 24 * 3_600_000));
+    expect((await countRows()).get('rack_imports')).toBe(0);
+    expect((await take(person, [SHEET], key).expect(201)).body.firstNumber).toBe(2);
+    expect(await piecesOf(person)).toHaveLength(2);
   });
 });
 

@@ -41,8 +41,7 @@ export function guidedPlan(wishes: GuidedWishes, offered: readonly KeyedMaterial
 }
 
 /** A tapered stick from nose to tail, and a block that makes the nose. */
-function body({ span, tail }: GuidedWishes, lengths: Lengths, wood: Woodpile): Solid[] {
-  const end = tail === 'none' ? Math.round(lengths.tailChord) : lengths.tail + lengths.tailChord;
+function body({ span }: GuidedWishes, lengths: Lengths, wood: Woodpile): Solid[] {
   const thick = half(Math.min(14, span / 150));
   const thin = half(thick * 0.6);
   const bar = { shape: 'bar', profile: 'rectangle', group: 'fuselage' } as const;
@@ -59,7 +58,7 @@ function body({ span, tail }: GuidedWishes, lengths: Lengths, wood: Woodpile): S
             name: 'Fuselage stick',
             material: stick,
             from: [lengths.nose * 0.6, 0, below] as Item['at'],
-            to: [end, 0, below] as Item['at'],
+            to: [lengths.end, 0, below] as Item['at'],
             width: [thick, thin] as [number, number],
             height: [thick, thin] as [number, number],
           },
@@ -100,7 +99,7 @@ function radioGear({ nose }: Lengths): Item[] {
 }
 
 /** With its wanted balance and the lead that brings it there; or its gear further aft where it is nose-heavy already. */
-function trimmed(plan: Plan, { nose }: Lengths): Plan {
+function trimmed(plan: Plan, { nose, end }: Lengths): Plan {
   const wing = wingReference(plan);
   const { totals, balance } = estimate(plan);
   if (!wing || balance.x === null || balance.percentMac === null) return plan;
@@ -110,12 +109,14 @@ function trimmed(plan: Plan, { nose }: Lengths): Plan {
       : (100 * (balance.neutralPoint - wing.xLeMac)) / wing.mac - 100 * MARGIN;
   const target = { percentMac: Math.round(percent), tolerance: 2 };
   const wanted = positionOfPercent(target.percentMac, wing.xLeMac, wing.mac);
-  const found = ballastFor(totals.mass, balance.x, wanted, nose);
-  if ('refused' in found)
+  if (balance.x < wanted && plan.items.length > 0) {
     return { ...plan, target, items: movedAft(plan.items, totals.mass * (wanted - balance.x)) };
-  const mass = tenths(found.mass);
+  }
+  const [at, name] = balance.x < wanted ? [end, 'Tail ballast'] : [nose, 'Nose ballast'];
+  const found = ballastFor(totals.mass, balance.x, wanted, at);
+  const mass = 'mass' in found ? Math.round(found.mass * 100) / 100 : 0;
   if (mass <= 0) return { ...plan, target };
-  const lead: Item = { id: 'nose-ballast', name: 'Nose ballast', group: 'ballast', mass, at: [nose, 0, 0] };
+  const lead: Item = { id: 'ballast', name, group: 'ballast', mass, at: [at, 0, 0] };
   return { ...plan, target, items: [...plan.items, lead] };
 }
 

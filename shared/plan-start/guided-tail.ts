@@ -20,6 +20,8 @@ export interface Lengths {
   /** leading edge of the tailplane, and how long it is */
   tail: number;
   tailChord: number;
+  /** where the model ends */
+  end: number;
 }
 
 /** Tailplane and fin in size and place for the wing; none where none is wanted. */
@@ -37,7 +39,8 @@ export function guidedTail(
   const halfSpan = whole(Math.sqrt(TAIL_ASPECT * tailArea) / 2);
   const tailChord = whole(tailArea / (2 * halfSpan));
   const tail = whole(quarter + arm - tailChord / 4);
-  const lengths = { nose: -whole(1.1 * mac), tail, tailChord };
+  const end = wishes.tail === 'none' ? whole(1.2 * mac) : tail + tailChord;
+  const lengths = { nose: -whole(1.1 * mac), tail, tailChord, end };
   if (wishes.tail === 'none') return { surfaces: [], lengths };
   const thickness = sheetThickness(tailChord);
   const plate = { flat: thickness };

@@ -60,7 +60,7 @@ describe('a guided start', () => {
         expectNearly(result.planform['wing']?.span, wish.span, ROUNDING);
         expect(result.totals.mass).toBeGreaterThan(0);
       }),
-      { numRuns: 150 },
+      { numRuns: 300 },
     );
   });
 

@@ -14,6 +14,7 @@ export const paths = {
   signUp: (next?: string) => (next === undefined ? '/sign-up' : `/sign-up?next=${encodeURIComponent(next)}`),
   forgotPassword: '/forgot-password',
   bench: '/bench',
+  start: '/start',
   materials: '/materials',
   account: '/account',
   sharing: (id: string) => `/gliders/${id}/sharing`,

@@ -32,6 +32,10 @@ const routes: RouteObject[] = [
             lazy: async () => ({ Component: (await import('./pages/bench-page.tsx')).BenchPage }),
           },
           {
+            path: 'start',
+            lazy: async () => ({ Component: (await import('./pages/start-page.tsx')).StartPage }),
+          },
+          {
             path: 'materials',
             lazy: async () => ({ Component: (await import('./pages/materials-page.tsx')).MaterialsPage }),
           },

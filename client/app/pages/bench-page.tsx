@@ -14,6 +14,7 @@ export function BenchPage() {
         <Bench
           hrefOf={(id) => paths.glider(id)}
           sharingHrefOf={paths.sharing}
+          onGuided={() => void navigate(paths.start)}
           onOpen={(id) => void navigate(paths.glider(id))}
         />
       </SheetPaper>

@@ -19,12 +19,14 @@ export interface BenchLinks {
 
 interface BenchProps extends BenchLinks {
   onOpen: (id: string) => void;
+  /** to the start by a few wishes */
+  onGuided: () => void;
 }
 
 const NONE: ReadonlySet<string> = new Set();
 
 /** The reader's gliders and those shared with them. */
-export function Bench({ onOpen, ...links }: BenchProps) {
+export function Bench({ onOpen, onGuided, ...links }: BenchProps) {
   const [params, setParams] = useSearchParams();
   const view = viewOf(params);
   const search = useSettled(view.search.trim(), 250);
@@ -58,14 +60,16 @@ export function Bench({ onOpen, ...links }: BenchProps) {
               onSelecting={(on) => setSelected(on ? NONE : null)}
             />
           )}
-          <NewGliderMenu onOpen={onOpen} />
+          <NewGliderMenu onOpen={onOpen} onGuided={onGuided} />
         </div>
       </div>
       <div className="mt-6" aria-busy={query.isPlaceholderData}>
         <QueryView
           query={query}
           isEmpty={isEmpty}
-          empty={nothingYet ? <EmptyBench onOpen={onOpen} /> : <NothingFound view={view} />}
+          empty={
+            nothingYet ? <EmptyBench onOpen={onOpen} onGuided={onGuided} /> : <NothingFound view={view} />
+          }
         >
           {(gliders) => (
             <Gliders
@@ -112,17 +116,20 @@ function Gliders({ gliders, selected, onSelected, ...rest }: GlidersProps) {
   );
 }
 
-function EmptyBench({ onOpen }: { onOpen: (id: string) => void }) {
+function EmptyBench({ onOpen, onGuided }: Pick<BenchProps, 'onOpen' | 'onGuided'>) {
   const { pending, blank, fromSample } = useNewGlider(onOpen);
   return (
     <div className="max-w-xl py-4">
       <h2 className="text-heading font-semibold">Nothing lies here yet</h2>
       <p className="mt-2">
-        Begin with a copy of the sample glider and change it into yours, or with a blank sheet. A plan that
-        somebody gave you comes in through “New glider”.
+        Say in a few words what your glider is to be and have it drawn, or begin with a copy of the sample and
+        change it into yours. A plan that somebody gave you comes in through “New glider”.
       </p>
       <p className="mt-5 flex flex-wrap gap-3">
-        <Button variant="primary" onClick={fromSample} pending={pending}>
+        <Button variant="primary" onClick={onGuided}>
+          Draw one from a few wishes
+        </Button>
+        <Button onClick={fromSample} pending={pending}>
           Copy the sample
         </Button>
         <Button onClick={blank} disabled={pending}>

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { buttonClass } from '#client/components/ui/button.tsx';
+import { Button, buttonClass } from '#client/components/ui/button.tsx';
 import { Menu, MenuItem } from '#client/components/ui/menu.tsx';
 import { useToast } from '#client/components/ui/toast.tsx';
 import type { Plan } from '#shared/core/plan.ts';
@@ -29,16 +29,20 @@ export function useNewGlider(onOpen: (gliderId: string) => void) {
   };
   return {
     pending: create.isPending,
+    begin,
     blank: () => begin(startPlan('New glider')),
     fromSample: () => begin(samplePlan),
   };
 }
 
-/** The ways to begin: a blank sheet, the sample, a file. */
-export function NewGliderMenu({ onOpen }: { onOpen: (gliderId: string) => void }) {
+/** The ways to begin: a few wishes, a blank sheet, the sample, a file. */
+interface NewGliderProps {
+  onOpen: (gliderId: string) => void;
+}
+
+export function NewGliderMenu({ onOpen, onGuided }: NewGliderProps & { onGuided: () => void }) {
   const { pending, blank, fromSample } = useNewGlider(onOpen);
   const [importing, setImporting] = useState(false);
-  const say = useToast();
   return (
     <>
       <Menu
@@ -51,19 +55,49 @@ export function NewGliderMenu({ onOpen }: { onOpen: (gliderId: string) => void }
           </button>
         }
       >
+        <MenuItem onSelect={onGuided}>From a few wishes …</MenuItem>
         <MenuItem onSelect={blank}>Blank sheet</MenuItem>
         <MenuItem onSelect={fromSample}>Copy of the sample</MenuItem>
         <MenuItem onSelect={() => setImporting(true)}>Import plans …</MenuItem>
       </Menu>
-      <ImportDialog
-        open={importing}
-        onOpenChange={setImporting}
-        onImported={(gliders) => {
-          const [only] = gliders;
-          if (gliders.length === 1 && only) onOpen(only.id);
-          else say(`${gliders.length} gliders lie on the bench.`);
-        }}
-      />
+      <Importer open={importing} onOpenChange={setImporting} onOpen={onOpen} />
     </>
+  );
+}
+
+/** The same ways as buttons, beside the wishes. */
+export function OtherStarts({ onOpen }: NewGliderProps) {
+  const { pending, blank, fromSample } = useNewGlider(onOpen);
+  const [importing, setImporting] = useState(false);
+  return (
+    <>
+      <Button onClick={blank} disabled={pending}>
+        Blank sheet
+      </Button>
+      <Button onClick={fromSample} disabled={pending}>
+        Copy of the sample
+      </Button>
+      <Button onClick={() => setImporting(true)}>Import plans …</Button>
+      <Importer open={importing} onOpenChange={setImporting} onOpen={onOpen} />
+    </>
+  );
+}
+
+interface ImporterProps extends NewGliderProps {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+}
+
+function Importer({ onOpen, ...dialog }: ImporterProps) {
+  const say = useToast();
+  return (
+    <ImportDialog
+      {...dialog}
+      onImported={(gliders) => {
+        const [only] = gliders;
+        if (gliders.length === 1 && only) onOpen(only.id);
+        else say(`${gliders.length} gliders lie on the bench.`);
+      }}
+    />
   );
 }

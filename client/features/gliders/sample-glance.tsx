@@ -8,7 +8,7 @@ import type { Workspace } from '#client/lib/workspace.ts';
 import type { Item, Part, Plan } from '#shared/core/plan.ts';
 import type { Units } from '#shared/format/units.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
-import { PlanPicture } from './plan-picture.tsx';
+import { PlanPicture } from '#client/components/drawing/plan-picture.tsx';
 import { balanceVerdict } from './verdict.ts';
 
 interface SampleGlanceProps {

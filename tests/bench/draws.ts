@@ -61,6 +61,7 @@ export function benchDraws(): Ratio[] {
       ours: ms(ours),
       beside: `the same multiplications, chance lying ready, ${ms(beside)}`,
       ratio: ours / beside,
+      most: 3,
     },
     {
       what: `another wood on the folded plan, ${what}`,

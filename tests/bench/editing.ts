@@ -1,46 +1,148 @@
-import type { Page } from 'playwright-core';
+import type { BrowserContext, Page } from 'playwright-core';
 import { openBrowser } from '#tests/support/chromium.ts';
 import { serve } from '#tests/support/served.ts';
+import { framesWhilePulling, framesWhileTyping, TOOLS, typeInto } from './editing-page.ts';
 import { planOfParts } from './large-plan.ts';
-import { ms, type Ratio } from './measure.ts';
+import { spread, type Ratio, type Spread } from './measure.ts';
 
-const FRAME_MS = 1000 / 60;
-const KEYS = 40;
+/** What feels like at once, ms, with the processor slowed 4×. */
+const AT_ONCE = 100;
+const KEYS = 48;
+const FRAMES = 120;
+/** One of 60 a second, ms, and what a display's own clock may be off. */
+const FRAME = 1000 / 60;
+const JITTER = 1.1;
 
-/** From a key going down to the frame that shows its answer being on screen: median and 95th of a hundred. */
-async function keyToScreen(page: Page): Promise<{ median: number; late: number }> {
-  const times: number[] = await page.evaluate(async (keys) => {
-    const field = document.querySelector<HTMLInputElement>('input[aria-label="Panel 1, span"], table input');
-    if (!field) throw new Error('no field to type in');
-    const shown = () =>
-      new Promise<void>((resolve) => {
-        // A message posted inside a frame's callback arrives once that frame has been drawn.
-        requestAnimationFrame(() => {
-          const channel = new MessageChannel();
-          channel.port1.addEventListener('message', () => resolve(), { once: true });
-          channel.port1.start();
-          channel.port2.postMessage(null);
-        });
-      });
-    const measured: number[] = [];
-    for (let i = 0; i < keys; i++) {
-      await new Promise((resolve) => setTimeout(resolve, 60));
-      const start = performance.now();
-      // Past React's own setter, as a key does.
-      Reflect.set(HTMLInputElement.prototype, 'value', String(420 + (i % 7)), field);
-      field.dispatchEvent(new Event('input', { bubbles: true }));
-      await shown();
-      measured.push(performance.now() - start);
-    }
-    return measured;
-  }, KEYS);
-  const sorted = times.slice(5).sort((a, b) => a - b);
-  const at = (share: number) => sorted[Math.floor(sorted.length * share)] ?? Number.NaN;
-  return { median: at(0.5), late: at(0.95) };
+/** A panel's span moves every part of its surface; a rib's thickness one line, and the strips and skins on it none. */
+const SPAN = {
+  field: 'Panel 1, span',
+  values: ['420', '421', '422', '423', '424', '425', '426'],
+  keys: KEYS,
+};
+const THICKNESS = { field: 'Thickness', values: ['1.5', '2', '2.5', '3'], keys: KEYS };
+const RIB = /^Ribs 1 1 2 1/;
+
+/** A page with one field that is answered by copying its text: what the browser itself takes. */
+async function blankPage(context: BrowserContext): Promise<Page> {
+  const page = await context.newPage();
+  await page.setContent(
+    '<label>Value <input aria-label="Value"></label><output data-answer></output>' +
+      '<svg width="900" height="300" data-lines><path stroke="black" d="M0 0"/></svg>',
+  );
+  await page.evaluate(TOOLS);
+  await page.evaluate(() => {
+    document.querySelector('input')?.addEventListener('input', ({ target }) => {
+      const text = target instanceof HTMLInputElement ? target.value : '';
+      document.querySelector('output')?.replaceChildren(text);
+      document.querySelector('path')?.setAttribute('d', `M0 0L${text} 50`);
+    });
+  });
+  return page;
 }
 
-/** Typing in the Drawing place of a plan of `parts` lines, at full speed and with the processor slowed 4×. */
-export async function benchEditing(parts: number): Promise<Ratio[]> {
+async function drawingPage(context: BrowserContext, id: string): Promise<Page> {
+  const page = await context.newPage();
+  await page.addInitScript({ content: TOOLS });
+  await page.goto(`/gliders/${id}/drawing`);
+  const mass = page.getByRole('region', { name: 'Title block' }).locator('.text-figure').first();
+  await mass.evaluate((element) => element.setAttribute('data-answer', ''));
+  await page
+    .locator('figure svg:has(path)')
+    .first()
+    .evaluate((svg) => svg.setAttribute('data-lines', ''));
+  await page.waitForTimeout(1500);
+  return page;
+}
+
+const beside = (what: string, { median }: Spread) => `${what} ${median.toPrecision(3)} ms`;
+
+/** Keys and frames of one plan at one speed of the processor. */
+async function measured(context: BrowserContext, id: string, parts: number, rate: number): Promise<Ratio[]> {
+  const [blank, page] = [await blankPage(context), await drawingPage(context, id)];
+  for (const one of [blank, page]) {
+    await (await context.newCDPSession(one)).send('Emulation.setCPUThrottlingRate', { rate });
+  }
+  const name = `${parts} parts${rate === 1 ? '' : `, slowed ${rate}×`}`;
+  const rows: Ratio[] = [];
+
+  await blank.bringToFront();
+  const VALUE = { field: 'Value', values: SPAN.values, keys: KEYS };
+  const bare = (await typeInto(blank, VALUE)).figures;
+  const bareFrames = await framesWhileTyping(blank, { ...VALUE, keys: FRAMES });
+
+  await page.bringToFront();
+  const key = (what: string, times: Spread) =>
+    rows.push(
+      {
+        what: `${name}: ${what}`,
+        ours: spread(times),
+        beside: beside('blank page', bare),
+        ratio: times.median / bare.median,
+      },
+      ...(rate === 1
+        ? []
+        : ([
+            {
+              what: `${name}: ${what}, median`,
+              ours: spread(times),
+              beside: `${AT_ONCE} ms`,
+              ratio: times.median / AT_ONCE,
+              most: 1,
+              timed: true,
+            },
+            {
+              what: `${name}: ${what}, 95th`,
+              ours: spread(times),
+              beside: `${AT_ONCE} ms`,
+              ratio: times.late / AT_ONCE,
+              most: 1,
+              timed: true,
+            },
+          ] as const)),
+    );
+  const frames = (what: string, times: Spread) =>
+    rows.push({
+      what: `${name}: ${what}`,
+      ours: spread(times),
+      beside: beside('blank page', bareFrames),
+      ratio: times.median / Math.max(FRAME, bareFrames.median),
+      ...(rate === 1 ? { most: JITTER, timed: true as const } : {}),
+    });
+
+  const span = await typeInto(page, SPAN);
+  key('span typed, to the figures', span.figures);
+  key('span typed, to the lines', span.lines);
+  frames(
+    'span typed at every frame, frame to frame',
+    await framesWhileTyping(page, { ...SPAN, keys: FRAMES }),
+  );
+
+  await page.getByRole('button', { name: RIB }).first().click();
+  const thickness = await typeInto(page, THICKNESS);
+  key('a rib’s thickness typed, to the figures', thickness.figures);
+  frames(
+    'a rib’s thickness typed at every frame, frame to frame',
+    await framesWhileTyping(page, { ...THICKNESS, keys: FRAMES }),
+  );
+
+  const handle = page.getByRole('group', { name: 'Handles of the drawing' }).getByRole('slider').first();
+  const box = await handle.boundingBox();
+  const mass = page.locator('[data-answer]');
+  const before = await mass.textContent();
+  if (!box) throw new Error('the rib has no handle');
+  const pulled = await framesWhilePulling(
+    page,
+    { x: box.x + box.width / 2, y: box.y + box.height / 2 },
+    FRAMES,
+  );
+  if ((await mass.textContent()) === before) throw new Error('pulling the rib changed no figure');
+  frames('a rib pulled, frame to frame', pulled);
+  await Promise.all([blank.close(), page.close()]);
+  return rows;
+}
+
+/** Typing and pulling in the Drawing of plans of so many lines, at full speed and with the processor slowed 4×. */
+export async function benchEditing(sizes: readonly number[]): Promise<Ratio[]> {
   const served = await serve();
   const browser = await openBrowser();
   try {
@@ -50,28 +152,11 @@ export async function benchEditing(parts: number): Promise<Ratio[]> {
     });
     const person = { name: 'Bench', email: 'bench@example.org', password: 'feathers and beams' };
     await context.request.post('/api/users', { data: person });
-    const made = await context.request.post('/api/gliders', { data: { plan: planOfParts(parts) } });
-    const { id } = (await made.json()) as { id: string };
-    const page = await context.newPage();
-    // The runner's compiler marks functions by a helper of this name, which the page does not have.
-    await page.addInitScript({ content: 'globalThis.__name = (f) => f;' });
-    const cdp = await context.newCDPSession(page);
     const rows: Ratio[] = [];
-    for (const [place, rate] of [
-      ['drawing', 1],
-      ['drawing', 4],
-    ] as const) {
-      await cdp.send('Emulation.setCPUThrottlingRate', { rate });
-      await page.goto(`/gliders/${id}/${place}`);
-      await page.getByRole('region', { name: 'Title block' }).waitFor();
-      await page.waitForTimeout(1500);
-      const { median, late } = await keyToScreen(page);
-      rows.push({
-        what: `key to screen, ${place}, ${parts} parts, processor ${rate === 1 ? 'as it is' : `slowed ${rate}×`}`,
-        ours: `${ms(median)} (95th ${ms(late)})`,
-        beside: rate === 1 ? `one frame ${ms(FRAME_MS)}` : 'the 100 ms that feel like at once',
-        ratio: median / (rate === 1 ? FRAME_MS : 100),
-      });
+    for (const parts of sizes) {
+      const made = await context.request.post('/api/gliders', { data: { plan: planOfParts(parts) } });
+      const { id } = (await made.json()) as { id: string };
+      for (const rate of [1, 4]) rows.push(...(await measured(context, id, parts, rate)));
     }
     return rows;
   } finally {

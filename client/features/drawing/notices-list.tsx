@@ -1,3 +1,4 @@
+import { memo, useDeferredValue } from 'react';
 import { noticeWords, type NoticeWords } from '#client/components/notice-text.ts';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
@@ -17,6 +18,11 @@ const AT_ONCE = 3;
 
 /** What the calculator has to say of the plan: what is out of its limits first, each with a way to the part. */
 export function NoticesList({ notices, plan, onPick }: NoticesListProps) {
+  // Many words, and none that anybody waits for: they come behind the figures.
+  return <Told notices={useDeferredValue(notices)} plan={useDeferredValue(plan)} onPick={onPick} />;
+}
+
+const Told = memo(function Told({ notices, plan, onPick }: NoticesListProps) {
   const units = useUnits();
   const all = notices.map((notice) => noticeWords(notice, plan, units));
   const words = [...all.filter(({ tone }) => tone === 'red'), ...all.filter(({ tone }) => tone !== 'red')];
@@ -38,7 +44,7 @@ export function NoticesList({ notices, plan, onPick }: NoticesListProps) {
       )}
     </section>
   );
-}
+});
 
 function OneNotice({ words, onPick }: { words: NoticeWords; onPick: (line: string) => void }) {
   const { tone, text, line } = words;

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { useDeferredValue, useMemo, useState } from 'react';
 import type { Workspace } from '#client/lib/workspace.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { Estimate } from '#shared/core/result.ts';
@@ -33,9 +33,16 @@ interface ViewsProps {
 
 const within = (low: number, value: number, high: number) => Math.max(low, Math.min(high, value));
 
-/** Plan and section of what is at hand. */
+/**
+ * Plan and section of what is at hand. After a key the figures answer first and the lines follow as soon as the
+ * browser is free; what is pulled by hand is drawn at once, or it would slip from the hand.
+ */
 export function Views(props: ViewsProps) {
-  const { plan, stale, result, tab, station, picked, hover, narrow } = props;
+  const { stale, tab, station, picked, hover, narrow } = props;
+  const [holding, setHolding] = useState(false);
+  const now = useMemo(() => ({ plan: props.plan, result: props.result }), [props.plan, props.result]);
+  const soon = useDeferredValue(now);
+  const { plan, result } = holding ? now : soon;
   const { view, setView, side, setSide, measuring, setMeasuring } = props.looking;
   const height = useViewportHeight();
   const onPick = useLatest((line: string) => props.onPick(line));
@@ -82,6 +89,7 @@ export function Views(props: ViewsProps) {
           station={cut}
           onStation={onStation}
           grip={grip}
+          onHold={setHolding}
           onPrint={onPrint}
           maxHeight={
             narrow

@@ -48,6 +48,8 @@ export interface PlanFigureProps {
   onStation: (s: number) => void;
   /** null for a reader */
   grip: Grip | null;
+  /** told when something is taken hold of and let go */
+  onHold: (holding: boolean) => void;
   measuring: boolean;
   onMeasuring: (measuring: boolean) => void;
   onPrint: () => void;
@@ -130,7 +132,10 @@ export const PlanFigure = memo(function PlanFigure(props: PlanFigureProps) {
             onPan={(dx, dy) => pan(dx, dy, bounds, paper)}
             onZoom={(by, at) => zoomBy(by, at, paper)}
             onFit={fit}
-            onHold={(holding) => setStill(holding ? paper : null)}
+            onHold={(holding) => {
+              setStill(holding ? paper : null);
+              props.onHold(holding);
+            }}
           />
         ) : (
           <p className="py-6 text-graphite">Nothing is drawn yet. Add a wing with the + beside the list.</p>

@@ -83,6 +83,7 @@ export async function typeInto(page: Page, typing: Typing): Promise<Typed> {
         isDrawn = true;
       });
       watch.observe(drawn, { subtree: true, childList: true, attributes: true });
+      bench.type(field, values.at(-1) ?? '');
       for (let i = 0; i < keys; i++) {
         await new Promise((done) => setTimeout(done, rest));
         const before = answer.textContent;

@@ -6,6 +6,8 @@ export interface GramEffect {
   /** id of the estimate's line */
   id: string;
   name: string;
+  /** key of its surface, null of items and solids */
+  surface: string | null;
   /** as it is, g */
   mass: number;
   /** mm of balance for each gram more on it; positive aft */
@@ -60,13 +62,13 @@ export function perGram(fold: FoldedPlan, trim: Trim): GramEffect[] {
   const { masses, mass, at, moments } = weigh(fold);
   if (!at) return [];
   return fold.lines
-    .flatMap(({ id, name }, i): GramEffect[] => {
+    .flatMap(({ id, name, surface }, i): GramEffect[] => {
       const own = masses[i] ?? 0;
       if (own <= 0) return [];
       const x = (moments[i]?.[0] ?? 0) / own;
       const ballast = ballastOf(1, x, trim);
       const allUp = ballast === null ? null : 1 + ballast;
-      return [{ id, name, mass: own, shift: (x - at[0]) / mass, ballast, allUp }];
+      return [{ id, name, surface, mass: own, shift: (x - at[0]) / mass, ballast, allUp }];
     })
     .sort(largestFirst);
 }

@@ -1,46 +1,69 @@
-import type { TrialResult, TrialRun } from '#shared/core/wood-trial.ts';
+import type { TrialResult } from '#shared/core/wood-trial.ts';
 import type { Units } from '#shared/format/units.ts';
+import { formatQuantity } from '#shared/format/numbers.ts';
 
-export interface TrialHeadline {
-  headline: string;
-  detail: string;
+/** What going from one trial to another does. */
+export interface Step {
+  /** g saved without ballast; negative where it costs some */
+  bare: number;
+  /** g saved all up; null where either cannot be trimmed */
+  allUp: number | null;
+  margin: { from: number; to: number } | null;
 }
 
 /** Less than this, g, is no difference. */
 const NOTHING = 0.05;
 
-/** What the trials come to, best first: `Light ribs save 3.1 g; after re-trim 4.0 g`. */
-export function trialHeadline({ results }: Pick<TrialRun, 'results'>, units: Units): TrialHeadline {
-  const [drawn, ...trials] = results;
-  if (!drawn) return { headline: 'Nothing to compare', detail: '' };
-  if (drawn.refused?.refused === 'no_mass') {
-    return { headline: 'Nothing to compare yet', detail: 'The plan has no mass: draw its parts first.' };
-  }
-  const [best] = trials
-    .map((trial) => ({ trial, ...savings(drawn, trial) }))
-    .sort((a, b) => (b.trimmed ?? b.bare) - (a.trimmed ?? a.bare));
-  if (!best) return { headline: 'As drawn', detail: 'Add a trial to compare it with.' };
+export function stepOf(from: TrialResult, to: TrialResult): Step {
   return {
-    headline: sentence(best.trial.name, best.bare, best.trimmed, units),
-    detail: detailOf(drawn, trials),
+    bare: from.bare - to.bare,
+    allUp: from.allUp === null || to.allUp === null ? null : from.allUp - to.allUp,
+    margin: from.margin === null || to.margin === null ? null : { from: from.margin, to: to.margin },
   };
 }
 
-function savings(drawn: TrialResult, trial: TrialResult): { bare: number; trimmed: number | null } {
-  const trimmed = drawn.allUp === null || trial.allUp === null ? null : drawn.allUp - trial.allUp;
-  return { bare: drawn.bare - trial.bare, trimmed };
+/** Words round the two figures of the sentence, which can be asked themselves. */
+export interface Sentence {
+  /** `Light ribs save` */
+  before: string;
+  bare: string | null;
+  /** `; after re-trim` */
+  between: string;
+  allUp: string | null;
+  after: string;
 }
 
-function sentence(name: string, bare: number, trimmed: number | null, units: Units): string {
-  const grams = (value: number) => units.format(value, 'mass');
-  const rest =
-    trimmed === null ? 'but it cannot be trimmed there' : `after re-trim ${grams(Math.abs(trimmed))}`;
-  const turned = trimmed !== null && bare * trimmed < 0 ? (trimmed > 0 ? ' saved' : ' more') : '';
-  if (Math.abs(bare) < NOTHING && Math.abs(trimmed ?? 0) < NOTHING) return `${name}: no difference in mass`;
-  return `${name}: ${bare >= 0 ? 'saves' : 'costs'} ${grams(Math.abs(bare))}; ${rest}${turned}`;
+/** `Light ribs: saves 3.1 g; after re-trim 4.0 g; spar margin unchanged at 2.6`. */
+export function sentenceOf(name: string, { bare, allUp, margin }: Step, units: Units): Sentence {
+  const grams = (value: number) => units.format(Math.abs(value), 'mass');
+  const after = marginWords(margin);
+  if (Math.abs(bare) < NOTHING && Math.abs(allUp ?? 0) < NOTHING) {
+    return { before: `${name}: no difference in mass`, bare: null, between: '', allUp: null, after };
+  }
+  const verb = bare >= 0 ? 'saves' : 'costs';
+  const start = { before: `${name}: ${verb} `, bare: grams(bare) };
+  if (allUp === null)
+    return { ...start, between: ', but it cannot be trimmed at this arm', allUp: null, after: '' };
+  const turned = bare * allUp < 0 ? (allUp > 0 ? ' saved' : ' more') : '';
+  return { ...start, between: '; after re-trim ', allUp: grams(allUp), after: `${turned}${after}` };
 }
 
-function detailOf(drawn: TrialResult, trials: readonly TrialResult[]): string {
-  const stuck = [drawn, ...trials].filter(({ refused }) => refused !== null).map(({ name }) => name);
-  return stuck.length === 0 ? '' : `Not to be trimmed at this arm: ${stuck.join(', ')}.`;
+export const wholeSentence = ({ before, bare, between, allUp, after }: Sentence): string =>
+  [before, bare, between, allUp, after].join('');
+
+function marginWords(margin: Step['margin']): string {
+  if (!margin) return '';
+  const [from, to] = [margin.from, margin.to].map((value) => formatQuantity(value, 'ratio'));
+  return from === to ? `; spar margin unchanged at ${to}` : `; spar margin ${to} instead of ${from}`;
+}
+
+/** The trial that saves most once trimmed: what the page opens with. The first is as drawn. */
+export function bestOf(results: readonly TrialResult[]): number {
+  const drawn = results[0];
+  if (!drawn || results.length < 2) return 0;
+  const [best] = results
+    .slice(1)
+    .map((result, i) => ({ index: i + 1, saved: stepOf(drawn, result).allUp ?? -Infinity }))
+    .sort((a, b) => b.saved - a.saved);
+  return best?.index ?? 0;
 }

@@ -9,6 +9,7 @@ import { whyNeutralPoint, whyStaticMargin } from './why-neutral.ts';
 import { whyChord, whyPlanform } from './why-planform.ts';
 import { whySpar } from './why-spar.ts';
 import { whySum } from './why-sum.ts';
+import { whySaving } from './why-saving.ts';
 import { whyTrial } from './why-trial.ts';
 import type { Asked, Why } from './why.ts';
 
@@ -53,6 +54,8 @@ export function answer(question: WhyQuestion, asked: Asked): Why | null {
     case 'spar':
       return whySpar(asked, question.station, question.loadFactor);
     case 'trial':
-      return whyTrial(asked, question.figure, question.trial, question.arm);
+      return whyTrial(asked, question.figure, question.trial, question.terms);
+    case 'saving':
+      return whySaving(asked, question);
   }
 }

@@ -1,9 +1,18 @@
-import type { Trial } from '#shared/core/wood-trial.ts';
+import type { Trial, TrialTerms } from '#shared/core/wood-trial.ts';
 
 export type PlanformFigure =
   'areaProjected' | 'areaDeveloped' | 'span' | 'aspectRatio' | 'mac' | 'xLeMac' | 'yMac';
 export type AreaKind = 'projected' | 'developed' | 'class';
-export type TrialFigure = 'wingMass' | 'bare' | 'percentMac' | 'ballast' | 'allUp' | 'wingLoading';
+export type TrialFigure =
+  | 'wingBare'
+  | 'wingMass'
+  | 'bare'
+  | 'percentMac'
+  | 'ballast'
+  | 'allUp'
+  | 'wingLoading'
+  | 'classLoading'
+  | 'margin';
 
 /** A figure that can be asked how it was made. */
 export type WhyQuestion =
@@ -30,4 +39,6 @@ export type WhyQuestion =
   | { of: 'tipWeight'; arm: number }
   /** at a station of the half span, mm, at a load factor */
   | { of: 'spar'; station: number; loadFactor: number }
-  | { of: 'trial'; figure: TrialFigure; trial: Trial; arm: number };
+  | { of: 'trial'; figure: TrialFigure; trial: Trial; terms: TrialTerms }
+  /** from one trial to another, without ballast or all up */
+  | { of: 'saving'; figure: 'bare' | 'allUp'; from: Trial; to: Trial; terms: TrialTerms };

@@ -63,10 +63,21 @@ describe('every figure that can be asked', () => {
     'xLeMac',
     'yMac',
   ] as const;
-  const trialFigures = ['wingMass', 'bare', 'percentMac', 'ballast', 'allUp', 'wingLoading'] as const;
+  const trialFigures = [
+    'wingBare',
+    'wingMass',
+    'bare',
+    'percentMac',
+    'ballast',
+    'allUp',
+    'wingLoading',
+    'classLoading',
+    'margin',
+  ] as const;
   const plan = planSchema.parse(dunlinJson);
   const result = estimate(plan);
   const air = airAt(0, 15);
+  const terms = { arm: -132, minimumMass: 300 };
   const lead: Trial = { name: 'As drawn', materials: {} };
   const questions: WhyQuestion[] = [
     ...result.lines.map(({ id }): WhyQuestion => ({ of: 'line', id })),
@@ -84,7 +95,14 @@ describe('every figure that can be asked', () => {
     { of: 'air', altitude: 300, temperature: 25 },
     { of: 'ballast', arm: -132, to: 60 },
     { of: 'spar', station: result.spar.worst ?? -1, loadFactor: 6 },
-    ...trialFigures.map((figure): WhyQuestion => ({ of: 'trial', figure, trial: lead, arm: -132 })),
+    ...trialFigures.map((figure): WhyQuestion => ({ of: 'trial', figure, trial: lead, terms })),
+    ...(['bare', 'allUp'] as const).map((figure): WhyQuestion => ({
+      of: 'saving',
+      figure,
+      from: lead,
+      to: { name: 'Light', materials: {} },
+      terms,
+    })),
   ];
   const told = (question: WhyQuestion, units = USUAL_UNITS) => answer(question, { plan, result, units });
 

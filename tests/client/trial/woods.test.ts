@@ -1,13 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { trialHeadline } from '#client/features/trial/headline.ts';
-import { parseTrials } from '#client/features/trial/trial-store.ts';
 import { drawnGroups, firstTrials, oneGradeLighter, woodsOf } from '#client/features/trial/woods.ts';
 import { snapshotOf } from '#client/lib/material-snapshot.ts';
 import whimbrelJson from '#data/demo/gliders/whimbrel.json' with { type: 'json' };
 import materialsJson from '#data/materials.json' with { type: 'json' };
 import { estimate } from '#shared/core/estimate.ts';
-import { runTrials, type TrialResult } from '#shared/core/wood-trial.ts';
-import { USUAL_UNITS } from '#shared/format/units.ts';
+import { runTrials } from '#shared/core/wood-trial.ts';
 import { planSchema } from '#shared/schemas/plan.ts';
 
 const plan = planSchema.parse(whimbrelJson);
@@ -54,56 +51,5 @@ describe('woods of a trial', () => {
     expect(trials[0]?.name).toBe('One grade lighter ribs');
     const { results } = runTrials(plan, [{ name: 'As drawn', materials: {} }, ...trials], { arm: -232 });
     expect(results[1]?.wingMass).toBeLessThan(results[0]?.wingMass ?? 0);
-  });
-});
-
-describe('trialHeadline', () => {
-  const trial = (name: string, bare: number, allUp: number | null): TrialResult => ({
-    name,
-    bare,
-    allUp,
-    wingMass: 0,
-    wingBare: 0,
-    u: 0,
-    x: null,
-    percentMac: null,
-    wingLoading: null,
-    classLoading: null,
-    margin: null,
-    marginAt: null,
-    added: allUp === null ? null : 0,
-    ballast: allUp === null ? null : allUp - bare,
-    refused: allUp === null ? { refused: 'wrong_side', takeOff: 1 } : null,
-  });
-  const headline = (...results: TrialResult[]) =>
-    trialHeadline({ results }, USUAL_UNITS).headline.replaceAll('\u202f', ' ');
-
-  it('tells the best trial by what is left after the re-trim', () => {
-    expect(
-      headline(trial('As drawn', 100, 120), trial('Light ribs', 96.9, 116), trial('Light tail', 99, 112)),
-    ).toBe('Light tail: saves 1.0 g; after re-trim 8.0 g');
-  });
-
-  it('says so when a saving is eaten by ballast, when nothing changes, and when it cannot be trimmed', () => {
-    expect(headline(trial('As drawn', 100, 120), trial('Light nose', 98, 123))).toBe(
-      'Light nose: saves 2.0 g; after re-trim 3.0 g more',
-    );
-    expect(headline(trial('As drawn', 100, 120), trial('Same', 100, 120))).toBe(
-      'Same: no difference in mass',
-    );
-    expect(headline(trial('As drawn', 100, 120), trial('Heavy', 104, null))).toBe(
-      'Heavy: costs 4.0 g; but it cannot be trimmed there',
-    );
-  });
-});
-
-describe('parseTrials', () => {
-  it('reads back what was kept and nothing else', () => {
-    const trials = firstTrials(groups, woods);
-    expect(parseTrials(JSON.parse(JSON.stringify(trials)))).toEqual(trials);
-    expect(
-      parseTrials([{ name: 'x', materials: { ribs: { key: 'a', material: { name: 'no figures' } } } }]),
-    ).toBeNull();
-    expect(parseTrials({})).toBeNull();
   });
 });

@@ -12,11 +12,11 @@ const SELECTORS: Record<Place, string> = {
 
 /** A wish to move the focus to a row that is only about to appear. */
 export class FocusWish {
-  private wanted: { line: string | null; where: Place } | null = null;
+  private wanted: { line: string | null; where: Place; late: boolean } | null = null;
 
-  /** A place in the row of a line; null: whatever follows the list. */
-  ask(line: string | null, where: Place): void {
-    this.wanted = { line, where };
+  /** A place in the row of a line; null: whatever follows the list. Late where a menu is only closing. */
+  ask(line: string | null, where: Place, late = where === 'form'): void {
+    this.wanted = { line, where, late };
   }
 
   /** Grants the wish if the list has the row by now. */
@@ -26,7 +26,7 @@ export class FocusWish {
     const target = wanted.line === null ? afterList(list) : within(list, wanted.line, wanted.where);
     if (!target) return;
     this.wanted = null;
-    setTimeout(() => target.focus(), wanted.where === 'form' ? AFTER_MENUS : 0);
+    setTimeout(() => target.focus(), wanted.late ? AFTER_MENUS : 0);
   }
 }
 

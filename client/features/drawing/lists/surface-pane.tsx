@@ -44,7 +44,7 @@ export function SurfacePane({ desk, surface, index, table, onRemoved }: SurfaceP
     const { recipe, lines } = withParts(desk.plan, surface, index, added, table);
     const first = lines[0] ?? null;
     desk.edit(recipe, `add ${lines.join(', ')}`);
-    desk.wish.ask(first, lines.length === 1 ? 'form' : 'row');
+    desk.wish.ask(first, lines.length === 1 ? 'form' : 'row', true);
     desk.pick(first);
   };
   const add = (choice: PartChoice) => put([{ choice, part: newPart(choice, surface) }]);

@@ -4,6 +4,7 @@ import { benchDraws } from './draws.ts';
 import { benchEditing } from './editing.ts';
 import { benchEstimate } from './estimate.ts';
 import { fails, isBroken, tableOf } from './table.ts';
+import { benchTrial, benchTrialPage } from './trial.ts';
 
 /**
  * `npm run bench`: figures as ratios of one run, for machines differ and are noisy. Ends with 1 where a ratio of one
@@ -11,7 +12,14 @@ import { fails, isBroken, tableOf } from './table.ts';
  */
 const load = () => `${(loadavg()[0] ?? 0).toFixed(1)} of ${availableParallelism()} processors busy`;
 const before = load();
-const rows = [...benchBundle(), ...benchEstimate(), ...benchDraws(), ...(await benchEditing([150, 500]))];
+const rows = [
+  ...benchBundle(),
+  ...benchEstimate(),
+  ...benchDraws(),
+  ...benchTrial(),
+  ...(await benchTrialPage()),
+  ...(await benchEditing([150, 500])),
+];
 
 process.stdout.write(`${tableOf(rows)}\n\n`);
 process.stdout.write(`Before the run ${before}, after it ${load()}.\n`);

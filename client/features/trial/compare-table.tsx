@@ -36,7 +36,7 @@ function Name({ index, tried, best, picked, onPick }: { index: number } & Compar
       ) : (
         <Button
           variant="plain"
-          className="max-w-52 justify-start px-0 text-left underline-offset-4 hover:underline"
+          className="-ml-3 max-w-56 justify-start text-left pointer-coarse:-ml-3.5"
           aria-pressed={picked === index}
           onClick={() => onPick(index)}
         >

@@ -1,3 +1,4 @@
+import { tradeOffs } from '#shared/core/trade-offs.ts';
 import type { TrialResult } from '#shared/core/wood-trial.ts';
 import type { Units } from '#shared/format/units.ts';
 import { formatQuantity } from '#shared/format/numbers.ts';
@@ -55,6 +56,19 @@ function marginWords(margin: Step['margin']): string {
   if (!margin) return '';
   const [from, to] = [margin.from, margin.to].map((value) => formatQuantity(value, 'ratio'));
   return from === to ? `; spar margin unchanged at ${to}` : `; spar margin ${to} instead of ${from}`;
+}
+
+/** Digits that masses, g, and margins are told to: what looks the same is no reason to prefer one. */
+const TOLD = { mass: 10, margin: 100 };
+
+/** Which trials nothing beats in both all-up mass and spar margin, as far as they are told. */
+export function bestTrades(results: readonly TrialResult[]): boolean[] {
+  const told = (value: number | null, digits: number) =>
+    value === null ? null : Math.round(value * digits) / digits;
+  return tradeOffs(results, {
+    small: ({ allUp }) => told(allUp, TOLD.mass),
+    large: ({ margin }) => told(margin, TOLD.margin),
+  });
 }
 
 /** The trial that saves most once trimmed: what the page opens with. The first is as drawn. */

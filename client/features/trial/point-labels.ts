@@ -2,6 +2,8 @@
 const LETTER = 6.4;
 const LINE = 16;
 const GAP = 11;
+/** A label put a line further down may come to lie a rounding error too near: that is no overlap. */
+const SLACK = 1e-6;
 
 interface Label {
   x: number;
@@ -22,7 +24,8 @@ export function pointLabels(
     const right = x + GAP + wide <= width;
     const [from, to] = right ? [x + GAP, x + GAP + wide] : [x - GAP - wide, x - GAP];
     let free = y;
-    const hit = () => taken.find((one) => one.from < to && from < one.to && Math.abs(one.y - free) < LINE);
+    const hit = () =>
+      taken.find((one) => one.from < to && from < one.to && Math.abs(one.y - free) < LINE - SLACK);
     for (let other = hit(); other; other = hit()) free = other.y + LINE;
     taken.push({ from, to, y: free });
     labels[i] = { x: right ? from : to, y: free, textAnchor: right ? 'start' : 'end' };

@@ -35,6 +35,7 @@ export function DeskMenu({ user }: { user: UserDto | null | undefined }) {
         <div className="sm:hidden">
           {user && <MenuItem onSelect={() => void navigate(paths.bench)}>Bench</MenuItem>}
           {!user && <MenuItem onSelect={() => void navigate(paths.sample())}>Sample glider</MenuItem>}
+          {user && <MenuItem onSelect={() => void navigate(paths.rack)}>Rack</MenuItem>}
           <MenuItem onSelect={() => void navigate(paths.materials)}>Materials</MenuItem>
           {!user && <MenuItem onSelect={() => void navigate(paths.signIn())}>Sign in</MenuItem>}
           <MenuLine />

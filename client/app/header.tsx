@@ -43,9 +43,14 @@ function MainLinks({ user }: { user: UserDto | null | undefined }) {
   return (
     <>
       {user ? (
-        <NavLink to={paths.bench} className={link}>
-          Bench
-        </NavLink>
+        <>
+          <NavLink to={paths.bench} className={link}>
+            Bench
+          </NavLink>
+          <NavLink to={paths.rack} className={link}>
+            Rack
+          </NavLink>
+        </>
       ) : (
         <NavLink to="/sample" className={link}>
           Sample

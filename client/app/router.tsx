@@ -40,6 +40,18 @@ const routes: RouteObject[] = [
             lazy: async () => ({ Component: (await import('./pages/materials-page.tsx')).MaterialsPage }),
           },
           {
+            path: 'rack',
+            lazy: async () => ({ Component: (await import('./pages/rack-page.tsx')).RackPage }),
+          },
+          {
+            path: 'rack/labels',
+            lazy: async () => ({ Component: (await import('./pages/rack-labels-page.tsx')).RackLabelsPage }),
+          },
+          {
+            path: 'rack/:id',
+            lazy: async () => ({ Component: (await import('./pages/rack-piece-page.tsx')).RackPiecePage }),
+          },
+          {
             path: 'forgot-password',
             lazy: async () => ({
               Component: (await import('./pages/forgot-password-page.tsx')).ForgotPasswordPage,

@@ -24,14 +24,16 @@ export function WeighedPieceFields({ piece, lines, takenBy, onPiece, onRemove }:
     onPiece({ ...piece, lines: on ? [...piece.lines, id] : piece.lines.filter((line) => line !== id) });
   return (
     <div className="mt-2 border-l-3 border-l-strong-rule pl-3">
-      <div className="grid grid-cols-[minmax(0,1fr)_7rem_auto] items-end gap-x-3">
-        <TextField
-          label="Piece"
-          keepRoom={false}
-          value={piece.name}
-          maxLength={LIMITS.name.max}
-          onChange={(event) => onPiece({ ...piece, name: event.target.value })}
-        />
+      <div className="grid grid-cols-2 items-end gap-x-3 gap-y-2 sm:grid-cols-[minmax(0,1fr)_7rem_auto]">
+        <div className="max-sm:col-span-2">
+          <TextField
+            label="Piece"
+            keepRoom={false}
+            value={piece.name}
+            maxLength={LIMITS.name.max}
+            onChange={(event) => onPiece({ ...piece, name: event.target.value })}
+          />
+        </div>
         <NumberField
           label="Density ±"
           quantity="fineShare"

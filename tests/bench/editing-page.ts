@@ -1,4 +1,4 @@
-import type { Page } from 'playwright-core';
+import type { CDPSession, Page } from 'playwright-core';
 import { quantiles, type Spread } from './measure.ts';
 
 /** A value typed letter by letter would be mended in between; here each key leaves a whole number. */
@@ -106,6 +106,22 @@ export async function typeInto(page: Page, typing: Typing): Promise<Typed> {
     figures: quantiles(times.figures.slice(WARMING)),
     lines: quantiles(times.lines.slice(WARMING)),
   };
+}
+
+/**
+ * What the page's own thread works for each of some keys, ms: script, layout and paint. Counted by the processor's
+ * clock, so that others who keep it busy count for little.
+ */
+export async function workPerKey(cdp: CDPSession, page: Page, typing: Typing): Promise<number> {
+  await cdp.send('Performance.enable', { timeDomain: 'threadTicks' });
+  const before = await workDone(cdp);
+  await typeInto(page, typing);
+  return ((await workDone(cdp)) - before) / typing.keys;
+}
+
+async function workDone(cdp: CDPSession): Promise<number> {
+  const { metrics } = await cdp.send('Performance.getMetrics');
+  return 1000 * (metrics.find(({ name }) => name === 'TaskDuration')?.value ?? Number.NaN);
 }
 
 /** From frame to frame while a value is typed at every one of them, ms. */

@@ -1,7 +1,7 @@
 import type { BrowserContext, Page } from 'playwright-core';
 import { openBrowser } from '#tests/support/chromium.ts';
 import { serve } from '#tests/support/served.ts';
-import { framesWhilePulling, framesWhileTyping, TOOLS, typeInto } from './editing-page.ts';
+import { framesWhilePulling, framesWhileTyping, TOOLS, typeInto, workPerKey } from './editing-page.ts';
 import { planOfParts } from './large-plan.ts';
 import { ms, spread, type Ratio, type Spread } from './measure.ts';
 
@@ -59,9 +59,8 @@ const beside = (what: string, { median }: Spread) => `${what} ${median.toPrecisi
 /** Keys and frames of one plan at one speed of the processor. */
 async function measured(context: BrowserContext, id: string, parts: number, rate: number): Promise<Ratio[]> {
   const [blank, page] = [await blankPage(context), await drawingPage(context, id)];
-  for (const one of [blank, page]) {
-    await (await context.newCDPSession(one)).send('Emulation.setCPUThrottlingRate', { rate });
-  }
+  const [ofBlank, ofPage] = await Promise.all([context.newCDPSession(blank), context.newCDPSession(page)]);
+  for (const cdp of [ofBlank, ofPage]) await cdp.send('Emulation.setCPUThrottlingRate', { rate });
   const name = `${parts} parts${rate === 1 ? '' : `, slowed ${rate}×`}`;
   const rows: Ratio[] = [];
 
@@ -70,7 +69,14 @@ async function measured(context: BrowserContext, id: string, parts: number, rate
   const bare = (await typeInto(blank, VALUE)).figures;
   const bareFrames = await framesWhileTyping(blank, { ...VALUE, keys: FRAMES });
 
+  const bareWork = rate === 1 ? await workPerKey(ofBlank, blank, VALUE) : null;
   await page.bringToFront();
+  const work = async (what: string, typing: typeof SPAN) => {
+    if (bareWork === null) return;
+    const ours = await workPerKey(ofPage, page, typing);
+    const beside = `blank page ${ms(bareWork)}`;
+    rows.push({ what: `${name}: ${what}, work a key`, ours: ms(ours), beside, ratio: ours / bareWork });
+  };
   const key = (what: string, times: Spread) => {
     if (rate === 1) {
       const ratio = times.median / bare.median;
@@ -93,6 +99,7 @@ async function measured(context: BrowserContext, id: string, parts: number, rate
     });
 
   const span = await typeInto(page, SPAN);
+  await work('span typed', SPAN);
   key('span typed, to the figures', span.figures);
   key('span typed, to the lines', span.lines);
   frames(
@@ -102,6 +109,7 @@ async function measured(context: BrowserContext, id: string, parts: number, rate
 
   await page.getByRole('button', { name: RIB }).first().click();
   const thickness = await typeInto(page, THICKNESS);
+  await work('a rib’s thickness typed', THICKNESS);
   key('a rib’s thickness typed, to the figures', thickness.figures);
   frames(
     'a rib’s thickness typed at every frame, frame to frame',

@@ -74,8 +74,12 @@ async function measured(context: BrowserContext, id: string, parts: number, rate
   const work = async (what: string, typing: typeof SPAN) => {
     if (bareWork === null) return;
     const ours = await workPerKey(ofPage, page, typing);
-    const beside = `blank page ${ms(bareWork)}`;
-    rows.push({ what: `${name}: ${what}, work a key`, ours: ms(ours), beside, ratio: ours / bareWork });
+    rows.push({
+      what: `${name}: ${what}, work a key`,
+      ours: ms(ours),
+      beside: `blank page ${ms(bareWork)}`,
+      ratio: ours / bareWork,
+    });
   };
   const key = (what: string, times: Spread) => {
     if (rate === 1) {

@@ -1,9 +1,8 @@
+import { memo } from 'react';
 import { useUnits } from '#client/lib/units.ts';
 import { estimate } from '#shared/core/estimate.ts';
 import { inAir, type DampAir } from '#shared/core/humidity.ts';
-import type { Plan } from '#shared/core/plan.ts';
-import type { Trial, TrialResult, TrialTerms } from '#shared/core/wood-trial.ts';
-import { builtAs } from './trial-chances.ts';
+import { builtAs, type Tried } from './trial-chances.ts';
 
 /** A dry and a damp day, and the heated room that the wood was weighed in (common practice, no source). */
 const [DRY, DAMP, WORKSHOP]: [DampAir, DampAir, DampAir] = [
@@ -13,19 +12,19 @@ const [DRY, DAMP, WORKSHOP]: [DampAir, DampAir, DampAir] = [
 ];
 
 interface AirNoteProps {
-  plan: Plan;
-  trial: Trial;
-  result: TrialResult | undefined;
-  terms: TrialTerms;
-  /** where it is trimmed to, mm aft of the datum */
-  wanted: number | null;
+  /** place in what was tried */
+  picked: number;
+  later: Tried;
 }
 
 /** What the day's air can make of a trial's mass, beside a class minimum where one is set. */
-export function AirNote({ plan, trial, result, terms, wanted }: AirNoteProps) {
+export const AirNote = memo(Air);
+
+function Air({ picked, later: { plan, run, terms, tried } }: AirNoteProps) {
   const units = useUnits();
-  const built = result ? builtAs(plan, trial, result, { arm: terms.arm, wanted }) : null;
-  if (!built) return null;
+  const [trial, result] = [tried[picked], run.results[picked]];
+  const built = trial && result ? builtAs(plan, trial, result, { arm: terms.arm, wanted: run.wanted }) : null;
+  if (!trial || !built) return null;
   const all = estimate(built);
   const [dry, damp] = [DRY, DAMP].map((air) => inAir(built, all, air, WORKSHOP));
   if (!dry || !damp) return null;

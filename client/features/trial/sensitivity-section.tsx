@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import { perDensity, perGram, type GramEffect } from '#shared/core/sensitivity.ts';
@@ -9,7 +10,9 @@ import { formatNumber, NARROW_SPACE } from '#shared/format/numbers.ts';
 const SHOWN = 8;
 
 /** Where a gram or a tenth of density costs most, with the ballast that it asks for. */
-export function SensitivitySection({ base, arm }: { base: TrialBase; arm: number }) {
+export const SensitivitySection = memo(Sensitivity);
+
+function Sensitivity({ base, arm }: { base: TrialBase; arm: number }) {
   const units = useUnits();
   if (base.wanted === null) return null;
   const trim = { arm, wanted: base.wanted };

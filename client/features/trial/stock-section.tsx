@@ -1,15 +1,22 @@
+import { useDeferredValue, useMemo, useState } from 'react';
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { stockNeeded, type StockNeed } from '#shared/core/stock-needed.ts';
+import { withWood } from '#shared/core/wood-groups.ts';
+import type { Trial } from '#shared/core/wood-trial.ts';
 import type { Units } from '#shared/format/units.ts';
 
 /** What a trial is cut from: sheet, sticks and blocks by material and size. */
-export function StockSection({ name, plan }: { name: string; plan: Plan }) {
+export function StockSection({ name, plan, trial }: { name: string; plan: Plan; trial: Trial }) {
   const units = useUnits();
-  const needs = stockNeeded(plan);
+  // Measured only where it is looked at, and never in the way of a choice.
+  const [open, setOpen] = useState(false);
+  const later = useDeferredValue(trial);
+  const tried = useMemo(() => (open ? withWood(plan, later.materials) : null), [open, plan, later]);
+  const needs = useMemo(() => (tried ? stockNeeded(tried) : []), [tried]);
   return (
-    <details className="mt-4">
+    <details className="mt-4" open={open} onToggle={(event) => setOpen(event.currentTarget.open)}>
       <summary className="opens min-h-row font-semibold">Stock that “{name}” takes</summary>
       <p className="max-w-prose text-note text-graphite">
         Net, as the finished parts measure: offcuts and the saw come on top. No prices are known here.
@@ -27,7 +34,7 @@ export function StockSection({ name, plan }: { name: string; plan: Plan }) {
         <tbody>
           {needs.map((need, i) => (
             <Tr key={i}>
-              <RowTh>{plan.materials[need.material]?.name ?? need.material}</RowTh>
+              <RowTh>{tried?.materials[need.material]?.name ?? need.material}</RowTh>
               <Td>{sizeText(need, units)}</Td>
               <Td numeric>{units.format(need.pieces, 'count')}</Td>
               <Td numeric>{amountText(need, units)}</Td>

@@ -7,7 +7,8 @@ import { trimmedPlan } from './draws/trimmed-plan.ts';
 import { useChances } from './draws/use-chances.ts';
 import { chanceText } from './draws/words.ts';
 
-interface Tried {
+/** What was tried, and what it came to. */
+export interface Tried {
   plan: Plan;
   run: TrialRun;
   terms: TrialTerms;

@@ -14,6 +14,7 @@ import { DrawsSection } from './draws/draws-section.tsx';
 import { useDrawSettings } from './draws/settings.ts';
 import { bestOf, bestTrades } from './headline.ts';
 import { SensitivitySection } from './sensitivity-section.tsx';
+import { useRackWoods } from './rack-woods.ts';
 import { StockSection } from './stock-section.tsx';
 import { TermsFields } from './terms-fields.tsx';
 import { TradeOffPlot } from './trade-off-plot.tsx';
@@ -47,6 +48,7 @@ export function TrialSheet({ workspace, plan, list, untouched, onList, status }:
   const [pickedIndex, pick] = useState(1);
   const [pair, setPair] = useState<[number, number] | null>(null);
   const woods = useMemo(() => woodsOf(plan, table), [plan, table]);
+  const rack = useRackWoods(kind, woods);
   const groups = useMemo(() => drawnGroups(plan, result), [plan, result]);
   const editable = onList !== undefined;
   const trials = useMemo(
@@ -132,7 +134,7 @@ export function TrialSheet({ workspace, plan, list, untouched, onList, status }:
         <>
           <WoodChoice
             key={picked}
-            {...{ plan, groups, woods, trial, editable, full }}
+            {...{ plan, groups, woods, rack, trial, editable, full }}
             number={picked}
             last={picked === trials.length}
             onTrial={(next) => keep(trials.map((one, i) => (i === picked - 1 ? next : one)))}
@@ -146,8 +148,8 @@ export function TrialSheet({ workspace, plan, list, untouched, onList, status }:
             onUse={() => use(trial)}
           />
           <div className="max-w-4xl">
-            <StockSection name={trial.name} plan={withWood(plan, trial.materials)} />
-            <AirNote {...{ plan, trial, terms }} wanted={run.wanted} result={run.results[picked]} />
+            <StockSection name={trial.name} plan={plan} trial={trial} />
+            <AirNote picked={picked} later={later} />
           </div>
         </>
       )}

@@ -15,6 +15,8 @@ interface WoodChoiceProps {
   plan: Plan;
   groups: readonly DrawnGroup[];
   woods: readonly TrialWood[];
+  /** weighed pieces at hand */
+  rack: readonly TrialWood[];
   trial: TrialDto;
   /** 1 for the first trial */
   number: number;
@@ -134,6 +136,7 @@ function GroupRows({ group, ...props }: WoodChoiceProps & { group: DrawnGroup })
 
 function Choice({
   woods,
+  rack,
   trial,
   editable,
   onTrial,
@@ -152,19 +155,28 @@ function Choice({
       value={chosen?.key ?? ''}
       options={[
         { value: '', label: shown ? 'as its group' : 'as drawn' },
-        ...optionsOf(woods, chosen, units),
+        ...optionsOf(woods, rack, chosen, units),
       ]}
-      onValue={(key) => onTrial(withChoice(trial, place, woods, key))}
+      onValue={(key) => onTrial(withChoice(trial, place, [...woods, ...rack], key))}
     />
   );
 }
 
-function optionsOf(woods: readonly TrialWood[], chosen: TrialWood | undefined, units: Units) {
-  const known = chosen === undefined || woods.some(({ key }) => key === chosen.key);
-  return (known ? woods : [...woods, chosen]).map(({ key, material }) => ({
+function optionsOf(
+  woods: readonly TrialWood[],
+  rack: readonly TrialWood[],
+  chosen: TrialWood | undefined,
+  units: Units,
+) {
+  const known = chosen === undefined || [...woods, ...rack].some(({ key }) => key === chosen.key);
+  const optionOf = ({ key, material }: TrialWood) => ({
     value: key,
     label: `${material.name}, ${units.format(material.density, 'density')}`,
-  }));
+  });
+  const table = (known ? woods : [...woods, chosen]).map(optionOf);
+  return rack.length === 0
+    ? table
+    : [...table, { label: 'Weighed, on your rack', options: rack.map(optionOf) }];
 }
 
 function withChoice(trial: TrialDto, place: string, woods: readonly TrialWood[], key: string): TrialDto {

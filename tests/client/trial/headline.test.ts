@@ -79,7 +79,7 @@ describe('names of points on the plot', () => {
   it('never lie over one another and stay in the frame', () => {
     const points = Array.from({ length: 12 }, (_, i) => ({
       x: 300 + i,
-      y: 100 / 3 + (i % 3) / 7,
+      y: 254.9 + (i % 3) / 7,
       name: `Trial ${i + 1}`,
     }));
     const labels = pointLabels(points, 360);

@@ -29,7 +29,7 @@ async function fetchedBefore(selector: string, page: Page, path: string): Promis
       .filter(({ name, startTime }) => name.endsWith('.js') && startTime <= until)
       .map(({ name }) => name);
   });
-  const bodies = await Promise.all([...new Set(asked)].map((url) => answers.get(url)?.body()));
+  const bodies = await Promise.all([...new Set(asked)].map(async (url) => answers.get(url)?.body()));
   // Every file asked for has an answer: one without would count as nothing.
   expect(bodies.every((body) => body !== undefined && body.length > 0)).toBe(true);
   return bodies.reduce((sum, body) => sum + gzipSync(body ?? '', { level: 9 }).length, 0) / 1000;

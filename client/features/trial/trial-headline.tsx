@@ -1,6 +1,7 @@
 import { Select } from '#client/components/ui/select.tsx';
 import { AskWhy } from '#client/components/why/ask-why.tsx';
 import { useUnits } from '#client/lib/units.ts';
+import type { WhyQuestion } from '#client/lib/why/question.ts';
 import type { Trial, TrialRun, TrialTerms } from '#shared/core/wood-trial.ts';
 import { sentenceOf, stepOf } from './headline.ts';
 
@@ -35,18 +36,10 @@ export function TrialHeadline({ tried, run, terms, from, to, onPair }: TrialHead
     <>
       <h1 className="max-w-5xl text-figure font-semibold text-balance">
         {said.before}
-        {said.bare !== null && (
-          <AskWhy inText question={ask('bare')}>
-            {said.bare}
-          </AskWhy>
-        )}
-        {said.between}
-        {said.allUp !== null && (
-          <AskWhy inText question={ask('allUp')}>
-            {said.allUp}
-          </AskWhy>
-        )}
-        {said.after}
+        {said.bare !== null && <Asked question={ask('bare')} text={said.bare} next={said.between} />}
+        {said.bare === null && said.between}
+        {said.allUp !== null && <Asked question={ask('allUp')} text={said.allUp} next={said.after} />}
+        {said.allUp === null && said.after}
       </h1>
       <div className="mt-2 flex flex-wrap gap-x-4 gap-y-2 print:hidden">
         <div className="w-72 max-w-full">
@@ -68,6 +61,22 @@ export function TrialHeadline({ tried, run, terms, from, to, onPair }: TrialHead
           />
         </div>
       </div>
+    </>
+  );
+}
+
+/** A figure that can be asked, and the words after it, whose stop stays with it where the line breaks. */
+function Asked({ question, text, next }: { question: WhyQuestion; text: string; next: string }) {
+  const stop = /^[;,]/.test(next) ? next.slice(0, 1) : '';
+  return (
+    <>
+      <span className="whitespace-nowrap">
+        <AskWhy inText question={question}>
+          {text}
+        </AskWhy>
+        {stop}
+      </span>
+      {next.slice(stop.length)}
     </>
   );
 }

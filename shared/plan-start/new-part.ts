@@ -1,6 +1,7 @@
 import { halfOf } from '#shared/core/half.ts';
-import type { Part, Strip, Surface } from '#shared/core/plan.ts';
-import { surfaceLine } from '#shared/core/stations.ts';
+import type { Pair, Part, Strip, Surface } from '#shared/core/plan.ts';
+import { heightAt } from '#shared/core/section-integrals.ts';
+import { stationAt, surfaceLine } from '#shared/core/stations.ts';
 
 /** What can be added to a surface, in the order in which a wing is built. */
 export type PartChoice =
@@ -25,6 +26,8 @@ export type NewPart = Bare<Part>;
 /** Sizes to tenths of a mm, as stock is sold. */
 const tenths = (value: number) => Math.max(0.1, Math.round(value * 10) / 10);
 const RIB_SPACING_CHORDS = 0.4;
+/** Most that a part takes of the section's depth where it lies; common practice, no source. */
+const DEPTH = { spar: 0.2, stringer: 0.25, sheeting: 0.08 } as const;
 
 /** A part of that sort in sizes that suit the surface, to be altered from there. */
 export function newPart(choice: PartChoice, surface: Surface): NewPart {
@@ -36,6 +39,15 @@ export function newPart(choice: PartChoice, surface: Surface): NewPart {
   const range = { from: 0, to: span };
   const spars = half.strips.filter(isSpar);
   const sparAt = spars[0]?.at?.[0] ?? 0.3;
+  const depthAt = (s: number, x: number) => {
+    const { section, chord } = stationAt(line, s);
+    return heightAt(section, x) * chord;
+  };
+  /** A size that is usual at the root and at the tip, or as much less as a thin section asks for. */
+  const within = (root: number, tip: number, share: number, x: number): Pair => [
+    Math.min(root, tenths(share * depthAt(0, x))),
+    Math.min(tip, tenths(share * depthAt(span, x))),
+  ];
   const strip = (
     name: string,
     group: string,
@@ -59,13 +71,17 @@ export function newPart(choice: PartChoice, surface: Surface): NewPart {
       return strip(`Spar, ${seat}`, 'spars', {
         seat,
         width,
-        height: [3, 2],
+        height: within(3, 2, DEPTH.spar, sparAt),
         at: [sparAt, sparAt],
         letIn: true,
       });
     }
     case 'stringer': {
-      const own = { width: [1.6, 1.6], height: [1.6, 1.6], at: [0.6, 0.6] } satisfies Partial<Strip>;
+      const own = {
+        width: [1.6, 1.6],
+        height: within(1.6, 1.6, DEPTH.stringer, 0.6),
+        at: [0.6, 0.6],
+      } satisfies Partial<Strip>;
       return strip('Stringer, top', 'stringers', { ...own, seat: 'top', letIn: true });
     }
     case 'leadingEdge': {
@@ -78,7 +94,8 @@ export function newPart(choice: PartChoice, surface: Surface): NewPart {
       return strip('Trailing edge', 'edges', { seat: 'tail', width, height, profile: 'triangle' });
     }
     case 'sheeting': {
-      const own = { start: sparAt, end: sparAt, seat: 'wrap', thickness: 1 } as const;
+      const thickness = Math.min(...within(1, 1, DEPTH.sheeting, sparAt));
+      const own = { start: sparAt, end: sparAt, seat: 'wrap', thickness } as const;
       return { ...range, kind: 'skin', name: 'Nose sheeting', group: 'sheeting', ...own };
     }
     case 'capStrips': {

@@ -61,6 +61,39 @@ describe('a set of parts', () => {
     expect(words.filter(({ tone }) => tone === 'red')).toEqual([]);
   });
 
+  it.each(['0006', '4406', '2407', '4409', '0018'])(
+    'each in turn fits into a wing of section %s, however small its chords',
+    (naca) => {
+      for (const [rootChord, tipChord] of [
+        [40, 40],
+        [70, 40],
+        [150, 90],
+        [400, 160],
+      ] as const) {
+        const section = { naca };
+        const bare = empty.surfaces.map((surface) => ({
+          ...surface,
+          panels: surface.panels.map((panel) => ({
+            ...panel,
+            rootChord,
+            tipChord,
+            rootSection: section,
+            tipSection: section,
+          })),
+        }));
+        const plan = SET_CHOICES.reduce((p, { choice }) => withSet(p, 0, choice), {
+          ...empty,
+          surfaces: bare,
+        });
+        const told = estimate(plan).notices.map(({ code }) => code);
+        expect(
+          told.filter((code) => /^strip|^rib|^web|^skin|^part/.test(code)),
+          `${rootChord}–${tipChord} mm`,
+        ).toEqual([]);
+      }
+    },
+  );
+
   it('of ribs stands at the root, at every break and at the tip, whole bays between', () => {
     const { surfaces } = demoPlan('whimbrel');
     const [ribs] = newSet('ribSet', surfaces[0]!);

@@ -22,7 +22,7 @@ export function buttonClass(variant: ButtonVariant = 'quiet', className?: string
 
 interface ButtonProps extends ComponentProps<'button'> {
   variant?: ButtonVariant;
-  /** While true the button is locked and says `pendingText`. */
+  /** While true the button does nothing and says `pendingText`; it keeps the focus, which a disabled one would lose. */
   pending?: boolean;
   pendingText?: string;
   children: ReactNode;
@@ -36,10 +36,22 @@ export function Button({
   children,
   disabled,
   type = 'button',
+  onClick,
   ...rest
 }: ButtonProps) {
   return (
-    <button type={type} className={buttonClass(variant, className)} disabled={disabled || pending} {...rest}>
+    <button
+      type={type}
+      className={buttonClass(variant, className)}
+      disabled={disabled && !pending}
+      aria-disabled={pending || undefined}
+      {...rest}
+      onClick={(event) => {
+        // A form that is sent with Enter presses its button too.
+        if (pending) event.preventDefault();
+        else onClick?.(event);
+      }}
+    >
       {pending ? <span role="status">{pendingText}</span> : children}
     </button>
   );

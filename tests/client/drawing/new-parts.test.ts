@@ -71,7 +71,7 @@ describe('a set of parts', () => {
         [400, 160],
       ] as const) {
         const section = { naca };
-        const bare = empty.surfaces.map((surface) => ({
+        const bare = empty.surfaces.map((surface): Surface => ({
           ...surface,
           panels: surface.panels.map((panel) => ({
             ...panel,

@@ -59,3 +59,9 @@ export async function typeOver(page: Page, text: string): Promise<void> {
   await page.keyboard.press('Control+A');
   await page.keyboard.type(text);
 }
+
+/** Something has the focus, after what could have taken it away. */
+export async function expectHeld(page: Page, where: string): Promise<void> {
+  const tag = async () => (await focusOf(page)).tag;
+  await expect.poll(tag, { timeout: 10_000, message: `focus ${where}` }).not.toMatch(/^(body|none)$/);
+}

@@ -19,6 +19,11 @@ export class FocusWish {
     this.wanted = { line, where, late };
   }
 
+  /** Whether a wish is still to be granted. */
+  asked(): boolean {
+    return this.wanted !== null;
+  }
+
   /** Grants the wish if the list has the row by now. */
   grant(list: HTMLElement | null): void {
     const { wanted } = this;

@@ -17,6 +17,7 @@ import type { Hover } from '../hover.ts';
 import { GROUP, RowGroup, type RowWords } from './row-group.tsx';
 import type { RowOps } from './row-tools.tsx';
 import type { FocusWish } from './focus-wish.ts';
+import { useHeldFocus } from './use-held-focus.ts';
 
 /** What every list of the drawing needs of the desk. */
 export interface Desk {
@@ -71,6 +72,7 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
   const [removed, setRemoved] = useState<Removed | null>(null);
   if (removed && removed.after === null && plan !== removed.before) setRemoved({ ...removed, after: plan });
   const ops = useOps(props, (name, line) => setRemoved({ name, line, before: plan, after: null }));
+  const held = useHeldFocus(() => rows.map(words.lineOf), wish);
   useEffect(() => wish.grant(list.current));
   const restedMasses = useDeferredValue(useSettled(masses, REST));
   const wrong = desk.issues.size > 0 ? wrongLines(props) : null;
@@ -83,7 +85,7 @@ export function RowsPane<T extends { id: string; name: string }>(props: RowsPane
         <span className="w-18 shrink-0 text-right">{rows.length > 0 && 'Mass'}</span>
       </div>
       {rows.length === 0 && <p className="px-2 py-3 text-note text-graphite">{empty}</p>}
-      <ul ref={list}>
+      <ul ref={list} {...held}>
         {groupsOf(rows).map((group, g) => {
           const lines = group.map(words.lineOf);
           const at = picked === null ? -1 : lines.indexOf(picked);

@@ -105,7 +105,7 @@ describe('the keys that ? lists', () => {
     }
     expect(views.size).toBe(4);
 
-    const station = page.getByRole('slider').first();
+    const station = page.locator('input[type=range]').first();
     const at = () => station.inputValue();
     const first = await at();
     await keyboard.press('n');

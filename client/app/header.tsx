@@ -14,7 +14,7 @@ export function Header() {
   const { pathname } = useLocation();
   const signing = pathname === paths.signIn() || pathname === paths.signUp();
   return (
-    <header className="no-print flex min-h-15 items-center gap-x-4 py-2 sm:gap-x-7">
+    <header className="no-print flex min-h-15 flex-wrap items-center gap-x-4 py-2 sm:gap-x-7">
       <Link
         to={user ? paths.bench : paths.home}
         className="flex min-h-row shrink-0 items-center gap-2 text-[1.0625rem] font-bold text-pencil no-underline hover:text-ink"

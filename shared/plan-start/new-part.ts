@@ -44,9 +44,9 @@ export function newPart(choice: PartChoice, surface: Surface): NewPart {
     return heightAt(section, x) * chord;
   };
   /** A size that is usual at the root and at the tip, or as much less as a thin section asks for. */
-  const within = (root: number, tip: number, share: number, x: number): Pair => [
-    Math.min(root, tenths(share * depthAt(0, x))),
-    Math.min(tip, tenths(share * depthAt(span, x))),
+  const within = (atRoot: number, atTip: number, share: number, x: number): Pair => [
+    Math.min(atRoot, tenths(share * depthAt(0, x))),
+    Math.min(atTip, tenths(share * depthAt(span, x))),
   ];
   const strip = (
     name: string,

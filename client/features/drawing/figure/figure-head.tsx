@@ -44,7 +44,7 @@ export function FigureHead(props: FigureHeadProps) {
         {note === null ? title : `${title} · ${note}`}
       </span>
       {onSide && (
-        <span className="flex" role="group" aria-label="Half">
+        <span className="flex flex-wrap" role="group" aria-label="Half">
           {(['starboard', 'port'] as const).map((name) => (
             <button
               key={name}
@@ -58,7 +58,7 @@ export function FigureHead(props: FigureHeadProps) {
           ))}
         </span>
       )}
-      <span className="flex" role="group" aria-label="View">
+      <span className="flex flex-wrap" role="group" aria-label="View">
         {views.map((name) => (
           <button
             key={name}
@@ -71,7 +71,7 @@ export function FigureHead(props: FigureHeadProps) {
           </button>
         ))}
       </span>
-      <span className="flex" role="group" aria-label="Tools">
+      <span className="flex flex-wrap" role="group" aria-label="Tools">
         <button
           type="button"
           aria-pressed={measuring}
@@ -91,7 +91,7 @@ export function FigureHead(props: FigureHeadProps) {
         </button>
       </span>
       {!brief && (
-        <span className="flex" role="group" aria-label="Zoom">
+        <span className="flex flex-wrap" role="group" aria-label="Zoom">
           <Tool label="Smaller" disabled={fitted} onClick={() => onZoom(-1)}>
             −
           </Tool>

@@ -25,7 +25,7 @@ export function StationPicker({ station, ribs, length, onStation, label }: Stati
     onStation(near === undefined || isStepOff ? value : near);
   };
   return (
-    <span className="flex items-center gap-1">
+    <span className="flex max-w-full min-w-0 items-center gap-1">
       <Step label="Rib before" to={before} onStation={onStation} sign="‹" />
       <input
         type="range"
@@ -36,7 +36,7 @@ export function StationPicker({ station, ribs, length, onStation, label }: Stati
         step={1}
         value={Math.round(station)}
         onChange={(event) => slide(Math.min(length, Number(event.target.value)))}
-        className="h-row w-40 accent-ink sm:w-56"
+        className="h-row w-40 min-w-0 shrink accent-ink sm:w-56"
       />
       <Step label="Next rib" to={after} onStation={onStation} sign="›" />
     </span>

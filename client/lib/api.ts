@@ -58,6 +58,11 @@ export async function requestJson(path: string, options: RequestOptions = {}): P
   return json(await send(path, options));
 }
 
+/** Asks the API for a file. */
+export async function requestFile(path: string, options: RequestOptions = {}): Promise<Blob> {
+  return (await send(path, options)).blob();
+}
+
 /** An answer that is what was agreed. @throws UnexpectedAnswer */
 export function checked<T extends z.ZodType>(answer: unknown, schema: T): z.output<T> {
   const parsed = schema.safeParse(answer);

@@ -34,6 +34,7 @@ describe('a rack', () => {
     const { page, complaints } = builder;
     await page.goto('/rack');
     await page.getByText('Nothing is on the rack yet.').waitFor();
+    expect(await page.getByText('Type a number.').count()).toBe(0);
     await inBothThemes(page, 'rack empty');
 
     await page.getByLabel('Material', { exact: true }).selectOption({ label: 'Balsa, medium' });
@@ -64,6 +65,8 @@ describe('a rack', () => {
     await inBothThemes(page, 'rack');
 
     // What cannot be is told at its field, and nothing typed is lost.
+    await page.getByRole('button', { name: 'Like the last' }).click();
+    expect(await page.getByLabel('Kind', { exact: true }).inputValue()).toBe('sheet');
     await page.getByLabel('Length', { exact: true }).fill('');
     await page.getByLabel('Mass', { exact: true }).fill('4');
     await page.keyboard.press('Enter');
@@ -119,6 +122,26 @@ describe('a rack', () => {
     await inBothThemes(page, 'rack edit');
     await page.getByRole('button', { name: 'Save' }).click();
     await page.getByText('one knot at the end').waitFor();
+
+    const knot = await page.screenshot({ clip: { x: 0, y: 0, width: 200, height: 120 } });
+    await page
+      .getByLabel('Photo of the piece')
+      .setInputFiles({ name: 'knot.png', mimeType: 'image/png', buffer: knot });
+    const photo = page.getByRole('img', { name: 'Piece 3' });
+    await photo.waitFor();
+    await expect
+      .poll(() => photo.evaluate((img) => (img instanceof HTMLImageElement ? img.naturalWidth : 0)), PATIENT)
+      .toBe(200);
+    const end = await page.screenshot({ clip: { x: 0, y: 0, width: 90, height: 120 } });
+    await page
+      .getByLabel('Photo of the piece')
+      .setInputFiles({ name: 'end.png', mimeType: 'image/png', buffer: end });
+    await expect
+      .poll(() => photo.evaluate((img) => (img instanceof HTMLImageElement ? img.naturalWidth : 0)), PATIENT)
+      .toBe(90);
+    await inBothThemes(page, 'rack photo');
+    await page.getByRole('button', { name: 'Take it off' }).click();
+    await page.getByRole('button', { name: 'Add a photo' }).waitFor();
     await page.getByRole('button', { name: 'Delete' }).click();
     await dialog(page).getByRole('button', { name: 'Delete' }).click();
     await page.waitForURL('**/rack');

@@ -2,6 +2,7 @@ import { ChartFrame } from '#client/components/ui/chart-frame.tsx';
 import { useWidth } from '#client/hooks/use-width.ts';
 import { useUnits } from '#client/lib/units.ts';
 import type { StockPieceDto } from '#shared/schemas/stock-piece.ts';
+import { densityTicks } from './figures.ts';
 
 const HEIGHT = 200;
 const ROOM = { left: 52, right: 12, top: 10, bottom: 30 };
@@ -17,17 +18,17 @@ export function DensityPlot({ pieces }: { pieces: readonly StockPieceDto[] }) {
     .sort((a, b) => a.thickness - b.thickness || a.density - b.density);
   const thicknesses = [...new Set(sheets.map(({ thickness }) => thickness))];
   if (sheets.length < 3) return null;
-  const top = Math.max(...sheets.map(({ density }) => density)) * 1.08;
+  const ticks = densityTicks(Math.max(...sheets.map(({ density }) => density)), units);
+  const top = ticks.at(-1) ?? 1;
   const inner = Math.max(width - ROOM.left - ROOM.right, 1);
   const x = (thickness: number) =>
     ROOM.left + ((thicknesses.indexOf(thickness) + 0.5) / thicknesses.length) * inner;
   const y = (density: number) => HEIGHT - ROOM.bottom - (density / top) * (HEIGHT - ROOM.top - ROOM.bottom);
-  const ticks = [0, top / 2, top].map((value) => value / 1.08);
   return (
     <ChartFrame
       className="mt-7 max-w-3xl"
       title="Density of the sheets by thickness"
-      sentence={`${units.label('density')}, each mark a sheet of those shown above.`}
+      sentence={`In ${units.label('density')}; each mark is one of the sheets shown above.`}
       columns={[
         { label: 'Piece' },
         { label: 'Thickness', numeric: true },

@@ -1,4 +1,4 @@
-import { useRef, useState, type FormEvent } from 'react';
+import { useEffect, useRef, useState, type FormEvent } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import { Select } from '#client/components/ui/select.tsx';
@@ -22,7 +22,12 @@ export function EntryForm({ last }: { last: StockPieceDto | undefined }) {
   const [added, setAdded] = useState<StockPieceDto | null>(null);
   const form = useRef<HTMLFormElement>(null);
   const mass = useRef<HTMLInputElement>(null);
-  const wish = useRef<{ text: string; key: string } | null>(null);
+  const latest = useRef(draft);
+  useEffect(() => {
+    latest.current = draft;
+  });
+  const failed = useRef(new Map<string, string>());
+  const queue = useRef(Promise.resolve());
   const mutation = useAddPiece();
   const change = (next: Partial<PieceDraft>) => {
     setDraft((before) => ({ ...before, ...next }));
@@ -32,7 +37,6 @@ export function EntryForm({ last }: { last: StockPieceDto | undefined }) {
 
   const submit = (event: FormEvent) => {
     event.preventDefault();
-    if (mutation.isPending) return;
     const read = pieceOf(draft);
     if ('errors' in read) {
       setErrors(read.errors);
@@ -40,22 +44,30 @@ export function EntryForm({ last }: { last: StockPieceDto | undefined }) {
       return;
     }
     const text = JSON.stringify(read.input);
-    if (wish.current?.text !== text) wish.current = { text, key: crypto.randomUUID() };
-    mutation.mutate(
-      { input: read.input, wish: wish.current.key },
-      {
-        onSuccess: (piece) => {
-          wish.current = null;
-          setAdded(piece);
-          setDraft(nextLike(draft));
-          mass.current?.focus();
-        },
-        onError: (error) => {
-          const { fields, root } = refusalOf(error, FIELDS);
-          setErrors({ ...Object.fromEntries(fields), ...(root === null ? {} : { root }) });
-        },
-      },
+    // A piece that failed on a bad line and is sent again is added once.
+    const wish = failed.current.get(text) ?? crypto.randomUUID();
+    failed.current.delete(text);
+    // The field is free at once: who weighs a stack types the next mass before the answer is there.
+    setDraft(nextLike(draft));
+    mass.current?.focus();
+    // One after another, so that the numbers follow the stack.
+    queue.current = queue.current.then(() =>
+      mutation.mutateAsync({ input: read.input, wish }).then(setAdded, (error: unknown) => {
+        failed.current.set(text, wish);
+        refuse(error, draft);
+      }),
     );
+  };
+
+  /** What was refused comes back, unless something else was typed meanwhile; then it is told. */
+  const refuse = (error: unknown, sent: PieceDraft) => {
+    const { fields, root } = refusalOf(error, FIELDS);
+    if (latest.current.mass !== null) {
+      const told = [...fields.map(([, message]) => message), root ?? ''].join(' ').trim();
+      return setErrors({ root: `The piece of ${units.format(sent.mass, 'mass')}: ${told}` });
+    }
+    setDraft(sent);
+    setErrors({ ...Object.fromEntries(fields), ...(root === null ? {} : { root }) });
   };
 
   const density = densityWhileTyping(draft, draft.mass);
@@ -99,8 +111,8 @@ export function EntryForm({ last }: { last: StockPieceDto | undefined }) {
             </span>
           </Button>
         )}
-        <Button type="submit" variant="primary" aria-disabled={mutation.isPending}>
-          {mutation.isPending ? 'Adding …' : 'Add'}
+        <Button type="submit" variant="primary">
+          Add
         </Button>
       </div>
     </form>

@@ -1,6 +1,7 @@
 import { densityOf } from '#shared/core/grades.ts';
 import { volumeOfStock } from '#shared/core/stock.ts';
 import type { Units } from '#shared/format/units.ts';
+import { convert } from '#shared/units/units.ts';
 import type { StockMaterial, StockPieceDto } from '#shared/schemas/stock-piece.ts';
 import { gradeWord, type Measured } from './words.ts';
 
@@ -38,4 +39,16 @@ export function rackHeadline(pieces: readonly StockPieceDto[], more: boolean, un
     ...(sheets.length > 0 ? [`lightest sheet ${units.format(Math.min(...sheets), 'density')}`] : []),
     ...(without > 0 ? [`${without} without a mass`] : []),
   ].join('; ');
+}
+
+const STEPS = [1, 2, 5, 10, 20, 50, 100, 200, 500, 1000, 2000, 5000];
+
+/** Lines of a scale of densities from 0 past the largest, kg/m³: round figures in the reader's unit. */
+export function densityTicks(largest: number, units: Units): number[] {
+  const unit = units.unit('density') as 'kg/m3';
+  const end = convert(largest, 'kg/m3', unit);
+  // Where the unit is large the steps are hundredths.
+  const fine = end < 4 ? 0.01 : 1;
+  const step = (STEPS.find((one) => end / (one * fine) <= 5) ?? 10_000) * fine;
+  return Array.from({ length: Math.ceil(end / step) + 1 }, (_, i) => convert(i * step, unit, 'kg/m3'));
 }

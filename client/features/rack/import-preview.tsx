@@ -1,7 +1,7 @@
 import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { ImportPreviewDto } from '#shared/schemas/rack.ts';
-import { previewHeadline } from './import-words.ts';
+import { columnText, previewHeadline } from './import-words.ts';
 import { KIND_WORDS, sizeText } from './words.ts';
 
 /** Rows of good lines that are drawn; the rest is counted. */
@@ -16,9 +16,7 @@ export function ImportPreview({ preview }: { preview: ImportPreviewDto }) {
       <p role="status" className="font-semibold">
         {previewHeadline(preview)}
       </p>
-      <p className="mt-1 text-note text-graphite">
-        Columns: {columns.map(({ header, field, unit }) => columnText(header, field, unit)).join('; ')}.
-      </p>
+      <p className="mt-1 text-note text-graphite">Columns: {columns.map(columnText).join('; ')}.</p>
       {bad.length > 0 && (
         <Table caption="Lines that cannot be taken in" showCaption className="mt-4 text-note">
           <thead>
@@ -78,9 +76,4 @@ export function ImportPreview({ preview }: { preview: ImportPreviewDto }) {
       {rows.length > SHOWN && <p className="mt-1 text-note">And {rows.length - SHOWN} more.</p>}
     </div>
   );
-}
-
-function columnText(header: string, field: string | null, unit: string | null): string {
-  if (field === null) return `“${header}” is not looked at`;
-  return unit === null ? `“${header}”` : `“${header}” in ${unit}`;
 }

@@ -13,3 +13,10 @@ export function previewHeadline({ rows, bad }: Pick<ImportPreviewDto, 'rows' | '
     ...(doubts > 0 ? [`${doubts} should be looked at`] : []),
   ].join('; ')}.`;
 }
+
+/** `“len (in)” → length, in`, and `“Shop” is left out` for a column that is not looked at. */
+export function columnText({ header, field, unit }: ImportPreviewDto['columns'][number]): string {
+  if (field === null) return `“${header}” is left out`;
+  const name = field.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+  return `“${header}” → ${name}${unit === null ? '' : `, ${unit}`}`;
+}

@@ -19,3 +19,12 @@ export function pagesOf<T>(labels: readonly T[], { count }: Pick<LabelSheet, 'co
     labels.slice(page * count, (page + 1) * count),
   );
 }
+
+/** More would make an address that not every server takes. */
+export const LABELS_AT_ONCE = 96;
+
+/** On the button that leads to the labels of what was chosen, or else of all that is shown. */
+export function labelsText(chosen: number, wanted: number): string {
+  if (wanted > LABELS_AT_ONCE) return `Labels of the first ${LABELS_AT_ONCE}`;
+  return chosen > 0 ? `Labels of ${chosen}` : 'Labels';
+}

@@ -1,4 +1,4 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { useMutation, useQueryClient, type InfiniteData } from '@tanstack/react-query';
 import { command, request } from '#client/lib/api.ts';
 import {
   importPreview,
@@ -6,11 +6,14 @@ import {
   splitResult,
   useResult,
   type ImportInput,
+  type RackListDto,
   type SplitInput,
   type UseInput,
 } from '#shared/schemas/rack.ts';
 import { stockPiece, type StockPieceDto, type StockPieceInput } from '#shared/schemas/stock-piece.ts';
 import { piecePath, rackQueries } from './queries.ts';
+
+const LISTS = [...rackQueries.all, 'list'];
 
 type Held = Pick<StockPieceDto, 'id' | 'version'>;
 const ifMatch = ({ version }: Held) => ({ 'If-Match': `"${version}"` });
@@ -39,8 +42,21 @@ export function useDeletePiece() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (piece: Held) => command(piecePath(piece.id), { method: 'DELETE', headers: ifMatch(piece) }),
-    // Only the lists: the page of the piece itself is being left.
-    onSuccess: () => client.invalidateQueries({ queryKey: [...rackQueries.all, 'list'] }),
+    onSuccess: (_, { id }) => {
+      // Gone from what is shown next, before it is asked for anew; the page of the piece itself is being left.
+      client.setQueriesData<InfiniteData<RackListDto, string | null>>(
+        { queryKey: LISTS },
+        (list) =>
+          list && {
+            ...list,
+            pages: list.pages.map((page) => ({
+              ...page,
+              pieces: page.pieces.filter((piece) => piece.id !== id),
+            })),
+          },
+      );
+      return client.invalidateQueries({ queryKey: LISTS });
+    },
   });
 }
 

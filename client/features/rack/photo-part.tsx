@@ -1,16 +1,15 @@
-import { useRef } from 'react';
+import { useQuery } from '@tanstack/react-query';
+import { useCallback, useRef } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { Notice } from '#client/components/ui/notice.tsx';
 import type { StockPieceDto } from '#shared/schemas/stock-piece.ts';
 import { useSetPhoto } from './mutations.ts';
-import { piecePath } from './queries.ts';
+import { rackQueries } from './queries.ts';
 
 /** The photo of a piece, one at most. */
 export function PhotoPart({ piece }: { piece: StockPieceDto }) {
   const mutation = useSetPhoto();
   const input = useRef<HTMLInputElement>(null);
-  // With the version in it, a new photo is not shown as the old one.
-  const source = `/api${piecePath(piece.id, '/photo')}?size=full&v=${piece.version}`;
   return (
     <section aria-labelledby="piece-photo">
       <h2 id="piece-photo" className="caption mb-2">
@@ -21,13 +20,7 @@ export function PhotoPart({ piece }: { piece: StockPieceDto }) {
           {mutation.error.message}
         </Notice>
       )}
-      {piece.hasPhoto && (
-        <img
-          src={source}
-          alt={`Piece ${piece.number}`}
-          className="mb-3 block max-h-80 max-w-full border border-rule"
-        />
-      )}
+      {piece.hasPhoto && <Photo piece={piece} />}
       <input
         ref={input}
         type="file"
@@ -56,5 +49,27 @@ export function PhotoPart({ piece }: { piece: StockPieceDto }) {
         )}
       </p>
     </section>
+  );
+}
+
+function Photo({ piece }: { piece: StockPieceDto }) {
+  const { data, error } = useQuery(rackQueries.photo(piece));
+  const show = useCallback(
+    (image: HTMLImageElement) => {
+      if (!data) return undefined;
+      const address = URL.createObjectURL(data);
+      image.src = address;
+      return () => URL.revokeObjectURL(address);
+    },
+    [data],
+  );
+  if (error) return <p className="mb-3 text-red">The photo could not be fetched. {error.message}</p>;
+  if (!data) return null;
+  return (
+    <img
+      ref={show}
+      alt={`Piece ${piece.number}`}
+      className="mb-3 block max-h-80 max-w-full border border-rule"
+    />
   );
 }

@@ -25,25 +25,25 @@ export function PieceFields({ draft, errors, onDraft, firstRef, massRef }: Piece
   const number = (
     field: 'length' | 'width' | 'thickness' | 'wall' | 'mass',
     label: string,
-    more: { optional?: boolean; hint?: string; inputRef?: Ref<HTMLInputElement> | undefined } = {},
+    inputRef?: Ref<HTMLInputElement>,
   ) => (
     <NumberField
       label={label}
       quantity={field === 'mass' ? 'mass' : 'length'}
-      optional={more.optional ?? false}
-      hint={more.hint}
+      // What is missing is told when the form is sent, and not of a field that nobody came to yet.
+      optional
       value={draft[field]}
       // A text that is no number must not pass as an empty field.
       onChange={(value, problem) =>
         onDraft({ [field]: problem === null || problem === 'missing' ? value : NaN })
       }
       error={errors[field]}
-      {...(more.inputRef ? { inputRef: more.inputRef } : {})}
+      {...(inputRef ? { inputRef } : {})}
     />
   );
   const tube = draft.kind === 'tube';
   return (
-    <div className="grid grid-cols-2 gap-x-4 gap-y-1 sm:grid-cols-4 lg:grid-cols-[8rem_minmax(12rem,1fr)_repeat(4,minmax(7rem,9rem))]">
+    <div className="grid grid-cols-2 gap-x-4 gap-y-1 sm:grid-cols-4 lg:grid-cols-[8rem_minmax(10rem,18rem)_repeat(4,minmax(8rem,12rem))]">
       <Select
         label="Kind"
         {...(firstRef ? { selectRef: firstRef } : {})}
@@ -63,8 +63,8 @@ export function PieceFields({ draft, errors, onDraft, firstRef, massRef }: Piece
       />
       {number('length', 'Length')}
       {number('width', tube ? 'Diameter' : 'Width')}
-      {tube ? number('wall', 'Wall, if hollow', { optional: true }) : number('thickness', 'Thickness')}
-      {number('mass', 'Mass', { optional: true, inputRef: massRef })}
+      {tube ? number('wall', 'Wall, if hollow') : number('thickness', 'Thickness')}
+      {number('mass', 'Mass', massRef)}
     </div>
   );
 }

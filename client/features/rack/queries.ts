@@ -1,8 +1,8 @@
 import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
-import { request } from '#client/lib/api.ts';
+import { request, requestFile } from '#client/lib/api.ts';
 import { gliderList } from '#shared/schemas/glider.ts';
 import { rackList } from '#shared/schemas/rack.ts';
-import { stockPiece } from '#shared/schemas/stock-piece.ts';
+import { stockPiece, type StockPieceDto } from '#shared/schemas/stock-piece.ts';
 import { paramsOf, type RackView } from './rack-view.ts';
 
 export const RACK_PAGE = 50;
@@ -30,6 +30,13 @@ export const rackQueries = {
     queryOptions({
       queryKey: ['rack', 'piece', id],
       queryFn: ({ signal }) => request(piecePath(id), stockPiece, { signal }),
+    }),
+  /** of that version, for its address stays the same whatever the picture */
+  photo: ({ id, version }: Pick<StockPieceDto, 'id' | 'version'>) =>
+    queryOptions({
+      queryKey: ['rack', 'photo', id, version],
+      queryFn: ({ signal }) => requestFile(piecePath(id, '/photo?size=full'), { signal }),
+      staleTime: Infinity,
     }),
   /** the reader's gliders by name, to reserve for */
   gliders: (search: string) =>

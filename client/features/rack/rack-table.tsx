@@ -55,7 +55,7 @@ export function RackTable({ pieces, view, onView, chosen, onChosen, ...links }: 
           {heading('length', 'Size')}
           {heading('mass', 'Mass')}
           {heading('density', 'Density')}
-          <Th>Grade</Th>
+          <Th className="pl-5">Grade</Th>
           <Th>Cut</Th>
           <Th>State</Th>
         </tr>
@@ -91,7 +91,7 @@ export function RackTable({ pieces, view, onView, chosen, onChosen, ...links }: 
             <Td numeric>
               <Amount value={piece.density} quantity="density" />
             </Td>
-            <Td>{piece.grade || gradeWord(piece.material, piece.density)}</Td>
+            <Td className="pl-5">{piece.grade || gradeWord(piece.material, piece.density)}</Td>
             <Td>{piece.grainCut}</Td>
             <Td>
               <PieceState piece={piece} gliderHref={links.gliderHref} />

@@ -11,6 +11,7 @@ import { DensityPlot } from './density-plot.tsx';
 import { EntryForm } from './entry-form.tsx';
 import { rackHeadline } from './figures.ts';
 import { ImportDialog } from './import-dialog.tsx';
+import { LABELS_AT_ONCE, labelsText } from './label-sheets.ts';
 import { rackQueries } from './queries.ts';
 import { RackCards } from './rack-cards.tsx';
 import { RackTable } from './rack-table.tsx';
@@ -40,6 +41,7 @@ export function Rack(links: RackLinks) {
   const { data, hasNextPage, isFetchingNextPage, fetchNextPage } = query;
   const look = (next: RackView) => setParams(paramsOf(next), { replace: true });
   const usual = view.state === 'onRack' && view.kind === null && view.search === '' && search === '';
+  const wanted = chosen.size > 0 ? [...chosen] : (data ?? []).map(({ id }) => id);
   const nothingYet = usual && data?.length === 0;
   const newest = data?.reduce<StockPieceDto | undefined>(
     (last, piece) => (last === undefined || piece.number > last.number ? piece : last),
@@ -67,11 +69,8 @@ export function Rack(links: RackLinks) {
             </a>
           )}
           {data && data.length > 0 && (
-            <Link
-              to={links.labelsHref(chosen.size > 0 ? [...chosen] : data.map(({ id }) => id))}
-              className={buttonClass()}
-            >
-              {chosen.size > 0 ? `Labels of ${chosen.size}` : 'Labels'}
+            <Link to={links.labelsHref(wanted.slice(0, LABELS_AT_ONCE))} className={buttonClass()}>
+              {labelsText(chosen.size, wanted.length)}
             </Link>
           )}
         </div>

@@ -75,6 +75,7 @@ export function SplitDialog({ piece, onClose }: SplitDialogProps) {
                 label={`Piece wanted ${i + 1}, ${along}`}
                 quantity="length"
                 above={0}
+                optional
                 value={value}
                 onChange={(next) => setWanted(wanted.map((one, at) => (at === i ? next : one)))}
               />

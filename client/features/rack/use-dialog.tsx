@@ -58,6 +58,7 @@ export function UseDialog({ piece, onClose }: { piece: StockPieceDto; onClose: (
             label="Length left"
             quantity="length"
             above={0}
+            optional
             max={piece.length}
             value={length}
             onChange={(value) => change(i, { length: value })}
@@ -67,6 +68,7 @@ export function UseDialog({ piece, onClose }: { piece: StockPieceDto; onClose: (
               label="Width left"
               quantity="length"
               above={0}
+              optional
               max={piece.width}
               value={width}
               onChange={(value) => change(i, { width: value })}

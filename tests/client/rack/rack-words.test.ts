@@ -1,8 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { BLANK_PIECE, nextLike, pieceOf, type PieceDraft } from '#client/features/rack/draft.ts';
-import { densityText, densityWhileTyping, rackHeadline } from '#client/features/rack/figures.ts';
-import { previewHeadline } from '#client/features/rack/import-words.ts';
-import { LABEL_SHEETS, pagesOf } from '#client/features/rack/label-sheets.ts';
+import {
+  densityText,
+  densityTicks,
+  densityWhileTyping,
+  rackHeadline,
+} from '#client/features/rack/figures.ts';
+import { columnText, previewHeadline } from '#client/features/rack/import-words.ts';
+import { LABEL_SHEETS, LABELS_AT_ONCE, labelsText, pagesOf } from '#client/features/rack/label-sheets.ts';
 import { orderedBy, paramsOf, viewOf } from '#client/features/rack/rack-view.ts';
 import { planSplit } from '#client/features/rack/split-plan.ts';
 import { sizeText } from '#client/features/rack/words.ts';
@@ -113,6 +118,26 @@ describe('the headline', () => {
   });
 });
 
+describe('the columns of a file', () => {
+  it('are told with what they are read as', () => {
+    expect(columnText({ header: 'len (in)', field: 'length', unit: 'in' })).toBe('“len (in)” → length, in');
+    expect(columnText({ header: 'Cut', field: 'grainCut', unit: null })).toBe('“Cut” → grain cut');
+    expect(columnText({ header: 'Shop', field: null, unit: null })).toBe('“Shop” is left out');
+  });
+});
+
+describe('the scale of the plot', () => {
+  it('has round figures and ends past the largest, whatever the unit', () => {
+    expect(densityTicks(181, USUAL_UNITS)).toEqual([0, 50, 100, 150, 200]);
+    const pounds = densityTicks(181, unitsOf(INCH_CHOICES));
+    expect(pounds.at(-1)).toBeGreaterThanOrEqual(181);
+    expect(pounds.map((one) => Math.round(one / 16.018463))).toEqual([0, 5, 10, 15]);
+    expect(densityTicks(181, unitsOf({ density: 'g/cm3' })).map((one) => Math.round(one))).toEqual([
+      0, 50, 100, 150, 200,
+    ]);
+  });
+});
+
 describe('sizes', () => {
   it('are told in the reader’s unit, in inches as fractions', () => {
     expect(plain(sizeText(piece, USUAL_UNITS))).toBe('1 000 × 100 × 2 mm');
@@ -169,5 +194,11 @@ describe('label sheets', () => {
     const labels = Array.from({ length: 25 }, (_, i) => i);
     expect(pagesOf(labels, LABEL_SHEETS[0]).map((page) => page.length)).toEqual([24, 1]);
     expect(pagesOf([], LABEL_SHEETS[0])).toEqual([]);
+  });
+
+  it('are asked for no more at once than an address holds', () => {
+    expect(labelsText(0, 50)).toBe('Labels');
+    expect(labelsText(2, 2)).toBe('Labels of 2');
+    expect(labelsText(0, LABELS_AT_ONCE + 1)).toBe('Labels of the first 96');
   });
 });

@@ -40,7 +40,7 @@ export function Histogram({ title, quantity, summary, wanted }: HistogramProps) 
       title={quantity === 'percentMac' ? title : `${title}, ${label}`}
       sentence={`Half of the draws lie below ${text(middle ?? null)}, nine in ten between ${text(low ?? null, true)} and ${text(high ?? null)}.${wanted ? ' Dotted: the wanted range.' : ''}`}
       columns={[
-        { label: `From ${label}`, numeric: true },
+        { label: `From ${label}` },
         { label: `to below ${label}`, numeric: true },
         { label: 'Draws', numeric: true },
         { label: 'Share', numeric: true },

@@ -13,11 +13,15 @@ export interface DrawWorker {
 
 type Listener = (reply: DrawReply) => void;
 
-/** Hands tasks to one worker, which is started with the first and ended with the last that listens. */
+/** How long a worker waits for the next task before it is ended, ms: a new question mostly follows the old at once. */
+const IDLE = 2_000;
+
+/** Hands tasks to one worker, which is started with the first and ended soon after the last that listens. */
 export class Drawer {
   readonly #start: () => DrawWorker;
   #worker: DrawWorker | null = null;
   #last = 0;
+  #ending: ReturnType<typeof setTimeout> | undefined;
   readonly #subjects = new Map<string, { id: number; listener: Listener }>();
 
   constructor(start: () => DrawWorker) {
@@ -26,6 +30,7 @@ export class Drawer {
 
   /** Asks; whatever the subject asked before is called off. Answers of the newest request only reach `listener`. */
   ask(subject: string, task: DrawTask, listener: Listener): void {
+    clearTimeout(this.#ending);
     const id = ++this.#last;
     this.#subjects.set(subject, { id, listener });
     this.#send({ subject, id, task });
@@ -36,8 +41,9 @@ export class Drawer {
     const asked = this.#subjects.get(subject);
     if (!asked) return;
     this.#subjects.delete(subject);
-    if (this.#subjects.size === 0) this.#end();
-    else this.#send({ subject, id: asked.id, task: null });
+    if (this.#worker) this.#send({ subject, id: asked.id, task: null });
+    clearTimeout(this.#ending);
+    if (this.#subjects.size === 0) this.#ending = setTimeout(() => this.#end(), IDLE);
   }
 
   #send(request: DrawRequest): void {

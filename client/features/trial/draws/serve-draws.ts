@@ -26,8 +26,12 @@ const STRETCH = 20;
 export function serveDraws(port: DrawPort): void {
   const newest = new Map<string, number>();
   port.addEventListener('message', ({ data: { subject, id, task } }) => {
+    if (!task) {
+      newest.delete(subject);
+      return;
+    }
     newest.set(subject, id);
-    if (task) void work(port, { subject, id }, task, () => newest.get(subject) === id);
+    void work(port, { subject, id }, task, () => newest.get(subject) === id);
   });
 }
 

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest';
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { Drawer, type DrawWorker } from '#client/features/trial/draws/drawer.ts';
 import type { DrawReply, DrawRequest } from '#client/features/trial/draws/serve-draws.ts';
 import { USUAL_SETTINGS } from '#client/features/trial/draws/settings.ts';
@@ -40,6 +40,9 @@ function drawerWithWorkers() {
 }
 
 describe('the page’s side of the draws', () => {
+  beforeEach(() => void vi.useFakeTimers());
+  afterEach(() => void vi.useRealTimers());
+
   it('starts one worker for all that ask and ends it with the last of them', () => {
     const { drawer, workers, listen } = drawerWithWorkers();
     drawer.ask('a', task, listen);
@@ -49,9 +52,21 @@ describe('the page’s side of the draws', () => {
     expect(workers[0]!.ended).toBe(false);
     expect(workers[0]!.requests.at(-1)).toEqual({ subject: 'a', id: 1, task: null });
     drawer.cancel('b');
+    vi.runAllTimers();
     expect(workers[0]!.ended).toBe(true);
     drawer.ask('a', task, listen);
     expect(workers).toHaveLength(2);
+  });
+
+  it('keeps the worker from one question to the next, and ends what the one before set going', () => {
+    const { drawer, workers, listen } = drawerWithWorkers();
+    drawer.ask('a', task, listen);
+    drawer.cancel('a');
+    drawer.ask('a', task, listen);
+    vi.runAllTimers();
+    expect(workers).toHaveLength(1);
+    expect(workers[0]!.ended).toBe(false);
+    expect(workers[0]!.requests.map((request) => request.task === null)).toEqual([false, true, false]);
   });
 
   it('hears the answer to the newest question only, and none once it is called off', () => {

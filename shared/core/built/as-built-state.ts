@@ -1,3 +1,4 @@
+import { NOTHING } from '../lump.ts';
 import { observe, type Belief } from './belief.ts';
 import type { SidedLine } from './sided-lines.ts';
 import { placesOf, type Covered, type Weighing } from './weighing.ts';
@@ -116,9 +117,9 @@ export function hear(state: BuiltState, weighing: Weighing): BuiltState {
   const sum = (of: readonly number[]) => of.reduce((total, i) => total + massAt(state, i), 0);
   const [expected, known] = [sum(places), sum(before)];
   const rest = weighing.mass - known;
-  const takesRest = fresh.length > 0 && rest > 0 && expected > known;
+  const takesRest = fresh.length > 0 && rest > NOTHING && expected - known > NOTHING;
   const factorOf = (i: number) => {
-    if (!takesRest) return expected > 0 ? weighing.mass / expected : 1;
+    if (!takesRest) return expected > NOTHING ? weighing.mass / expected : 1;
     return state.mass[i] === null ? rest / (expected - known) : 1;
   };
   const weights = weightsOf(state, fresh);
@@ -138,10 +139,10 @@ export function hear(state: BuiltState, weighing: Weighing): BuiltState {
   const by = [...state.by];
   const x = [...state.x];
   for (const i of places) {
-    mass[i] = expected > 0 ? massAt(state, i) * factorOf(i) : weighing.mass / places.length;
+    mass[i] = expected > NOTHING ? massAt(state, i) * factorOf(i) : weighing.mass / places.length;
     by[i] = weighing.id;
   }
-  if (weighing.x !== undefined && weighing.mass > 0) {
+  if (weighing.x !== undefined && weighing.mass > NOTHING) {
     const moment = places.reduce((total, i) => total + (mass[i] ?? 0) * (x[i] ?? 0), 0);
     for (const i of places) x[i] = (x[i] ?? 0) + weighing.x - moment / weighing.mass;
   }
@@ -165,5 +166,5 @@ function knownVariance(state: BuiltState, i: number): number {
   const id = state.by[i];
   const heard = state.heard.find((one) => one.id === id);
   const together = state.by.reduce((total, by, j) => total + (by === id ? (state.mass[j] ?? 0) : 0), 0);
-  return heard && together > 0 ? (heard.u ** 2 * (state.mass[i] ?? 0)) / together : 0;
+  return heard && together > NOTHING ? (heard.u ** 2 * (state.mass[i] ?? 0)) / together : 0;
 }

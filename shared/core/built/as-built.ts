@@ -105,7 +105,8 @@ function bandOf(state: BuiltState, factor: (i: number) => number): number {
   const ofReadings = [...readings].map(([id, places]) => {
     const heard = state.heard.find((one) => one.id === id);
     if (!heard) return 0;
-    const share = (i: number) => (heard.measured > 0 ? massAt(state, i) / heard.measured : 1 / places.length);
+    const share = (i: number) =>
+      heard.measured > NOTHING ? massAt(state, i) / heard.measured : 1 / places.length;
     return heard.u * total(places.map((i) => share(i) * factor(i)));
   });
   const ofParts = toCome.map((i) => factor(i) * Math.sqrt(ownVariance(state, i)));

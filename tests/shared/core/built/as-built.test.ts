@@ -182,6 +182,7 @@ describe('the account of a model that is being built', () => {
         const said = built.materials.flatMap(({ posterior }) => [posterior.mean, posterior.sd]);
         expect([...figures, ...parts, ...said].filter((value) => !Number.isFinite(value))).toEqual([]);
       }),
+      { numRuns: 300 },
     );
   });
 });

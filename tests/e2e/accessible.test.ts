@@ -96,9 +96,9 @@ async function unfold(page: Page): Promise<void> {
 }
 
 async function look(page: Page, paths: readonly string[]): Promise<void> {
-  const window = page.viewportSize();
+  const size = page.viewportSize();
   for (const path of paths) {
-    if (window) await page.setViewportSize(window);
+    if (size) await page.setViewportSize(size);
     await page.goto(path);
     await settle(page);
     await unfold(page);

@@ -165,11 +165,8 @@ describe('looking at the drawing', () => {
     await page.keyboard.press('Enter');
     for (let i = 0; i < 5; i++) await page.keyboard.press('Shift+ArrowRight');
     await page.keyboard.press('Enter');
-    await page
-      .getByText(/\d\s?mm/)
-      .filter({ visible: true })
-      .first()
-      .waitFor();
+    const told = page.getByText(/\d\s?mm/).filter({ visible: true });
+    await expect.poll(() => told.count(), PATIENT).toBeGreaterThan(0);
     await picture(page, 'drawing-measured');
   });
 });

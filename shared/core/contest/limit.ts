@@ -45,7 +45,10 @@ const FACTORS: Record<LimitUnit, { times: string; over: string }> = {
   in: { times: '25.4', over: '1' },
 };
 
-/** Enough digits for every product of what can be typed. */
+/**
+ * Decimals with enough digits for every product of what can be typed.
+ * @example new Exact('0.1').plus('0.2').toFixed() // → '0.3'
+ */
 export const Exact = Decimal.clone({ precision: 80 });
 
 /**

@@ -1,9 +1,9 @@
 import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openBrowser } from '#tests/support/chromium.ts';
-import { ROUND, textOf } from '#tests/shared/sections/texts.ts';
 import { expectAccessible, PATIENT, PHONE, picture } from './support/browser.ts';
-import { makeGlider, newBuilder, openDrawing, pickPart, storedGlider, type Builder } from './support/desk.ts';
+import { pickPart } from './support/desk.ts';
+import { drawingOf, partOf, wingOf } from './support/drawing.ts';
 
 let browser: Browser;
 beforeAll(async () => {
@@ -11,21 +11,6 @@ beforeAll(async () => {
 });
 afterAll(() => browser.close());
 
-type Own = Builder & { id: string };
-
-async function atDrawing(name: string, options?: Parameters<typeof newBuilder>[2]): Promise<Own> {
-  const builder = await newBuilder(browser, name, options);
-  const { id } = await makeGlider(builder);
-  await openDrawing(builder.page, id);
-  return { ...builder, id };
-}
-
-const wing = async (own: Own) => {
-  const [found] = (await storedGlider(own, own.id)).plan.surfaces;
-  if (!found) throw new Error('no wing');
-  return found;
-};
-const partOf = async (own: Own, id: string) => (await wing(own)).parts.find((part) => part.id === id);
 const handle = (page: Page, name: string | RegExp) => page.getByRole('slider', { name });
 
 /** Takes hold of a handle, pulls it aside and lets go. */
@@ -41,7 +26,7 @@ async function pull(page: Page, what: Locator, [dx, dy]: readonly [number, numbe
 
 describe('taking hold of the drawing', () => {
   it('moves one rib to a whole millimetre, tells it while it is pulled, and undoes it as one step', async () => {
-    const own = await atDrawing('Edda Kvist');
+    const own = await drawingOf(browser, 'Edda Kvist');
     const { page, complaints } = own;
     await pickPart(page, 'Ribs, outer panel');
     const rib = handle(page, 'Ribs, outer panel, 2');
@@ -67,7 +52,7 @@ describe('taking hold of the drawing', () => {
   });
 
   it('moves a spar along the chord by the arrow keys, in steps of the reader’s unit', async () => {
-    const own = await atDrawing('Finn Rask');
+    const own = await drawingOf(browser, 'Finn Rask');
     const { page } = own;
     await pickPart(page, 'Spar, top');
     const end = handle(page, 'Spar, top, inner end');
@@ -84,7 +69,7 @@ describe('taking hold of the drawing', () => {
   });
 
   it('moves a panel’s break with the wing following', async () => {
-    const own = await atDrawing('Gro Falk');
+    const own = await drawingOf(browser, 'Gro Falk');
     const { page } = own;
     const mass = page.getByRole('region', { name: 'Title block' });
     const before = await mass.textContent();
@@ -92,7 +77,7 @@ describe('taking hold of the drawing', () => {
     await corner.waitFor();
     await pull(page, corner, [0, 12]);
     await expect
-      .poll(async () => (await wing(own)).panels, PATIENT)
+      .poll(async () => (await wingOf(own)).panels, PATIENT)
       .not.toEqual([
         expect.objectContaining({ span: 370, rootChord: 136, tipChord: 131, sweep: 2 }),
         expect.objectContaining({ span: 215, rootChord: 131, tipChord: 88, sweep: 19 }),
@@ -102,7 +87,7 @@ describe('taking hold of the drawing', () => {
   });
 
   it('works by touch', async () => {
-    const own = await atDrawing('Hanno Beck', { ...PHONE, colorScheme: 'dark' });
+    const own = await drawingOf(browser, 'Hanno Beck', { ...PHONE, colorScheme: 'dark' });
     const { page } = own;
     await pickPart(page, 'Ribs, outer panel');
     const rib = handle(page, 'Ribs, outer panel, 2');
@@ -131,7 +116,7 @@ describe('taking hold of the drawing', () => {
 
 describe('looking at the drawing', () => {
   it('lights a part up in the list when it is pressed in the drawing, and the other way round', async () => {
-    const { page } = await atDrawing('Ilka Thorn');
+    const { page } = await drawingOf(browser, 'Ilka Thorn');
     for (const view of ['Above', 'Side', 'Front', 'Surface']) {
       await page.getByRole('button', { name: view, exact: true }).click();
       await expectAccessible(page, `the view ${view}`);
@@ -159,7 +144,7 @@ describe('looking at the drawing', () => {
   });
 
   it('measures between two places by keyboard, in the reader’s unit', async () => {
-    const { page } = await atDrawing('Jarl Hoff');
+    const { page } = await drawingOf(browser, 'Jarl Hoff');
     await page.getByRole('button', { name: 'Measure', exact: true }).click();
     await page.getByRole('application').first().focus();
     await page.keyboard.press('Enter');
@@ -168,86 +153,5 @@ describe('looking at the drawing', () => {
     const told = page.getByText(/\d\s?mm/).filter({ visible: true });
     await expect.poll(() => told.count(), PATIENT).toBeGreaterThan(0);
     await picture(page, 'drawing-measured');
-  });
-});
-
-describe('a section from a file', () => {
-  const open = async (page: Page) => {
-    await page.getByRole('button', { name: 'Own points for the root section of panel 1' }).click();
-    await page.getByRole('dialog').waitFor();
-  };
-  const give = (page: Page, name: string, text: string) =>
-    page
-      .getByLabel('Coordinate file')
-      .setInputFiles({ name, mimeType: 'text/plain', buffer: Buffer.from(text) });
-
-  it('is taken, shown and drawn, with what had to be mended said', async () => {
-    const own = await atDrawing('Kaja Brun');
-    const { page } = own;
-    await open(page);
-    // The underside first, a point twice, commas for points, in per cent.
-    const comma = textOf(
-      [...ROUND]
-        .reverse()
-        .flatMap((point, i): [number, number][] => (i === 3 ? [point, point] : [point]))
-        .map(([x, z]): [number, number] => [x * 100, z * 100]),
-    );
-    await give(page, 'gull.dat', `Gull 44-09\n${comma.replaceAll('.', ',')}`);
-    await page.getByText('The underside came first; the points are turned round.').waitFor();
-    await page.getByText('One point stood there twice.').waitFor();
-    await page.getByText('Coordinates are in per cent of the chord.').waitFor();
-    await expectAccessible(page, 'the section import');
-    await picture(page, 'section-import');
-    await page.getByLabel('For root and tip of all panels').check();
-    await page.getByRole('button', { name: 'Use these points' }).click();
-    await expect
-      .poll(
-        async () =>
-          (await wing(own)).panels.map(({ tipSection }) => 'points' in tipSection && tipSection.name),
-        PATIENT,
-      )
-      .toEqual(['Gull 44-09', 'Gull 44-09']);
-  });
-
-  it('of 5,000 points is thinned, and says by how little', async () => {
-    const own = await atDrawing('Lone Berg');
-    const { page } = own;
-    const fine = Array.from({ length: 5000 }, (_, i): [number, number] => {
-      const turn = (2 * Math.PI * i) / 4999;
-      return [0.5 + 0.5 * Math.cos(turn), 0.06 * Math.sin(turn)];
-    });
-    await open(page);
-    await give(page, 'oval.txt', `Oval\n${textOf(fine)}`);
-    await page.getByText(/points are thinned to/).waitFor();
-    await page.getByRole('button', { name: 'Use these points' }).click();
-    await expect
-      .poll(async () => {
-        const spec = (await wing(own)).panels[0]?.rootSection;
-        return spec && 'points' in spec ? spec.points.length : 0;
-      }, PATIENT)
-      .toBeGreaterThan(50);
-  });
-
-  it('that cannot be read is refused with the line that is to blame, and nothing is lost', async () => {
-    const own = await atDrawing('Mads Eik');
-    const { page } = own;
-    const lines = textOf(ROUND).split('\n');
-    await open(page);
-    await give(
-      page,
-      'bad.dat',
-      ['Gull', ...lines.slice(0, 7), 'chalk and cheese', ...lines.slice(7)].join('\n'),
-    );
-    await page.getByText(/Line 9, “chalk and cheese”, is not two numbers\./).waitFor();
-    const zigzag = [...lines.slice(0, 6), lines[2], ...lines.slice(6)];
-    await page.getByRole('textbox', { name: 'Points' }).fill(zigzag.join('\n'));
-    await page.getByText(/goes back along the first face/).waitFor();
-    await page.getByRole('textbox', { name: 'Points' }).fill('1 0\n0 0');
-    await page.getByText(/Only 2 points are found/).waitFor();
-    await page.getByRole('button', { name: 'Use these points' }).click();
-    expect(await page.getByRole('dialog').count()).toBe(1);
-    expect(await page.getByRole('textbox', { name: 'Points' }).inputValue()).toBe('1 0\n0 0');
-    await page.getByRole('button', { name: 'Cancel' }).click();
-    expect((await wing(own)).panels[0]?.rootSection).toEqual({ naca: '6409' });
   });
 });

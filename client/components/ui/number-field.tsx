@@ -60,7 +60,9 @@ export function NumberField(props: NumberFieldProps) {
   const wrongSize = 'value' in read ? rangeText(read.value, { ...props, unit }) : undefined;
   // An unfinished `1/` is no error while it is being typed.
   const refused = props.error === undefined ? undefined : boundIn(props.error, quantity, unit);
-  const error = refused ?? wrongSize ?? (problem && (left || !own) ? problemText(problem) : undefined);
+  // Nor is a field that nobody has come to yet; what stands in it otherwise is told at once.
+  const isDue = left || (!own && problem !== 'missing');
+  const error = refused ?? wrongSize ?? (problem && isDue ? problemText(problem) : undefined);
 
   // In a cell the heading names the unit; what another unit or a sum comes to still has to be told.
   const told = compact && own ? underneathOf(text, quantity, unit) || undefined : undefined;

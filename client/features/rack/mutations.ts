@@ -80,12 +80,21 @@ export const useBuildIn = () =>
     request(piecePath(id, '/use'), useResult, { method: 'POST', body: use }),
   );
 
-/** A picture of the piece, or null to take it off. */
-export const useSetPhoto = () =>
-  useRackChange(({ id, file }: { id: string; file: File | null }) => {
-    if (file === null) return request(piecePath(id, '/photo'), stockPiece, { method: 'DELETE' });
-    return request(piecePath(id, '/photo'), stockPiece, { method: 'PUT', body: formOf(file) });
+/** A picture of the piece, or null to take it off. One that is gone is not asked for once more. */
+export function useSetPhoto() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: ({ id, file }: { id: string; file: File | null }) =>
+      file === null
+        ? request(piecePath(id, '/photo'), stockPiece, { method: 'DELETE' })
+        : request(piecePath(id, '/photo'), stockPiece, { method: 'PUT', body: formOf(file) }),
+    onSuccess: async (piece) => {
+      client.setQueryData(rackQueries.piece(piece.id).queryKey, piece);
+      if (piece.hasPhoto) await client.invalidateQueries({ queryKey: rackQueries.photo(piece).queryKey });
+      await client.invalidateQueries({ queryKey: LISTS });
+    },
   });
+}
 
 /** Nothing is stored by it. */
 export const usePreviewImport = () =>

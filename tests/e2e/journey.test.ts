@@ -76,7 +76,7 @@ describe('from plan and wood to a balance sheet', () => {
     await picture(page, 'loading');
 
     await page.getByRole('link', { name: 'Wood trial', exact: true }).click();
-    await page.getByRole('button', { name: 'Use this wood' }).waitFor();
+    await page.getByRole('button', { name: 'Make this the plan' }).first().waitFor();
     await expectAccessible(page, 'wood trial');
     await picture(page, 'trial');
 

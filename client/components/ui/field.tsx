@@ -44,7 +44,7 @@ export function Field(props: FieldProps) {
   return (
     <div
       className={cn(
-        inline && 'grid grid-cols-[minmax(5.5rem,2fr)_minmax(0,3fr)] items-baseline gap-x-2',
+        inline && 'grid grid-cols-[minmax(min(5.5rem,40%),2fr)_minmax(0,3fr)] items-baseline gap-x-2',
         className,
       )}
     >
@@ -55,8 +55,9 @@ export function Field(props: FieldProps) {
         {label}
       </label>
       <div className="min-w-0">
-        <div className="flex items-baseline gap-2">
-          <div className="min-w-0 flex-1">{control}</div>
+        {/* In large letters the unit goes below its number. */}
+        <div className="flex flex-wrap items-baseline gap-x-2">
+          <div className="min-w-[min(3.5rem,100%)] flex-1">{control}</div>
           {suffix && (
             <span
               className={cn('shrink-0 text-note text-graphite', inline ? 'min-w-[5em]' : 'min-w-[2.5em]')}

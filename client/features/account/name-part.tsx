@@ -28,7 +28,7 @@ export function NamePart({ account }: { account: AccountDto }) {
       note="Stands on balance sheets and in the log. Sheets keep the name they were made with."
     >
       <form {...form} className="flex flex-wrap items-start gap-x-4">
-        <div className="min-w-56 max-w-sm flex-1">
+        <div className="min-w-[min(14rem,100%)] max-w-sm flex-1">
           <TextField
             {...field('name')}
             label="Name"

@@ -24,12 +24,9 @@ export function Facts({ result, beam }: FactsProps) {
       <h2 className="caption">Balance in figures</h2>
       <dl className="mt-1">
         {factsOf(result, beam).map(({ label, figure, question }) => (
-          <div
-            key={label}
-            className="grid min-h-row grid-cols-[auto_1fr] items-center gap-x-4 border-b border-rule"
-          >
+          <div key={label} className="flex min-h-row flex-wrap items-center gap-x-4 border-b border-rule">
             <dt className="text-graphite">{label}</dt>
-            <dd className="text-right font-semibold">
+            <dd className="ml-auto text-right font-semibold">
               {question ? (
                 <AskWhy question={question} name={label}>
                   {figure}

@@ -64,7 +64,7 @@ export function SpeedChart({ flown, clMax, trimLift, air }: SpeedChartProps) {
         over === 'density' ? bare(trim) : units.format(stall, 'speed', { unit: other, bare: true }),
       ])}
     >
-      <div className="mb-2 w-56">
+      <div className="mb-2 w-56 max-w-full">
         <Select
           label="Over"
           inline

@@ -85,7 +85,7 @@ export function EntryForm({ last }: { last: StockPieceDto | undefined }) {
             <GrainSelect value={draft.grainCut} onValue={(cut) => change({ grainCut: cut })} />
           </div>
         )}
-        <p className="min-h-row min-w-52 flex-1 content-center" aria-live="polite">
+        <p className="min-h-row min-w-[min(13rem,100%)] flex-1 content-center" aria-live="polite">
           {density !== null && draft.material !== null ? (
             <strong className="text-heading font-semibold">
               {densityText(draft.material, density, units)}

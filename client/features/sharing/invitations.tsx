@@ -79,7 +79,7 @@ function InviteForm({ gliderId, accountHref }: InvitationsProps) {
         </Notice>
       )}
       <div className="flex flex-wrap items-start gap-x-4">
-        <div className="min-w-56 flex-1">
+        <div className="min-w-[min(14rem,100%)] flex-1">
           <TextField
             {...field('email')}
             label="E-mail"

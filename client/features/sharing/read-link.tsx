@@ -61,7 +61,7 @@ function LinkOn({ link, pending, onOff }: LinkOnProps) {
   };
   return (
     <div className="flex flex-wrap items-end gap-3">
-      <div className="min-w-64 flex-1">
+      <div className="min-w-[min(16rem,100%)] flex-1">
         <TextField
           label="Link"
           inputRef={input}

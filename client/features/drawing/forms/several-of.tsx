@@ -29,28 +29,30 @@ export function NumbersRow({ label, quantity, cells, between, readOnly }: Number
     <div
       role="group"
       aria-labelledby={id}
-      className="grid grid-cols-[minmax(5.5rem,2fr)_minmax(0,3fr)] items-baseline gap-x-2"
+      className="grid grid-cols-[minmax(min(5.5rem,40%),2fr)_minmax(0,3fr)] items-baseline gap-x-2"
     >
       <span id={id} className="text-note">
         {label}
       </span>
-      <div className="flex items-baseline gap-1.5">
-        {cells.map((cell, i) => (
-          <div key={cell.label} className="flex min-w-0 flex-1 items-baseline gap-1.5">
-            {i > 0 && between && <span className="text-note text-graphite">{between}</span>}
-            <div className="min-w-0 flex-1">
-              <NumberField
-                compact
-                className="min-w-0!"
-                {...cell}
-                label={`${label}, ${cell.label}`}
-                quantity={quantity}
-                readOnly={readOnly}
-                onChange={(value) => value !== null && cell.onChange(value)}
-              />
+      <div className="flex min-w-0 flex-wrap items-baseline gap-x-1.5">
+        <div className="flex min-w-[min(6rem,100%)] flex-1 items-baseline gap-1.5">
+          {cells.map((cell, i) => (
+            <div key={cell.label} className="flex min-w-0 flex-1 items-baseline gap-1.5">
+              {i > 0 && between && <span className="text-note text-graphite">{between}</span>}
+              <div className="min-w-0 flex-1">
+                <NumberField
+                  compact
+                  className="min-w-0!"
+                  {...cell}
+                  label={`${label}, ${cell.label}`}
+                  quantity={quantity}
+                  readOnly={readOnly}
+                  onChange={(value) => value !== null && cell.onChange(value)}
+                />
+              </div>
             </div>
-          </div>
-        ))}
+          ))}
+        </div>
         <span className="min-w-[2.5em] shrink-0 text-note text-graphite">
           {besideAll(cells, quantity, units)}
         </span>

@@ -50,7 +50,7 @@ export function SurfaceSettings({ desk, surface, index, onRemoved }: SurfaceSett
       onToggle={(event) => setOpen(event.currentTarget.open)}
       className="border-t border-rule px-2 pt-1"
     >
-      <div className="grid gap-y-1.5 pt-1">
+      <div className="grid grid-cols-1 gap-y-1.5 pt-1">
         <TextOf form={form} field="key" label="Name" />
         <ChoiceOf form={form} field="role" label="Role" options={ROLES} />
         <PlaceOf form={form} field="apex" label="Root leading edge x, y, z" />

@@ -11,6 +11,7 @@ import { whySpar } from './why-spar.ts';
 import { whySum } from './why-sum.ts';
 import { whySaving } from './why-saving.ts';
 import { whyTrial } from './why-trial.ts';
+import { percent, sayIn } from './say.ts';
 import type { Asked, Why } from './why.ts';
 
 /** How a figure was made; null where it is not there (any more). */
@@ -19,11 +20,13 @@ export function answer(question: WhyQuestion, asked: Asked): Why | null {
   switch (question.of) {
     case 'line': {
       const line = result.lines.find(({ id }) => id === question.id);
-      return line ? whyLine(plan, line, units) : null;
+      return line ? withShare(whyLine(plan, line, units), line.mass, asked) : null;
     }
     case 'group': {
       const lines = result.lines.filter((line) => sheetGroupKey(line) === question.key);
-      return lines.length > 0 ? whySum(sheetGroupName(question.key), lines, units) : null;
+      if (lines.length === 0) return null;
+      const mass = lines.reduce((sum, line) => sum + line.mass, 0);
+      return withShare(whySum(sheetGroupName(question.key), lines, units), mass, asked);
     }
     case 'total':
       return whySum('The whole model', result.lines, units);
@@ -58,4 +61,13 @@ export function answer(question: WhyQuestion, asked: Asked): Why | null {
     case 'saving':
       return whySaving(asked, question);
   }
+}
+
+/** With what a part's mass is of the whole model's. */
+function withShare(why: Why, mass: number, { result, units }: Asked): Why {
+  const { grams } = sayIn(units);
+  const whole = result.totals.mass;
+  if (!(whole > 0)) return why;
+  const share = `Share of the mass: ${grams(mass)} ÷ ${grams(whole)} = ${percent((100 * mass) / whole)}.`;
+  return { ...why, steps: [...why.steps, share] };
 }

@@ -1,8 +1,9 @@
 import { z } from 'zod';
-import { USUAL_UNITS } from '#shared/format/units.ts';
+import { unitsOf } from '#shared/format/units.ts';
 import { sheet, sheetInput, sheetList } from '#shared/schemas/sheet.ts';
 import { endpoint, type Endpoint } from '#server/http/endpoint.ts';
 import { sheetCsv, sheetFileName } from '#server/presenters/sheet-csv.ts';
+import { preferencesOf } from '#server/services/account.ts';
 import { createSheet, getSheet, listSheets } from '#server/services/sheets.ts';
 import { idParams, pageQuery } from './inputs.ts';
 
@@ -49,13 +50,14 @@ export const sheetEndpoints: Endpoint[] = [
     method: 'get',
     path: '/sheets/:id/csv',
     tag,
-    summary: 'A balance sheet for a spreadsheet',
+    summary: 'A balance sheet for a spreadsheet, in the units of who asks',
     access: 'signed-in',
     params: idParams,
     answer: { status: 200, schema: z.string(), download: 'text/csv' },
     handle: async ({ actor, params }) => {
       const found = await getSheet(actor, params.id);
-      return { body: sheetCsv(found, USUAL_UNITS), fileName: sheetFileName(found, 'csv') };
+      const { units } = await preferencesOf(actor);
+      return { body: sheetCsv(found, unitsOf(units)), fileName: sheetFileName(found, 'csv') };
     },
   }),
   endpoint({

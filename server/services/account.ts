@@ -1,4 +1,5 @@
 import type { AccountChanges, AccountDto, EmailChange, PasswordChange } from '#shared/schemas/account.ts';
+import type { Preferences } from '#shared/schemas/preferences.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import { lucia } from '#server/auth/lucia.ts';
 import { commonPassword, isCommonPassword } from '#server/auth/common-passwords.ts';
@@ -25,6 +26,11 @@ export async function ownRow(actor: UserDto): Promise<User> {
 export async function confirmPassword(user: User, password: string): Promise<void> {
   if (await passwordMatches(user.passwordHash, password)) return;
   throw new AppError('wrong_password', 'That is not your password.');
+}
+
+/** How somebody wants to see everything. */
+export async function preferencesOf(actor: UserDto): Promise<Preferences> {
+  return (await ownRow(actor)).preferences;
 }
 
 export async function getAccount(actor: UserDto): Promise<AccountDto> {

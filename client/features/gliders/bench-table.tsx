@@ -2,6 +2,7 @@ import { memo, useCallback, useRef, useEffect, type ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { Amount } from '#client/components/ui/amount.tsx';
 import { RowTh, Table, Td, Th } from '#client/components/ui/table.tsx';
+import { WhenNear } from '#client/components/when-near.tsx';
 import { cn } from '#client/lib/cn.ts';
 import { formatMoment } from '#client/lib/moments.ts';
 import type { GliderOrder, GliderSummaryDto } from '#shared/schemas/glider.ts';
@@ -20,6 +21,7 @@ interface BenchTableProps extends BenchLinks {
 }
 
 const ROLE_WORDS = { owner: '', builder: 'you build', pilot: 'you fly', reader: 'you read' } as const;
+const PICTURE = 'h-11 w-40 max-sm:h-7 max-sm:w-[4.5rem]';
 const BOX = 'size-4.5 accent-ink pointer-coarse:size-6';
 
 /** The gliders as ruled rows, each with its wing drawn; on the phone the figures stand under the name. */
@@ -182,11 +184,9 @@ const BenchRow = memo(function BenchRow(props: BenchRowProps) {
         </Td>
       )}
       <Td className="h-18! w-44 max-sm:w-20 max-sm:pt-4 max-sm:align-top">
-        <OutlinePicture
-          outline={outline}
-          widest={widest}
-          className="h-11 w-40 max-sm:h-7 max-sm:w-[4.5rem]"
-        />
+        <WhenNear before={<div className={PICTURE} />}>
+          <OutlinePicture outline={outline} widest={widest} className={PICTURE} />
+        </WhenNear>
       </Td>
       <RowTh className="max-sm:py-3">
         <Link

@@ -120,6 +120,22 @@ describe('GET /api/gliders/:id/sheets', () => {
   });
 });
 
+describe('the table of a sheet', () => {
+  it('is in the units that its reader has chosen, whoever saved it', async () => {
+    const owner = await makePerson(app);
+    const sheet = await makeSheet(await makeGlider({ owner: owner.user }), owner.user);
+    const head = async () =>
+      (await owner.agent.get(`/api/sheets/${sheet.id}/csv`).expect(200)).text.split('\n')[0];
+    expect(await head()).toContain('Mass g');
+    await owner.agent
+      .patch('/api/account')
+      .send({ units: { mass: 'oz', length: 'in' } })
+      .expect(200);
+    expect(await head()).toContain('Mass oz');
+    expect(await head()).toContain('Arm in');
+  });
+});
+
 describe('downloads of a sheet', () => {
   it('come as files named after the glider and the number', async () => {
     const owner = await makePerson(app);

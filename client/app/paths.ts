@@ -1,8 +1,14 @@
 /** Places of a glider, in the order of their tabs. */
-export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'sheets', 'log'] as const;
+export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'cut', 'sheets', 'log'] as const;
 export type Place = (typeof PLACES)[number];
 /** The sample is not stored, so it has no sheets and no log. */
-export const SAMPLE_PLACES = ['drawing', 'balance', 'loading', 'trial'] as const satisfies readonly Place[];
+export const SAMPLE_PLACES = [
+  'drawing',
+  'balance',
+  'loading',
+  'trial',
+  'cut',
+] as const satisfies readonly Place[];
 
 /** What a read-only link shows to whoever has it. */
 export const SHARED_PLACES = ['drawing', 'balance', 'loading'] as const satisfies readonly Place[];

@@ -14,6 +14,7 @@ const LABELS: Record<Place, string> = {
   balance: 'Balance',
   loading: 'Loading',
   trial: 'Wood trial',
+  cut: 'Cut list',
   sheets: 'Sheets',
   log: 'Log',
 };

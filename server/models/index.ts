@@ -1,6 +1,12 @@
 import type { Sequelize } from 'sequelize';
 import { BuildTerms, initBuildTerms } from './build-terms.ts';
 import { initFirstFlight } from './first-flight.ts';
+import { initClassEdition, ClassEdition } from './class-edition.ts';
+import { initClub, Club } from './club.ts';
+import { ClubGlider, initClubGlider } from './club-glider.ts';
+import { ClubInvitation, initClubInvitation } from './club-invitation.ts';
+import { ClubMember, initClubMember } from './club-member.ts';
+import { GliderAim, initGliderAim } from './glider-aim.ts';
 import { GliderAssignment, initGliderAssignment } from './glider-assignment.ts';
 import { GliderMaterial, initGliderMaterial } from './glider-material.ts';
 import { GliderMember, initGliderMember } from './glider-member.ts';
@@ -44,6 +50,12 @@ export function initModels(sequelize: Sequelize): void {
   initBuildTerms(sequelize);
   initFirstFlight(sequelize);
   initGliderAssignment(sequelize);
+  initClub(sequelize);
+  initClubMember(sequelize);
+  initClubInvitation(sequelize);
+  initClubGlider(sequelize);
+  initClassEdition(sequelize);
+  initGliderAim(sequelize);
 
   Session.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   MailedLink.belongsTo(User, { as: 'user', foreignKey: 'userId' });
@@ -61,5 +73,11 @@ export function initModels(sequelize: Sequelize): void {
   StockPiece.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   GliderAssignment.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
   GliderTrials.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
+  ClubMember.belongsTo(Club, { as: 'club', foreignKey: 'clubId' });
+  ClubMember.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  ClubInvitation.belongsTo(Club, { as: 'club', foreignKey: 'clubId' });
+  ClubInvitation.belongsTo(User, { as: 'inviter', foreignKey: 'invitedBy' });
+  ClubGlider.belongsTo(Glider, { as: 'glider', foreignKey: 'gliderId' });
+  GliderAim.belongsTo(ClassEdition, { as: 'edition', foreignKey: 'classEditionId' });
   BuildTerms.belongsTo(User, { as: 'editor', foreignKey: 'updatedBy' });
 }

@@ -7,6 +7,8 @@ const DOING: Record<SiteAction, string> = {
   addSharedMaterial: 'add to the shared table of materials',
   addGlider: 'add gliders',
   addStockPiece: 'add pieces to a rack',
+  addClub: 'found clubs',
+  addClassEdition: 'add to everybody’s limits of classes',
 };
 
 export function maySite(role: UserDto['role'], action: SiteAction): boolean {

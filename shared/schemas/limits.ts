@@ -62,6 +62,14 @@ export const LIMITS = {
   supports: { max: 12 },
   checks: { max: 60 },
   glides: { max: 60 },
+  /** limits of one edition of a class, and own editions of one club */
+  classLimits: { max: 40 },
+  classEditions: { max: 300 },
+  /** members of one club, and clubs that one person is in */
+  clubMembers: { max: 2_000 },
+  clubs: { max: 50 },
+  /** gliders that are shown to one club */
+  clubGliders: { max: 1_000 },
   /** bytes of a JSON body; a plan of 2,000 parts takes about half a megabyte */
   bodyBytes: { max: 4_000_000 },
 } as const;

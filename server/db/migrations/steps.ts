@@ -8,6 +8,7 @@ import { photos } from './20261201-7-photos.ts';
 import { accounts } from './20261201-8-accounts.ts';
 import { rack } from './20261201-9-rack.ts';
 import { built } from './20261201-10-built.ts';
+import { clubs } from './20261201-11-clubs.ts';
 import type { Migration } from './migration.ts';
 
 /** Every step of the database, oldest first. Steps are added at the end and never changed. */
@@ -22,4 +23,5 @@ export const STEPS: readonly Migration[] = [
   accounts,
   rack,
   built,
+  clubs,
 ];

@@ -15,10 +15,11 @@ const handle = (page: Page, name: string | RegExp) => page.getByRole('slider', {
 
 /** Takes hold of a handle, pulls it aside and lets go. */
 async function pull(page: Page, what: Locator, [dx, dy]: readonly [number, number]): Promise<void> {
+  // Waits until the handle lies still and is what the pointer meets.
+  await what.hover();
   const box = await what.boundingBox();
   if (!box) throw new Error('nothing to take hold of');
   const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
-  await page.mouse.move(x, y);
   await page.mouse.down();
   for (let i = 1; i <= 6; i++) await page.mouse.move(x + (dx * i) / 6, y + (dy * i) / 6);
   await page.mouse.up();

@@ -14,6 +14,9 @@ export const PROBLEMS = {
   email_unverified: { status: 403, title: 'The address is not confirmed' },
   link_dead: { status: 410, title: 'The link no longer works' },
   shared_gliders: { status: 409, title: 'Gliders have other members' },
+  last_secretary: { status: 409, title: 'The club would have no secretary' },
+  edition_in_use: { status: 409, title: 'The edition is in use' },
+  edition_exists: { status: 409, title: 'There is such an edition already' },
   wrong_password: { status: 403, title: 'Wrong password' },
   corrected_already: { status: 409, title: 'Corrected already' },
   signed_already: { status: 409, title: 'Another record was signed under this id' },
@@ -65,7 +68,9 @@ export type Noun =
   | 'invitation'
   | 'session'
   | 'weighing'
-  | 'record';
+  | 'record'
+  | 'club'
+  | 'edition';
 
 export const nothingHere = () => new AppError('not_found', 'There is nothing at this address.');
 

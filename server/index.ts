@@ -6,6 +6,7 @@ import { connect, DatabaseUnusable } from './db/connect.ts';
 import { DatabaseNewer, migrateUp } from './db/migrate.ts';
 import { seedDemo } from './db/seed-demo.ts';
 import { SeedError } from './db/seed-files.ts';
+import { seedClasses } from './db/seed-classes.ts';
 import { seedMaterials } from './db/seed-materials.ts';
 import { openSequelize } from './db/sequelize.ts';
 import { EnvError, readEnv, type Env } from './env.ts';
@@ -61,6 +62,7 @@ async function main(): Promise<void> {
     },
   });
   await seedMaterials();
+  await seedClasses();
   await seedDemo();
 
   const server = createServer(app);

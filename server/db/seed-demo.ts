@@ -10,16 +10,18 @@ import { insertGlider } from '#server/services/gliders.ts';
 import { insertSheet } from '#server/services/sheets.ts';
 import { database, inTransaction } from '#server/services/transaction.ts';
 import { readDemoPlan, readPeople, SeedError, type People } from './seed-files.ts';
+import { seedDemoClub } from './seed-club.ts';
 import { seedDemoRack } from './seed-rack.ts';
 import { SEED_LOCK } from './seed-materials.ts';
 
 /**
- * Adds the demo's people, gliders and wood where nobody has an account yet, whole or not at all.
+ * Adds the demo's people, gliders, wood and club where nobody has an account yet, whole or not at all.
  * @returns whether it was added
  */
 export async function seedDemo(): Promise<boolean> {
   if ((await User.count()) > 0) return false;
-  const { people, gliders } = await readPeople();
+  const file = await readPeople();
+  const { people, gliders } = file;
   const hashes = await Promise.all(people.map(({ password }) => hashPassword(password)));
   return inTransaction(async (transaction) => {
     await database().query(`SELECT pg_advisory_xact_lock(${SEED_LOCK})`, { transaction });
@@ -37,6 +39,7 @@ export async function seedDemo(): Promise<boolean> {
       gliderIds.set(glider.file, await addGlider(glider, users, transaction));
     }
     await seedDemoRack(users, gliderIds, transaction);
+    await seedDemoClub({ people: file, users, gliderIds }, transaction);
     return true;
   });
 }

@@ -1,5 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import { z } from 'zod';
+import { classEditionInput, type ClassEditionInput } from '#shared/schemas/class-edition.ts';
+import { clubRole } from '#shared/schemas/club.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { materialInput } from '#shared/schemas/material.ts';
 import { planSchema, type PlanDto } from '#shared/schemas/plan.ts';
@@ -15,9 +17,25 @@ const key = z.string().min(1).max(LIMITS.key.max);
 const seedMaterial = z.strictObject({ ...materialInput.shape, key }).omit({ shared: true });
 const materialsFile = z.object({ materials: z.array(seedMaterial) });
 
+const classesFile = z.strictObject({
+  classes: z.array(
+    z.strictObject({
+      key: classEditionInput.shape.key,
+      name: classEditionInput.shape.name,
+      body: classEditionInput.shape.issuedBy,
+      editions: z.array(classEditionInput.pick({ edition: true, note: true, limits: true })),
+    }),
+  ),
+});
+
 const gliderFile = z.string().regex(/^[\w-]+\.json$/);
 
 const peopleFile = z.object({
+  club: z.strictObject({
+    name: z.string(),
+    place: z.string(),
+    invited: z.array(z.strictObject({ email, role: clubRole, by: key })),
+  }),
   people: z.array(
     z.strictObject({
       key,
@@ -25,6 +43,8 @@ const peopleFile = z.object({
       email,
       password: z.string().min(1).max(LIMITS.password.max),
       role: z.enum(['admin', 'user']),
+      /** what the person is in the club */
+      inClub: clubRole,
     }),
   ),
   gliders: z.array(
@@ -32,6 +52,10 @@ const peopleFile = z.object({
       file: gliderFile,
       owner: key,
       members: z.array(z.strictObject({ person: key, role: z.enum(['builder', 'pilot', 'reader']) })),
+      /** whether its owner lets the club see it */
+      shownToClub: z.boolean(),
+      /** sign and edition of the class that it is built for */
+      aim: z.strictObject({ key, edition: z.string() }).optional(),
       sheets: z.array(z.strictObject({ note: z.string().max(LIMITS.note.max) })),
     }),
   ),
@@ -73,6 +97,14 @@ async function readData<T>(path: string, schema: z.ZodType<T>): Promise<T> {
 
 export async function readSeedMaterials(): Promise<SeedMaterial[]> {
   return (await readData('materials.json', materialsFile)).materials;
+}
+
+/** Every edition of every class, one by one. */
+export async function readClassEditions(): Promise<ClassEditionInput[]> {
+  const { classes } = await readData('classes.json', classesFile);
+  return classes.flatMap(({ body: issuedBy, editions, ...named }) =>
+    editions.map((edition) => ({ ...named, issuedBy, ...edition })),
+  );
 }
 
 export const readPeople = (): Promise<People> => readData('demo/people.json', peopleFile);

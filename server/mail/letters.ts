@@ -1,3 +1,4 @@
+import type { ClubRole } from '#shared/schemas/club.ts';
 import type { MemberRole } from '#shared/schemas/sharing.ts';
 import { surroundings } from '#server/surroundings.ts';
 import type { Letter } from './letter.ts';
@@ -39,6 +40,11 @@ export const passwordChangedLetter = (name: string): Letter => ({
   action: { label: 'To the sign-in page', href: href('/sign-in') },
 });
 
+const INVITATION_NOTES = [
+  'The link is good for 14 days and for one use.',
+  'If you do not know who that is, leave it: nothing happens.',
+];
+
 /** What each role may do, in the words of the invitation. */
 const MAY: Record<MemberRole, string> = {
   builder: 'You may change its drawing, weigh its parts and save its sheets.',
@@ -57,8 +63,26 @@ export const invitationLetter = ({ gliderName, invitedBy, role, token }: Invited
   subject: `${invitedBy} invites you to the glider ${gliderName}`,
   lines: [`${invitedBy} wants you as a ${role} of the glider ${gliderName}.`, MAY[role]],
   action: { label: 'Look at the invitation', href: href(`/invitations/${token}`) },
-  notes: [
-    'The link is good for 14 days and for one use.',
-    'If you do not know who that is, leave it: nothing happens.',
-  ],
+  notes: INVITATION_NOTES,
+});
+
+/** What each role may do in a club, in the words of the invitation. */
+const MAY_IN_CLUB: Record<ClubRole, string> = {
+  secretary: 'You may keep its members, its gliders and its limits of classes.',
+  director: 'You may run its contests and weigh in.',
+  member: 'You may show gliders to it and enter its contests.',
+};
+
+interface InvitedToClub {
+  clubName: string;
+  invitedBy: string;
+  role: ClubRole;
+  token: string;
+}
+
+export const clubInvitationLetter = ({ clubName, invitedBy, role, token }: InvitedToClub): Letter => ({
+  subject: `${invitedBy} invites you to ${clubName}`,
+  lines: [`${invitedBy} wants you as a ${role} of ${clubName}.`, MAY_IN_CLUB[role]],
+  action: { label: 'Look at the invitation', href: href(`/club-invitations/${token}`) },
+  notes: INVITATION_NOTES,
 });

@@ -65,8 +65,18 @@ import {
   weighingList,
 } from '#shared/schemas/weighing.ts';
 import { firstFlight, firstFlightInput, firstFlightList } from '#shared/schemas/first-flight.ts';
+import * as classEditions from '#shared/schemas/class-edition.ts';
+import * as clubs from '#shared/schemas/club.ts';
 import { health } from '#server/routes/health.ts';
 import { newUser } from '#server/routes/users.ts';
+
+/** The objects that a module of schemas gives away, by the module's own names. */
+function objectsOf(module: Record<string, unknown>): Record<string, z.ZodType> {
+  const objects = Object.entries(module).flatMap(([name, schema]) =>
+    schema instanceof z.ZodObject ? [[name.charAt(0).toUpperCase() + name.slice(1), schema] as const] : [],
+  );
+  return Object.fromEntries(objects);
+}
 
 /** The name in the description of every schema that a body or an answer has. */
 const NAMES: Record<string, z.ZodType> = {
@@ -141,6 +151,8 @@ const NAMES: Record<string, z.ZodType> = {
   OwnershipInput: ownershipInput,
   ReadLinkState: readLinkState,
   SharedGlider: sharedGlider,
+  ...objectsOf(clubs),
+  ...objectsOf(classEditions),
   NewUser: newUser,
   SignIn: signIn,
   User: user,

@@ -136,7 +136,7 @@ export const accountEndpoints: Endpoint[] = [
     limits: ['passwordGuesses'],
     body: accountDeletionInput,
     answer: { status: 200, schema: accountDeletion },
-    problems: ['wrong_password', 'shared_gliders'],
+    problems: ['wrong_password', 'shared_gliders', 'last_secretary'],
     handle: async ({ actor, body }) => ({
       body: await deleteAccount(actor, body.password),
       cookie: lucia.createBlankSessionCookie(),

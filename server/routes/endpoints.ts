@@ -3,6 +3,9 @@ import { accountEndpoints } from './account.ts';
 import { invitationEndpoints } from './invitations.ts';
 import { mailedLinkEndpoints } from './mailed-links.ts';
 import { sharingEndpoints } from './sharing.ts';
+import { classEditionEndpoints } from './class-editions.ts';
+import { clubInvitationEndpoints } from './club-invitations.ts';
+import { clubEndpoints } from './clubs.ts';
 import { estimateEndpoints } from './estimates.ts';
 import { gliderEndpoints } from './gliders.ts';
 import { gliderAssignmentEndpoints } from './glider-assignments.ts';
@@ -41,6 +44,9 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ...materialEndpoints,
   ...sharingEndpoints,
   ...invitationEndpoints,
+  ...clubEndpoints,
+  ...clubInvitationEndpoints,
+  ...classEditionEndpoints,
   ...userEndpoints,
   ...accountEndpoints,
   ...mailedLinkEndpoints,

@@ -3,6 +3,9 @@ import { QueryTypes, type Transaction } from 'sequelize';
 import type { AccountDeletionDto } from '#shared/schemas/account.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import { AppError } from '#server/errors.ts';
+import { ClubInvitation } from '#server/models/club-invitation.ts';
+import { ClubMember } from '#server/models/club-member.ts';
+import { Club } from '#server/models/club.ts';
 import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { IdempotencyKey } from '#server/models/idempotency-key.ts';
@@ -11,6 +14,7 @@ import { MailedLink } from '#server/models/mailed-link.ts';
 import { Session } from '#server/models/session.ts';
 import type { User } from '#server/models/user.ts';
 import { confirmPassword, ownRow } from './account.ts';
+import { part } from './club-members.ts';
 import { removeUnusedFiles } from './stored-files.ts';
 import { database, inTransaction } from './transaction.ts';
 
@@ -19,7 +23,7 @@ type Named = AccountDeletionDto['left'][number];
 /**
  * Deletes an account with its gliders. Rows of others that name the user (saved states, sheets, weighings) stay true:
  * of the user a husk without name and address stays behind them.
- * @throws AppError `wrong_password`, `shared_gliders` while a glider of theirs has other members
+ * @throws AppError `wrong_password`, `shared_gliders` while a glider of theirs has other members, `last_secretary`
  */
 export async function deleteAccount(actor: UserDto, password: string): Promise<AccountDeletionDto> {
   const user = await ownRow(actor);
@@ -34,6 +38,7 @@ export async function deleteAccount(actor: UserDto, password: string): Promise<A
       rows.flatMap(({ glider }) => (glider ? [{ id: glider.id, name: glider.name }] : []));
     const own = named(members.filter(({ role }) => role === 'owner'));
     await refuseShared(own, transaction);
+    await leaveClubs(user, transaction);
     await Glider.destroy({ where: { id: own.map(({ id }) => id) }, transaction });
     await GliderMember.destroy({ where: { userId: user.id }, transaction });
     await forget(user, transaction);
@@ -56,6 +61,16 @@ async function refuseShared(own: readonly Named[], transaction: Transaction): Pr
   throw new AppError('shared_gliders', detail, { members: { gliders } });
 }
 
+/** @throws AppError `last_secretary` for a club that would be left without one */
+async function leaveClubs(user: User, transaction: Transaction): Promise<void> {
+  const where = { userId: user.id };
+  const clubIds = (await ClubMember.findAll({ where, transaction })).map(({ clubId }) => clubId);
+  const lock = transaction.LOCK.UPDATE;
+  await Club.findAll({ where: { id: clubIds }, order: [['id', 'ASC']], lock, transaction });
+  const rows = await ClubMember.findAll({ where, transaction });
+  for (const row of rows) await part(row, transaction);
+}
+
 /** Takes everything personal out of a user's row, and the rest of what was only theirs. */
 async function forget(user: User, transaction: Transaction): Promise<void> {
   const where = { userId: user.id };
@@ -63,6 +78,7 @@ async function forget(user: User, transaction: Transaction): Promise<void> {
   await MailedLink.destroy({ where, transaction });
   await IdempotencyKey.destroy({ where, transaction });
   await Invitation.destroy({ where: { invitedBy: user.id }, transaction });
+  await ClubInvitation.destroy({ where: { invitedBy: user.id }, transaction });
   await database().query('DELETE FROM stock_pieces WHERE user_id = $1', { bind: [user.id], transaction });
   // A material that others' plans were made with keeps its row; only its keeper could see it in a list.
   await database().query(

@@ -22,6 +22,16 @@ export async function ownRow(actor: UserDto): Promise<User> {
   return user;
 }
 
+/**
+ * The asker's row, for what sends mail to others in their name.
+ * @throws AppError `email_unverified` until their own address is confirmed
+ */
+export async function verifiedRow(actor: UserDto): Promise<User> {
+  const user = await ownRow(actor);
+  if (user.verifiedAt !== null) return user;
+  throw new AppError('email_unverified', 'Confirm your own address first; then you can invite others.');
+}
+
 /** @throws AppError `wrong_password` */
 export async function confirmPassword(user: User, password: string): Promise<void> {
   if (await passwordMatches(user.passwordHash, password)) return;

@@ -1,4 +1,4 @@
-import { Transaction } from 'sequelize';
+import { QueryTypes, Transaction } from 'sequelize';
 import type { GliderRole } from '#shared/schemas/glider.ts';
 import type { UserDto } from '#shared/schemas/session.ts';
 import { notFound, type Noun } from '#server/errors.ts';
@@ -6,9 +6,10 @@ import { GliderMember } from '#server/models/glider-member.ts';
 import { Glider } from '#server/models/glider.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
 import type { GliderAction } from '#server/policies/table.ts';
+import { database } from './transaction.ts';
 
 /**
- * The asker's role on a glider.
+ * The asker's role on a glider: a reader's also where its owner lets a club see it that the asker is in.
  * @throws AppError `not_found` where there is none
  */
 export async function gliderRoleOf(
@@ -21,8 +22,22 @@ export async function gliderRoleOf(
     where: { gliderId, userId: actor.id },
     ...(transaction && { transaction }),
   });
-  if (!member) throw notFound(noun);
-  return member.role;
+  if (member) return member.role;
+  if (await isShownTo(actor, gliderId, transaction)) return 'reader';
+  throw notFound(noun);
+}
+
+async function isShownTo(
+  actor: UserDto,
+  gliderId: string,
+  transaction: Transaction | undefined,
+): Promise<boolean> {
+  const rows = await database().query(
+    `SELECT FROM club_gliders JOIN club_members USING (club_id)
+     WHERE glider_id = $1 AND user_id = $2 LIMIT 1`,
+    { type: QueryTypes.SELECT, bind: [gliderId, actor.id], ...(transaction && { transaction }) },
+  );
+  return rows.length > 0;
 }
 
 /** Refuses unless the asker may do this with the glider. */

@@ -2,6 +2,7 @@ import { Op } from 'sequelize';
 import { lucia } from '#server/auth/lucia.ts';
 import { IdempotencyKey } from '#server/models/idempotency-key.ts';
 import { forgetOldMails } from '#server/mail/outbox.ts';
+import { forgetDeadClubInvitations } from './club-invitations.ts';
 import { forgetDeadInvitations } from './invitations.ts';
 import { forgetDeadLinks } from './mailed-links.ts';
 import { removeUnusedFiles } from './stored-files.ts';
@@ -19,6 +20,7 @@ export async function tidy(now = new Date()): Promise<void> {
   await database().query('DELETE FROM rack_imports WHERE made_at < $1', { bind: [keptSince] });
   await forgetDeadLinks(now);
   await forgetDeadInvitations(now);
+  await forgetDeadClubInvitations(now);
   await forgetOldMails(now);
   await removeUnusedFiles();
   await database().query('DELETE FROM rate_counters WHERE resets_at < now()');

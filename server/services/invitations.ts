@@ -17,12 +17,13 @@ import { GliderMember } from '#server/models/glider-member.ts';
 import { Invitation } from '#server/models/invitation.ts';
 import { authorizeGlider } from '#server/policies/glider.ts';
 import { presentInvitation } from '#server/presenters/sharing.ts';
-import { ownRow } from './account.ts';
+import { verifiedRow } from './account.ts';
 import { allowOnGlider, gliderRoleOf, lockGlider } from './glider-access.ts';
 import { deadLink } from './mailed-links.ts';
 import { inTransaction } from './transaction.ts';
 
-const LIFE_MS = 14 * 86_400_000;
+/** How long an invitation waits for its answer. */
+export const INVITATION_LIFE_MS = 14 * 86_400_000;
 
 const open = () => ({ expiresAt: { [Op.gt]: new Date() } });
 const inviter = { association: 'inviter', attributes: ['name'], required: true };
@@ -49,10 +50,7 @@ export async function invite(
   { email, role }: InvitationInput,
 ): Promise<InvitationDto> {
   await allowOnGlider(actor, gliderId, 'share');
-  const user = await ownRow(actor);
-  if (user.verifiedAt === null) {
-    throw new AppError('email_unverified', 'Confirm your own address first; then you can invite others.');
-  }
+  const user = await verifiedRow(actor);
   const id = randomUUID();
   await inTransaction(async (transaction) => {
     const { glider } = await lockGlider(actor, gliderId, 'share', transaction);
@@ -64,7 +62,7 @@ export async function invite(
     }
     const token = newToken();
     const row = { id, ownerId: glider.ownerId, gliderId, email, role, invitedBy: actor.id };
-    const expiresAt = new Date(Date.now() + LIFE_MS);
+    const expiresAt = new Date(Date.now() + INVITATION_LIFE_MS);
     await Invitation.create({ ...row, tokenHash: hashToken(token), expiresAt }, { transaction });
     const letter = invitationLetter({ gliderName: glider.name, invitedBy: user.name, role, token });
     await post(email, letter, transaction);

@@ -61,7 +61,9 @@ export function removeMember(actor: UserDto, gliderId: string, userId: string): 
 export function leaveGlider(actor: UserDto, gliderId: string): Promise<void> {
   return inTransaction(async (transaction) => {
     await lockGlider(actor, gliderId, 'leave', transaction);
-    await GliderMember.destroy({ where: { gliderId, userId: actor.id }, transaction });
+    const left = await GliderMember.destroy({ where: { gliderId, userId: actor.id }, transaction });
+    // Who sees it by a club is no member of it.
+    if (left === 0) throw notFound('member');
   });
 }
 

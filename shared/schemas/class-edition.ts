@@ -24,7 +24,7 @@ const limitText = z
   .string()
   .trim()
   .max(20, 'Must have at most 20 characters.')
-  .regex(/^\d{1,9}(\.\d{1,9})?$/, 'Write a number such as 410 or 12.5.')
+  .regex(/^\d{1,9}(\.\d{1,9})?$/, { error: 'Write a number such as 410 or 12.5.', abort: true })
   .refine((text) => Number(text) > 0, 'Must be more than 0.');
 
 const words = z.string().trim().max(LIMITS.name.max, `Must have at most ${LIMITS.name.max} characters.`);

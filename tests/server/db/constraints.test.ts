@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { QueryTypes } from 'sequelize';
 import { describe, expect, it } from 'vitest';
+import { clubRole } from '#shared/schemas/club.ts';
 import { gliderRole } from '#shared/schemas/glider.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { materialBasis, materialCategory } from '#shared/schemas/material.ts';
@@ -71,6 +72,10 @@ describe('the numbers typed into CHECK constraints', () => {
     ['stock_pieces_grade_length', LIMITS.name.max],
     ['stock_pieces_note_length', LIMITS.note.max],
     ['rack_imports_count', LIMITS.rackImport.max],
+    ['clubs_name_length', LIMITS.name.max],
+    ['clubs_place_length', LIMITS.name.max],
+    ['class_editions_name_length', LIMITS.name.max],
+    ['class_editions_note_length', LIMITS.note.max],
   ])('%s are the limits of the schema', async (constraint, limit) => {
     const numbers = [...(await definitionOf(constraint)).matchAll(/\d+(?:\.\d+)?/g)].map(Number);
     expect(Math.max(...numbers)).toBe(limit);
@@ -81,6 +86,8 @@ describe('the numbers typed into CHECK constraints', () => {
     ['materials_category', materialCategory.options],
     ['materials_basis', materialBasis.options],
     ['glider_members_role', gliderRole.options],
+    ['club_members_role', clubRole.options],
+    ['club_invitations_role', clubRole.options],
     ['stock_pieces_kind', stockKind.options],
     ['stock_pieces_material_category', materialCategory.options],
     ['stock_pieces_grain_cut', grainCut.options],

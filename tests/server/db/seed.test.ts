@@ -6,8 +6,10 @@ import { gliderList } from '#shared/schemas/glider.ts';
 import { rackList } from '#shared/schemas/rack.ts';
 import { materialList } from '#shared/schemas/material.ts';
 import { seedDemo } from '#server/db/seed-demo.ts';
-import { readDemoRack, readPeople, readSeedMaterials } from '#server/db/seed-files.ts';
+import { seedClasses } from '#server/db/seed-classes.ts';
+import { readClassEditions, readDemoRack, readPeople, readSeedMaterials } from '#server/db/seed-files.ts';
 import { seedMaterials } from '#server/db/seed-materials.ts';
+import { ClassEdition } from '#server/models/class-edition.ts';
 import { Material } from '#server/models/material.ts';
 import { User } from '#server/models/user.ts';
 import { useApp } from '../support/app.ts';
@@ -28,6 +30,9 @@ async function everything(): Promise<string> {
     'glider_saves',
     'sheets',
     'stock_pieces',
+    'clubs',
+    'club_members',
+    'class_editions',
   ];
   const rows = await Promise.all(
     tables.map((table) =>
@@ -45,6 +50,18 @@ describe('seeding', () => {
     expect(await seedMaterials()).toEqual({ added: rows.length, renewed: 0 });
     const { materials } = materialList.parse((await app.visitor().get('/api/materials')).body);
     expect(materials.map(({ key }) => key).toSorted()).toEqual(rows.map(({ key }) => key).toSorted());
+  });
+
+  it('fills everybody’s limits of classes, renews what nothing uses and leaves the rest', async () => {
+    const editions = await readClassEditions();
+    expect(await seedClasses()).toEqual({ added: editions.length, renewed: 0 });
+    const [used, unused] = await ClassEdition.findAll({ limit: 2, order: ['key'] });
+    if (!used || !unused) throw new Error('no editions');
+    await used.update({ note: 'Older words', usedAt: new Date() });
+    await unused.update({ note: 'Older words' });
+    expect(await seedClasses()).toEqual({ added: 0, renewed: 1 });
+    expect((await used.reload()).note).toBe('Older words');
+    expect((await unused.reload()).note).not.toBe('Older words');
   });
 
   it('adds the demo, in which everybody can sign in and finds their gliders with figures and sheets', async () => {
@@ -68,6 +85,19 @@ describe('seeding', () => {
     expect(counts.get('gliders')).toBe(gliders.length);
     expect(counts.get('sheets')).toBe(gliders.reduce((sum, { sheets }) => sum + sheets.length, 0));
     expect(counts.get('glider_materials')).toBeGreaterThan(0);
+  });
+
+  it('makes everybody of the demo a member of its club, with a glider shown to it and gliders aimed at classes', async () => {
+    const { club, people } = await readPeople();
+    const counts = await countRows();
+    expect(counts.get('club_members')).toBe(people.length);
+    expect(counts.get('club_invitations')).toBe(club.invited.length);
+    expect(counts.get('club_gliders')).toBe(1);
+    expect(counts.get('glider_aims')).toBe(2);
+    const { email } = people.find(({ inClub }) => inClub === 'director')!;
+    const director = await signInAs(app, await User.findOne({ where: { email }, rejectOnEmpty: true }));
+    const { body } = await director.agent.get('/api/clubs').expect(200);
+    expect(body.clubs).toMatchObject([{ name: club.name, role: 'director', members: people.length }]);
   });
 
   it('fills the builder’s rack with wood of densities that there are, some of it put to gliders', async () => {
@@ -98,6 +128,7 @@ describe('seeding', () => {
   it('changes nothing the second time', async () => {
     const before = await everything();
     expect(await seedMaterials()).toEqual({ added: 0, renewed: 0 });
+    expect(await seedClasses()).toEqual({ added: 0, renewed: 0 });
     expect(await seedDemo()).toBe(false);
     expect(await everything()).toBe(before);
   });

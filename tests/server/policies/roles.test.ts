@@ -1,93 +1,32 @@
 import { randomUUID } from 'node:crypto';
 import { describe, expect, it } from 'vitest';
-import { gliderRole, type GliderRole } from '#shared/schemas/glider.ts';
-import type { Endpoint } from '#server/http/endpoint.ts';
+import { gliderRole } from '#shared/schemas/glider.ts';
 import type { Material } from '#server/models/material.ts';
-import {
-  POLICY,
-  type GliderAction,
-  type MaterialAction,
-  type MaterialStanding,
-  type StockPieceAction,
-} from '#server/policies/table.ts';
+import { POLICY, type MaterialStanding } from '#server/policies/table.ts';
 import { ENDPOINTS } from '#server/routes/endpoints.ts';
 import { useApp } from '../support/app.ts';
 import { makePerson, type Person } from '../support/people.ts';
+import { makeEdition } from '../support/clubs.ts';
 import { expectProblem } from '../support/problems.ts';
-import { nameOf, send } from '../support/requests.ts';
+import { nameOf, send, type Params } from '../support/requests.ts';
+import {
+  CLUB_GLIDER_ROUTES,
+  CLUB_ROUTES,
+  endpointOf,
+  GLIDER_ROUTES,
+  MATERIAL_ROUTES,
+  PIECE_ROUTES,
+} from '../support/routes-and-roles.ts';
 import { addMember, makeMaterial, MATERIAL } from '../support/rows.ts';
 import { makeWorld } from '../support/world.ts';
 
 const app = useApp();
 
-/** Typed here a second time, so that a change of the table has to be meant. */
-const GLIDER_ROUTES: Record<string, { action: GliderAction; allowed: GliderRole[] }> = {
-  'get /gliders/:id': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /gliders/:id': { action: 'edit', allowed: ['owner', 'builder'] },
-  'delete /gliders/:id': { action: 'delete', allowed: ['owner'] },
-  'put /gliders/:id/archived': { action: 'archive', allowed: ['owner'] },
-  'get /gliders/:id/saves/:version': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'post /gliders/:id/saves/:version/restore': { action: 'edit', allowed: ['owner', 'builder'] },
-  'put /gliders/:id/saves/:version/name': { action: 'nameSave', allowed: ['owner', 'builder'] },
-  'get /gliders/:id/saves': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'get /gliders/:id/sheets': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'post /gliders/:id/sheets': { action: 'saveSheet', allowed: ['owner', 'builder', 'pilot'] },
-  'get /gliders/:id/photos': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'post /gliders/:id/photos': { action: 'addPhoto', allowed: ['owner', 'builder', 'pilot'] },
-  'get /gliders/:id/trials': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /gliders/:id/trials': { action: 'edit', allowed: ['owner', 'builder'] },
-  'get /gliders/:id/weighings': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'post /gliders/:id/weighings': { action: 'weigh', allowed: ['owner', 'builder', 'pilot'] },
-  'get /gliders/:id/build-terms': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /gliders/:id/build-terms': { action: 'weigh', allowed: ['owner', 'builder', 'pilot'] },
-  'get /gliders/:id/first-flights': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'post /gliders/:id/first-flights': { action: 'signFlight', allowed: ['owner', 'builder', 'pilot'] },
-  'get /gliders/:id/assignment': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /gliders/:id/assignment': { action: 'edit', allowed: ['owner', 'builder'] },
-  'get /gliders/:id/members': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /gliders/:id/members/:userId': { action: 'share', allowed: ['owner'] },
-  'delete /gliders/:id/members/:userId': { action: 'share', allowed: ['owner'] },
-  'delete /gliders/:id/membership': { action: 'leave', allowed: ['builder', 'pilot', 'reader'] },
-  'post /gliders/:id/ownership': { action: 'transfer', allowed: ['owner'] },
-  'get /gliders/:id/link': { action: 'share', allowed: ['owner'] },
-  'post /gliders/:id/link': { action: 'share', allowed: ['owner'] },
-  'delete /gliders/:id/link': { action: 'share', allowed: ['owner'] },
-  'get /gliders/:id/invitations': { action: 'share', allowed: ['owner'] },
-  'post /gliders/:id/invitations': { action: 'share', allowed: ['owner'] },
-  'delete /invitations/:id': { action: 'share', allowed: ['owner'] },
-  'get /photos/:id/image': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'get /photos/:id/thumbnail': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'put /photos/:id': { action: 'captionPhoto', allowed: ['owner', 'builder', 'pilot'] },
-  'delete /photos/:id': { action: 'deletePhoto', allowed: ['owner', 'builder'] },
-  'get /sheets/:id': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'get /sheets/:id/csv': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-  'get /sheets/:id/json': { action: 'read', allowed: ['owner', 'builder', 'pilot', 'reader'] },
-};
-
-const MATERIAL_ROUTES: Record<string, { action: MaterialAction; allowed: MaterialStanding[] }> = {
-  'get /materials/:id': { action: 'read', allowed: ['visitor', 'user', 'admin', 'keeper'] },
-  'get /materials/:id/uses': { action: 'readUses', allowed: ['user', 'admin', 'keeper'] },
-  'put /materials/:id': { action: 'edit', allowed: ['admin', 'keeper'] },
-  'delete /materials/:id': { action: 'delete', allowed: ['admin', 'keeper'] },
-};
-
-const PIECE_ROUTES: Record<string, StockPieceAction> = {
-  'get /rack/:id': 'read',
-  'put /rack/:id': 'edit',
-  'delete /rack/:id': 'delete',
-  'post /rack/:id/split': 'cut',
-  'post /rack/:id/use': 'cut',
-  'put /rack/:id/reservation': 'reserve',
-  'delete /rack/:id/reservation': 'reserve',
-  'put /rack/:id/photo': 'edit',
-  'get /rack/:id/photo': 'read',
-  'delete /rack/:id/photo': 'edit',
-};
-
-function endpointOf(name: string): Endpoint {
-  const endpoint = ENDPOINTS.find((candidate) => nameOf(candidate) === name);
-  if (!endpoint) throw new Error(`There is no ${name}.`);
-  return endpoint;
+/** What a route is sent where it has to name a row that is there. */
+async function bodyFor(route: string, params: Params): Promise<Record<string, unknown> | undefined> {
+  if (route.endsWith('/ownership')) return { userId: params['userId'] };
+  if (route === 'put /gliders/:id/aim') return { editionId: (await makeEdition(null)).id };
+  return undefined;
 }
 
 describe('roles on a glider', () => {
@@ -102,7 +41,7 @@ describe('roles on a glider', () => {
 
     const endpoint = endpointOf(route);
     const params = paramsOf(endpoint);
-    const body = route.endsWith('/ownership') ? { userId: params['userId'] } : undefined;
+    const body = await bodyFor(route, params);
     const res = await send(person.agent, endpoint, params, body);
 
     if (GLIDER_ROUTES[route]?.allowed.includes(role)) expect(res.ok).toBe(true);
@@ -176,7 +115,11 @@ describe('the table', () => {
       addSharedMaterial: ['admin'],
       addGlider: ['user', 'admin'],
       addStockPiece: ['user', 'admin'],
+      addClub: ['user', 'admin'],
+      addClassEdition: ['admin'],
     });
+    for (const { action, allowed } of Object.values(CLUB_ROUTES))
+      expect(POLICY.club[action]).toEqual(allowed);
     for (const action of Object.values(PIECE_ROUTES)) expect(POLICY.stockPiece[action]).toEqual(['keeper']);
   });
 
@@ -184,7 +127,8 @@ describe('the table', () => {
     // A session is its user’s own; nobody has a role on it.
     const walked = [
       'delete /account/sessions/:id',
-      ...[GLIDER_ROUTES, MATERIAL_ROUTES, PIECE_ROUTES].flatMap((routes) => Object.keys(routes)),
+      ...CLUB_GLIDER_ROUTES,
+      ...[GLIDER_ROUTES, MATERIAL_ROUTES, PIECE_ROUTES, CLUB_ROUTES].flatMap((routes) => Object.keys(routes)),
     ];
     const all = ENDPOINTS.filter(({ path }) => path.includes(':id')).map(nameOf);
     expect(walked.toSorted()).toEqual(all.toSorted());

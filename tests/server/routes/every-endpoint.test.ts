@@ -20,7 +20,13 @@ const withId = ENDPOINTS.filter(({ path }) => path.includes(':id'));
 const withBody = ENDPOINTS.filter(({ schemas, upload }) => schemas.body && !upload);
 
 /** Parameters that lead to nobody's row. */
-const nowhere = () => ({ id: randomUUID(), version: '1', userId: randomUUID(), token: NO_TOKEN });
+const nowhere = () => ({
+  id: randomUUID(),
+  version: '1',
+  userId: randomUUID(),
+  gliderId: randomUUID(),
+  token: NO_TOKEN,
+});
 
 describe('every endpoint', () => {
   it.each(named(needSession))('%s answers a visitor with 401 and changes nothing', async (_, endpoint) => {

@@ -25,6 +25,12 @@ const TABLES = [
   'weighings',
   'build_terms',
   'first_flights',
+  'clubs',
+  'club_members',
+  'club_invitations',
+  'club_gliders',
+  'class_editions',
+  'glider_aims',
   'idempotency_keys',
 ];
 

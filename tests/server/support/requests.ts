@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Endpoint } from '#server/http/endpoint.ts';
 import { PASSWORD, type Person } from './people.ts';
 import { buildTermsBody, firstFlightBody, weighingBody } from './built.ts';
+import { editionBody } from './clubs.ts';
 import { assignmentOf, SHEET } from './stock.ts';
 import { MATERIAL, smallPlan } from './rows.ts';
 
@@ -49,6 +50,17 @@ const BODIES: Record<string, () => Record<string, unknown>> = {
   'post /invitations/decline': () => ({ token: NO_TOKEN }),
   'put /gliders/:id/members/:userId': () => ({ role: 'pilot' }),
   'post /gliders/:id/ownership': () => ({ userId: randomUUID() }),
+  'put /gliders/:id/aim': () => ({ editionId: randomUUID() }),
+  'post /clubs': () => ({ name: 'Tarn Side Flyers', place: '' }),
+  'put /clubs/:id': () => ({ name: 'Tarn Side Flyers', place: 'Tarn Side' }),
+  'put /clubs/:id/members/:userId': () => ({ role: 'director' }),
+  'post /clubs/:id/invitations': () => ({ email: 'quill@larkmoor.example', role: 'member' }),
+  'post /club-invitations/preview': () => ({ token: NO_TOKEN }),
+  'post /club-invitations/accept': () => ({ token: NO_TOKEN }),
+  'post /club-invitations/decline': () => ({ token: NO_TOKEN }),
+  'post /class-editions': () => ({ ...editionBody() }),
+  'post /clubs/:id/class-editions': () => ({ ...editionBody() }),
+  'put /class-editions/:id': () => ({ ...editionBody({ edition: `2027 ${randomUUID()}` }) }),
   'post /users': () => ({
     name: 'Ada Quill',
     email: 'quill@larkmoor.example',

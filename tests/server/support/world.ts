@@ -1,4 +1,5 @@
 import type { Endpoint } from '#server/http/endpoint.ts';
+import type { Club } from '#server/models/club.ts';
 import { Session } from '#server/models/session.ts';
 import { putPiecePhoto } from '#server/services/stock-photos.ts';
 import type { TestApp } from './app.ts';
@@ -6,6 +7,7 @@ import { makePhoto, smallPicture } from './photos.ts';
 import { makePerson, type Person } from './people.ts';
 import type { Params } from './requests.ts';
 import { addMember, makeGlider, makeInvitation, makeMaterial } from './rows.ts';
+import { joinClub, makeClub, makeClubInvitation, makeEdition, showGlider } from './clubs.ts';
 import { makePiece } from './stock.ts';
 import { makeSheet } from './sheets.ts';
 
@@ -13,6 +15,8 @@ import { makeSheet } from './sheets.ts';
 export interface World {
   owner: Person;
   glider: Awaited<ReturnType<typeof makeGlider>>;
+  /** the owner keeps it, shows the glider to it, and has written an edition for it */
+  club: Club;
   /** parameters of a path that lead to the owner's rows */
   paramsOf: (endpoint: Pick<Endpoint, 'path'>) => Params;
 }
@@ -28,6 +32,11 @@ export async function makeWorld(app: TestApp): Promise<World> {
   const member = await makePerson(app);
   await addMember(glider, member.user, 'reader');
   const invitation = await makeInvitation(glider, owner.user);
+  const club = await makeClub(owner.user);
+  await joinClub(club, member.user, 'member');
+  await showGlider(club, glider);
+  const clubInvitation = await makeClubInvitation(club, owner.user);
+  const edition = await makeEdition(club);
   const session = await Session.findOne({ where: { userId: owner.user.id }, rejectOnEmpty: true });
   const ids: Record<string, string> = {
     gliders: glider.id,
@@ -37,14 +46,19 @@ export async function makeWorld(app: TestApp): Promise<World> {
     rack: piece.id,
     invitations: invitation.id,
     account: session.id,
+    clubs: club.id,
+    'club-invitations': clubInvitation.id,
+    'class-editions': edition.id,
   };
   return {
     owner,
     glider,
+    club,
     paramsOf: ({ path }) => ({
       id: ids[path.split('/')[1] ?? ''] ?? '',
       version: '1',
       userId: member.user.id,
+      gliderId: glider.id,
     }),
   };
 }

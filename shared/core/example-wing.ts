@@ -1,6 +1,7 @@
 import type { BuiltPart } from './built/as-built.ts';
 import { startBuilt } from './built/as-built-state.ts';
 import { sidedLines } from './built/sided-lines.ts';
+import type { AssignProblem } from './cut/assign-account.ts';
 import { estimate } from './estimate.ts';
 import { halfOf } from './half.ts';
 import type { CapStrips, Plan, Ribs, Skin, Strip, Surface, Web } from './plan.ts';
@@ -145,3 +146,42 @@ export const EXAMPLE_STARBOARD: BuiltPart = { ...EXAMPLE_HALF_PART, side: 'starb
 
 /** The account of that plan before anything was weighed. */
 export const EXAMPLE_BUILT = startBuilt(sidedLines(EXAMPLE_PLAN), EXAMPLE_PLAN.materials);
+
+const EXAMPLE_RIB = {
+  line: 'wing/rib',
+  name: 'Rib',
+  surface: 'wing',
+  form: 'sheet',
+  length: 100,
+  width: 10,
+  thickness: 2,
+  volume: 2000,
+  y: 100,
+  isSpar: false,
+  grain: 'stiff',
+  material: 'balsa',
+  wood: 'balsa',
+  density: 160,
+} as const;
+const EXAMPLE_SHEET = {
+  form: 'sheet',
+  length: 300,
+  width: 75,
+  thickness: 2,
+  grainCut: 'C',
+  wood: 'balsa',
+} as const;
+
+/** A rib on each half, and a light sheet and a heavier one that both could be cut from. */
+export const EXAMPLE_ASSIGNMENT: AssignProblem = {
+  parts: [
+    { ...EXAMPLE_RIB, id: 'rib port', n: 0, side: 'port' },
+    { ...EXAMPLE_RIB, id: 'rib starboard', n: 1, side: 'starboard' },
+  ],
+  stock: [
+    { ...EXAMPLE_SHEET, id: '1', density: 100 },
+    { ...EXAMPLE_SHEET, id: '2', density: 140 },
+  ],
+  terms: { aim: 'lightest', kerf: 1, massTolerance: null, momentTolerance: null },
+  fixed: new Map(),
+};

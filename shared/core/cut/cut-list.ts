@@ -76,7 +76,8 @@ export function cutList(plan: Plan): CutList {
   return { sticks, ribs };
 }
 
-function sidesOf(surface: Surface, side: Strip['side']): BuiltSide[] {
+/** The sides that a part is cut for. */
+export function sidesOf(surface: Surface, side: Strip['side']): BuiltSide[] {
   if (!surface.mirrored) return ['middle'];
   return side === 'port' || side === 'starboard' ? [side] : ['port', 'starboard'];
 }

@@ -150,6 +150,7 @@ export const EXAMPLE_BUILT = startBuilt(sidedLines(EXAMPLE_PLAN), EXAMPLE_PLAN.m
 const EXAMPLE_RIB = {
   line: 'wing/rib',
   name: 'Rib',
+  number: null,
   surface: 'wing',
   form: 'sheet',
   length: 100,

@@ -5,15 +5,18 @@ import { Notice } from '#client/components/ui/notice.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { useKept } from '#client/hooks/use-kept.ts';
 import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
-import { request } from '#client/lib/api.ts';
+import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { cutList } from '#shared/core/cut/cut-list.ts';
-import { rackList } from '#shared/schemas/rack.ts';
+import { INCH_SIZES, METRIC_SIZES } from '#shared/core/cut/shop-sizes.ts';
 import type { StockPieceDto } from '#shared/schemas/stock-piece.ts';
 import { cutTerms, USUAL_TERMS, type CutTerms } from './cut-terms.ts';
-import { RibSection } from './rib-section.tsx';
-import { SheetStrips } from './sheet-strips.tsx';
-import { isFromSheet, stickGroups } from './stick-groups.ts';
+import { freePieces } from './rack-pieces.ts';
+import { sheetGroups } from './sheet-groups.ts';
+import { SheetSection } from './sheet-section.tsx';
+import { ShoppingSection } from './shopping-section.tsx';
+import { shoppingList } from './shopping.ts';
+import { stickGroups } from './stick-groups.ts';
 import { StickSection } from './stick-section.tsx';
 import { cutHeadline } from './words.ts';
 
@@ -23,17 +26,23 @@ const NONE: readonly StockPieceDto[] = [];
 export function CutPlace({ workspace, person }: { workspace: Workspace; person: string }) {
   const plan = useValidPlan(workspace);
   const [terms, keep] = useKept<CutTerms>(`featherbeam.cut.${person}`, cutTerms, USUAL_TERMS);
-  const { data } = useQuery({
-    queryKey: ['rack', 'sticks'],
-    queryFn: ({ signal }) => request('/rack?state=free&kind=stick&limit=100', rackList, { signal }),
-    enabled: workspace.kind === 'saved',
-  });
-  const rack = data?.pieces ?? NONE;
+  const { data: rack = NONE } = useQuery({ ...freePieces, enabled: workspace.kind === 'saved' });
+  const units = useUnits();
+  const sizes = units.system === 'inch' ? INCH_SIZES : METRIC_SIZES;
   const list = useMemo(() => (plan ? cutList(plan) : { sticks: [], ribs: [] }), [plan]);
   const groups = useMemo(() => stickGroups(list.sticks, terms, rack), [list, terms, rack]);
+  const sheets = useMemo(
+    () => (plan ? sheetGroups(plan, terms, { rack, sizes }) : []),
+    [plan, terms, rack, sizes],
+  );
   if (!plan) return null;
-  const { title, text } = cutHeadline(list, groups);
-  const longest = Math.max(1, ...groups.flatMap(({ packing }) => packing.sticks.map(({ length }) => length)));
+  const { title, text } = cutHeadline(list, groups, sheets);
+  const lines = shoppingList(sheets, groups, { sizes, stick: terms.bought });
+  const longest = Math.max(
+    1,
+    ...groups.flatMap(({ packing }) => packing.sticks.map(({ length }) => length)),
+    ...sheets.flatMap(({ packing }) => packing.sheets.map(({ length }) => length)),
+  );
   return (
     <div className="px-4 pt-5 pb-8 sm:px-7">
       <header className="flex flex-wrap items-start gap-x-6 gap-y-2">
@@ -49,11 +58,13 @@ export function CutPlace({ workspace, person }: { workspace: Workspace; person: 
       <Notice tone="ochre" word="Knife and saw:" className="mt-4 max-w-3xl print:hidden">
         cut away from your hand against a steel rule, wear a mask for dust, keep thin glue off skin and eyes.
       </Notice>
+      <ShoppingSection plan={plan} lines={lines} />
       {groups.map((group) => (
         <StickSection key={group.key} plan={plan} group={group} longest={longest} />
       ))}
-      <SheetStrips plan={plan} strips={list.sticks.filter(isFromSheet)} />
-      {list.ribs.length > 0 && <RibSection plan={plan} ribs={list.ribs} />}
+      {sheets.map((group) => (
+        <SheetSection key={group.key} plan={plan} group={group} longest={longest} />
+      ))}
     </div>
   );
 }

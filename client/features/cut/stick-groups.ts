@@ -1,4 +1,5 @@
 import type { StickPiece } from '#shared/core/cut/cut-list.ts';
+import { WIDEST_STICK } from '#shared/core/cut/cut-parts.ts';
 import { packSticks, type StickPacking, type StickStock } from '#shared/core/cut/pack-sticks.ts';
 import { spliceOf, type Splice, type SpliceRefusal } from '#shared/core/cut/splice.ts';
 import type { StockPieceDto } from '#shared/schemas/stock-piece.ts';
@@ -19,11 +20,6 @@ export interface StickGroup {
   needs: CutStickNeed[];
   packing: StickPacking;
 }
-
-/** Wider strips are cut from sheet, mm (common practice, no source: sticks are sold up to half an inch). */
-const WIDEST_STICK = 13;
-
-export const isFromSheet = ({ width }: Pick<StickPiece, 'width'>): boolean => width > WIDEST_STICK;
 
 /** Sticks that are spliced alike take turns, so that no two joints lie at one station. */
 const TURNS = [0, 1, 2, 3] as const;
@@ -54,7 +50,7 @@ export function stickGroups(
 ): StickGroup[] {
   const byKey = new Map<string, StickPiece[]>();
   for (const piece of sticks) {
-    if (isFromSheet(piece)) continue;
+    if (piece.width > WIDEST_STICK) continue;
     const key = `${piece.material} ${piece.width.toFixed(2)} × ${piece.thickness.toFixed(2)}`;
     byKey.set(key, [...(byKey.get(key) ?? []), piece]);
   }

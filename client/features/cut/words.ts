@@ -3,6 +3,8 @@ import { ribsAround, type Splice, type SpliceRefusal } from '#shared/core/cut/sp
 import type { Plan } from '#shared/core/plan.ts';
 import { ribNumbers } from '#shared/drawing/marks.ts';
 import type { Units } from '#shared/format/units.ts';
+import type { SheetPacking } from '#shared/core/cut/pack-sheets.ts';
+import type { SheetGroup } from './sheet-groups.ts';
 import type { StickGroup } from './stick-groups.ts';
 
 const SIDES = { port: ', port', starboard: ', starboard', middle: '' } as const;
@@ -12,32 +14,69 @@ export function stickName({ name, side, panel }: Pick<StickPiece, 'name' | 'side
   return `${name}${SIDES[side]}${panel === null ? '' : `, panel ${panel}`}`;
 }
 
+const counted = (count: number, one: string, more = `${one}s`) => `${count} ${count === 1 ? one : more}`;
+
 /** What the page comes to, before any list. */
-export function cutHeadline(list: CutList, groups: readonly StickGroup[]): { title: string; text: string } {
-  const buy = groups.reduce((sum, { packing }) => sum + packing.bought, 0);
-  const used = groups.reduce(
-    (sum, { packing }) => sum + packing.sticks.filter(({ stock }) => stock !== null).length,
+export function cutHeadline(
+  list: CutList,
+  sticks: readonly StickGroup[],
+  sheets: readonly SheetGroup[],
+): { title: string; text: string } {
+  const stickCount = sticks.reduce((sum, { needs }) => sum + needs.length, 0);
+  const blankCount = sheets.reduce(
+    (sum, { blanks }) => sum + blanks.reduce((count, { ids }) => count + ids.length, 0),
     0,
   );
-  const refused = groups.flatMap(({ needs }) => needs.filter(({ splice }) => 'refused' in splice));
-  const spliced = groups.flatMap(({ needs }) =>
+  if (stickCount + blankCount === 0) {
+    return { title: 'Nothing to cut', text: 'Ribs, spars, sheeting and edges of the drawing appear here.' };
+  }
+  const buy = (groups: readonly { packing: { bought: number } }[]) =>
+    groups.reduce((sum, { packing }) => sum + packing.bought, 0);
+  const [newSticks, newSheets] = [buy(sticks), buy(sheets)];
+  const bought = [
+    ...(newSticks > 0 ? [counted(newSticks, 'stick')] : []),
+    ...(newSheets > 0 ? [counted(newSheets, 'sheet')] : []),
+  ];
+  const pieces = [
+    ...sticks.flatMap(({ packing }) => packing.sticks),
+    ...sheets.flatMap(({ packing }) => packing.sheets),
+  ];
+  const fromRack = pieces.filter(({ stock }) => stock !== null).length;
+  const refused = sticks.flatMap(({ needs }) => needs.filter(({ splice }) => 'refused' in splice));
+  const spliced = sticks.flatMap(({ needs }) =>
     needs.filter(({ splice }) => !('refused' in splice) && splice.joints.length > 0),
   );
-  const sticks = groups.reduce((sum, { needs }) => sum + needs.length, 0);
-  if (list.sticks.length === 0) {
-    return { title: 'No sticks to cut', text: 'Spars, stringers and edges of the drawing appear here.' };
-  }
-  const ribs = list.ribs.length === 0 ? '' : ` and ${list.ribs.length} ribs`;
-  const from = used > 0 ? `, ${used} from your rack` : '';
+  const cut = [
+    ...(stickCount > 0 ? [counted(stickCount, 'stick')] : []),
+    ...(blankCount > 0 ? [`${blankCount} pieces of sheet`] : []),
+  ].join(' and ');
+  const from = fromRack > 0 ? `, ${fromRack} from your rack` : '';
+  const ribs = list.ribs.length > 0 ? [`${list.ribs.length} of the pieces are ribs`] : [];
   const parts = [
-    spliced.length > 0 ? `${spliced.length} of them spliced` : 'none needs a splice',
+    ...ribs,
+    spliced.length > 0 ? `${spliced.length} of the sticks spliced` : 'no stick needs a splice',
     ...(refused.length > 0 ? [`${refused.length} cannot be made from this stock`] : []),
   ];
   return {
-    title: `${sticks} sticks${ribs}; ${buy} ${buy === 1 ? 'stick' : 'sticks'} to buy${from}`,
+    title: `${cut}; ${bought.length > 0 ? bought.join(' and ') : 'nothing'} to buy${from}`,
     text: `${parts.join('; ')}.`.replace(/^./, (letter) => letter.toUpperCase()),
   };
 }
+
+/** How well blanks lie on their sheets, told from the shop's side. */
+export function packedWords({ bought, bound, sheets }: SheetPacking): string {
+  if (sheets.length === 0) return 'On no sheet.';
+  if (bought === 0) return 'All from what is at hand.';
+  return `${bought} to buy${bought > bound ? `, at best ${bound}` : ''}; laid in strips along the grain.`;
+}
+
+const GRAIN_WORDS = {
+  bends: 'wants a sheet that bends across: A grain, or B',
+  stiff: 'wants a stiff sheet: C grain, or B',
+} as const;
+
+/** Which cut of sheet a blank wants. */
+export const grainWords = (grain: keyof typeof GRAIN_WORDS): string => GRAIN_WORDS[grain];
 
 /** Where a stick is joined, told by mm and by the ribs about it; or why it cannot be. */
 export function spliceWords(

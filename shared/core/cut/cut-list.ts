@@ -1,6 +1,7 @@
 import type { BuiltSide } from '../built/sided-lines.ts';
-import { halfOf, ribExtent, ribStations, stripAt, type Half } from '../half.ts';
-import type { Bar, Plan, Strip, Surface } from '../plan.ts';
+import { developedAt } from '../fit.ts';
+import { covers, halfOf, ribExtent, ribStations, stripAt, type Half } from '../half.ts';
+import type { Bar, CapStrips, Plan, Strip, Surface } from '../plan.ts';
 import { ordinateAt } from '../section-integrals.ts';
 import { stationAt, surfaceLine, type Station } from '../stations.ts';
 
@@ -19,8 +20,10 @@ export interface StickPiece {
   thickness: number;
   /** along the stick itself, skew included */
   length: number;
-  /** where it begins, from the root, and the half span; null outside a surface */
+  /** where it begins, from the root, and the half span; null outside a surface and for what lies along a rib */
   place: { surface: string; from: number; halfSpan: number } | null;
+  /** its middle along the half span; null outside a surface */
+  station: number | null;
 }
 
 /** The block of sheet that a rib is cut from, grain along the chord. Lengths mm. */
@@ -60,6 +63,7 @@ export function cutList(plan: Plan): CutList {
     for (const part of surface.parts) {
       for (const side of sidesOf(surface, part.side)) {
         if (part.kind === 'strip') sticks.push(...stripPieces(surface, half, part, side));
+        if (part.kind === 'capStrips') sticks.push(...capPieces(surface, half, part, side));
         if (part.kind === 'ribs') {
           ribStations(part).forEach((s, i) => {
             const blank = blankAt(half, stationAt(half.line, s));
@@ -110,8 +114,25 @@ function stripPieces(surface: Surface, { line }: Half, strip: Strip, side: Built
       ...section(strip.width, strip.height),
       length: wayOf(line, strip, from, end),
       place: { surface: surface.key, from, halfSpan: line.length },
+      station: (from + end) / 2,
     };
   });
+}
+
+/** A strip over the edge of each rib in reach, for each face that it lies on. */
+function capPieces(surface: Surface, half: Half, caps: CapStrips, side: BuiltSide): StickPiece[] {
+  const faces = caps.seat === 'both' ? (['top', 'bottom'] as const) : [caps.seat];
+  const stations = half.ribs.flatMap((ribs) => ribs.stations).filter(({ s }) => covers(caps, s));
+  const pieces = stations.flatMap((station) =>
+    faces.map((seat) => ({ length: developedAt({ ...caps, seat }, station).amount, station: station.s })),
+  );
+  return pieces
+    .filter(({ length }) => length > 0)
+    .map((piece, i): StickPiece => {
+      const line = `${surface.key}/${caps.id}`;
+      const own = { line, name: caps.name, side, panel: null, material: caps.material, place: null };
+      return { id: `${line} ${side} ${i + 1}`, ...own, ...section([caps.width], [caps.thickness]), ...piece };
+    });
 }
 
 /** Length of a strip's centre line, mm: summed over steps that begin anew at every panel. */
@@ -151,5 +172,5 @@ function blankAt(half: Half, station: Station): { length: number; height: number
 function barPiece({ id, name, material, from, to, width, height }: Bar): StickPiece {
   const length = Math.hypot(to[0] - from[0], to[1] - from[1], to[2] - from[2]);
   const own = { line: `solid/${id}`, name, side: 'middle' as const, panel: null, material };
-  return { id: `solid/${id} middle`, ...own, ...section(width, height), length, place: null };
+  return { id: `solid/${id} middle`, ...own, ...section(width, height), length, place: null, station: null };
 }

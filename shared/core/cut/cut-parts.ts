@@ -3,7 +3,7 @@ import type { Plan } from '../plan.ts';
 import { pointOf, stationAt, surfaceLine, type SurfaceLine } from '../stations.ts';
 import { woodGroupKey } from '../wood-groups.ts';
 import { cutList } from './cut-list.ts';
-import { sheetBlanks, type GrainWish, type SheetBlank } from './sheet-blanks.ts';
+import { sheetBlanks, type GrainWish } from './sheet-blanks.ts';
 
 /** A wooden piece to be cut, as far as it matters which stock it comes from. Lengths mm. */
 export interface CutPart {
@@ -12,6 +12,8 @@ export interface CutPart {
   line: string;
   n: number;
   name: string;
+  /** of several alike, which: the rib from the root, the panel, the bay; null where there is one */
+  number: number | null;
   side: BuiltSide;
   /** null outside a surface */
   surface: string | null;
@@ -40,20 +42,7 @@ export const WIDEST_STICK = 13;
  */
 export const woodOf = (name: string): string => (/^[^,(]*/.exec(name)?.[0] ?? '').trim().toLowerCase();
 
-type Piece = Pick<
-  CutPart,
-  | 'id'
-  | 'line'
-  | 'name'
-  | 'side'
-  | 'surface'
-  | 'form'
-  | 'length'
-  | 'width'
-  | 'thickness'
-  | 'grain'
-  | 'material'
-> & {
+type Piece = Omit<CutPart, 'n' | 'volume' | 'y' | 'isSpar' | 'wood' | 'density'> & {
   /** middle along the half span; null outside a surface */
   station: number | null;
 };
@@ -94,18 +83,23 @@ const sideKey = ({ line, side }: { line: string; side: BuiltSide }) => `${line} 
 
 function piecesOf(plan: Plan): Piece[] {
   const { sticks, ribs } = cutList(plan);
-  const ofSheet = ({ number: _, of: __, ...blank }: SheetBlank): Piece => ({ ...blank, form: 'sheet' });
+  const keys = new Set(plan.surfaces.map(({ key }) => key));
+  const surfaceOf = (line: string) => {
+    const key = line.slice(0, line.indexOf('/'));
+    return keys.has(key) ? key : null;
+  };
   return [
-    ...sticks.map(({ panel: _, place, width, ...stick }): Piece => {
-      const station = place && place.from + stick.length / 2;
-      const form = width > WIDEST_STICK ? 'sheet' : 'stick';
-      return { ...stick, width, form, station, surface: place?.surface ?? null, grain: null };
+    ...sticks.map(({ panel, place: _, ...stick }): Piece => {
+      const form = stick.width > WIDEST_STICK ? 'sheet' : 'stick';
+      return { ...stick, number: panel, form, surface: surfaceOf(stick.line), grain: null };
     }),
-    ...ribs.map(({ number: _, height, line, ...rib }): Piece => {
-      const surface = line.slice(0, line.indexOf('/'));
-      return { ...rib, line, width: height, form: 'sheet', surface, grain: 'stiff' };
+    ...ribs.map(({ height, ...rib }): Piece => {
+      const surface = surfaceOf(rib.line);
+      return { ...rib, width: height, form: 'sheet', surface, grain: 'stiff' };
     }),
-    ...sheetBlanks(plan).map(ofSheet),
+    ...sheetBlanks(plan).map(({ number, of, ...blank }): Piece => {
+      return { ...blank, number: of > 1 ? number : null, form: 'sheet' };
+    }),
   ];
 }
 

@@ -41,10 +41,7 @@ export interface SheetPacking {
  * with room. The bound holds for what is at hand and what is bought together.
  * @example packSheets([{ id: 'a', length: 900, width: 60 }, { id: 'b', length: 900, width: 60 }], { atHand: [], bought: { length: 1000, width: 100 }, kerf: 1 }) // → { sheets: [{ stock: null, length: 1000, width: 100, laid: [{ id: 'a', at: [0, 0] }], used: 0.54 }, { stock: null, length: 1000, width: 100, laid: [{ id: 'b', at: [0, 0] }], used: 0.54 }], bought: 2, bound: 2, tooLarge: [], unplaced: [] }
  */
-export function packSheets(
-  blanks: readonly Rectangle[],
-  { atHand, bought, kerf }: SheetTerms,
-): SheetPacking {
+export function packSheets(blanks: readonly Rectangle[], { atHand, bought, kerf }: SheetTerms): SheetPacking {
   const falling = blanks.toSorted((a, b) => b.width - a.width || b.length - a.length);
   const open: { stock: string | null; length: number; width: number; own: Rectangle[]; laid: Laid[] }[] =
     atHand

@@ -17,7 +17,9 @@ export const METRIC_SIZES: ShopSizes = {
 };
 
 export const INCH_SIZES: ShopSizes = {
-  thicknesses: [1 / 32, 1 / 20, 1 / 16, 3 / 32, 1 / 8, 3 / 16, 1 / 4, 3 / 8, 1 / 2].map((inches) => inches * INCH),
+  thicknesses: [1 / 32, 1 / 20, 1 / 16, 3 / 32, 1 / 8, 3 / 16, 1 / 4, 3 / 8, 1 / 2].map(
+    (inches) => inches * INCH,
+  ),
   sides: [1 / 16, 3 / 32, 1 / 8, 3 / 16, 1 / 4, 5 / 16, 3 / 8, 1 / 2].map((inches) => inches * INCH),
   sheet: { length: 36 * INCH, width: 3 * INCH },
   stick: 36 * INCH,

@@ -1,8 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { USUAL_TERMS } from '#client/features/cut/cut-terms.ts';
+import { sheetGroups } from '#client/features/cut/sheet-groups.ts';
 import { stickGroups } from '#client/features/cut/stick-groups.ts';
 import { cutHeadline, spliceWords, stickName } from '#client/features/cut/words.ts';
 import { cutList } from '#shared/core/cut/cut-list.ts';
+import { METRIC_SIZES } from '#shared/core/cut/shop-sizes.ts';
 import { unitsOf } from '#shared/format/units.ts';
 import { demoPlan } from '#tests/support/plans.ts';
 
@@ -18,7 +20,10 @@ describe('the sticks of a plan', () => {
     const needed = groups.flatMap(({ needs }) => needs.map(({ piece }) => piece.id));
     expect(cut.toSorted()).toEqual(needed.toSorted());
     expect(groups.every(({ width }) => width <= 13)).toBe(true);
-    expect(cutHeadline(list, groups).title).toMatch(/^\d+ sticks and 38 ribs; \d+ sticks to buy$/);
+    const sheets = sheetGroups(plan, USUAL_TERMS, { rack: [], sizes: METRIC_SIZES });
+    const { title, text } = cutHeadline(list, groups, sheets);
+    expect(title).toMatch(/^\d+ sticks and \d+ pieces of sheet; \d+ sticks and \d+ sheets to buy$/);
+    expect(text).toMatch(/^38 of the pieces are ribs; /);
   });
 
   it('say where they are spliced when stock is short, and by how much when it is too short', () => {

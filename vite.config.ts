@@ -19,6 +19,7 @@ export default defineConfig({
     target: 'es2022',
     sourcemap: false,
   },
+  worker: { format: 'es' },
   server: { host: '127.0.0.1', proxy: { '/api': `http://127.0.0.1:${apiPort}` } },
   test: {
     reporters: ['default'],

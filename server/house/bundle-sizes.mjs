@@ -17,8 +17,8 @@ export const BUDGETS = [
 /** Where a build leaves its sizes, in its own folder; a name with a point before it is not served. */
 export const SIZES = join('.vite', 'sizes.json');
 
-/** Text that is worth packing before it is sent. */
-const PACKED = /\.(js|css|svg|json)$/;
+/** What is worth packing before it is sent. */
+const PACKED = /\.(js|css|svg|json|wasm)$/;
 
 /** How much JavaScript each page with a budget needs: the entry, its own files, and all that they import.
  * @param {readonly BuiltChunk[]} chunks */

@@ -11,7 +11,8 @@ export function securityHeaders(scriptHashes: readonly string[]): RequestHandler
       useDefaults: false,
       directives: {
         defaultSrc: ["'self'"],
-        scriptSrc: ["'self'", ...scriptHashes.map((hash) => `'${hash}'`)],
+        // A solver runs as WebAssembly in a worker; that compiles no text as script.
+        scriptSrc: ["'self'", "'wasm-unsafe-eval'", ...scriptHashes.map((hash) => `'${hash}'`)],
         styleSrc: ["'self'", "'unsafe-inline'"],
         imgSrc: ["'self'", 'data:', 'blob:'],
         fontSrc: ["'self'", 'data:'],

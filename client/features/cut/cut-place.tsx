@@ -8,8 +8,10 @@ import { useValidPlan } from '#client/hooks/use-valid-plan.ts';
 import { useUnits } from '#client/lib/units.ts';
 import type { Workspace } from '#client/lib/workspace.ts';
 import { cutList } from '#shared/core/cut/cut-list.ts';
+import { cutParts, THICKEST_SHEET } from '#shared/core/cut/cut-parts.ts';
 import { INCH_SIZES, METRIC_SIZES } from '#shared/core/cut/shop-sizes.ts';
 import type { StockPieceDto } from '#shared/schemas/stock-piece.ts';
+import { AssignSection } from './assign/assign-section.tsx';
 import { cutTerms, USUAL_TERMS, type CutTerms } from './cut-terms.ts';
 import { freePieces } from './rack-pieces.ts';
 import { sheetGroups } from './sheet-groups.ts';
@@ -37,7 +39,10 @@ export function CutPlace({ workspace, person }: { workspace: Workspace; person: 
   );
   if (!plan) return null;
   const { title, text } = cutHeadline(list, groups, sheets);
-  const lines = shoppingList(sheets, groups, { sizes, stick: terms.bought });
+  const blocks = cutParts(plan).filter(
+    ({ form, thickness }) => form === 'sheet' && thickness > THICKEST_SHEET,
+  );
+  const lines = shoppingList(sheets, groups, blocks, { sizes, stick: terms.bought });
   const longest = Math.max(
     1,
     ...groups.flatMap(({ packing }) => packing.sticks.map(({ length }) => length)),
@@ -65,6 +70,7 @@ export function CutPlace({ workspace, person }: { workspace: Workspace; person: 
       {sheets.map((group) => (
         <SheetSection key={group.key} plan={plan} group={group} longest={longest} />
       ))}
+      {workspace.kind === 'saved' && <AssignSection workspace={workspace} plan={plan} />}
     </div>
   );
 }

@@ -1,4 +1,4 @@
-import { cutParts, woodOf, type CutPart } from '#shared/core/cut/cut-parts.ts';
+import { cutParts, THICKEST_SHEET, woodOf, type CutPart } from '#shared/core/cut/cut-parts.ts';
 import { packSheets, type SheetPacking } from '#shared/core/cut/pack-sheets.ts';
 import { sheetSold, type ShopSizes } from '#shared/core/cut/shop-sizes.ts';
 import type { Plan } from '#shared/core/plan.ts';
@@ -36,7 +36,7 @@ export function sheetGroups(
 ): SheetGroup[] {
   const byKey = new Map<string, CutPart[]>();
   for (const part of cutParts(plan)) {
-    if (part.form !== 'sheet') continue;
+    if (part.form !== 'sheet' || part.thickness > THICKEST_SHEET) continue;
     const key = `${part.material} ${part.thickness.toFixed(2)}`;
     byKey.set(key, [...(byKey.get(key) ?? []), part]);
   }

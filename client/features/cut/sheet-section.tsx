@@ -26,7 +26,9 @@ export function SheetSection({ plan, group, longest }: SheetSectionProps) {
   return (
     <section aria-label={title} className="mt-8 break-inside-avoid">
       <h2 className="text-heading font-semibold">{title}</h2>
-      <p className="text-note text-graphite">{packedWords(packing)}</p>
+      <p className="text-note text-graphite">
+        {packedWords(packing)} {grainWords(blanks)}
+      </p>
       {packing.tooLarge.length > 0 && (
         <p className="text-note text-red">
           <span aria-hidden="true">▲ </span>
@@ -38,7 +40,7 @@ export function SheetSection({ plan, group, longest }: SheetSectionProps) {
         <div className="grid gap-y-2">
           {packing.sheets.map((sheet, i) => {
             const name = sheet.stock ?? 'New';
-            const of = `${units.format(sheet.length, 'length')} × ${units.format(sheet.width, 'length')}`;
+            const of = `${units.size(sheet.length, { bare: true })} × ${units.size(sheet.width)}`;
             const label = `${name} sheet, ${of}, with ${sheet.laid.length} blanks`;
             return (
               <div key={i}>
@@ -69,13 +71,12 @@ export function SheetSection({ plan, group, longest }: SheetSectionProps) {
             </tr>
           </thead>
           <tbody>
-            {blanks.map(({ name, number, ids, length, width, grain }, i) => (
+            {blanks.map(({ name, number, ids, length, width }, i) => (
               <Tr key={ids[0]}>
                 <Td className="font-semibold">{i + 1}</Td>
-                <RowTh className="py-1">
+                <RowTh>
                   {name}
                   {number !== null && `, ${number}`}
-                  {grain && <span className="block text-note text-graphite">{grainWords(grain)}</span>}
                 </RowTh>
                 <Td numeric>{ids.length}</Td>
                 <Td numeric>{size(length)}</Td>

@@ -6,10 +6,10 @@ import type { ShoppingLine } from './shopping.ts';
 /** What to buy, in the sizes that shops sell, with a box to tick on paper. */
 export function ShoppingSection({ plan, lines }: { plan: Plan; lines: readonly ShoppingLine[] }) {
   const units = useUnits();
-  const section = (width: number | null, thickness: number) =>
-    width === null
-      ? `${units.size(thickness)} thick`
-      : `${units.size(width, { bare: true })} × ${units.size(thickness)}`;
+  const sizes = (all: readonly (number | null)[]) => {
+    const known = all.filter((mm) => mm !== null);
+    return known.map((mm, i) => units.size(mm, { bare: i < known.length - 1 })).join(' × ');
+  };
   return (
     <section aria-label="To buy" className="mt-6">
       <h2 className="text-heading font-semibold">To buy</h2>
@@ -34,21 +34,13 @@ export function ShoppingSection({ plan, lines }: { plan: Plan; lines: readonly S
                 <Tr key={key}>
                   <Td className="hidden print:table-cell">☐</Td>
                   <RowTh>{plan.materials[material]?.name ?? material}</RowTh>
-                  <Td numeric>{sold ? count : ''}</Td>
+                  <Td numeric>{count}</Td>
                   <Td>
-                    {sold === null ? (
-                      <span className="text-red">
-                        <span aria-hidden="true">▲ </span>sold by no model shop: laminate or plane it
-                      </span>
-                    ) : (
-                      `${form} ${units.format(sold.length, 'length')} × ${section(
-                        form === 'sheet' ? sold.width : sold.width,
-                        sold.thickness,
-                      )}`
-                    )}
+                    {form} {sizes([sold.length, sold.width, sold.thickness])}
                   </Td>
                   <Td className="text-graphite">
-                    {section(drawn.width, drawn.thickness)}
+                    {form === 'block' ? 'at least that' : sizes([drawn.width, drawn.thickness])}
+                    {form === 'sheet' && ' thick'}
                     {isThicker && ': take it down'}
                   </Td>
                 </Tr>

@@ -11,6 +11,37 @@ export interface CutStickNeed {
   splice: Splice | SpliceRefusal;
 }
 
+/** Sticks of one part that are alike, port and starboard together. */
+export interface StickRow {
+  ids: string[];
+  piece: StickPiece;
+  splice: Splice | SpliceRefusal;
+  /** of both halves, so that the side is not named */
+  isOfBoth: boolean;
+}
+
+/** Lengths this near are one length, mm: no saw tells them apart. */
+const SAME_LENGTH = 0.05;
+
+/** Sticks as they are listed: those of one part, length and splice in one row. */
+export function stickRows(needs: readonly CutStickNeed[]): StickRow[] {
+  const rows: (StickRow & { joints: string; sides: Set<string> })[] = [];
+  for (const { piece, splice } of needs) {
+    const joints = JSON.stringify(splice);
+    const alike = rows.find((row) => {
+      const { line, panel, length } = row.piece;
+      const isPart = line === piece.line && panel === piece.panel && joints === row.joints;
+      return isPart && Math.abs(length - piece.length) < SAME_LENGTH;
+    });
+    if (alike) {
+      alike.ids.push(piece.id);
+      alike.sides.add(piece.side);
+    } else
+      rows.push({ ids: [piece.id], piece, splice, isOfBoth: false, joints, sides: new Set([piece.side]) });
+  }
+  return rows.map(({ ids, piece, splice, sides }) => ({ ids, piece, splice, isOfBoth: sides.size > 1 }));
+}
+
 /** Sticks of one material and section, and how they are cut from stock. */
 export interface StickGroup {
   key: string;

@@ -2,7 +2,7 @@ import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { StickFigure } from './stick-figure.tsx';
-import type { StickGroup } from './stick-groups.ts';
+import { stickRows, type StickGroup } from './stick-groups.ts';
 import { spliceWords, stickName } from './words.ts';
 
 interface StickSectionProps {
@@ -17,11 +17,14 @@ export function StickSection({ plan, group, longest }: StickSectionProps) {
   const { material, width, thickness, needs, packing } = group;
   const wood = plan.materials[material];
   const size = `${units.size(width, { bare: true })} × ${units.size(thickness)}`;
+  const rows = stickRows(needs);
   const numbers = new Map(
-    needs.flatMap(({ piece }, i) => [
-      [piece.id, i + 1] as const,
-      ...[1, 2, 3, 4, 5, 6].map((part) => [`${piece.id}, part ${part}`, i + 1] as const),
-    ]),
+    rows.flatMap(({ ids }, i) =>
+      ids.flatMap((id) => [
+        [id, i + 1] as const,
+        ...[1, 2, 3, 4, 5, 6].map((part) => [`${id}, part ${part}`, i + 1] as const),
+      ]),
+    ),
   );
   const spare = packing.bought - packing.bound;
   return (
@@ -39,7 +42,7 @@ export function StickSection({ plan, group, longest }: StickSectionProps) {
             <div key={i}>
               <StickFigure stick={stick} longest={longest} material={wood} numbers={numbers} />
               <p className="text-note text-graphite">
-                {stick.stock ?? 'New'}, {units.format(stick.length, 'length')}
+                {stick.stock ?? 'New'}, {units.size(stick.length)}
                 {stick.offcut > 0 && `; ${units.format(stick.offcut, 'length')} left to keep`}
               </p>
             </div>
@@ -52,18 +55,19 @@ export function StickSection({ plan, group, longest }: StickSectionProps) {
                 <span className="sr-only">Number</span>
               </Th>
               <Th>Stick</Th>
+              <Th numeric>Pieces</Th>
               <Th numeric>True length {units.label('length')}</Th>
               <Th className="hidden w-8 print:table-cell">cut</Th>
             </tr>
           </thead>
           <tbody>
-            {needs.map(({ piece, splice }, i) => {
+            {rows.map(({ ids, piece, splice, isOfBoth }, i) => {
               const joint = spliceWords(plan, piece, splice, units);
               return (
                 <Tr key={piece.id}>
                   <Td className="font-semibold">{i + 1}</Td>
                   <RowTh className="py-1">
-                    {stickName(piece)}
+                    {stickName(isOfBoth ? { ...piece, side: 'middle' } : piece)}
                     {joint && (
                       <span
                         className={
@@ -75,6 +79,7 @@ export function StickSection({ plan, group, longest }: StickSectionProps) {
                       </span>
                     )}
                   </RowTh>
+                  <Td numeric>{ids.length}</Td>
                   <Td numeric>{units.format(piece.length, 'length', { bare: true })}</Td>
                   <Td className="hidden print:table-cell">☐</Td>
                 </Tr>

@@ -4,7 +4,7 @@ import type { Plan } from '#shared/core/plan.ts';
 import { ribNumbers } from '#shared/drawing/marks.ts';
 import type { Units } from '#shared/format/units.ts';
 import type { SheetPacking } from '#shared/core/cut/pack-sheets.ts';
-import type { SheetGroup } from './sheet-groups.ts';
+import type { BlankRow, SheetGroup } from './sheet-groups.ts';
 import type { StickGroup } from './stick-groups.ts';
 
 const SIDES = { port: ', port', starboard: ', starboard', middle: '' } as const;
@@ -70,13 +70,18 @@ export function packedWords({ bought, bound, sheets }: SheetPacking): string {
   return `${bought} to buy${bought > bound ? `, at best ${bound}` : ''}; laid in strips along the grain.`;
 }
 
-const GRAIN_WORDS = {
-  bends: 'wants a sheet that bends across: A grain, or B',
-  stiff: 'wants a stiff sheet: C grain, or B',
-} as const;
-
-/** Which cut of sheet a blank wants. */
-export const grainWords = (grain: keyof typeof GRAIN_WORDS): string => GRAIN_WORDS[grain];
+/** Which cut of sheet the blanks want; nothing where any will do. */
+export function grainWords(blanks: readonly BlankRow[]): string {
+  const wants = (grain: BlankRow['grain']) => {
+    const names = new Set(blanks.filter((blank) => blank.grain === grain).map(({ name }) => name));
+    return [...names].join(', ');
+  };
+  const [bends, stiff] = [wants('bends'), wants('stiff')];
+  return [
+    ...(bends === '' ? [] : [`A or B grain, which bends across, for: ${bends}.`]),
+    ...(stiff === '' ? [] : [`C or B grain, which is stiff across, for: ${stiff}.`]),
+  ].join(' ');
+}
 
 /** Where a stick is joined, told by mm and by the ribs about it; or why it cannot be. */
 export function spliceWords(

@@ -36,6 +36,9 @@ export interface CutPart {
 /** Wider strips are cut from sheet, mm (common practice, no source: sticks are sold up to half an inch). */
 export const WIDEST_STICK = 13;
 
+/** What is thicker is a block, mm (common practice, no source: sheet is sold up to half an inch). */
+export const THICKEST_SHEET = 13;
+
 /**
  * Which wood a name means, whatever its grade: what stands before the first comma or bracket.
  * @example woodOf('Balsa, medium-hard') // → 'balsa'

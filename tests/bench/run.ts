@@ -1,4 +1,5 @@
 import { availableParallelism, loadavg } from 'node:os';
+import { benchAssignment } from './assignment.ts';
 import { benchBundle } from './bundle.ts';
 import { benchDraws } from './draws.ts';
 import { benchEditing } from './editing.ts';
@@ -18,6 +19,7 @@ const rows = [
   ...benchDraws(),
   ...benchTrial(),
   ...(await benchTrialPage()),
+  ...(await benchAssignment()),
   ...(await benchEditing([150, 500])),
 ];
 

@@ -105,11 +105,17 @@ export function accountOf(problem: AssignProblem, choice: Choice): AssignAccount
   return { ...account, score: scoreOf(account, terms.aim) };
 }
 
-/** What a part weighs of a density, g. */
+/**
+ * What a part weighs of a density in kg/m³, g.
+ * @example grams({ volume: 2000 }, 100) // → 0.2
+ */
 export const grams = ({ volume }: Pick<CutPart, 'volume'>, density: number): number =>
   volume * density * 1e-6;
 
-/** Parts laid on a sheet by strips, or on a stick one after the other; null where they find no room. */
+/**
+ * Parts laid on a sheet by strips, or on a stick one after the other; null where they find no room.
+ * @example layOn(EXAMPLE_ASSIGNMENT.stock[0], EXAMPLE_ASSIGNMENT.parts, 1) // → [{ id: 'rib port', at: [0, 0] }, { id: 'rib starboard', at: [101, 0] }]
+ */
 export function layOn(piece: CutStock, parts: readonly CutPart[], kerf: number): Laid[] | null {
   if (piece.form === 'sheet') return laySheet(parts, piece, kerf);
   return laySheet(
@@ -119,7 +125,10 @@ export function layOn(piece: CutStock, parts: readonly CutPart[], kerf: number):
   );
 }
 
-/** Surfaces of which both halves are cut here. */
+/**
+ * Surfaces of which both halves are cut here.
+ * @example matchedSurfaces(EXAMPLE_ASSIGNMENT.parts) // → ['wing']
+ */
 export function matchedSurfaces(parts: readonly CutPart[]): string[] {
   const on = (side: CutPart['side']) =>
     new Set(parts.flatMap((part) => (part.side === side && part.surface !== null ? [part.surface] : [])));
@@ -127,7 +136,10 @@ export function matchedSurfaces(parts: readonly CutPart[]): string[] {
   return [...on('port')].filter((surface) => starboard.has(surface));
 }
 
-/** Mean arm of a surface's parts by volume, mm; never 0. */
+/**
+ * Mean arm of a surface's parts by volume, mm; never 0.
+ * @example meanArm(EXAMPLE_ASSIGNMENT.parts, 'wing') // → 100
+ */
 export function meanArm(parts: readonly CutPart[], surface: string): number {
   let [volume, moment] = [0, 0];
   for (const part of parts) {

@@ -26,8 +26,9 @@ export function mended(problem: AssignProblem, choice: Choice): Map<string, stri
       continue;
     }
     const piece = pieces.get(fault.stock);
+    if (!piece) continue;
     const own = fault.parts.flatMap((id) => byId.get(id) ?? []).toSorted((a, b) => area(b) - area(a));
-    while (piece && own.length > 0 && !layOn(piece, own, problem.terms.kerf)) {
+    while (own.length > 0 && !layOn(piece, own, problem.terms.kerf)) {
       const loose = own.findLastIndex(({ id }) => !problem.fixed.has(id));
       const [gone] = own.splice(loose < 0 ? own.length - 1 : loose, 1);
       if (gone) kept.delete(gone.id);

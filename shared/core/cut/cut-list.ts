@@ -80,8 +80,11 @@ export function cutList(plan: Plan): CutList {
   return { sticks, ribs };
 }
 
-/** The sides that a part is cut for. */
-export function sidesOf(surface: Surface, side: Strip['side']): BuiltSide[] {
+/**
+ * The sides that a part is cut for.
+ * @example sidesOf({ mirrored: true }, 'both') // → ['port', 'starboard']
+ */
+export function sidesOf(surface: Pick<Surface, 'mirrored'>, side: Strip['side']): BuiltSide[] {
   if (!surface.mirrored) return ['middle'];
   return side === 'port' || side === 'starboard' ? [side] : ['port', 'starboard'];
 }

@@ -7,6 +7,7 @@ import { assignGreedily } from '#shared/core/cut/assign-greedy.ts';
 import { searchAssignment } from '#shared/core/cut/assign-search.ts';
 import { misfit } from '#shared/core/cut/stock-fit.ts';
 import { EXAMPLE_ASSIGNMENT } from '#shared/core/example-wing.ts';
+import { sixtyParts } from '#tests/bench/assignment.ts';
 
 let highs: Highs;
 beforeAll(async () => {
@@ -103,6 +104,57 @@ describe('which part comes from which piece', () => {
     );
     // Some of these were laid too tightly at first.
     expect(mostRounds).toBeGreaterThan(1);
+  });
+
+  it.each(['lightest', 'matched', 'strongest'] as const)(
+    'comes within a hundredth of the bound for 60 parts and 40 pieces: %s',
+    (aim) => {
+      const problem = sixtyParts(aim);
+      const gaps = { relativeGap: 0.01, absoluteGap: 0.005 };
+      const solve = (lp: string, seconds: number) => solveMip(highs, lp, { seconds, ...gaps });
+      const clock = () => performance.now() / 1000;
+      const { choice, score, bound } = searchAssignment(problem, solve, { seconds: 120, ...gaps, clock });
+      expect(score - bound).toBeLessThanOrEqual(Math.max(0.005, 0.01 * Math.abs(score)));
+      const { faults, bought, halves } = accountOf(problem, choice);
+      expect([faults, bought]).toEqual([[], []]);
+      for (const { massOver, momentOver } of halves) expect([massOver, momentOver]).toEqual([0, 0]);
+    },
+    120_000,
+  );
+
+  it('tells what a choice by hand breaks, and by how much', () => {
+    const [first, second] = EXAMPLE_ASSIGNMENT.parts;
+    if (!first || !second) throw new Error('no example');
+    const narrow = { ...sheet, id: '3', length: 90, width: 10 };
+    const one = { ...sheet, id: '4', length: 100, width: 10 };
+    const problem = { ...EXAMPLE_ASSIGNMENT, stock: [narrow, one] };
+    const { faults } = accountOf(problem, new Map([['rib port', '3']]));
+    expect(faults).toEqual([
+      { code: 'misfit', part: 'rib port', stock: '3', miss: { code: 'too_short', by: 10 } },
+      { code: 'crowded', stock: '3', parts: ['rib port'] },
+    ]);
+    const both = new Map([
+      [first.id, '4'],
+      [second.id, '4'],
+    ]);
+    expect(accountOf(problem, both).faults).toEqual([
+      { code: 'crowded', stock: '4', parts: ['rib port', 'rib starboard'] },
+    ]);
+    const apart = {
+      ...problem,
+      stock: EXAMPLE_ASSIGNMENT.stock,
+      terms: { ...problem.terms, massTolerance: 0.05, momentTolerance: 5 },
+    };
+    const [wing] = accountOf(
+      apart,
+      new Map([
+        ['rib port', '1'],
+        ['rib starboard', '2'],
+      ]),
+    ).halves;
+    // 2000 mm³ of 100 and of 140 kg/m³, 100 mm out: 0.08 g and 8 g·mm apart.
+    expect(wing?.massOver).toBeCloseTo(0.03, 9);
+    expect(wing?.momentOver).toBeCloseTo(3, 9);
   });
 
   it('leaves what was put somewhere by hand', () => {

@@ -66,7 +66,8 @@ function Assigned({ workspace, plan, assignment }: AssignedProps) {
     );
   }
   const { title, text } = assignHeadline(assignment, plan, units);
-  const near = gapWords(assignment, units);
+  // While and after searching the line under the buttons says it.
+  const near = search.state === 'idle' ? gapWords(assignment, units) : '';
   return (
     <>
       <h2 className="text-heading font-semibold">Which piece for which part</h2>
@@ -115,7 +116,7 @@ function Assigned({ workspace, plan, assignment }: AssignedProps) {
         </Notice>
       )}
       <AssignPieces assignment={assignment} plan={plan} />
-      <AssignTable assignment={assignment} canEdit={canEdit && search.state !== 'working'} />
+      <AssignTable assignment={assignment} plan={plan} canEdit={canEdit && search.state !== 'working'} />
     </>
   );
 }

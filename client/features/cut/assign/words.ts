@@ -5,6 +5,9 @@ import type { Misfit } from '#shared/core/cut/stock-fit.ts';
 import type { Units } from '#shared/format/units.ts';
 import type { Assignment } from './use-assignment.ts';
 
+/** Halves nearer than this are told as alike, g: a usual workshop scale shows no less (common practice, no source). */
+const ALIKE_G = 0.05;
+
 const SIDES = { port: ', port', starboard: ', starboard', middle: '' } as const;
 
 /** A part as the builder calls it. */
@@ -37,12 +40,14 @@ export function assignHeadline(
 }
 
 function halfWords(
-  { surface, port, starboard, massOver, momentOver }: Assignment['account']['halves'][number],
+  { surface, port, starboard, massOver, momentOver, arm }: Assignment['account']['halves'][number],
   plan: Plan,
   units: Units,
 ): string {
   const role = plan.surfaces.find(({ key }) => key === surface)?.role ?? surface;
   const mass = port.mass - starboard.mass;
+  const isAlike = Math.abs(mass) < ALIKE_G && Math.abs(port.moment - starboard.moment) < ALIKE_G * arm;
+  if (isAlike) return `${role}: halves alike`;
   const heavier = mass > 0 ? 'port' : 'starboard';
   const by = `${role}: ${heavier} ${units.format(Math.abs(mass), 'mass')} heavier`;
   const moment = `${units.format(Math.abs(port.moment - starboard.moment), 'moment')} apart about the middle`;

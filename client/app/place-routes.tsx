@@ -10,6 +10,7 @@ const FILES: Record<Place, () => Promise<{ Component: () => ReactNode }>> = {
   balance: async () => ({ Component: (await import('./pages/glider/balance-page.tsx')).BalancePage }),
   loading: async () => ({ Component: (await import('./pages/glider/loading-page.tsx')).LoadingPage }),
   trial: async () => ({ Component: (await import('./pages/glider/trial-page.tsx')).TrialPage }),
+  built: async () => ({ Component: (await import('./pages/glider/built-page.tsx')).BuiltPage }),
   cut: async () => ({ Component: (await import('./pages/glider/cut-page.tsx')).CutPage }),
   sheets: async () => ({ Component: (await import('./pages/glider/sheets-page.tsx')).SheetsPage }),
   log: async () => ({ Component: (await import('./pages/glider/log-page.tsx')).LogPage }),

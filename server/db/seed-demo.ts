@@ -10,6 +10,7 @@ import { insertGlider } from '#server/services/gliders.ts';
 import { insertSheet } from '#server/services/sheets.ts';
 import { database, inTransaction } from '#server/services/transaction.ts';
 import { readDemoPlan, readPeople, SeedError, type People } from './seed-files.ts';
+import { seedDemoBuilt } from './seed-built.ts';
 import { seedDemoClub } from './seed-club.ts';
 import { seedDemoRack } from './seed-rack.ts';
 import { SEED_LOCK } from './seed-materials.ts';
@@ -39,6 +40,7 @@ export async function seedDemo(): Promise<boolean> {
       gliderIds.set(glider.file, await addGlider(glider, users, transaction));
     }
     await seedDemoRack(users, gliderIds, transaction);
+    await seedDemoBuilt(users, gliderIds, transaction);
     await seedDemoClub({ people: file, users, gliderIds }, transaction);
     return true;
   });

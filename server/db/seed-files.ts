@@ -7,6 +7,7 @@ import { materialInput } from '#shared/schemas/material.ts';
 import { planSchema, type PlanDto } from '#shared/schemas/plan.ts';
 import { splitInput, useInput } from '#shared/schemas/rack.ts';
 import { email } from '#shared/schemas/session.ts';
+import { buildStage, coveredLine } from '#shared/schemas/weighing.ts';
 import { stockFields } from '#shared/schemas/stock-piece.ts';
 
 /** A file of `data/` is missing or wrong; the message says which and where. */
@@ -76,8 +77,28 @@ const rackFile = z.strictObject({
   ),
 });
 
+const builtFile = z.strictObject({
+  glider: gliderFile,
+  /** g */
+  target: z.number(),
+  weighings: z.array(
+    z.strictObject({
+      title: key,
+      stage: buildStage,
+      covers: z.array(coveredLine).min(1),
+      values: z.array(z.number()).min(1),
+      resolution: z.number(),
+      density: z.number().optional(),
+      thickness: z.number().optional(),
+      /** key of the person who weighed */
+      by: key,
+    }),
+  ),
+});
+
 export type SeedMaterial = z.infer<typeof seedMaterial>;
 export type People = z.infer<typeof peopleFile>;
+export type DemoBuilt = z.infer<typeof builtFile>;
 export type DemoRack = z.infer<typeof rackFile>;
 
 const DATA = new URL('../../data/', import.meta.url);
@@ -110,5 +131,7 @@ export async function readClassEditions(): Promise<ClassEditionInput[]> {
 export const readPeople = (): Promise<People> => readData('demo/people.json', peopleFile);
 
 export const readDemoRack = (): Promise<DemoRack> => readData('demo/rack.json', rackFile);
+
+export const readDemoBuilt = (): Promise<DemoBuilt> => readData('demo/built.json', builtFile);
 
 export const readDemoPlan = (file: string): Promise<PlanDto> => readData(`demo/gliders/${file}`, planSchema);

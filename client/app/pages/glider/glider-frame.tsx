@@ -14,6 +14,7 @@ const LABELS: Record<Place, string> = {
   balance: 'Balance',
   loading: 'Loading',
   trial: 'Wood trial',
+  built: 'As built',
   cut: 'Cut list',
   sheets: 'Sheets',
   log: 'Log',

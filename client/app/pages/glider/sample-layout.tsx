@@ -18,8 +18,9 @@ export function SampleLayout() {
   );
 }
 
-const hrefOf = (place: Place) =>
-  place === 'sheets' || place === 'log' ? paths.sample() : paths.sample(place);
+const isSamplePlace = (place: Place): place is (typeof SAMPLE_PLACES)[number] =>
+  SAMPLE_PLACES.some((one) => one === place);
+const hrefOf = (place: Place) => paths.sample(isSamplePlace(place) ? place : undefined);
 
 function Desk() {
   const workspace = useWorkspace();

@@ -108,11 +108,11 @@ function Weighed({ glider, plan, built }: Omit<FetchedProps, 'person'> & { built
       <BudgetPlot built={built} />
       <PanelsSection built={built} plan={plan} />
       <MaterialsSection built={built} plan={plan} />
+      <WeighingsList built={built} canWeigh={canWeigh} gliderVersion={glider.version} />
       <section aria-label="Parts" className="mt-10 border-t border-rule pt-6">
         <h2 className="text-heading font-semibold">Part by part</h2>
         <PartsTable built={built} plan={plan} />
       </section>
-      <WeighingsList built={built} canWeigh={canWeigh} gliderVersion={glider.version} />
     </div>
   );
 }

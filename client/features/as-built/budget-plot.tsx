@@ -1,5 +1,6 @@
 import { Area, ComposedChart, Line, ReferenceLine, XAxis, YAxis } from 'recharts';
 import { ChartFrame } from '#client/components/ui/chart-frame.tsx';
+import { hatchFill } from '#client/components/ui/hatch.tsx';
 import { useWidth } from '#client/hooks/use-width.ts';
 import { useUnits } from '#client/lib/units.ts';
 import { rulerOf } from '#shared/core/ruler.ts';
@@ -8,7 +9,13 @@ import { QUANTITIES } from '#shared/units/quantities.ts';
 import { convert } from '#shared/units/units.ts';
 import type { Built } from './use-built.ts';
 
-const HEIGHT = 240;
+const HEIGHT = 210;
+const SCALE_HEIGHT = 90;
+const WIDE = 48;
+const MARGIN = { top: 10, right: 16, bottom: 0, left: 0 };
+const TICK = { fill: 'var(--graphite)', fontSize: 12 };
+const WAY = { type: 'number', allowDecimals: false, stroke: 'var(--graphite)' } as const;
+const STILL = { isAnimationActive: false, activeDot: false } as const;
 /** The band drawn, in standard uncertainties: nineteen in twenty. */
 const BAND = 2;
 
@@ -25,15 +32,18 @@ export function BudgetPlot({ built }: { built: Built }) {
     weighed,
     band: [forecast - BAND * u, forecast + BAND * u] as const,
   }));
-  const low = 0;
-  const high = Math.max(...data.map(({ band }) => band[1]), terms.target ?? 0) * 1.04;
-  const ruler = rulerOf(low / unit, high / unit, HEIGHT, 36);
+  const edges = [...data.flatMap(({ band }) => band), ...(terms.target === null ? [] : [terms.target])];
+  const [low, high] = [Math.min(...edges), Math.max(...edges)];
+  const pad = Math.max(0.1, (high - low) * 0.08);
+  const [from, to] = [Math.max(0, low - pad), high + pad];
+  const ruler = rulerOf(from / unit, to / unit, HEIGHT, 30);
+  const digits = Math.max(0, -Math.floor(Math.log10(ruler.step) + 1e-9));
   const mass = (grams: number) => units.format(grams, 'mass', { bare: true });
   const label = units.label('mass');
   return (
     <ChartFrame
       title={`Weight budget, ${label}`}
-      sentence={`Grey: the forecast with a band that holds nineteen times in twenty. Dark: on the scale.${terms.target === null ? '' : ' Dashed: what is aimed at.'}`}
+      sentence={`Above, the forecast after each weighing, in a band that holds nineteen times in twenty${terms.target === null ? '' : '; dashed, what is aimed at'}. Below, what is on the scale of it.`}
       columns={[
         { label: 'After' },
         { label: `On the scale ${label}`, numeric: true },
@@ -50,56 +60,19 @@ export function BudgetPlot({ built }: { built: Built }) {
       ])}
     >
       <div ref={frame} aria-hidden="true">
-        <ComposedChart
-          width={width}
-          height={HEIGHT}
-          data={data}
-          margin={{ top: 10, right: 16, bottom: 0, left: 0 }}
-          accessibilityLayer={false}
-        >
-          <XAxis
-            dataKey="i"
-            type="number"
-            domain={[0, Math.max(1, steps.length - 1)]}
-            allowDecimals={false}
-            tick={{ fill: 'var(--graphite)', fontSize: 12 }}
-            stroke="var(--graphite)"
-            tickFormatter={(i: number) => (i === 0 ? 'drawn' : String(i))}
-          />
+        <ComposedChart {...{ width, data }} height={HEIGHT} margin={MARGIN} accessibilityLayer={false}>
+          <XAxis {...WAY} dataKey="i" domain={[0, Math.max(1, steps.length - 1)]} tick={false} height={4} />
           <YAxis
             type="number"
-            domain={[low, high]}
+            domain={[from, to]}
             ticks={ruler.numbered.map((mark) => mark * unit)}
-            tick={{ fill: 'var(--graphite)', fontSize: 12 }}
+            tick={TICK}
             stroke="var(--graphite)"
-            width={48}
-            tickFormatter={(grams: number) => formatNumber(grams / unit, 0)}
+            width={WIDE}
+            tickFormatter={(grams: number) => formatNumber(grams / unit, digits)}
           />
-          <Area
-            dataKey="band"
-            stroke="none"
-            fill="var(--graphite)"
-            fillOpacity={0.18}
-            isAnimationActive={false}
-            activeDot={false}
-          />
-          <Line
-            dataKey="forecast"
-            stroke="var(--graphite)"
-            strokeWidth={1.6}
-            dot={{ r: 2 }}
-            isAnimationActive={false}
-            activeDot={false}
-          />
-          <Line
-            dataKey="weighed"
-            type="stepAfter"
-            stroke="var(--pencil)"
-            strokeWidth={2.2}
-            dot={false}
-            isAnimationActive={false}
-            activeDot={false}
-          />
+          <Area {...STILL} dataKey="band" stroke="none" fill="var(--graphite)" fillOpacity={0.18} />
+          <Line {...STILL} dataKey="forecast" stroke="var(--graphite)" strokeWidth={1.8} dot={{ r: 2 }} />
           {terms.target !== null && (
             <ReferenceLine
               y={terms.target}
@@ -108,6 +81,33 @@ export function BudgetPlot({ built }: { built: Built }) {
               label={{ value: 'aimed at', position: 'insideTopRight', fill: 'var(--ink)', fontSize: 12 }}
             />
           )}
+        </ComposedChart>
+        <ComposedChart {...{ width, data }} height={SCALE_HEIGHT} margin={MARGIN} accessibilityLayer={false}>
+          <XAxis
+            {...WAY}
+            dataKey="i"
+            domain={[0, Math.max(1, steps.length - 1)]}
+            tick={TICK}
+            tickFormatter={(i: number) => (i === 0 ? 'drawn' : String(i))}
+          />
+          <YAxis
+            type="number"
+            domain={[0, data.at(-1)?.forecast ?? 1]}
+            ticks={[0, data.at(-1)?.weighed ?? 0]}
+            tick={TICK}
+            stroke="var(--graphite)"
+            width={WIDE}
+            tickFormatter={(grams: number) => formatNumber(grams / unit, 0)}
+          />
+          <Area
+            {...STILL}
+            dataKey="weighed"
+            type="stepAfter"
+            stroke="var(--pencil)"
+            strokeWidth={2}
+            fill={hatchFill('wood')}
+            fillOpacity={1}
+          />
         </ComposedChart>
       </div>
     </ChartFrame>

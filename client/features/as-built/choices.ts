@@ -28,7 +28,7 @@ export function choicesOf(plan: Plan): Choice[] {
   const lines = sidedLines(plan);
   const parts = lines.map((line): Choice => ({
     code: `${line.line} ${line.side}`,
-    label: `${line.name}${SIDES[line.side]}${groupOf(plan, line)}`,
+    label: lineLabel(plan, line),
     stage: 'part',
     covers: [coverOf(line)],
   }));
@@ -53,10 +53,14 @@ export function choicesOf(plan: Plan): Choice[] {
   return [...parts, ...pairs, ...plan.surfaces.flatMap((surface) => halves(surface, lines)), model];
 }
 
+/** A part on its side as the builder calls it. */
+export const lineLabel = (plan: Plan, line: Pick<SidedLine, 'name' | 'side' | 'surface'>): string =>
+  `${line.name}${SIDES[line.side]}${groupOf(plan, line)}`;
+
 const coverOf = ({ line, side }: SidedLine) => ({ line, side });
 
 /** Of surfaces other than the first wing it is said which: several have a leading edge. */
-function groupOf(plan: Plan, { surface }: SidedLine): string {
+function groupOf(plan: Plan, { surface }: Pick<SidedLine, 'surface'>): string {
   const index = plan.surfaces.findIndex(({ key }) => key === surface);
   return index > 0 ? ` (${plan.surfaces[index]?.key ?? ''})` : '';
 }

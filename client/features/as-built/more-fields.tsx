@@ -25,10 +25,10 @@ interface MoreFieldsProps {
 
 /** Balance point, measured density and thickness, photo and note: what tells why a part ran over. */
 export function MoreFields({ gliderId, more, onMore }: MoreFieldsProps) {
-  const [photo, setPhoto] = useState<'none' | 'sending' | string>('none');
+  const [words, setWords] = useState('');
   const send = async (file: File | undefined) => {
     if (!file) return;
-    setPhoto('sending');
+    setWords('Sending …');
     try {
       const added = await sendPhoto({
         gliderId,
@@ -39,9 +39,9 @@ export function MoreFields({ gliderId, more, onMore }: MoreFieldsProps) {
         signal: new AbortController().signal,
       });
       onMore({ ...more, photo: added });
-      setPhoto('none');
+      setWords('The photo is kept.');
     } catch (error) {
-      setPhoto(error instanceof Error ? error.message : 'It could not be sent.');
+      setWords(error instanceof Error ? error.message : 'It could not be sent.');
     }
   };
   return (
@@ -86,18 +86,13 @@ export function MoreFields({ gliderId, more, onMore }: MoreFieldsProps) {
         <span className="font-semibold">Photo</span>
         <input
           type="file"
+          aria-label="Photo"
           accept="image/jpeg,image/png,image/webp,image/avif"
           capture="environment"
           onChange={({ currentTarget }) => void send(currentTarget.files?.[0])}
         />
         <span role="status" className="text-graphite">
-          {photo === 'sending'
-            ? 'Sending …'
-            : photo !== 'none'
-              ? photo
-              : more.photo
-                ? 'The photo is kept.'
-                : ''}
+          {more.photo === null && words === 'The photo is kept.' ? '' : words}
         </span>
       </label>
     </details>

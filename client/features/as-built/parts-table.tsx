@@ -4,9 +4,8 @@ import { overrunOf } from '#shared/core/built/overrun.ts';
 import type { Plan, Part } from '#shared/core/plan.ts';
 import type { Units } from '#shared/format/units.ts';
 import type { Noted } from './account.ts';
+import { lineLabel } from './choices.ts';
 import type { Built } from './use-built.ts';
-
-const SIDES = { port: ', port', starboard: ', starboard', middle: '' } as const;
 
 /** Every part as it stands: on the scale, or as it is forecast now; and why what was weighed ran over. */
 export function PartsTable({ built, plan }: { built: Built; plan: Plan }) {
@@ -28,25 +27,27 @@ export function PartsTable({ built, plan }: { built: Built; plan: Plan }) {
       </thead>
       <tbody>
         {account.parts.map((part) => {
-          const { line, side, name, estimated, weighing, material } = part;
+          const { line, side, estimated, weighing, material } = part;
           const over = part.mass - estimated;
           const note = notes.get(weighing ?? '');
           const why =
             weighing === null || !note
               ? ''
-              : whyWords(
-                  overrunOf(
-                    { estimated, measured: part.mass, u: uOf.get(weighing) ?? 0 },
-                    { ...causesOf(note, plan, line, material), cv: plan.materials[material ?? '']?.cv ?? 0 },
-                  ),
-                  units,
-                );
+              : material === null
+                ? itemWords(over, uOf.get(weighing) ?? 0)
+                : whyWords(
+                    overrunOf(
+                      { estimated, measured: part.mass, u: uOf.get(weighing) ?? 0 },
+                      {
+                        ...causesOf(note, plan, line, material),
+                        cv: plan.materials[material ?? '']?.cv ?? 0,
+                      },
+                    ),
+                    units,
+                  );
           return (
             <Tr key={`${line} ${side}`}>
-              <RowTh>
-                {name}
-                {SIDES[side]}
-              </RowTh>
+              <RowTh>{lineLabel(plan, part)}</RowTh>
               <Td numeric className="text-graphite">
                 {mass(estimated)}
               </Td>
@@ -87,6 +88,10 @@ function thicknessOf(plan: Plan, line: string): number | null {
   const part = parts.find(([id]) => id === line)?.[1];
   return part && 'thickness' in part ? part.thickness : null;
 }
+
+/** Something bought has no wood to blame. */
+const itemWords = (over: number, u: number): string =>
+  Math.abs(over) <= 2 * u ? 'as drawn' : 'the drawing has another figure for it';
 
 function whyWords(
   { over, density, thickness, rest, likely }: ReturnType<typeof overrunOf>,

@@ -118,7 +118,9 @@ export function WeighForm({ plan, gliderId, gliderVersion, onNote, said }: Weigh
         />
         <datalist id={list}>
           {choices.map(({ code, label }) => (
-            <option key={code} value={label} />
+            <option key={code} value={label}>
+              {label}
+            </option>
           ))}
         </datalist>
         <NumberField

@@ -20,13 +20,16 @@ export function builtHeadline(
   const mass = (grams: number) => units.format(grams, 'mass');
   const forecast = `${units.format(account.mass, 'mass', { bare: true })} ± ${units.doubt(account.u, 'mass')}`;
   const left = terms.target === null ? null : budgetLeft(terms.target, account);
-  const over = left !== null && left < 0;
+  const isClose = left !== null && Math.abs(left) <= account.u;
+  const over = left !== null && left < 0 && !isClose;
   const target =
     left === null || terms.target === null
       ? ''
-      : left < 0
-        ? `, ${mass(-left)} over the ${mass(terms.target)} aimed at`
-        : `, ${mass(left)} left of the ${mass(terms.target)} aimed at`;
+      : isClose
+        ? `, as near as can be told to the ${mass(terms.target)} aimed at`
+        : left < 0
+          ? `, ${mass(-left)} over the ${mass(terms.target)} aimed at`
+          : `, ${mass(left)} left of the ${mass(terms.target)} aimed at`;
   const parts = account.parts.filter(({ weighing }) => weighing !== null).length;
   return {
     over,

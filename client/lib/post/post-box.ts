@@ -99,7 +99,7 @@ export class PostBox {
           } catch (error) {
             if (!isFinal(error)) return;
             const { detail } = error.problem;
-            const why = [detail, ...error.fields.map((field) => field.detail)].join(' ');
+            const why = [detail, ...error.fields.map((field) => field.detail)].join(' ').trim();
             this.#write(this.#read().map((one) => (one.key === next.key ? { ...one, refused: why } : one)));
             continue;
           }

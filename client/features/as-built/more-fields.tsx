@@ -1,8 +1,8 @@
 import { useState } from 'react';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { TextField } from '#client/components/ui/text-field.tsx';
-import { sendPhoto } from '#client/features/log/photos/send-photo.ts';
-import { shrunk } from '#client/features/log/photos/shrink.ts';
+import { sendPhoto } from '#client/lib/photo/send-photo.ts';
+import { shrunk } from '#client/lib/photo/shrink.ts';
 import type { PhotoDto } from '#shared/schemas/photo.ts';
 
 /** What else was seen at the scale. */

@@ -3,8 +3,8 @@ import { useEffect, useRef, useState } from 'react';
 import { ApiError } from '#client/lib/api.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { logQueries } from '../queries.ts';
-import { sendPhoto } from './send-photo.ts';
-import { shrunk } from './shrink.ts';
+import { sendPhoto } from '#client/lib/photo/send-photo.ts';
+import { shrunk } from '#client/lib/photo/shrink.ts';
 
 /** A photo on its way, or one that did not get there. */
 export interface Upload {

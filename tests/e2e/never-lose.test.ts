@@ -165,9 +165,10 @@ describe('a lost connection', () => {
     const builder = await newBuilder(browser, 'Pia Lund');
     const { id } = await makeGlider(builder);
     const { page, context } = builder;
-    await openDrawing(page, id);
     // The other places are fetched ahead, once this one has settled.
-    await page.waitForResponse(/log-page/);
+    const ahead = page.waitForResponse(/log-page/);
+    await openDrawing(page, id);
+    await ahead;
     await page.waitForLoadState('networkidle');
     await context.setOffline(true);
     await fillPart(page, RIBS, 'Thickness', '2.4');

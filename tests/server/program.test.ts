@@ -134,9 +134,11 @@ describe('the commands for the database', () => {
     expect(await outputOf('server/db/migrate.ts')).toMatch(/^Done: 20261201-1-people, .*\n$/);
     expect(await outputOf('server/db/migrate.ts', 'status')).toMatch(/To do: nothing\.\n$/);
     expect(await outputOf('server/db/seed.ts')).toMatch(
-      /^Materials: \d+ added, 0 renewed\. Demo: added\.\n$/,
+      /^Materials: \d+ added, 0 renewed\. Editions of classes: \d+ added, 0 renewed\. Demo: added\.\n$/,
     );
-    expect(await outputOf('server/db/seed.ts')).toBe('Materials: 0 added, 0 renewed. Demo: left as it is.\n');
+    expect(await outputOf('server/db/seed.ts')).toBe(
+      'Materials: 0 added, 0 renewed. Editions of classes: 0 added, 0 renewed. Demo: left as it is.\n',
+    );
     expect(await outputOf('server/db/migrate.ts', 'down', 'all')).toMatch(
       /^Taken back: .*20261201-1-people\.\n$/,
     );

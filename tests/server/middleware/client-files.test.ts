@@ -77,11 +77,11 @@ describe('a built client', () => {
     expectProblem(await app.visitor().get('/assets/../../package.json'), 'not_found');
   });
 
-  it('lets the page’s own script run by its hash, and no other inline script', async () => {
+  it('lets the page’s own script run by its hash, programmes of WebAssembly, and no other inline script', async () => {
     const policy = (await app.visitor().get('/')).headers['content-security-policy'] ?? '';
     const scripts = policy.split(';').find((directive) => directive.startsWith('script-src'));
     const hash = createHash('sha256').update(SCRIPT).digest('base64');
-    expect(scripts).toBe(`script-src 'self' 'sha256-${hash}'`);
+    expect(scripts).toBe(`script-src 'self' 'wasm-unsafe-eval' 'sha256-${hash}'`);
     expect(policy).toContain("frame-ancestors 'none'");
   });
 });

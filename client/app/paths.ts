@@ -1,5 +1,15 @@
 /** Places of a glider, in the order of their tabs. */
-export const PLACES = ['drawing', 'balance', 'loading', 'trial', 'built', 'cut', 'sheets', 'log'] as const;
+export const PLACES = [
+  'drawing',
+  'balance',
+  'loading',
+  'trial',
+  'built',
+  'cut',
+  'flight',
+  'sheets',
+  'log',
+] as const;
 export type Place = (typeof PLACES)[number];
 /** The sample is not stored, so it has no sheets and no log. */
 export const SAMPLE_PLACES = [

@@ -12,6 +12,7 @@ const FILES: Record<Place, () => Promise<{ Component: () => ReactNode }>> = {
   trial: async () => ({ Component: (await import('./pages/glider/trial-page.tsx')).TrialPage }),
   built: async () => ({ Component: (await import('./pages/glider/built-page.tsx')).BuiltPage }),
   cut: async () => ({ Component: (await import('./pages/glider/cut-page.tsx')).CutPage }),
+  flight: async () => ({ Component: (await import('./pages/glider/flight-page.tsx')).FlightPage }),
   sheets: async () => ({ Component: (await import('./pages/glider/sheets-page.tsx')).SheetsPage }),
   log: async () => ({ Component: (await import('./pages/glider/log-page.tsx')).LogPage }),
 };

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { countedOf, notedOf } from '#client/features/as-built/account.ts';
+import { countedOf, notedOf } from '#client/lib/built/account.ts';
 import { choicesOf, chosen } from '#client/features/as-built/choices.ts';
 import { listenToScale, readScaleLine, type ScaleLine } from '#client/features/as-built/serial-scale.ts';
 import { heardWords } from '#client/features/as-built/words.ts';

@@ -15,7 +15,7 @@ import { MaterialsSection } from './materials-section.tsx';
 import { PanelsSection } from './panels-section.tsx';
 import { PartsTable } from './parts-table.tsx';
 import { TargetField } from './target-field.tsx';
-import { useBuilt, type Built } from './use-built.ts';
+import { useBuilt, type Built } from '#client/lib/built/use-built.ts';
 import { WeighForm } from './weigh-form.tsx';
 import { WeighingsList } from './weighings-list.tsx';
 import { builtHeadline, heardWords } from './words.ts';

@@ -7,7 +7,7 @@ import { rulerOf } from '#shared/core/ruler.ts';
 import { formatNumber } from '#shared/format/numbers.ts';
 import { QUANTITIES } from '#shared/units/quantities.ts';
 import { convert } from '#shared/units/units.ts';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 
 const HEIGHT = 210;
 const SCALE_HEIGHT = 90;

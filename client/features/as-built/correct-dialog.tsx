@@ -4,7 +4,7 @@ import { Dialog, DialogActions } from '#client/components/ui/dialog.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import { TextField } from '#client/components/ui/text-field.tsx';
 import type { WeighingInput } from '#shared/schemas/weighing.ts';
-import type { Noted } from './account.ts';
+import type { Noted } from '#client/lib/built/account.ts';
 
 interface CorrectDialogProps {
   noted: Noted;

@@ -2,7 +2,7 @@ import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { useUnits } from '#client/lib/units.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import { formatNumber } from '#shared/format/numbers.ts';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 
 /** What was held of each material, what the weighed parts said, and what is held now of its parts still to come. */
 export function MaterialsSection({ built, plan }: { built: Built; plan: Plan }) {

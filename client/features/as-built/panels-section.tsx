@@ -3,7 +3,7 @@ import { useUnits } from '#client/lib/units.ts';
 import { matchPanels } from '#shared/core/built/panel-match.ts';
 import type { Plan, Surface } from '#shared/core/plan.ts';
 import { surfaceLine } from '#shared/core/stations.ts';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 import { matchWords } from './words.ts';
 
 /** Sanding that is offered: the parts that have to give least. */

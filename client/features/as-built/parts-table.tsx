@@ -3,9 +3,9 @@ import { useUnits } from '#client/lib/units.ts';
 import { overrunOf } from '#shared/core/built/overrun.ts';
 import type { Plan, Part } from '#shared/core/plan.ts';
 import type { Units } from '#shared/format/units.ts';
-import type { Noted } from './account.ts';
+import type { Noted } from '#client/lib/built/account.ts';
 import { lineLabel } from './choices.ts';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 
 /** Every part as it stands: on the scale, or as it is forecast now; and why what was weighed ran over. */
 export function PartsTable({ built, plan }: { built: Built; plan: Plan }) {

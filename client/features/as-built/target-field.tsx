@@ -3,7 +3,7 @@ import { useState } from 'react';
 import { Button } from '#client/components/ui/button.tsx';
 import { NumberField } from '#client/components/ui/number-field.tsx';
 import type { BuildTermsDto, BuildTermsInput } from '#shared/schemas/weighing.ts';
-import { builtQueries, saveTerms } from './queries.ts';
+import { builtQueries, saveTerms } from '#client/lib/built/queries.ts';
 
 const inputOf = ({ version: _, updatedAt: __, updatedBy: ___, ...input }: BuildTermsDto): BuildTermsInput =>
   input;

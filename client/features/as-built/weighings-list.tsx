@@ -4,9 +4,9 @@ import { RowTh, Table, Td, Th, Tr } from '#client/components/ui/table.tsx';
 import { formatMoment } from '#client/lib/moments.ts';
 import { useUnits } from '#client/lib/units.ts';
 import type { WeighingInput } from '#shared/schemas/weighing.ts';
-import type { Noted } from './account.ts';
+import type { Noted } from '#client/lib/built/account.ts';
 import { CorrectDialog } from './correct-dialog.tsx';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 
 interface WeighingsListProps {
   built: Built;

@@ -2,7 +2,7 @@ import { budgetLeft } from '#shared/core/built/budget.ts';
 import type { PanelMatch } from '#shared/core/built/panel-match.ts';
 import type { Units } from '#shared/format/units.ts';
 import type { BuildStage } from '#shared/schemas/weighing.ts';
-import type { Built } from './use-built.ts';
+import type { Built } from '#client/lib/built/use-built.ts';
 
 export const STAGE_NAMES: Record<BuildStage, string> = {
   part: 'part',

@@ -2,7 +2,7 @@ import { balanceAfter } from '../ballast.ts';
 import { percentOfMac } from '../balance.ts';
 import { readingOf } from '../built/reading.ts';
 import type { WingReference } from '../wing-reference.ts';
-import { fingerTest, supportsAccount } from './supports-account.ts';
+import { fingerTest, supportsAccount, type SupportReading } from './supports-account.ts';
 
 /** One scale under the model as it is read in the field. g, mm */
 export interface FieldSupport {
@@ -51,22 +51,33 @@ export function fieldAccount(
   return { measured: { ...found, percentMac: percent(found.x) }, flown };
 }
 
+/**
+ * Where the model balances sideways, mm to starboard with its standard uncertainty; null where its supports do not
+ * stand apart sideways, or it lay on a finger.
+ * @example fieldSideways({ kind: 'finger', mass: 100, resolution: 0, tipsForwardAt: 80, tipsAftAt: 80 }) // → null
+ */
+export function fieldSideways(method: FieldMethod): { mass: number; y: number; uy: number } | null {
+  if (method.kind === 'finger' || method.supports.every(({ y }) => y === method.supports[0]?.y)) return null;
+  const account = supportsAccount(method.supports.map(withDoubt));
+  return account && { mass: account.mass, y: account.y, uy: account.uy };
+}
+
 function measure(method: FieldMethod): Omit<FieldFigures, 'percentMac'> | null {
   if (method.kind === 'finger') {
     const reading = readingOf({ values: [method.mass], tare: 0, resolution: method.resolution });
     if (!reading || reading.mass <= 0) return null;
     return { ...reading, ...fingerTest(method.tipsForwardAt, method.tipsAftAt) };
   }
-  const account = supportsAccount(
-    method.supports.map(({ reading, tare, resolution, x, y, ux }) => ({
-      reading,
-      tare,
-      x,
-      y,
-      ux,
-      uy: ux,
-      u: readingOf({ values: [reading], tare, resolution })?.u ?? 0,
-    })),
-  );
+  const account = supportsAccount(method.supports.map(withDoubt));
   return account && { mass: account.mass, u: account.u, x: account.x, ux: account.ux };
 }
+
+const withDoubt = ({ reading, tare, resolution, x, y, ux }: FieldSupport): SupportReading => ({
+  reading,
+  tare,
+  x,
+  y,
+  ux,
+  uy: ux,
+  u: readingOf({ values: [reading], tare, resolution })?.u ?? 0,
+});

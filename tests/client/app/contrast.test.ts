@@ -57,6 +57,20 @@ describe.each(Object.entries(THEMES))('the colours of the %s theme', (_, colours
   });
 });
 
+describe.each([
+  ['light', { ...THEMES.light, ...themeOf('\n.in-sun') }],
+  ['dark', { ...THEMES.dark, ...themeOf('.dark .in-sun') }],
+] as const)('the colours of the %s theme in sunlight', (_, colours: Record<string, string>) => {
+  const pairs = TEXT.flatMap(([front, backs]) => backs.map((back) => [front, back] as const));
+
+  it.each(pairs.filter(([, back]) => back !== 'wood-light'))(
+    'let text in %s be read on %s: 7 to 1 (WCAG 2.2, 1.4.6)',
+    (front, back) => {
+      expect(contrast(colours[front] ?? '', colours[back] ?? '')).toBeGreaterThanOrEqual(7);
+    },
+  );
+});
+
 describe('the measure of contrast', () => {
   it('is 21 for black on white, and 4.54 for #767676 on white, as the guideline’s own examples have it', () => {
     expect(contrast('#000000', '#ffffff')).toBeCloseTo(21, 9);

@@ -16,6 +16,7 @@ const LABELS: Record<Place, string> = {
   trial: 'Wood trial',
   built: 'As built',
   cut: 'Cut list',
+  flight: 'First flight',
   sheets: 'Sheets',
   log: 'Log',
 };

@@ -12,6 +12,7 @@ import { database, inTransaction } from '#server/services/transaction.ts';
 import { readDemoPlan, readPeople, SeedError, type People } from './seed-files.ts';
 import { seedDemoBuilt } from './seed-built.ts';
 import { seedDemoClub } from './seed-club.ts';
+import { seedDemoFlight } from './seed-flight.ts';
 import { seedDemoRack } from './seed-rack.ts';
 import { SEED_LOCK } from './seed-materials.ts';
 
@@ -41,6 +42,7 @@ export async function seedDemo(): Promise<boolean> {
     }
     await seedDemoRack(users, gliderIds, transaction);
     await seedDemoBuilt(users, gliderIds, transaction);
+    await seedDemoFlight(users, gliderIds, transaction);
     await seedDemoClub({ people: file, users, gliderIds }, transaction);
     return true;
   });

@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 import { z } from 'zod';
 import { classEditionInput, type ClassEditionInput } from '#shared/schemas/class-edition.ts';
 import { clubRole } from '#shared/schemas/club.ts';
+import { firstFlightInput } from '#shared/schemas/first-flight.ts';
 import { LIMITS } from '#shared/schemas/limits.ts';
 import { materialInput } from '#shared/schemas/material.ts';
 import { planSchema, type PlanDto } from '#shared/schemas/plan.ts';
@@ -133,5 +134,22 @@ export const readPeople = (): Promise<People> => readData('demo/people.json', pe
 export const readDemoRack = (): Promise<DemoRack> => readData('demo/rack.json', rackFile);
 
 export const readDemoBuilt = (): Promise<DemoBuilt> => readData('demo/built.json', builtFile);
+
+const flightFile = z.strictObject({
+  glider: gliderFile,
+  by: key,
+  daysAgo: z.int().min(0),
+  record: firstFlightInput.pick({
+    method: true,
+    ballast: true,
+    checks: true,
+    place: true,
+    wind: true,
+    glides: true,
+    note: true,
+  }),
+});
+export type DemoFlight = z.infer<typeof flightFile>;
+export const readDemoFlight = (): Promise<DemoFlight> => readData('demo/flight.json', flightFile);
 
 export const readDemoPlan = (file: string): Promise<PlanDto> => readData(`demo/gliders/${file}`, planSchema);

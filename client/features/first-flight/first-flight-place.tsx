@@ -6,25 +6,18 @@ import type { Workspace } from '#client/lib/workspace.ts';
 import { speedAt } from '#shared/core/loading.ts';
 import type { Plan } from '#shared/core/plan.ts';
 import type { GliderDto } from '#shared/schemas/glider.ts';
-import { BallastStep } from './ballast-step.tsx';
+import { BalanceColumn } from './balance-column.tsx';
 import { CheckStep } from './check-step.tsx';
 import { checkLines } from './checks.ts';
 import { freshDraft } from './draft.ts';
 import { fieldVerdict } from './field-verdict.ts';
-import { ForecastCheck } from './forecast-check.tsx';
 import { GlidesStep } from './glides-step.tsx';
-import { RangeFields } from './range-fields.tsx';
-import { RangeStrip } from './range-strip.tsx';
 import { missingOf, recordOf } from './record-of.ts';
 import { Records } from './records.tsx';
-import { Sideways } from './sideways.tsx';
 import { SignStep } from './sign-step.tsx';
 import { Thresholds } from './thresholds.tsx';
 import { useDraft } from './use-draft.ts';
 import { flightAccount, useFieldFacts } from './use-flight.ts';
-import { VerdictCard } from './verdict-card.tsx';
-import { WeighStep } from './weigh-step.tsx';
-import { WindTable } from './wind-table.tsx';
 
 /** The field day of a model: weighed, balanced, gone through, glided and signed, with or without a connection. */
 export function FirstFlightPlace({ workspace, person }: { workspace: Workspace; person: string }) {
@@ -49,7 +42,7 @@ function FieldDay({ workspace, plan, glider, person }: FieldDayProps) {
   const facts = useFieldFacts(glider.id, person, plan, result);
   const [said, setSaid] = useState('');
   const account = useMemo(() => flightAccount(draft, facts), [draft, facts]);
-  const { wing, neutralPoint } = facts.sources;
+  const { wing } = facts.sources;
   const flown = account.account?.flown ?? null;
   const verdict = flown && fieldVerdict(flown, account.range, wing, units);
   const { clMax = 1, airDensity = 1.225 } = plan.flight ?? {};
@@ -74,72 +67,46 @@ function FieldDay({ workspace, plan, glider, person }: FieldDayProps) {
     setSaid(`Signed by ${draft.signature} and kept on this device.`);
   };
   return (
-    <div className="in-sun mx-auto w-full max-w-2xl px-4 pt-5 pb-10 sm:px-7">
+    <div className="in-sun mx-auto w-full max-w-2xl px-4 pt-5 pb-10 sm:px-7 lg:max-w-6xl">
       <header className="flex flex-wrap items-baseline justify-between gap-x-4">
         <h1 className="text-figure font-semibold">First flight</h1>
         <p role="status" className="text-note text-graphite">
           {online ? 'Kept on this device while you type' : 'No signal: everything is kept here'}
         </p>
       </header>
-      <p role="status" className={said === '' ? 'sr-only' : 'mt-3 bg-ink-wash px-3 py-2 font-semibold'}>
-        {said}
-      </p>
       {!canSign && (
         <p className="mt-2 text-graphite">
           You may try this page and read what was signed; the builder or the pilot of this glider signs.
         </p>
       )}
-      <WeighStep draft={draft} change={change} />
-      {verdict && <VerdictCard verdict={verdict} />}
-      {!verdict && (
-        <p className="mt-4 bg-ink-wash px-3 py-2">
-          With every reading and place typed in, this says how it balances and what to put where.
-        </p>
-      )}
-      {flown && (
-        <RangeStrip
-          flown={flown}
-          range={account.range}
-          neutralPoint={neutralPoint}
-          outside={verdict?.kind === 'outside'}
-          units={units}
+      <div className="lg:grid lg:grid-cols-2 lg:gap-x-12">
+        <BalanceColumn
+          {...{ workspace, plan, draft, change, facts, account, verdict }}
+          gliderId={glider.id}
         />
-      )}
-      <RangeFields draft={draft} change={change} sources={facts.sources} />
-      {flown && (
-        <BallastStep {...{ draft, change, facts, plan, flown }} range={account.range} gliderId={glider.id} />
-      )}
-      {account.method && <Sideways method={account.method} tip={tipOf(workspace)} />}
-      {account.account && account.method && (
-        <ForecastCheck
-          measured={account.account.measured}
-          method={account.method}
-          forecast={facts.forecast}
-          plan={plan}
-        />
-      )}
-      {flown && wing && (
-        <WindTable mass={flown.mass} area={wing.area} plan={plan} most={facts.terms?.most ?? null} />
-      )}
-      <CheckStep draft={draft} change={change} lines={lines} />
-      <Thresholds flown={flown} />
-      <GlidesStep draft={draft} change={change} />
-      {canSign && (
-        <SignStep draft={draft} change={change} missing={missingOf(draft, account, lines)} onSign={sign} />
-      )}
-      <Records
-        facts={facts}
-        canSign={canSign}
-        followed={draft.follows}
-        onFollow={(follows) => change({ follows })}
-      />
+        <div className="min-w-0">
+          <CheckStep draft={draft} change={change} lines={lines} />
+          <Thresholds flown={flown} />
+          <GlidesStep draft={draft} change={change} />
+          {canSign && (
+            <SignStep
+              draft={draft}
+              change={change}
+              missing={missingOf(draft, account, lines)}
+              onSign={sign}
+            />
+          )}
+          <p role="status" className={said === '' ? 'sr-only' : 'mt-3 bg-ink-wash px-3 py-2 font-semibold'}>
+            {said}
+          </p>
+          <Records
+            facts={facts}
+            canSign={canSign}
+            followed={draft.follows}
+            onFollow={(follows) => change({ follows })}
+          />
+        </div>
+      </div>
     </div>
   );
-}
-
-/** Half the span of the first wing, where tip weight goes, mm. */
-function tipOf({ plan, result }: Pick<Workspace, 'plan' | 'result'>): number | null {
-  const wing = plan.surfaces.find(({ role }) => role === 'wing');
-  const span = wing && result.planform[wing.key]?.span;
-  return span === undefined ? null : span / 2;
 }

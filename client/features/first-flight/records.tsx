@@ -12,7 +12,7 @@ interface RecordsProps {
   facts: Pick<FieldFacts, 'box' | 'waiting' | 'signed'>;
   canSign: boolean;
   /** lets the next record follow this one */
-  onFollow: (id: string) => void;
+  onFollow: (id: string | null) => void;
   followed: string | null;
 }
 
@@ -40,7 +40,13 @@ export function Records({ facts, canSign, onFollow, followed }: RecordsProps) {
           className="mt-2"
           actions={
             record.refused !== null && (
-              <Button variant="danger" onClick={() => box.drop(record.key)}>
+              <Button
+                variant="danger"
+                onClick={() => {
+                  box.drop(record.key);
+                  if (followed === record.key) onFollow(body.follows);
+                }}
+              >
                 Throw it away
               </Button>
             )

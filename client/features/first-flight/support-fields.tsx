@@ -31,6 +31,7 @@ export function SupportFields({ support, sideways, onChange, onRemove }: Support
       <div className="mt-1 grid grid-cols-[1.2fr_1fr_0.8fr] gap-x-3">
         <NumberField
           label={<Labelled name={name} what="Shows" />}
+          keepRoom={false}
           quantity="mass"
           value={reading}
           min={0}
@@ -40,6 +41,7 @@ export function SupportFields({ support, sideways, onChange, onRemove }: Support
         />
         <NumberField
           label={<Labelled name={name} what="Stands at" />}
+          keepRoom={false}
           quantity="length"
           value={x}
           {...PLACE}
@@ -47,6 +49,7 @@ export function SupportFields({ support, sideways, onChange, onRemove }: Support
         />
         <NumberField
           label={<Labelled name={name} what="Tare" />}
+          keepRoom={false}
           quantity="mass"
           value={tare}
           min={0}

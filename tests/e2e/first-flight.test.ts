@@ -103,7 +103,8 @@ describe('the field day', () => {
   });
 
   it('is not signed while anything is missing, and says what', async () => {
-    const { page } = await openField('Tove Brandt');
+    const own = await openField('Tove Brandt');
+    const { page, id } = own;
     await field(page, 'Pilot’s name').fill('Tove Brandt');
     await page.getByRole('button', { name: 'Sign and keep' }).click();
     await page.getByText('The weighing is not all there. 11 of the check are open.').waitFor();
@@ -117,6 +118,12 @@ describe('the field day', () => {
     await joint.getByLabel('Note').fill('Play in the joiner');
     await page.getByRole('button', { name: 'Sign and keep' }).click();
     await page.getByText('Signed by Tove Brandt and kept on this device.').waitFor();
+    await expect
+      .poll(
+        async () => (await keptOf(own, id)).map(({ checks }) => checks.find((one) => one.id === 'joint')),
+        PATIENT,
+      )
+      .toMatchObject([{ answer: 'no', note: 'Play in the joiner' }]);
   });
 });
 
@@ -148,7 +155,7 @@ describe('other ways to balance', () => {
     const { page } = await openField('Viggo Ask');
     await weigh(page, '118', '103');
     await page.getByText('Look again:').waitFor();
-    await page.getByText('the two readings were typed the wrong way round').waitFor();
+    expect(await page.getByText('the two readings were typed the wrong way round').count()).toBe(1);
   });
 
   it('takes a finger for who has no second scale', async () => {

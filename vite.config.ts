@@ -2,6 +2,7 @@ import tailwind from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 import { bundleSizes } from './server/house/bundle-sizes.mjs';
+import { offlineBuild } from './server/house/offline-build.mjs';
 
 const apiPort = process.env['API_PORT'] ?? '4311';
 
@@ -12,7 +13,8 @@ const nodeTests = (name: string, include: string[], extra: object = {}) => ({
 });
 
 export default defineConfig({
-  plugins: [react(), tailwind(), bundleSizes()],
+  plugins: [react(), tailwind(), bundleSizes(), offlineBuild()],
+  publicDir: 'client/public',
   build: {
     outDir: 'node_modules/.cache/featherbeam/client',
     emptyOutDir: true,

@@ -4,6 +4,7 @@ import { Shortcuts } from '#client/components/shortcuts/shortcuts.tsx';
 import { HatchDefs } from '#client/components/ui/hatch.tsx';
 import { CrumbsProvider } from './crumbs.tsx';
 import { Header } from './header.tsx';
+import { NewerNotice } from './newer-notice.tsx';
 
 /** What stands round every page: skip link, header, main. */
 export function Layout() {
@@ -34,6 +35,7 @@ export function Layout() {
       <div className="mx-auto flex min-h-dvh w-full max-w-[96rem] flex-col px-4 sm:px-7 print:block print:max-w-none print:p-0">
         <Header />
         <main ref={main} id="main" tabIndex={-1} className="flex flex-1 flex-col pb-7 print:block print:pb-0">
+          <NewerNotice />
           <Outlet />
         </main>
       </div>

@@ -1,6 +1,7 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { firstFlightList, type FirstFlightDto } from '#shared/schemas/first-flight.ts';
+import { gliderList } from '#shared/schemas/glider.ts';
 import { openBrowser } from '#tests/support/chromium.ts';
 import { expectAccessible, PATIENT, PHONE, picture } from './support/browser.ts';
 import { makeGlider, newBuilder, signedIn, type Builder } from './support/desk.ts';
@@ -147,6 +148,37 @@ describe('two devices', () => {
       .toEqual([2, 1]);
     await page.getByText('No. 2', { exact: true }).click();
     await page.getByText('follows none: it was begun without knowing of the earlier ones').waitFor();
+  });
+});
+
+describe('the pilot', () => {
+  it('weighs, ballasts and signs a glider of somebody else, and does not draw', async () => {
+    const own = await signedIn(
+      browser,
+      { email: 'pilot@larkmoor.example', password: 'larkmoor-pilot' },
+      PHONE,
+    );
+    const { page, context } = own;
+    const list = gliderList.parse(await (await context.request.get('/api/gliders')).json());
+    const { id = '', role } = list.gliders.find(({ name }) => name === 'Dunlin') ?? {};
+    expect(role).toBe('pilot');
+    const before = (await keptOf(own, id)).length;
+    await page.goto(`/gliders/${id}/drawing`);
+    await page
+      .getByRole('button', { name: /^Nose sheeting/ })
+      .first()
+      .click();
+    await expect.poll(() => field(page, 'Thickness').first().isEditable(), PATIENT).toBe(false);
+    await page.goto(`/gliders/${id}/built`);
+    await page.getByRole('form', { name: 'Weigh' }).waitFor();
+    await page.goto(`/gliders/${id}/flight`);
+    await page.getByText('No. 1', { exact: true }).waitFor();
+    await weigh(page);
+    await page.getByRole('button', { name: 'It is fitted' }).click();
+    await answerAll(page);
+    await field(page, 'Pilot’s name').fill('Rowan Petersham');
+    await page.getByRole('button', { name: 'Sign and keep' }).click();
+    await expect.poll(async () => (await keptOf(own, id)).length, PATIENT).toBe(before + 1);
   });
 });
 

@@ -15,10 +15,10 @@ export interface Served {
   restart: () => Promise<void>;
 }
 
-/** The product as `npm start` serves it: real server, real PostgreSQL of its own, built client, demo scenario. */
-export async function serve(): Promise<Served> {
+/** The product as `npm start` serves it: real server, real PostgreSQL of its own, built client, demo scenario. `clientDir` serves another build. */
+export async function serve(clientDir?: string): Promise<Served> {
   const cluster = await startCluster({ throwaway: true });
-  let server = launch(cluster.url(), '0');
+  let server = launch(cluster.url(), '0', clientDir);
   const stop = async () => {
     await end(server, 'SIGTERM');
     await cluster.stop();
@@ -30,7 +30,7 @@ export async function serve(): Promise<Served> {
       stop,
       kill: () => end(server, 'SIGKILL'),
       restart: async () => {
-        server = launch(cluster.url(), new URL(baseUrl).port);
+        server = launch(cluster.url(), new URL(baseUrl).port, clientDir);
         await addressOf(server);
       },
     };
@@ -40,13 +40,14 @@ export async function serve(): Promise<Served> {
   }
 }
 
-function launch(databaseUrl: string, port: string): ChildProcess {
+function launch(databaseUrl: string, port: string, clientDir: string | undefined): ChildProcess {
   return spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
     cwd: ROOT,
     env: {
       ...process.env,
       DATABASE_URL: databaseUrl,
       PORT: port,
+      ...(clientDir && { FEATHERBEAM_CLIENT_DIR: clientDir }),
       NODE_ENV: 'production',
       LOG_LEVEL: 'error',
       FEATHERBEAM_RATE_LIMIT_SCALE: '1000',

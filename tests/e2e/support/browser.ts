@@ -29,6 +29,8 @@ export interface Visit {
 export async function visit(browser: Browser, options: BrowserContextOptions = DESKTOP): Promise<Visit> {
   const context = await browser.newContext({
     baseURL: inject('baseUrl'),
+    // Kept files and answers would hide what a page asks for; `offline.test.ts` lets them in.
+    serviceWorkers: 'block',
     ...options,
     reducedMotion: 'reduce',
   });

@@ -6,6 +6,7 @@ import { paths, PLACES } from '#client/app/paths.ts';
 import { fetchPlaces } from '#client/app/place-routes.tsx';
 import { QueryView } from '#client/components/query-view.tsx';
 import { buttonClass } from '#client/components/ui/button.tsx';
+import { fetchFieldRecords } from '#client/features/first-flight/queries.ts';
 import { DeskNotices } from '#client/features/gliders/desk-notices.tsx';
 import { LeaveGuard } from '#client/features/gliders/leave-guard.tsx';
 import { gliderQueries } from '#client/features/gliders/queries.ts';
@@ -52,6 +53,7 @@ function Desk({ id, userName }: { id: string; userName: string }) {
   const client = useQueryClient();
   useTitle(workspace.plan.name);
   useEffect(() => fetchPlaces(PLACES), []);
+  useEffect(() => fetchFieldRecords(client, id), [client, id]);
   useCrumbs([{ label: 'Bench', href: paths.bench }, { label: workspace.plan.name }]);
   const hrefOf = (place: (typeof PLACES)[number]) => paths.glider(id, place);
   const within = (pathname: string) => PLACES.some((place) => hrefOf(place) === pathname);

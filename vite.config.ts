@@ -1,5 +1,6 @@
 import tailwind from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
+import { build } from 'vite';
 import { defineConfig } from 'vitest/config';
 import { bundleSizes } from './server/house/bundle-sizes.mjs';
 import { offlineBuild } from './server/house/offline-build.mjs';
@@ -13,7 +14,7 @@ const nodeTests = (name: string, include: string[], extra: object = {}) => ({
 });
 
 export default defineConfig({
-  plugins: [react(), tailwind(), bundleSizes(), offlineBuild()],
+  plugins: [react(), tailwind(), bundleSizes(), offlineBuild(build)],
   publicDir: 'client/public',
   build: {
     outDir: 'node_modules/.cache/featherbeam/client',

@@ -4,8 +4,11 @@ export interface BuiltFile {
   revision: string | null;
 }
 
+/** `build` of Vite, as far as it is needed here. */
+export type Build = (config: object) => Promise<unknown>;
+
 export declare function builtFiles(folder: string): BuiltFile[];
-export declare function offlineBuild(): {
+export declare function offlineBuild(build: Build): {
   name: string;
   apply: 'build';
   writeBundle(options: { dir?: string | undefined }): void;

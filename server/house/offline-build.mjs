@@ -1,7 +1,6 @@
 import { createHash } from 'node:crypto';
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { build } from 'vite';
 
 /** Kept on the device from the start: scripts, styles, letters and the page itself; the solver only once it was used. */
 const KEPT = /\.(js|css|woff2|html|webmanifest|png|svg)$/;
@@ -25,8 +24,9 @@ export function builtFiles(folder) {
 /** @param {string} file */
 const hashOf = (file) => createHash('sha256').update(readFileSync(file)).digest('hex').slice(0, 16);
 
-/** Builds the service worker once everything that it keeps is there. */
-export function offlineBuild() {
+/** Builds the service worker once everything that it keeps is there.
+ * @param {import('./offline-build.d.mts').Build} build the bundler’s own, which these scripts do not import */
+export function offlineBuild(build) {
   let folder = '';
   return {
     name: 'featherbeam-offline',
